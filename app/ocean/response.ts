@@ -1,0 +1,103 @@
+/** What an estimate says. Names, units and signs are fixed: they leave the house as JSON. */
+import type { MethodChoices, ModelId, TriggerLevel } from "./scenario";
+
+/** 10th, 50th and 90th percentile where an ensemble ran. */
+export interface Band {
+  p10?: number;
+  p50?: number;
+  p90?: number;
+}
+
+export interface TriggerOutcome extends TriggerLevel {
+  hoursBeyond: number;
+  /** ISO 8601 UTC, or seconds where the storm was given in seconds; null if never. */
+  firstAt: string | number | null;
+  /** h */
+  longestSpell: number;
+  met: boolean;
+}
+
+export interface Headline {
+  /** N/m² */
+  peakStress: { value: number; time: string | number } & Band;
+  /** m/s; degrees true that the water goes to (null when still); share of the speed that is inertial, 0…1. */
+  peakDrift: { value: number; towards: number | null; time: string | number; inertialShare: number } & Band;
+  /** m; degrees true */
+  netDisplacement: { value: number; towards: number | null } & Band;
+  /** m³ per m of shore over the storm. With a shore: positive to the right when looking offshore; without: north. */
+  transportAlong: { value: number } & Band;
+  /** m³ per m of shore over the storm. With a shore: positive offshore; without: east. */
+  transportAcross: { value: number } & Band;
+  /** g/kg: the lowest, when, and its difference from the start. */
+  surfaceSalinity: { value: number; time: string | number; change: number } & Band;
+  /** °C at the end, and its difference from the start. */
+  surfaceTemperature: { value: number; change: number } & Band;
+  /** m at the end */
+  layerDepth: { value: number } & Band;
+  /** kg/m³ at the end, water below minus layer; null where nothing is known of the water below. */
+  densityStep: { value: number | null } & Band;
+  triggers: TriggerOutcome[];
+}
+
+export const SERIES_UNITS = {
+  stressX: "N/m²",
+  stressY: "N/m²",
+  driftEast: "m/s",
+  driftNorth: "m/s",
+  displacementEast: "m",
+  displacementNorth: "m",
+  transportAlong: "m²/s",
+  transportAcross: "m²/s",
+  temperature: "°C",
+  salinity: "g/kg",
+  density: "kg/m³",
+  layerDepth: "m",
+} as const;
+export type SeriesName = keyof typeof SERIES_UNITS;
+
+/** All of one length; plain arrays, so that they survive JSON. */
+export type ResponseSeries = { time: (string | number)[] } & Record<SeriesName, number[]>;
+
+export type FitSeverity = "ok" | "caution" | "doNotUse";
+
+export interface FitNote {
+  code: string;
+  severity: FitSeverity;
+  message: string;
+  value: number;
+  threshold: number;
+  source: string;
+}
+
+export interface MethodEntry {
+  value: number | string | boolean;
+  unit: string;
+  source: string;
+  origin: "chosen" | "default";
+}
+
+/** Every law and parameter, whether it was chosen or not. */
+export type MethodUsed = { [Key in keyof Required<MethodChoices>]?: MethodEntry };
+
+export interface Budget {
+  /** What the water's content changed by, what was put in, and the difference. */
+  change: number;
+  input: number;
+  residual: number;
+}
+
+export interface Response {
+  headline: Headline;
+  series: ResponseSeries;
+  fitNotes: FitNote[];
+  recommendedModel: ModelId;
+  /** Why that model, in a sentence. */
+  recommendation: string;
+  method: MethodUsed;
+  /** heat J/m², salt kg/m², momentum kg/m/s (of the column per m², east and north together). */
+  budgets: { heat: Budget; salt: Budget; momentum: Budget };
+  /** SHA-256 of the canonical scenario. */
+  inputs: string;
+  engine: string;
+  caution: string;
+}
