@@ -1,0 +1,27 @@
+import { createContext } from "react-router";
+import type { Role } from "~/organisations/permissions";
+import type { UnitChoices } from "~/units/unit-choices";
+import type { PaperSize } from "~/memo/document";
+
+/** The person who is signed in. */
+export interface Actor {
+  id: string;
+  name: string;
+  email: string;
+}
+
+/** The organisation that the address names, and what the actor is in it. */
+export interface CurrentOrganisation {
+  id: string;
+  slug: string;
+  name: string;
+  role: Role;
+  units: UnitChoices;
+  paperSize: PaperSize;
+}
+
+export const requestIdContext = createContext<string>();
+export const nonceContext = createContext<string>();
+export const actorContext = createContext<Actor | null>(null);
+export const organisationContext = createContext<CurrentOrganisation>();
+

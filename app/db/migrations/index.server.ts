@@ -1,0 +1,11 @@
+import type { RunnableMigration } from "umzug";
+import { firstTables } from "./2026-12-01-first-tables.server";
+
+export interface MigrationContext {
+  /** Runs one statement inside the migration's transaction. */
+  query: (statement: string) => Promise<void>;
+}
+export type Migration = RunnableMigration<MigrationContext>;
+
+/** In order. A migration that has been released is never edited: add the next one. */
+export const migrations: Migration[] = [firstTables];

@@ -1,0 +1,25 @@
+import { type CreationOptional, DataTypes, type InferAttributes, type InferCreationAttributes, Model } from "sequelize";
+import { sequelize } from "../connection.server";
+import { ROLES, type Role } from "~/organisations/permissions";
+
+/** Who belongs to an organisation, as what. */
+export class Membership extends Model<InferAttributes<Membership>, InferCreationAttributes<Membership>> {
+  declare id: string;
+  declare organisationId: string;
+  declare userId: string;
+  declare role: Role;
+  declare createdAt: CreationOptional<Date>;
+  declare updatedAt: CreationOptional<Date>;
+}
+
+Membership.init(
+  {
+    id: { type: DataTypes.TEXT, primaryKey: true },
+    organisationId: { type: DataTypes.TEXT, allowNull: false },
+    userId: { type: DataTypes.TEXT, allowNull: false },
+    role: { type: DataTypes.TEXT, allowNull: false, validate: { isIn: [[...ROLES]] } },
+    createdAt: DataTypes.DATE,
+    updatedAt: DataTypes.DATE,
+  },
+  { sequelize, tableName: "memberships", modelName: "Membership" },
+);

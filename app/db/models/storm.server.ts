@@ -1,0 +1,29 @@
+import { type CreationOptional, DataTypes, type InferAttributes, type InferCreationAttributes, Model } from "sequelize";
+import { sequelize } from "../connection.server";
+
+/** A named event: a time window with its forcing series. */
+export class Storm extends Model<InferAttributes<Storm>, InferCreationAttributes<Storm>> {
+  declare id: string;
+  declare organisationId: string;
+  declare projectId: string;
+  declare name: string;
+  /** Seconds since 1970 UTC; null until a record is confirmed. */
+  declare startsAt: number | null;
+  declare endsAt: number | null;
+  declare createdAt: CreationOptional<Date>;
+  declare updatedAt: CreationOptional<Date>;
+}
+
+Storm.init(
+  {
+    id: { type: DataTypes.TEXT, primaryKey: true },
+    organisationId: { type: DataTypes.TEXT, allowNull: false },
+    projectId: { type: DataTypes.TEXT, allowNull: false },
+    name: { type: DataTypes.TEXT, allowNull: false, validate: { len: [1, 120] } },
+    startsAt: { type: DataTypes.DOUBLE, allowNull: true },
+    endsAt: { type: DataTypes.DOUBLE, allowNull: true },
+    createdAt: DataTypes.DATE,
+    updatedAt: DataTypes.DATE,
+  },
+  { sequelize, tableName: "storms", modelName: "Storm" },
+);

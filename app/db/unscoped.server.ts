@@ -1,0 +1,87 @@
+/**
+ * Look-ups that come before an organisation is known: who signs in, which organisations a person belongs to,
+ * what a share link opens, which estimates wait for a worker. Each returns the organisation with what it found,
+ * so that everything after goes through `forOrganisation`.
+ */
+import type { Transaction } from "sequelize";
+import { newId } from "./id.server";
+import { Estimate } from "./models/estimate.server";
+import { Membership } from "./models/membership.server";
+import { Organisation } from "./models/organisation.server";
+import { ShareLink } from "./models/share-link.server";
+import { User } from "./models/user.server";
+import type { Role } from "~/organisations/permissions";
+
+export async function findUserByEmail(email: string): Promise<User | null> {
+  return User.findOne({ where: { email } });
+}
+
+export async function findUser(id: string): Promise<User | null> {
+  return User.findByPk(id);
+}
+
+export async function createUser(
+  values: { email: string; name: string; passwordHash: string },
+  transaction: Transaction,
+): Promise<User> {
+  return User.create({ id: newId(), ...values }, { transaction });
+}
+
+export async function createOrganisation(
+  values: Pick<Organisation, "slug" | "name" | "units" | "paperSize">,
+  transaction: Transaction,
+): Promise<Organisation> {
+  return Organisation.create({ id: newId(), ...values }, { transaction });
+}
+
+export async function slugIsTaken(slug: string, transaction?: Transaction): Promise<boolean> {
+  return (await Organisation.count({ where: { slug }, transaction })) > 0;
+}
+
+export async function findOrganisation(id: string): Promise<Organisation | null> {
+  return Organisation.findByPk(id);
+}
+
+export interface OrganisationOfUser {
+  organisation: Organisation;
+  role: Role;
+}
+
+export async function organisationsOfUser(userId: string): Promise<OrganisationOfUser[]> {
+  const memberships = await Membership.findAll({ where: { userId } });
+  const found = await Promise.all(
+    memberships.map(async ({ organisationId, role }) => ({
+      organisation: await Organisation.findByPk(organisationId),
+      role,
+    })),
+  );
+  return found
+    .filter((entry): entry is OrganisationOfUser => entry.organisation !== null)
+    .sort((a, b) => a.organisation.name.localeCompare(b.organisation.name));
+}
+
+export async function membershipBySlug(userId: string, slug: string): Promise<OrganisationOfUser | null> {
+  const organisation = await Organisation.findOne({ where: { slug } });
+  if (!organisation) return null;
+  const membership = await Membership.findOne({ where: { userId, organisationId: organisation.id } });
+  return membership && { organisation, role: membership.role };
+}
+
+/** Names of people who wrote, checked or ran something. */
+export async function namesOfUsers(ids: Iterable<string>): Promise<Map<string, string>> {
+  const users = await User.findAll({ where: { id: [...new Set(ids)] }, attributes: ["id", "name"] });
+  return new Map(users.map(({ id, name }) => [id, name]));
+}
+
+export async function findShareLinkByTokenHash(tokenHash: string): Promise<ShareLink | null> {
+  return ShareLink.findOne({ where: { tokenHash } });
+}
+
+/** What a stopped server left unfinished, oldest first. */
+export async function unfinishedEstimates(): Promise<{ organisationId: string; id: string }[]> {
+  return Estimate.findAll({
+    where: { state: ["queued", "running"] },
+    order: [["updatedAt", "ASC"]],
+    attributes: ["organisationId", "id"],
+  });
+}

@@ -1,0 +1,22 @@
+import type { ChannelName, ReadingStep, Understood } from "~/readers/reading";
+
+/** How a confirmed record was read: kept beside the original, printed in the memo's register of inputs. */
+export interface RecordProvenance {
+  formatLabel: string;
+  rows: number;
+  /** ISO UTC */
+  first: string;
+  last: string;
+  zone: string;
+  /** m; null where the file holds no wind. */
+  windHeight: number | null;
+  averagingMinutes: number | null;
+  medianStepSeconds: number | null;
+  understood: Understood[];
+  steps: ReadingStep[];
+  dropped: { reason: string; count: number; firstRow: number }[];
+  channels: { channel: ChannelName; unit: string; count: number; missing: number; fromColumns: string[] }[];
+  /** Whose answers these are, and when (ISO UTC). */
+  confirmedBy: string;
+  confirmedAt: string;
+}
