@@ -1,0 +1,118 @@
+import { Temporal } from "temporal-polyfill";
+
+/** ISO 8601 text, seconds since 1970-01-01T00:00:00Z, or a Date. */
+export type Moment = string | number | Date;
+
+/** Seconds since 1970-01-01T00:00:00Z; NaN where the text is no time. Numbers are taken as such seconds. */
+export function epochSeconds(moment: Moment): number {
+  if (typeof moment === "number") return moment;
+  return (typeof moment === "string" ? Date.parse(moment) : moment.getTime()) / 1000;
+}
+
+/** A wall clock in an IANA zone, or `UTC`, or a fixed offset as `+05:30`. */
+export interface ZoneClock {
+  /** As it is named beside every time. */
+  zone: string;
+  /** `2026-11-04` */
+  date(seconds: number): string;
+  /** `2026-11-04 20:00`: only where the zone is named beside it. */
+  dateTime(seconds: number): string;
+  /** `2026-11-04T20:00:00+00:00`: unambiguous by itself, for tables and files. */
+  iso(seconds: number): string;
+  /** Whole hours of the wall clock between two moments that are multiples of `hours` since midnight, ascending. */
+  multiples(from: number, to: number, hours: number): ClockTick[];
+}
+
+export interface ClockTick {
+  /** Seconds since 1970-01-01T00:00:00Z. */
+  seconds: number;
+  year: number;
+  month: number;
+  day: number;
+  hour: number;
+}
+
+/** @throws RangeError for a zone that is not known. */
+export function zoneClock(zone: string): ZoneClock {
+  const at = (seconds: number) =>
+    Temporal.Instant.fromEpochMilliseconds(Math.round(seconds * 1000)).toZonedDateTimeISO(zone);
+  const two = (value: number) => String(value).padStart(2, "0");
+  return {
+    zone: at(0).timeZoneId,
+    date: (seconds) => at(seconds).toPlainDate().toString(),
+    dateTime(seconds) {
+      const time = at(Math.round(seconds / 60) * 60);
+      return `${time.toPlainDate().toString()} ${two(time.hour)}:${two(time.minute)}`;
+    },
+    iso(seconds) {
+      const text = at(seconds).toString({ timeZoneName: "never", smallestUnit: "second", roundingMode: "halfExpand" });
+      return zone === "UTC" ? text.replace(/\+00:00$/, "Z") : text;
+    },
+    multiples: (from, to, hours) =>
+      hours >= 24 ? dayMultiples(at(from), to, hours / 24) : hourMultiples(at, from, to, hours),
+  };
+}
+
+/** Days are counted from the first midnight on or before the start, so that steps of several days begin with it. */
+function dayMultiples(start: Temporal.ZonedDateTime, to: number, days: number): ClockTick[] {
+  const from = start.epochMilliseconds / 1000;
+  const ticks: ClockTick[] = [];
+  let midnight = start.startOfDay();
+  if (midnight.epochMilliseconds / 1000 < from) midnight = midnight.add({ days: 1 }).startOfDay();
+  while (midnight.epochMilliseconds / 1000 <= to) {
+    ticks.push(tickOf(midnight));
+    midnight = midnight.add({ days }).startOfDay();
+  }
+  return ticks;
+}
+
+function hourMultiples(
+  at: (seconds: number) => Temporal.ZonedDateTime,
+  from: number,
+  to: number,
+  hours: number,
+): ClockTick[] {
+  const ticks: ClockTick[] = [];
+  // A quarter of an hour is the finest offset in use, so every full hour of any zone is met.
+  for (let seconds = Math.ceil(from / 900) * 900; seconds <= to; seconds += 900) {
+    const time = at(seconds);
+    if (time.minute === 0 && time.hour % hours === 0) ticks.push(tickOf(time));
+  }
+  return ticks;
+}
+
+function tickOf(time: Temporal.ZonedDateTime): ClockTick {
+  return {
+    seconds: time.epochMilliseconds / 1000,
+    year: time.year,
+    month: time.month,
+    day: time.day,
+    hour: time.hour,
+  };
+}
+
+/** `2026-11-04 20:00 UTC`: ISO date, 24-hour clock, always with the zone's name; `no time` where there is none. */
+export function formatTime(moment: Moment | null | undefined, zone: string): string {
+  if (moment === null || moment === undefined) return "no time";
+  const seconds = epochSeconds(moment);
+  if (!Number.isFinite(seconds)) return "no time";
+  const clock = zoneClock(zone);
+  return `${clock.dateTime(seconds)} ${clock.zone}`;
+}
+
+/** `2026-11-04 UTC`: the day a moment falls on in the zone. */
+export function formatDate(moment: Moment | null | undefined, zone: string): string {
+  if (moment === null || moment === undefined) return "no date";
+  const seconds = epochSeconds(moment);
+  if (!Number.isFinite(seconds)) return "no date";
+  const clock = zoneClock(zone);
+  return `${clock.date(seconds)} ${clock.zone}`;
+}
+
+/** `2026-11-03 00:00 to 2026-11-08 00:00 UTC` */
+export function formatPeriod(from: Moment, to: Moment, zone: string): string {
+  const clock = zoneClock(zone);
+  const [start, end] = [epochSeconds(from), epochSeconds(to)];
+  if (!Number.isFinite(start) || !Number.isFinite(end)) return "no time";
+  return `${clock.dateTime(start)} to ${clock.dateTime(end)} ${clock.zone}`;
+}
