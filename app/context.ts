@@ -1,7 +1,7 @@
 import { createContext } from "react-router";
 import type { Role } from "~/organisations/permissions";
 import type { UnitChoices } from "~/units/unit-choices";
-import type { PaperSize } from "~/memo/document";
+import type { PageSize } from "~/memo/document";
 
 /** The person who is signed in. */
 export interface Actor {
@@ -17,11 +17,9 @@ export interface CurrentOrganisation {
   name: string;
   role: Role;
   units: UnitChoices;
-  paperSize: PaperSize;
+  paperSize: PageSize;
 }
 
-export const requestIdContext = createContext<string>();
-export const nonceContext = createContext<string>();
 export const actorContext = createContext<Actor | null>(null);
 export const organisationContext = createContext<CurrentOrganisation>();
 

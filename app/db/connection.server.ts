@@ -30,14 +30,14 @@ function connect(): Sequelize {
 
 export const sequelize = connect();
 
+export async function closeDatabase(): Promise<void> {
+  await sequelize.close();
+}
+
 /**
  * Every writing transaction takes the write lock at once: a deferred one that reads first and writes later
  * fails with a stale snapshot, whatever the busy timeout.
  */
 export function inWriteTransaction<T>(work: (transaction: Transaction) => Promise<T>): Promise<T> {
   return sequelize.transaction({ type: Transaction.TYPES.IMMEDIATE }, work);
-}
-
-export async function closeDatabase(): Promise<void> {
-  await sequelize.close();
 }

@@ -4,6 +4,7 @@ import { FormStrategy } from "remix-auth-form";
 import { findUserByEmail } from "~/db/unscoped.server";
 import type { User } from "~/db/models/user.server";
 import { passwordMatches } from "./password.server";
+import { clientAddressOf } from "./request-facts.server";
 
 /** Why a sign-in was refused, in words for the form. The same for an unknown address and a wrong password. */
 export class SignInRefused extends Error {
@@ -30,18 +31,13 @@ async function countFailure(place: string, email: string): Promise<void> {
   await Promise.allSettled([byAddressAndPlace.consume(`${place} ${email}`), byPlace.consume(place)]);
 }
 
-/** Where the request came from, as the server entry saw it; a browser cannot set this header. */
-export function placeOf(request: Request): string {
-  return request.headers.get("x-client-address") ?? "unknown";
-}
-
 const authenticator = new Authenticator<User>();
 
 authenticator.use(
   new FormStrategy(async ({ form, request }) => {
     const email = normaliseEmail(String(form.get("email") ?? ""));
     const password = String(form.get("password") ?? "");
-    const place = placeOf(request);
+    const place = clientAddressOf(request);
     if (await isThrottled(place, email)) {
       throw new SignInRefused("Too many attempts. Wait a quarter of an hour, then try again.");
     }

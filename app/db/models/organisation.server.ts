@@ -1,6 +1,6 @@
 import { type CreationOptional, DataTypes, type InferAttributes, type InferCreationAttributes, Model } from "sequelize";
 import { sequelize } from "../connection.server";
-import type { PaperSize } from "~/memo/document";
+import type { PageSize } from "~/memo/document";
 import type { UnitChoices } from "~/units/unit-choices";
 
 /** A consultancy: the tenant. */
@@ -9,7 +9,7 @@ export class Organisation extends Model<InferAttributes<Organisation>, InferCrea
   declare slug: string;
   declare name: string;
   declare units: UnitChoices;
-  declare paperSize: PaperSize;
+  declare paperSize: PageSize;
   declare createdAt: CreationOptional<Date>;
   declare updatedAt: CreationOptional<Date>;
 }

@@ -1,0 +1,69 @@
+/** The URL map. What is not on this page is not on the web; the access matrix is generated from it. */
+import { index, layout, prefix, route, type RouteConfig } from "@react-router/dev/routes";
+
+export default [
+  index("routes/public/landing.tsx"),
+  route("basemap/:z/:x/:y", "routes/basemap-tile.ts"),
+
+  route("sign-in", "routes/account/sign-in.tsx"),
+  route("sign-up", "routes/account/sign-up.tsx"),
+  route("sign-out", "routes/account/sign-out.tsx"),
+
+  route("s/:token", "routes/share/open.tsx"),
+  route("shared/:link", "routes/share/memo.tsx"),
+  route("shared/:link/memo.pdf", "routes/share/pdf.ts"),
+
+  route("o", "routes/org/choose.tsx"),
+  route("o/:organisation", "routes/org/layout.tsx", [
+    index("routes/org/projects/list.tsx"),
+    route("projects/new", "routes/org/projects/new.tsx"),
+    route("projects/:project", "routes/org/projects/layout.tsx", [
+      index("routes/org/projects/ledger.tsx"),
+      route("ledger.csv", "routes/org/projects/ledger-csv.ts"),
+      route("facts", "routes/org/projects/edit.tsx"),
+
+      ...prefix("area", [
+        index("routes/org/area/list.tsx"),
+        route("new", "routes/org/area/new.tsx"),
+        route(":box", "routes/org/area/edit.tsx"),
+      ]),
+
+      ...prefix("storms", [
+        index("routes/org/storms/list.tsx"),
+        route("new", "routes/org/storms/new.tsx"),
+        layout("routes/org/storms/layout.tsx", [
+          route(":storm", "routes/org/storms/show.tsx"),
+          route(":storm/records/:record", "routes/org/storms/reading-sheet.tsx"),
+        ]),
+        route(":storm/series.csv", "routes/org/storms/series-csv.ts"),
+      ]),
+      route("files/:file", "routes/org/storms/source-file.ts"),
+
+      ...prefix("water", [
+        index("routes/org/water/list.tsx"),
+        route("new", "routes/org/water/new.tsx"),
+        route(":column", "routes/org/water/edit.tsx"),
+      ]),
+
+      ...prefix("estimates", [
+        index("routes/org/estimates/list.tsx"),
+        route(":estimate", "routes/org/estimates/response.tsx"),
+        route(":estimate/response.json", "routes/org/estimates/response-json.ts"),
+        route(":estimate/series.csv", "routes/org/estimates/series-csv.ts"),
+      ]),
+
+      ...prefix("memos", [
+        index("routes/org/memos/list.tsx"),
+        route("new", "routes/org/memos/new.tsx"),
+        route(":memo", "routes/org/memos/edit.tsx"),
+        route(":memo/draft.pdf", "routes/org/memos/draft-pdf.ts"),
+        route(":memo/revisions/:revision", "routes/org/memos/revision.tsx"),
+        route(":memo/revisions/:revision/memo.pdf", "routes/org/memos/revision-pdf.ts"),
+      ]),
+    ]),
+    route("method-sheets", "routes/org/method-sheets/list.tsx"),
+    route("method-sheets/new", "routes/org/method-sheets/new.tsx"),
+  ]),
+
+  route("*", "routes/public/not-found.tsx"),
+] satisfies RouteConfig;
