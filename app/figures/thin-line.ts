@@ -1,0 +1,58 @@
+/** No eye and no printer tells more points apart on one line. */
+export const MAX_POINTS = 1500;
+
+/**
+ * Which samples to draw: at most `limit`, among them the lowest and the highest of every stretch, one missing sample
+ * for each stretch that has any (so that gaps stay open), and the two ends.
+ * @param values one a sample, NaN where missing
+ * @returns ascending indices; all of them where there are few enough
+ */
+export function keepExtremes(values: ArrayLike<number>, limit = MAX_POINTS): number[] {
+  const { length } = values;
+  if (length <= limit) return Array.from({ length }, (_, index) => index);
+  const bins = Math.max(1, Math.floor((limit - 2) / 3));
+  const kept: number[] = [0];
+  for (let bin = 0; bin < bins; bin += 1) {
+    const start = Math.floor((bin * length) / bins);
+    const end = Math.floor(((bin + 1) * length) / bins);
+    for (const index of extremesOf(values, start, end)) if (index > (kept.at(-1) ?? 0)) kept.push(index);
+  }
+  if (kept.at(-1) !== length - 1) kept.push(length - 1);
+  return kept;
+}
+
+function extremesOf(values: ArrayLike<number>, start: number, end: number): number[] {
+  let lowest = -1;
+  let highest = -1;
+  let missing = -1;
+  for (let index = start; index < end; index += 1) {
+    const value = values[index] ?? Number.NaN;
+    if (!Number.isFinite(value)) {
+      missing = index;
+      continue;
+    }
+    if (lowest < 0 || value < (values[lowest] ?? Number.NaN)) lowest = index;
+    if (highest < 0 || value > (values[highest] ?? Number.NaN)) highest = index;
+  }
+  return [...new Set([lowest, highest, missing])].filter((index) => index >= 0).sort((a, b) => a - b);
+}
+
+/**
+ * Puts a missing sample into every pause of more than three median steps, so that no line is drawn across it.
+ * @param time seconds, ascending
+ */
+export function openPauses(time: ArrayLike<number>, values: ArrayLike<number>): { time: number[]; values: number[] } {
+  const steps = Array.from({ length: Math.max(0, time.length - 1) }, (_, i) => (time[i + 1] ?? 0) - (time[i] ?? 0));
+  const median = [...steps].sort((a, b) => a - b)[Math.floor(steps.length / 2)] ?? 0;
+  const opened = { time: [] as number[], values: [] as number[] };
+  for (let index = 0; index < time.length; index += 1) {
+    const moment = time[index] ?? 0;
+    opened.time.push(moment);
+    opened.values.push(values[index] ?? Number.NaN);
+    if ((steps[index] ?? 0) > 3 * median) {
+      opened.time.push(moment + median);
+      opened.values.push(Number.NaN);
+    }
+  }
+  return opened;
+}
