@@ -38,7 +38,10 @@ interface TenantRow {
 }
 type Row<M extends Model> = Attributes<M> & TenantRow;
 type Values<M extends Model> = Omit<CreationAttributes<M>, "id" | "organisationId">;
-type Filter<M extends Model> = Partial<Omit<Attributes<M>, "organisationId">> & WhereOptions<Attributes<M>>;
+/** Equal to a value, or to one of several. */
+type Filter<M extends Model> = {
+  [Key in Exclude<keyof Attributes<M>, "organisationId">]?: Attributes<M>[Key] | readonly Attributes<M>[Key][];
+};
 
 interface ListOptions<M extends Model> {
   where?: Filter<M>;

@@ -3,7 +3,7 @@ import { forOrganisation } from "~/db/scoped.server";
 import { createOrganisation, createUser, findUserByEmail, slugIsTaken } from "~/db/unscoped.server";
 import { DEFAULT_METHOD_CHOICES } from "~/estimates/default-method";
 import { hashPassword } from "~/services/password.server";
-import { DEFAULT_UNIT_CHOICES } from "~/units/unit-choices";
+import { DEFAULT_UNITS } from "~/units/unit-choices";
 import type { Transaction } from "sequelize";
 
 export interface SignUp {
@@ -40,7 +40,7 @@ export async function signUp(values: SignUp): Promise<{ userId: string; slug: st
     const user = await createUser({ email: values.email, name: values.name, passwordHash }, transaction);
     const slug = await freeSlug(values.organisationName, transaction);
     const organisation = await createOrganisation(
-      { slug, name: values.organisationName, units: DEFAULT_UNIT_CHOICES, paperSize: "A4" },
+      { slug, name: values.organisationName, units: DEFAULT_UNITS, paperSize: "A4" },
       transaction,
     );
     const tenant = forOrganisation(organisation.id, transaction);

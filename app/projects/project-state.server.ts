@@ -22,7 +22,7 @@ async function memoState(tenant: Tenant, projectId: string): Promise<string> {
   const memos = await tenant.memos.list({ where: { projectId } });
   if (memos.length === 0) return "none yet";
   const latest = await tenant.memoRevisions.first({
-    where: { memoId: memos.map((memo) => memo.id) } as never,
+    where: { memoId: memos.map((memo) => memo.id) },
     order: [["issuedAt", "DESC"]],
     without: ["pdf", "document"],
   });

@@ -1,0 +1,168 @@
+import { getFormProps, getInputProps, getSelectProps, useForm, type SubmissionResult } from "@conform-to/react";
+import { parseWithZod } from "@conform-to/zod/v4";
+import { useMemo, useState, type ReactNode } from "react";
+import { Form, useNavigation } from "react-router";
+import type { z } from "zod";
+import { Field, FormErrors } from "./field";
+import { BoxEditor } from "./map/box-editor";
+import { SubmitButton } from "./submit-button";
+import { boxSchema, MOST_TRIGGER_LEVELS, TRIGGER_QUANTITY_IDS } from "~/area/box-schema";
+import { TRIGGER_QUANTITIES, type Position } from "~/ocean/scenario";
+import { displayUnit, quantity } from "~/units/quantities";
+import type { UnitChoices } from "~/units/unit-choices";
+
+type BoxFormValues = z.input<ReturnType<typeof boxSchema>>;
+
+interface StudyBoxFormProps {
+  lastResult?: SubmissionResult<string[]>;
+  units: UnitChoices;
+  otherBoxes: { name: string; polygon: Position[] }[];
+  ring: Position[] | null;
+  /** As shown, in the organisation's units. */
+  values?: Omit<BoxFormValues, "polygon">;
+  children?: ReactNode;
+}
+
+/** Shared by the page that draws a box and the one that changes it. */
+export function StudyBoxForm({ lastResult, units, otherBoxes, ring: stored, values, children }: StudyBoxFormProps) {
+  const [ring, setRing] = useState<Position[] | null>(stored);
+  const schema = useMemo(() => boxSchema(units), [units]);
+  const busy = useNavigation().state !== "idle";
+  const [form, fields] = useForm<BoxFormValues, BoxFormValues, string[]>({
+    lastResult: busy ? undefined : lastResult,
+    defaultValue: values,
+    onValidate: ({ formData }) => parseWithZod(formData, { schema }),
+    shouldRevalidate: "onInput",
+  });
+  const measures = [
+    { field: fields.waterDepth, label: "Water depth", unit: displayUnit("depth", units).unit },
+    {
+      field: fields.shoreNormal,
+      label: "Shore normal",
+      unit: "° true",
+      hint: "The bearing that points straight offshore. With it, transport is told along and across the shore.",
+    },
+    { field: fields.distanceToShore, label: "Distance to the shore", unit: displayUnit("distance", units).unit },
+  ];
+  const levels = fields.triggerLevels.getFieldList();
+  return (
+    <Form method="post" {...getFormProps(form)} className="grid gap-6">
+      <FormErrors errors={form.errors} id={form.errorId} />
+      <BoxEditor
+        value={ring}
+        onChange={setRing}
+        otherBoxes={otherBoxes}
+        units={units}
+        errors={fields.polygon.errors ?? []}
+      />
+      <div className="grid gap-4 sm:grid-cols-2 lg:grid-cols-4">
+        <Field id={fields.name.id} label="Name" errors={fields.name.errors}>
+          {(described) => (
+            <input
+              {...getInputProps(fields.name, { type: "text" })}
+              {...described}
+              key={fields.name.key}
+              className="input"
+              autoComplete="off"
+            />
+          )}
+        </Field>
+        {measures.map(({ field, label, unit, hint }) => (
+          <Field key={field.id} id={field.id} label={label} unit={unit} hint={hint} errors={field.errors} optional>
+            {(described) => (
+              <input
+                {...getInputProps(field, { type: "text" })}
+                {...described}
+                key={field.key}
+                className="input"
+                inputMode="decimal"
+              />
+            )}
+          </Field>
+        ))}
+      </div>
+      <fieldset className="border border-hairline p-4">
+        <legend className="px-1 text-small font-bold text-slate">Trigger levels</legend>
+        <p className="text-small text-quiet">
+          A client’s limits: what counts is the time beyond the value, and whether it reaches the hours.
+        </p>
+        {levels.map((level, index) => {
+          const parts = level.getFieldset();
+          const chosen = TRIGGER_QUANTITIES.find((id) => id === parts.quantity.value) ?? "salinity";
+          return (
+            <div key={level.key} className="mt-3 grid grid-cols-2 items-start gap-3 sm:grid-cols-[2fr_1fr_1fr_1fr_auto]">
+              <Field id={parts.quantity.id} label="Quantity" errors={parts.quantity.errors}>
+                {(described) => (
+                  <select {...getSelectProps(parts.quantity)} {...described} key={parts.quantity.key} className="input">
+                    {TRIGGER_QUANTITIES.map((id) => (
+                      <option key={id} value={id}>
+                        {quantity(TRIGGER_QUANTITY_IDS[id]).name}
+                      </option>
+                    ))}
+                  </select>
+                )}
+              </Field>
+              <Field id={parts.side.id} label="Side" errors={parts.side.errors}>
+                {(described) => (
+                  <select {...getSelectProps(parts.side)} {...described} key={parts.side.key} className="input">
+                    <option value="below">below</option>
+                    <option value="above">above</option>
+                  </select>
+                )}
+              </Field>
+              <Field
+                id={parts.value.id}
+                label="Value"
+                unit={displayUnit(TRIGGER_QUANTITY_IDS[chosen], units).unit}
+                errors={parts.value.errors}
+              >
+                {(described) => (
+                  <input
+                    {...getInputProps(parts.value, { type: "text" })}
+                    {...described}
+                    key={parts.value.key}
+                    className="input"
+                    inputMode="decimal"
+                  />
+                )}
+              </Field>
+              <Field id={parts.hours.id} label="For" unit="h" errors={parts.hours.errors}>
+                {(described) => (
+                  <input
+                    {...getInputProps(parts.hours, { type: "text" })}
+                    {...described}
+                    key={parts.hours.key}
+                    className="input"
+                    inputMode="decimal"
+                  />
+                )}
+              </Field>
+              <button
+                {...form.remove.getButtonProps({ name: fields.triggerLevels.name, index })}
+                className="button sm:mt-6"
+                aria-label={`Remove trigger level ${index + 1}`}
+              >
+                Remove
+              </button>
+            </div>
+          );
+        })}
+        {levels.length < MOST_TRIGGER_LEVELS && (
+          <button
+            {...form.insert.getButtonProps({
+              name: fields.triggerLevels.name,
+              defaultValue: { quantity: "salinity", side: "below", hours: 6 },
+            })}
+            className="button mt-3"
+          >
+            Add a trigger level
+          </button>
+        )}
+      </fieldset>
+      <div className="flex flex-wrap gap-2">
+        <SubmitButton busy="Saving…">Save the box</SubmitButton>
+        {children}
+      </div>
+    </Form>
+  );
+}
