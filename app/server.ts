@@ -59,7 +59,8 @@ async function start(settings: Config): Promise<void> {
 function stopOnSignals(server: Server, shutdownSeconds: number): void {
   let stopping = false;
   const stop = async (signal: NodeJS.Signals) => {
-    if (stopping) process.exit(1);
+    // npm passes a Ctrl+C on to a process that the terminal has told already.
+    if (stopping) return;
     stopping = true;
     log().info({ signal }, "stopping: finishing the requests under way");
     const finished = await stopGracefully(server, shutdownSeconds * 1000);
