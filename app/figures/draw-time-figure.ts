@@ -38,7 +38,8 @@ export function drawTimeFigure(
     markup += axisHeading(`${panel.heading} (${displayUnit(panel.quantity, context.units).unit})`, top, {
       grows: panel.downwards ? "down" : "up",
       colour: panel.colour,
-      keys: panel.lines.length > 1 ? panel.lines.map((line) => ({ label: line.label ?? "", dash: line.dash ?? "" })) : [],
+      keys:
+        panel.lines.length > 1 ? panel.lines.map((line) => ({ label: line.label ?? "", dash: line.dash ?? "" })) : [],
     });
     top += HEADING_HEIGHT;
     const drawn = drawTimePanel(panel, frame);

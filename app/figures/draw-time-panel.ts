@@ -1,5 +1,4 @@
 import * as Plot from "@observablehq/plot";
-import type { ZoneClock } from "~/units/format-time";
 import { formatNumber, toDisplay } from "~/units/format-quantity";
 import { arrowStrip } from "./arrow-strip";
 import { HAIRLINE, INK, markColour, MIST } from "./colours";
@@ -71,8 +70,7 @@ function ground(panel: TimePanel, axis: ValueAxis, frame: TimeFrame): Plot.Marki
       : []),
     Plot.ruleX(midnights, { stroke: HAIRLINE, strokeWidth: 0.5 }),
     Plot.ruleY(axis.ticks, { stroke: HAIRLINE, strokeWidth: 0.5 }),
-    ...(panel.zero && low < 0 && high > 0 ? [Plot.ruleY([0], { stroke: INK, strokeWidth: 0.75 })] : []),
-    Plot.ruleY([panel.zero && low >= 0 ? 0 : panel.downwards ? high : low], { stroke: INK, strokeWidth: 0.75 }),
+    ...(panel.zero ? [Plot.ruleY([0], { stroke: INK, strokeWidth: 0.75 })] : []),
     Plot.axisY(axis.ticks, {
       label: null,
       tickSize: 4,
@@ -98,7 +96,14 @@ function lineMarks(line: PanelLine, panel: TimePanel, frame: TimeFrame): Plot.Ma
   const hold = line.shape === "hold";
   const curve = hold ? "step-after" : "linear";
   const marks: Plot.Markish[] = [
-    Plot.line(points, { x: "x", y: "y", stroke: colour, strokeWidth: 1.5, strokeDasharray: line.dash || undefined, curve }),
+    Plot.line(points, {
+      x: "x",
+      y: "y",
+      stroke: colour,
+      strokeWidth: 1.5,
+      strokeDasharray: line.dash || undefined,
+      curve,
+    }),
   ];
   if (hold) marks.unshift(Plot.areaY(points, { x: "x", y1: 0, y2: "y", fill: colour, fillOpacity: 0.22, curve }));
   const lonely = points.filter((point, i) => Number.isFinite(point.y) && stands(points, i));
@@ -123,4 +128,3 @@ function bandMarks(panel: TimePanel, frame: TimeFrame): Plot.Markish[] {
   }));
   return [Plot.areaY(points, { x: "x", y1: "y1", y2: "y2", fill: markColour(panel.colour), fillOpacity: 0.18 })];
 }
-

@@ -2,7 +2,7 @@ import { formatQuantity } from "~/units/format-quantity";
 import { QUANTITIES } from "~/units/quantities";
 import { missingSentence, periodOf, rangeSentence } from "./describe";
 import { drawTimeFigure } from "./draw-time-figure";
-import { extremes, farthestFromStart } from "./extremes";
+import { extremes } from "./extremes";
 import type { Figure } from "./figure";
 import { caption, type FigureContext } from "./figure-context";
 import type { TimePanel } from "./time-panel";
@@ -34,10 +34,7 @@ export function forcingStack(data: ForcingData, context: FigureContext): Figure 
     { name: QUANTITIES.windSpeed10.name, quantity: "windSpeed10", values: windSpeed10 },
     { name: "wind direction from", quantity: "direction", values: windFrom },
   ];
-  const alt = [
-    `Forcing of the storm, ${periodOf(time, context)}.`,
-    windSentence(time, windSpeed10, windFrom, context),
-  ];
+  const alt = [`Forcing of the storm, ${periodOf(time, context)}.`, windSentence(time, windSpeed10, windFrom, context)];
   const shown = ["Wind at 10 m, with arrows that point where it blows to"];
   if (windGust) {
     channels.push({ name: QUANTITIES.windGust.name, quantity: "windGust", values: windGust });
@@ -100,7 +97,7 @@ export function heldTotal(time: ArrayLike<number>, ratePerHour: ArrayLike<number
 
 function farthestFromZero(values: ArrayLike<number>): number | null {
   const found = extremes(values);
-  if (found === null) return farthestFromStart(values);
+  if (found === null) return null;
   return Math.abs(found.min) > Math.abs(found.max) ? found.minAt : found.maxAt;
 }
 

@@ -1,7 +1,6 @@
 import type { TriggerLevel } from "~/ocean/scenario";
-import { formatQuantity } from "~/units/format-quantity";
+import { formatQuantity, toDisplay } from "~/units/format-quantity";
 import { displayUnit } from "~/units/quantities";
-import { toDisplay } from "~/units/format-quantity";
 import type { UnitChoices } from "~/units/unit-choices";
 import type { PanelLevel } from "./time-panel";
 
@@ -12,8 +11,8 @@ export function triggerLevels(
   units: UnitChoices,
 ): PanelLevel[] {
   const levels = (triggers ?? []).filter((trigger) => trigger.quantity === quantity);
-  const seen = new Map(levels.map((trigger) => [trigger.value, trigger]));
-  return [...seen.keys()].map((value) => ({ value, label: `trigger level ${levelText(value, quantity, units)}` }));
+  const values = new Set(levels.map((trigger) => trigger.value));
+  return [...values].map((value) => ({ value, label: `trigger level ${levelText(value, quantity, units)}` }));
 }
 
 export function levelText(value: number, quantity: TriggerLevel["quantity"], units: UnitChoices): string {

@@ -4,7 +4,7 @@ import { INK, markColour, PAPER, textColour } from "./colours";
 import { extremes } from "./extremes";
 import { FONT_SIZE } from "./plain-markup";
 import { textWidth } from "./text-size";
-import { timePosition, type TimeFrame } from "./time-frame";
+import { timeAt, timePosition, type TimeFrame } from "./time-frame";
 import type { TimePanel } from "./time-panel";
 import type { ValueAxis } from "./value-axis";
 
@@ -46,7 +46,10 @@ export function peakSide(panel: TimePanel): "above" | "below" | null {
   return high !== (panel.downwards === true) ? "above" : "below";
 }
 
-/** A dot on the marked sample, with its value and time. */
+/** px: a label keeps this far from the lines. */
+const CLEARANCE = 9;
+
+/** A dot on the marked sample, with its value and time, clear of all lines of the panel. */
 export function peakMarks(panel: TimePanel, frame: TimeFrame, side: "above" | "below"): Plot.Markish[] {
   const index = panel.marked ?? 0;
   const seconds = frame.time[index] ?? 0;
@@ -57,17 +60,40 @@ export function peakMarks(panel: TimePanel, frame: TimeFrame, side: "above" | "b
   const half = textWidth(label) / 2;
   const at = timePosition(seconds, frame);
   const clamped = Math.min(Math.max(at, frame.marginLeft + half + 2), frame.width - 2 - half);
-  const point = [{ x: seconds, y: toDisplay(value, panel.quantity, frame.context.units) }];
+  const [left, right] = [clamped - half, clamped + half].map((x) => timeAt(x, frame));
+  const outermost = outermostBetween(panel, frame, left ?? seconds, right ?? seconds, side) ?? value;
+  const shown = (si: number) => toDisplay(si, panel.quantity, frame.context.units);
   return [
-    Plot.dot(point, { x: "x", y: "y", r: 2.25, fill: markColour(panel.colour) }),
-    Plot.text(point, {
+    Plot.dot([{ x: seconds, y: shown(value) }], { x: "x", y: "y", r: 2.25, fill: markColour(panel.colour) }),
+    Plot.text([{ x: seconds, y: shown(outermost) }], {
       x: "x",
       y: "y",
       text: () => label,
       dx: clamped - at,
-      dy: side === "above" ? -9 : 10,
+      dy: side === "above" ? -CLEARANCE : CLEARANCE,
       fill: textColour(panel.colour),
       ...HALO,
     }),
   ];
+}
+
+/** The value of any line that reaches farthest up (or down) the page between two moments. */
+function outermostBetween(
+  panel: TimePanel,
+  frame: TimeFrame,
+  from: number,
+  to: number,
+  side: "above" | "below",
+): number | null {
+  const greatest = (side === "above") !== (panel.downwards === true);
+  let outermost: number | null = null;
+  for (const { values } of panel.lines) {
+    for (let index = 0; index < values.length; index += 1) {
+      const seconds = frame.time[index] ?? 0;
+      const value = values[index] ?? Number.NaN;
+      if (seconds < from || seconds > to || !Number.isFinite(value)) continue;
+      if (outermost === null || (greatest ? value > outermost : value < outermost)) outermost = value;
+    }
+  }
+  return outermost;
 }

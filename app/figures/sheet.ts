@@ -4,11 +4,11 @@ import { escapeXml, FONT_FAMILY, FONT_SIZE, roundGeometry } from "./plain-markup
 import { textWidth } from "./text-size";
 import type { ColourToken } from "~/units/quantities";
 
+/** Without a width of its own: the page gives it one by CSS, svg-to-pdfkit by its options. */
 export function svgSheet(width: number, height: number, markup: string): string {
   return (
-    `<svg xmlns="http://www.w3.org/2000/svg" viewBox="0 0 ${width} ${Math.ceil(height)}" width="${width}" ` +
-    `height="${Math.ceil(height)}" fill="${INK}" font-family="${FONT_FAMILY}" font-size="${FONT_SIZE}" ` +
-    `text-anchor="middle">${markup}</svg>`
+    `<svg xmlns="http://www.w3.org/2000/svg" viewBox="0 0 ${width} ${Math.ceil(height)}" fill="${INK}" ` +
+    `font-family="${FONT_FAMILY}" font-size="${FONT_SIZE}" text-anchor="middle">${markup}</svg>`
   );
 }
 
@@ -31,9 +31,7 @@ export function axisHeading(
 ): string {
   const baseline = top + 12;
   const arrow =
-    options.grows === "down"
-      ? `M4,${baseline - 9}v9m-2.5,-3l2.5,3l2.5,-3`
-      : `M4,${baseline}v-9m-2.5,3l2.5,-3l2.5,3`;
+    options.grows === "down" ? `M4,${baseline - 9}v9m-2.5,-3l2.5,3l2.5,-3` : `M4,${baseline}v-9m-2.5,3l2.5,-3l2.5,3`;
   let x = 11;
   let markup =
     `<path d="${arrow}" fill="none" stroke="${INK}" stroke-width="0.9"/>` +

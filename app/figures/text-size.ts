@@ -6,6 +6,7 @@ import { FONT_SIZE } from "./plain-markup";
  */
 export function textWidth(text: string, size = FONT_SIZE): number {
   let em = 0;
-  for (const letter of text) em += /[A-Zmw%−+]/.test(letter) ? 0.62 : /[ ijl.,:'|()tfr\u00a0]/.test(letter) ? 0.28 : 0.49;
+  for (const letter of text)
+    em += /[A-Zmw%−+]/.test(letter) ? 0.62 : /[ ijl.,:'|()tfr\u00a0]/.test(letter) ? 0.28 : 0.49;
   return em * size;
 }

@@ -32,3 +32,9 @@ export function timePosition(seconds: number, frame: TimeFrame): number {
   const [from, to] = frame.domain;
   return frame.marginLeft + ((seconds - from) / (to - from)) * (frame.width - frame.marginLeft - frame.marginRight);
 }
+
+/** Seconds at a position in px from the left edge of the figure. */
+export function timeAt(position: number, frame: TimeFrame): number {
+  const [from, to] = frame.domain;
+  return from + ((position - frame.marginLeft) / (frame.width - frame.marginLeft - frame.marginRight)) * (to - from);
+}

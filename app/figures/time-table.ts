@@ -24,7 +24,9 @@ export function timeTable(time: ArrayLike<number>, channels: TableChannel[], con
     ],
     rows: Array.from({ length: time.length }, (_, index) => [
       clock.iso(time[index] ?? 0),
-      ...channels.map((channel) => finite(toDisplay(channel.values[index] ?? Number.NaN, channel.quantity, context.units))),
+      ...channels.map((channel) =>
+        finite(toDisplay(channel.values[index] ?? Number.NaN, channel.quantity, context.units)),
+      ),
     ]),
   };
 }
