@@ -7,10 +7,24 @@ const LONGEST = 500;
  * @param url the request's target, such as `/s/abc.data?x=1`
  */
 export function logPath(url: string): string {
-  const path = url.split(/[?#]/, 1)[0];
-  const segments = path.split("/");
-  const masked = segments.map((segment, index) =>
-    segment !== "" && BEFORE_A_TOKEN.has(segments[index - 1]?.toLowerCase() ?? "") ? "***" : segment,
-  );
+  let previous = "";
+  const masked = url
+    .split(/[?#]/, 1)[0]
+    .split("/")
+    .map((segment) => {
+      if (segment === "") return segment;
+      const isToken = BEFORE_A_TOKEN.has(previous);
+      previous = decoded(segment).toLowerCase();
+      return isToken ? "***" : segment;
+    });
   return masked.join("/").slice(0, LONGEST);
+}
+
+/** The router sees through percent signs, so the mask must. */
+function decoded(segment: string): string {
+  try {
+    return decodeURIComponent(segment);
+  } catch {
+    return segment;
+  }
 }
