@@ -19,16 +19,14 @@ export const MOST_TRIGGER_LEVELS = 6;
 const position = z.tuple([z.number(), z.number()]);
 
 /** The map and the coordinate field both write this. Whether it is a sound box is said by `checkBox`. */
-const polygon = z
-  .string("Draw the box on the map, or type its corners.")
-  .transform((text, context): Position[] => {
-    try {
-      return z.array(position).parse(JSON.parse(text)) as Position[];
-    } catch {
-      context.addIssue({ code: "custom", message: "Draw the box on the map, or type its corners." });
-      return z.NEVER;
-    }
-  });
+const polygon = z.string("Draw the box on the map, or type its corners.").transform((text, context): Position[] => {
+  try {
+    return z.array(position).parse(JSON.parse(text)) as Position[];
+  } catch {
+    context.addIssue({ code: "custom", message: "Draw the box on the map, or type its corners." });
+    return z.NEVER;
+  }
+});
 
 /** A number as typed in the organisation's unit, turned to SI and held to limits that are told in that unit. */
 function measured(id: QuantityId, units: UnitChoices, limits: { min: number; max: number }) {

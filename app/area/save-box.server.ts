@@ -24,12 +24,7 @@ async function checkSurroundings(ring: Position[]): Promise<{ share: number | nu
  * Checks a box against the sphere and the coast, then stores it; `id` null makes a new one.
  * Empty fields are stored as unknown, never as zero.
  */
-export async function saveBox(
-  tenant: Tenant,
-  projectId: string,
-  id: string | null,
-  values: BoxValues,
-): Promise<Saved> {
+export async function saveBox(tenant: Tenant, projectId: string, id: string | null, values: BoxValues): Promise<Saved> {
   const checked = checkBox(values.polygon);
   if (!checked.ok) return { fieldErrors: { polygon: checked.problems.map(({ message }) => message) } };
   const { share, refusal } = await checkSurroundings(checked.ring);
