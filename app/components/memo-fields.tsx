@@ -1,0 +1,134 @@
+import { getFormProps, getInputProps, getSelectProps, getTextareaProps, useForm, type SubmissionResult } from "@conform-to/react";
+import { parseWithZod } from "@conform-to/zod/v4";
+import type { ReactNode } from "react";
+import { Form } from "react-router";
+import type { z } from "zod";
+import { Field, FormErrors } from "./field";
+import { SubmitButton } from "./submit-button";
+import { memoSchema } from "~/memo/memo-schema";
+import { MEMO_PURPOSES } from "~/memo/purposes";
+
+type MemoFormValues = z.input<typeof memoSchema>;
+
+export interface EstimateChoice {
+  id: string;
+  /** `2617-07` */
+  code: string;
+  /** Box in storm. */
+  name: string;
+  /** As `current`, `out of date: column edited`. */
+  state: string;
+}
+
+interface MemoFieldsProps {
+  lastResult?: SubmissionResult<string[]>;
+  choices: EstimateChoice[];
+  values: Partial<MemoFormValues>;
+  submit: string;
+  draftedFindings?: string;
+  children?: ReactNode;
+}
+
+/** Shared by the page that begins a memo and the one that writes it. */
+export function MemoFields({ lastResult, choices, values, submit, draftedFindings, children }: MemoFieldsProps) {
+  const [form, fields] = useForm<MemoFormValues, MemoFormValues, string[]>({
+    id: "memo",
+    lastResult,
+    defaultValue: values,
+    onValidate: ({ formData }) => parseWithZod(formData, { schema: memoSchema }),
+    shouldRevalidate: "onInput",
+  });
+  const chosen = new Set(values.estimates);
+  return (
+    <Form method="post" {...getFormProps(form)} className="grid gap-4">
+      <FormErrors errors={form.errors} id={form.errorId} />
+      <Field id={fields.title.id} label="Title" errors={fields.title.errors}>
+        {(described) => (
+          <input
+            {...getInputProps(fields.title, { type: "text" })}
+            {...described}
+            key={fields.title.key}
+            className="input"
+            autoComplete="off"
+          />
+        )}
+      </Field>
+      <Field
+        id={fields.question.id}
+        label="Question"
+        hint="What the client asks, and the decision that hangs on the answer."
+        errors={fields.question.errors}
+      >
+        {(described) => (
+          <textarea
+            {...getTextareaProps(fields.question)}
+            {...described}
+            key={fields.question.key}
+            rows={3}
+            className="input"
+          />
+        )}
+      </Field>
+      <Field
+        id={fields.findings.id}
+        label="Bottom line"
+        hint="Left empty, it is drafted from the responses, with the range and what drives it."
+        errors={fields.findings.errors}
+        optional
+      >
+        {(described) => (
+          <textarea
+            {...getTextareaProps(fields.findings)}
+            {...described}
+            key={fields.findings.key}
+            rows={5}
+            className="input"
+            placeholder={draftedFindings}
+          />
+        )}
+      </Field>
+      <Field id={fields.purpose.id} label="Issued for" errors={fields.purpose.errors}>
+        {(described) => (
+          <select {...getSelectProps(fields.purpose)} {...described} key={fields.purpose.key} className="input">
+            {MEMO_PURPOSES.map((purpose) => (
+              <option key={purpose}>{purpose}</option>
+            ))}
+          </select>
+        )}
+      </Field>
+      <fieldset
+        id={fields.estimates.id}
+        tabIndex={-1}
+        aria-describedby={fields.estimates.errors ? fields.estimates.errorId : undefined}
+        className="border border-hairline p-4"
+      >
+        <legend className="px-1 text-small font-bold text-slate">Estimates, in this order</legend>
+        {choices.map(({ id, code, name, state }) => (
+          <label key={id} className="flex items-start gap-2.5 py-1">
+            <input
+              type="checkbox"
+              name={fields.estimates.name}
+              value={id}
+              defaultChecked={chosen.has(id)}
+              className="mt-1 size-4 shrink-0 accent-ink"
+            />
+            <span>
+              <span className="font-bold">{code}</span> {name} <span className="text-small text-quiet">{state}</span>
+            </span>
+          </label>
+        ))}
+        {fields.estimates.errors && (
+          <p id={fields.estimates.errorId} className="mt-1 text-small font-bold text-error">
+            {fields.estimates.errors.join(" ")}
+          </p>
+        )}
+      </fieldset>
+      <div className="flex flex-wrap gap-2">
+        <SubmitButton busy="Saving…" name="intent" value="save">
+          {submit}
+        </SubmitButton>
+        {children}
+      </div>
+    </Form>
+  );
+}

@@ -1,0 +1,97 @@
+import { Link } from "react-router";
+import type { Route } from "./+types/list";
+import { EmptyState, PageTitle } from "~/components/page-title";
+import { namesOfUsers } from "~/db/unscoped.server";
+import { memoNumber } from "~/memo/memo-number";
+import { may } from "~/organisations/permissions";
+import { currentProject } from "~/projects/current-project.server";
+import { formatDate } from "~/units/format-time";
+
+export async function loader({ context, params }: Route.LoaderArgs) {
+  const { tenant, organisation, project } = await currentProject(context, params, "project.view");
+  const memos = await tenant.memos.list({ where: { projectId: project.id }, order: [["number", "DESC"]] });
+  const revisions = await tenant.memoRevisions.list({
+    where: { memoId: memos.map(({ id }) => id) },
+    order: [["sequence", "DESC"]],
+    without: ["pdf", "document"],
+  });
+  const names = await namesOfUsers(memos.map(({ originatorId }) => originatorId));
+  return {
+    memos: memos.map(({ id, number, title, originatorId }) => ({
+      id,
+      number: memoNumber(project.jobNumber, number),
+      title,
+      originator: names.get(originatorId) ?? "",
+      revisions: revisions
+        .filter(({ memoId }) => memoId === id)
+        .map(({ id: revision, label, purpose, issuedAt }) => ({
+          id: revision,
+          label,
+          purpose,
+          issued: formatDate(issuedAt, project.timeZone),
+        })),
+    })),
+    timeZone: project.timeZone,
+    mayWrite: may(organisation.role, "memo.write"),
+    hasEstimates: (await tenant.estimates.count({ projectId: project.id })) > 0,
+  };
+}
+
+export default function MemoList({ loaderData }: Route.ComponentProps) {
+  const { memos, mayWrite, hasEstimates, timeZone } = loaderData;
+  const begin = mayWrite && hasEstimates && (
+    <Link to="new" className="button button-primary">
+      New memo
+    </Link>
+  );
+  return (
+    <>
+      <PageTitle actions={begin}>Memos</PageTitle>
+      {memos.length === 0 ? (
+        <EmptyState title="No memo yet" action={begin}>
+          {hasEstimates
+            ? "A memo answers the client’s question with the numbers of one or more estimates, and keeps pointing at them."
+            : "A memo points at estimates. Run one from the ledger first."}
+        </EmptyState>
+      ) : (
+        <div className="overflow-x-auto">
+          <table className="rule-table">
+            <thead>
+              <tr>
+                <th scope="col">Memo</th>
+                <th scope="col">Title</th>
+                <th scope="col">Originator</th>
+                <th scope="col">Issued ({timeZone})</th>
+              </tr>
+            </thead>
+            <tbody>
+              {memos.map(({ id, number, title, originator, revisions }) => (
+                <tr key={id}>
+                  <td className="whitespace-nowrap">{number}</td>
+                  <td>
+                    <Link to={id} className="font-bold">
+                      {title}
+                    </Link>
+                  </td>
+                  <td>{originator}</td>
+                  <td>
+                    {revisions.length === 0
+                      ? "draft"
+                      : revisions.map((revision) => (
+                          <p key={revision.id}>
+                            <Link to={`${id}/revisions/${revision.id}`}>Revision {revision.label}</Link>{" "}
+                            <span className="text-small text-quiet">
+                              {revision.issued}, for {revision.purpose}
+                            </span>
+                          </p>
+                        ))}
+                  </td>
+                </tr>
+              ))}
+            </tbody>
+          </table>
+        </div>
+      )}
+    </>
+  );
+}
