@@ -1,5 +1,6 @@
 import type { RunnableMigration } from "umzug";
 import { firstTables } from "./2026-12-01-first-tables.server";
+import { estimateInputs } from "./2026-12-01-estimate-inputs.server";
 
 export interface MigrationContext {
   /** Runs one statement inside the migration's transaction. */
@@ -8,4 +9,4 @@ export interface MigrationContext {
 export type Migration = RunnableMigration<MigrationContext>;
 
 /** In order. A migration that has been released is never edited: add the next one. */
-export const migrations: Migration[] = [firstTables];
+export const migrations: Migration[] = [firstTables, estimateInputs];

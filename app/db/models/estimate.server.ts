@@ -1,5 +1,6 @@
 import { type CreationOptional, DataTypes, type InferAttributes, type InferCreationAttributes, Model } from "sequelize";
 import { sequelize } from "../connection.server";
+import type { RunInputs } from "~/estimates/inputs-register";
 import type { ScenarioProblem } from "~/ocean/scenario";
 
 /** One cell of the ledger. Its response is found by input hash and engine version, so an edit taken back makes it current again. */
@@ -16,6 +17,8 @@ export class Estimate extends Model<InferAttributes<Estimate>, InferCreationAttr
   declare problems: ScenarioProblem[] | null;
   declare inputHash: string | null;
   declare engineVersion: string | null;
+  /** What the last run stood on. */
+  declare inputs: CreationOptional<RunInputs | null>;
   declare requestedBy: string;
   declare startedAt: Date | null;
   declare finishedAt: Date | null;
@@ -37,6 +40,7 @@ Estimate.init(
     problems: { type: DataTypes.JSON, allowNull: true },
     inputHash: { type: DataTypes.TEXT, allowNull: true },
     engineVersion: { type: DataTypes.TEXT, allowNull: true },
+    inputs: { type: DataTypes.JSON, allowNull: true },
     requestedBy: { type: DataTypes.TEXT, allowNull: false },
     startedAt: { type: DataTypes.DATE, allowNull: true },
     finishedAt: { type: DataTypes.DATE, allowNull: true },

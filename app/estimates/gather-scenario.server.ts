@@ -1,0 +1,106 @@
+/** Collects from the database what an estimate stands on. */
+import { buildScenario } from "./build-scenario";
+import { inputParts, type InputParts } from "./input-parts";
+import type { InputsRegister } from "./inputs-register";
+import { readStorm, type StormReading } from "./read-storm.server";
+import { Recent } from "./recent";
+import type { StormForcing } from "./storm-forcing";
+import type { MethodSheet } from "~/db/models/method-sheet.server";
+import type { Storm } from "~/db/models/storm.server";
+import type { StudyBox } from "~/db/models/study-box.server";
+import type { WaterColumn } from "~/db/models/water-column.server";
+import type { Tenant } from "~/db/scoped.server";
+import { inputHash } from "~/ocean/input-hash";
+import type { Scenario, ScenarioProblem } from "~/ocean/scenario";
+
+export interface GatheredScenario {
+  /** Null where the storm's series leave nothing to compute with: `problems` says why. */
+  scenario: Scenario | null;
+  /** The engine's hash of `scenario`. */
+  hash: string | null;
+  parts: InputParts | null;
+  forcing: StormForcing | null;
+  /** What stands in the way of a run; more may come from the engine. */
+  problems: ScenarioProblem[];
+  assumptions: string[];
+  register: InputsRegister;
+}
+
+export interface EstimateRows {
+  box: StudyBox;
+  storm: Storm;
+  water: WaterColumn;
+  sheet: MethodSheet;
+}
+
+/** Parts to hash of the whole: a ledger asks for the same again and again. */
+const recentHashes = new Recent<string>(2048);
+
+function hashOf(scenario: Scenario, parts: InputParts): string {
+  const key = Object.values(parts).join(" ");
+  const hash = recentHashes.get(key) ?? inputHash(scenario);
+  recentHashes.set(key, hash);
+  return hash;
+}
+
+export function heatInterpolationOf(sheet: MethodSheet): "linear" | "hold" {
+  return sheet.choices.heatInterpolation ?? "linear";
+}
+
+/** Puts rows and a storm's reading together; asks the database nothing. */
+export function gatherFrom({ box, storm, water, sheet }: EstimateRows, reading: StormReading): GatheredScenario {
+  const { forcing, problems, assumptions, scenarioStorm, hash: stormHash, records } = reading;
+  const scenario = scenarioStorm && buildScenario({ box, storm: scenarioStorm, water, method: sheet.choices });
+  const parts = scenario && stormHash ? inputParts(scenario, stormHash) : null;
+  const { polygon, waterDepth, shoreNormal, distanceToShore, triggerLevels } = box;
+  const { source, temperature, salinity, salinityScale, layerDepth, belowTemperature, belowSalinity } = water;
+  return {
+    scenario,
+    hash: scenario && parts && hashOf(scenario, parts),
+    parts,
+    forcing,
+    problems,
+    assumptions,
+    register: {
+      box: { name: box.name, polygon, waterDepth, shoreNormal, distanceToShore, triggerLevels },
+      storm: { name: storm.name, startsAt: storm.startsAt, endsAt: storm.endsAt, records },
+      water: {
+        name: water.name,
+        source,
+        temperature,
+        salinity,
+        salinityScale,
+        layerDepth,
+        belowTemperature,
+        belowSalinity,
+      },
+      method: { name: sheet.name, version: sheet.version, choices: sheet.choices },
+    },
+  };
+}
+
+export interface EstimateReferences {
+  studyBoxId: string;
+  stormId: string;
+  waterColumnId: string;
+  methodSheetId: string;
+}
+
+/**
+ * @param zone names times in messages
+ * @returns null where one of the four is no longer there
+ */
+export async function gatherScenario(
+  tenant: Tenant,
+  { studyBoxId, stormId, waterColumnId, methodSheetId }: EstimateReferences,
+  zone: string,
+): Promise<GatheredScenario | null> {
+  const [box, storm, water, sheet] = await Promise.all([
+    tenant.studyBoxes.find(studyBoxId),
+    tenant.storms.find(stormId),
+    tenant.waterColumns.find(waterColumnId),
+    tenant.methodSheets.find(methodSheetId),
+  ]);
+  if (!box || !storm || !water || !sheet) return null;
+  return gatherFrom({ box, storm, water, sheet }, await readStorm(tenant, storm, heatInterpolationOf(sheet), zone));
+}

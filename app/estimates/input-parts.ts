@@ -1,0 +1,36 @@
+/** A hash of each part of a scenario, so that an estimate can say which of its inputs changed. */
+import { sha256 } from "@noble/hashes/sha2.js";
+import { bytesToHex, utf8ToBytes } from "@noble/hashes/utils.js";
+import { canonicalJson } from "~/ocean/canonical-json";
+import type { Scenario } from "~/ocean/scenario";
+
+export const INPUT_PARTS = ["box", "storm", "water", "method", "triggerLevels"] as const;
+export type InputPart = (typeof INPUT_PARTS)[number];
+export type InputParts = Record<InputPart, string>;
+
+export const PART_NAMES: Record<InputPart, string> = {
+  box: "study box",
+  storm: "storm",
+  water: "water column",
+  method: "method sheet",
+  triggerLevels: "trigger levels",
+};
+
+export function partHash(value: unknown): string {
+  return bytesToHex(sha256(utf8ToBytes(canonicalJson(value ?? null))));
+}
+
+/** @param stormHash the storm's part, where it was made before: its series are the long part of a scenario */
+export function inputParts(scenario: Scenario, stormHash = partHash(scenario.storm)): InputParts {
+  return {
+    box: partHash(scenario.box),
+    storm: stormHash,
+    water: partHash(scenario.water),
+    method: partHash(scenario.method),
+    triggerLevels: partHash(scenario.triggerLevels),
+  };
+}
+
+export function changedParts(before: InputParts, now: InputParts): InputPart[] {
+  return INPUT_PARTS.filter((part) => before[part] !== now[part]);
+}

@@ -1,0 +1,45 @@
+/** Every input of an estimate by name, file and hash: shown on its page, printed in the memo, kept with its last run. */
+import type { InputParts } from "./input-parts";
+import type { MethodChoices, Position, TriggerLevel } from "~/ocean/scenario";
+import type { RecordProvenance } from "~/storms/provenance";
+
+export interface RegisteredRecord {
+  name: string;
+  origin: "file" | "pasted" | "constant";
+  sourceFileId: string | null;
+  /** Null where there is no file. */
+  fileName: string | null;
+  sha256: string | null;
+  provenance: RecordProvenance | null;
+}
+
+export interface InputsRegister {
+  box: {
+    name: string;
+    polygon: Position[];
+    waterDepth: number | null;
+    shoreNormal: number | null;
+    distanceToShore: number | null;
+    triggerLevels: TriggerLevel[];
+  };
+  /** Seconds since 1970-01-01T00:00:00Z. */
+  storm: { name: string; startsAt: number | null; endsAt: number | null; records: RegisteredRecord[] };
+  water: {
+    name: string;
+    source: string;
+    temperature: number;
+    salinity: number;
+    salinityScale: "absolute" | "practical";
+    layerDepth: number;
+    belowTemperature: number | null;
+    belowSalinity: number | null;
+  };
+  method: { name: string; version: number; choices: MethodChoices };
+}
+
+/** Kept with an estimate at the end of its run. */
+export interface RunInputs {
+  parts: InputParts | null;
+  assumptions: string[];
+  register: InputsRegister;
+}

@@ -1,0 +1,271 @@
+/**
+ * One time axis for all that drives a storm. Each channel comes with its own times, missing values taken out;
+ * wind is brought to the common axis as a vector, rain and evaporation as rates that hold until their next time,
+ * heat on the straight line between its times, or held where the method says so.
+ */
+import { heldAt, linearAt, lastAtOrBefore, medianStep, unionAxis, type Samples } from "./resample";
+import type { HeatSeries, ScenarioProblem } from "~/ocean/scenario";
+import type { ChannelName } from "~/readers/reading";
+import { formatTime } from "~/units/format-time";
+
+export type StormChannels = Partial<Record<ChannelName, Samples>>;
+
+export interface StormInput {
+  channels: StormChannels;
+  /** m above the sea; null where the record does not say. */
+  windHeight: number | null;
+  /** Seconds since 1970-01-01T00:00:00Z. */
+  startsAt: number | null;
+  endsAt: number | null;
+  heatInterpolation: "linear" | "hold";
+}
+
+export interface StormForcing {
+  /** Seconds since 1970-01-01T00:00:00Z, strictly ascending. */
+  time: number[];
+  /** m/s at `windHeight` */
+  windSpeed: number[];
+  /** degrees true, where the wind comes from */
+  windFrom: number[];
+  windHeight: number;
+  /** mm/h */
+  rain?: number[];
+  /** mm/h */
+  evaporation?: number[];
+  heat?: HeatSeries;
+}
+
+export interface ReadForcing {
+  /** Null where a problem leaves nothing to compute with. */
+  forcing: StormForcing | null;
+  problems: ScenarioProblem[];
+  /** What was taken for granted, a sentence each. */
+  assumptions: string[];
+}
+
+/** Pauses that are longer are refused, never bridged: the engine's own limit. Common practice, no source. seconds */
+export const LONGEST_PAUSE = 6 * 3600;
+
+const HEAT_PARTS = ["shortwave", "longwave", "sensible", "latent"] as const;
+
+const LABELS: Partial<Record<ChannelName, string>> = {
+  windSpeed: "wind",
+  rain: "rain",
+  evaporation: "evaporation",
+  netHeat: "net heat",
+  shortwave: "shortwave radiation",
+  longwave: "longwave radiation",
+  sensible: "sensible heat",
+  latent: "latent heat",
+};
+
+interface Wind {
+  time: number[];
+  speed: number[];
+  from: number[];
+  east: number[];
+  north: number[];
+}
+
+const RADIANS = Math.PI / 180;
+
+/** Samples that have both speed and direction; a calm needs no direction. */
+function pairWind(speed: Samples, from: Samples): Wind {
+  const wind: Wind = { time: [], speed: [], from: [], east: [], north: [] };
+  for (let index = 0; index < speed.time.length; index++) {
+    const moment = speed.time[index];
+    const at = lastAtOrBefore(from.time, moment);
+    const bearing = at >= 0 && from.time[at] === moment ? from.values[at] : speed.values[index] === 0 ? 0 : Number.NaN;
+    if (Number.isNaN(bearing)) continue;
+    wind.time.push(moment);
+    wind.speed.push(speed.values[index]);
+    wind.from.push(bearing);
+    wind.east.push(-speed.values[index] * Math.sin(bearing * RADIANS));
+    wind.north.push(-speed.values[index] * Math.cos(bearing * RADIANS));
+  }
+  return wind;
+}
+
+/** As measured where a sample stands; between samples the vector on the straight line, turned back to speed and direction. */
+function windAt(wind: Wind, moment: number): [speed: number, from: number] {
+  const at = lastAtOrBefore(wind.time, moment);
+  if (at >= 0 && wind.time[at] === moment) return [wind.speed[at], wind.from[at]];
+  const east = linearAt({ time: wind.time, values: wind.east }, moment);
+  const north = linearAt({ time: wind.time, values: wind.north }, moment);
+  const speed = Math.hypot(east, north);
+  return [speed, speed === 0 ? 0 : (Math.atan2(-east, -north) / RADIANS + 360) % 360];
+}
+
+interface Pause {
+  from: number;
+  to: number;
+}
+
+/** Pauses that are longer than the channel may have, cut to [from, to]; a missing start or end counts as one. */
+function pausesOf(time: ArrayLike<number>, from: number, to: number, longest: number): Pause[] {
+  const within = Array.from({ length: time.length }, (_, index) => time[index]).filter((at) => at > from && at < to);
+  const before = lastAtOrBefore(time, from);
+  const after = Array.prototype.find.call(time, (at: number) => at >= to) as number | undefined;
+  const knots = [before >= 0 ? time[before] : from, ...within, after ?? to];
+  return knots.slice(1).flatMap((next, index) => {
+    const previous = knots[index];
+    return next - previous > longest ? [{ from: Math.max(previous, from), to: Math.min(next, to) }] : [];
+  });
+}
+
+/** Wind is held to the limit; a channel of longer regular steps (a daily gauge) may pause for as long as it always does. */
+function longestPause(channel: ChannelName, time: ArrayLike<number>): number {
+  if (channel === "windSpeed") return LONGEST_PAUSE;
+  const step = medianStep(time);
+  return Number.isFinite(step) ? Math.max(LONGEST_PAUSE, 1.5 * step) : LONGEST_PAUSE;
+}
+
+function pauseProblem(channel: ChannelName, path: string, pause: Pause, zone: string): ScenarioProblem {
+  const hours = ((pause.to - pause.from) / 3600).toFixed(1);
+  return {
+    path,
+    code: "GAP",
+    message:
+      `The ${LABELS[channel] ?? channel} has no value for ${hours} h, from ${formatTime(pause.from, zone)} to ` +
+      `${formatTime(pause.to, zone)}. A pause this long is not bridged: bring a record that covers it, or narrow the storm's window.`,
+  };
+}
+
+/** Held rates: the last one stands for one step of its own record, then nothing. */
+function heldRate(samples: Samples, axis: number[]): number[] {
+  const last = samples.time[samples.time.length - 1];
+  const step = medianStep(samples.time);
+  const end = Number.isFinite(step) ? last + step : Number.POSITIVE_INFINITY;
+  return axis.map((moment) => {
+    const value = moment >= end ? 0 : heldAt(samples, moment);
+    return Number.isNaN(value) ? 0 : value;
+  });
+}
+
+function heatOf(input: StormInput, axis: number[], assumptions: string[]): HeatSeries | undefined {
+  const { channels, heatInterpolation } = input;
+  const at = (samples: Samples) =>
+    axis.map((moment) => {
+      const held = heatInterpolation === "hold" ? heldAt(samples, moment) : linearAt(samples, moment);
+      return Number.isNaN(held) ? samples.values[0] : held;
+    });
+  const parts = HEAT_PARTS.filter((part) => channels[part]);
+  if (channels.netHeat) {
+    if (parts.length > 0) {
+      assumptions.push(
+        `Net heat is given; its parts (${parts.map((part) => LABELS[part]).join(", ")}) are not added to it.`,
+      );
+    }
+    return { net: at(channels.netHeat) };
+  }
+  if (parts.length === 0) {
+    assumptions.push("No heat flux is given: taken as 0 W/m².");
+    return undefined;
+  }
+  const missing = HEAT_PARTS.filter((part) => !channels[part]);
+  if (missing.length > 0) {
+    assumptions.push(`No ${missing.map((part) => LABELS[part]).join(", no ")} is given: taken as 0 W/m².`);
+  }
+  return Object.fromEntries(parts.map((part) => [part, at(channels[part] as Samples)]));
+}
+
+/**
+ * Brings a storm's channels to one time axis: the union of the times of all channels within the window, and its ends.
+ * @param zone names times in messages
+ * @returns what drives the water, or the problems that leave nothing to compute with; never throws for what a file can hold
+ */
+export function readForcing(input: StormInput, zone: string): ReadForcing {
+  const { channels, startsAt, endsAt } = input;
+  const problems: ScenarioProblem[] = [];
+  const assumptions: string[] = [];
+  const fail = (path: string, code: string, message: string): ReadForcing => ({
+    forcing: null,
+    problems: [...problems, { path, code, message }],
+    assumptions,
+  });
+  if (startsAt === null || endsAt === null) {
+    return fail(
+      "storm.time",
+      "INVALID_INPUT",
+      "The storm has no confirmed record yet: confirm one on its reading sheet.",
+    );
+  }
+  if (!channels.windSpeed || !channels.windFrom) {
+    const what = !channels.windSpeed ? "wind speed" : "wind direction";
+    return fail("storm.windSpeed", "INVALID_INPUT", `The storm has no ${what}: add a record that holds it.`);
+  }
+  const wind = pairWind(channels.windSpeed, channels.windFrom);
+  if (wind.time.length < 2) {
+    return fail(
+      "storm.windFrom",
+      "INVALID_INPUT",
+      "Fewer than two samples have both a wind speed and a direction: bring a record in which they share their times.",
+    );
+  }
+  const from = Math.max(startsAt, wind.time[0]);
+  const to = Math.min(endsAt, wind.time[wind.time.length - 1]);
+  for (const [start, end] of [
+    [startsAt, Math.min(from, endsAt)],
+    [Math.max(to, startsAt), endsAt],
+  ]) {
+    if (end - start > LONGEST_PAUSE) {
+      problems.push(pauseProblem("windSpeed", "storm.windSpeed", { from: start, to: end }, zone));
+    } else if (end > start) {
+      assumptions.push(
+        `The wind record lacks ${formatTime(start, zone)} to ${formatTime(end, zone)}: the estimate covers what it holds.`,
+      );
+    }
+  }
+  if (!(to > from)) {
+    return fail(
+      "storm.time",
+      "INVALID_INPUT",
+      "The wind record and the storm's window do not overlap: change the window.",
+    );
+  }
+
+  const used = (["windSpeed", "rain", "evaporation", "netHeat", ...HEAT_PARTS] as const).filter(
+    (name) => channels[name] && !(channels.netHeat && (HEAT_PARTS as readonly string[]).includes(name)),
+  );
+  const timesOf = (name: ChannelName) => (name === "windSpeed" ? wind.time : (channels[name]?.time ?? []));
+  const pauses = used.flatMap((name) => {
+    const path =
+      name === "windSpeed" || name === "rain" || name === "evaporation"
+        ? `storm.${name}`
+        : `storm.heat.${name === "netHeat" ? "net" : name}`;
+    const found = pausesOf(timesOf(name), from, to, longestPause(name, timesOf(name)));
+    problems.push(...found.map((pause) => pauseProblem(name, path, pause, zone)));
+    return found;
+  });
+  // Nothing is invented inside a pause: the axis itself has it, and the engine refuses it as well.
+  const axis = unionAxis([...used.map(timesOf), ...heldEnds(channels)], from, to).filter((moment) =>
+    pauses.every((pause) => moment <= pause.from || moment >= pause.to),
+  );
+
+  if (input.windHeight === null) assumptions.push("The record does not state the wind's height: taken as 10 m.");
+  if (!channels.rain) assumptions.push("No rain is given: taken as 0 mm/h.");
+  if (!channels.evaporation) assumptions.push("No evaporation is given: taken as 0 mm/h.");
+  const speeds = axis.map((moment) => windAt(wind, moment));
+  const heat = heatOf(input, axis, assumptions);
+  return {
+    forcing: {
+      time: axis,
+      windSpeed: speeds.map(([speed]) => speed),
+      windFrom: speeds.map(([, bearing]) => bearing),
+      windHeight: input.windHeight ?? 10,
+      ...(channels.rain && { rain: heldRate(channels.rain, axis) }),
+      ...(channels.evaporation && { evaporation: heldRate(channels.evaporation, axis) }),
+      ...(heat && { heat }),
+    },
+    problems,
+    assumptions,
+  };
+}
+
+/** Moments at which a held rate ends, so that the axis has them. */
+function heldEnds(channels: StormChannels): number[][] {
+  return [channels.rain, channels.evaporation].flatMap((samples) => {
+    if (!samples || samples.time.length < 2) return [];
+    return [[samples.time[samples.time.length - 1] + medianStep(samples.time)]];
+  });
+}
