@@ -78,9 +78,9 @@ async function inspect(database: SqliteFile, file: string): Promise<Omit<BackupC
   if (!tables.some(({ name }) => name === "migrations")) {
     throw new BackupError(`${file} is an SQLite database, but not one of Galeprint.`);
   }
-  const applied = await database.all<{ name: string }>("SELECT name FROM migrations ORDER BY name");
-  const known = new Set(migrations.map(({ name }) => name));
-  const unknown = applied.filter(({ name }) => !known.has(name));
+  const applied = await database.all<{ name: string }>("SELECT name FROM migrations");
+  const known = migrations.map(({ name }) => name);
+  const unknown = applied.filter(({ name }) => !known.includes(name));
   if (unknown.length > 0) {
     throw new BackupError(`${file} was made by a newer version of Galeprint (${unknown[0].name}). Update first.`);
   }
@@ -89,7 +89,11 @@ async function inspect(database: SqliteFile, file: string): Promise<Omit<BackupC
     const [{ count }] = await database.all<{ count: number }>(`SELECT count(*) AS count FROM ${quoted(name)}`);
     rows += count;
   }
-  return { tables: tables.length, rows, migration: applied.at(-1)?.name ?? "none" };
+  return {
+    tables: tables.length,
+    rows,
+    migration: known.findLast((name) => applied.some((row) => row.name === name)) ?? "none",
+  };
 }
 
 /**
