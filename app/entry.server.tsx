@@ -5,12 +5,14 @@ import { isbot } from "isbot";
 import { renderToPipeableStream } from "react-dom/server";
 import { isRouteErrorResponse, ServerRouter, type EntryContext } from "react-router";
 import { closeDatabase } from "~/db/connection.server";
+import { resumeEstimates } from "~/estimates/run-queue.server";
 import { config } from "~/services/config.server";
 import { log, requestLog } from "~/services/log.server";
 import { requestIdOf } from "~/services/request-facts.server";
 import { onShutdown } from "~/services/shutdown.server";
 
 onShutdown("database", closeDatabase);
+void resumeEstimates().catch((error: unknown) => log().error({ err: error }, "could not resume estimates"));
 
 export const streamTimeout = 10_000;
 
