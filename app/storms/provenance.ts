@@ -1,5 +1,13 @@
 import type { ChannelName, ReadingStep, Understood } from "~/readers/reading";
 
+/** A value that a person set to stand over the whole storm, in the channel's unit. */
+export interface ConstantForcing {
+  channel: ChannelName;
+  value: number;
+  /** As it was typed. */
+  asWritten: { value: number; unit: string };
+}
+
 /** How a confirmed record was read: kept beside the original, printed in the memo's register of inputs. */
 export interface RecordProvenance {
   formatLabel: string;
@@ -16,6 +24,8 @@ export interface RecordProvenance {
   steps: ReadingStep[];
   dropped: { reason: string; count: number; firstRow: number }[];
   channels: { channel: ChannelName; unit: string; count: number; missing: number; fromColumns: string[] }[];
+  /** Only where no file stands behind the record. */
+  constant?: ConstantForcing;
   /** Whose answers these are, and when (ISO UTC). */
   confirmedBy: string;
   confirmedAt: string;

@@ -1,0 +1,130 @@
+import { drawTimeFigure } from "~/figures/draw-time-figure";
+import { extremes } from "~/figures/extremes";
+import type { Figure } from "~/figures/figure";
+import { caption, type FigureContext } from "~/figures/figure-context";
+import { periodOf, rangeSentence } from "~/figures/describe";
+import type { TimePanel } from "~/figures/time-panel";
+import { timeTable } from "~/figures/time-table";
+import { windPanel } from "~/figures/wind-panel";
+import type { ChannelName } from "~/readers/reading";
+import type { ChannelSeries } from "./channel-series";
+import { CHANNELS } from "./channels";
+import { onCommonAxis } from "./common-axis";
+import type { StormWindow } from "./storm-window";
+
+interface StormFigureOptions {
+  id: string;
+  title: string;
+  /** m; null where it is not known. */
+  windHeight: number | null;
+  /** Shown on a tinted ground. */
+  window?: StormWindow | null;
+}
+
+const HEAT_PARTS: readonly { channel: ChannelName; label: string; dash: string }[] = [
+  { channel: "shortwave", label: "shortwave", dash: "" },
+  { channel: "longwave", label: "longwave", dash: "6,2" },
+  { channel: "sensible", label: "sensible", dash: "2,3" },
+  { channel: "latent", label: "latent", dash: "6,2,2,2" },
+];
+
+const DRAWN: readonly ChannelName[] = [
+  "windSpeed",
+  "windGust",
+  "windFrom",
+  "rain",
+  "netHeat",
+  ...HEAT_PARTS.map(({ channel }) => channel),
+];
+
+/** Wind at its own height, rain and heat as recorded, above one time axis; null where there is none of the three. */
+export function stormFigure(
+  series: readonly ChannelSeries[],
+  { id, title, windHeight, window }: StormFigureOptions,
+  context: FigureContext,
+): Figure | null {
+  const drawn = series.filter(({ channel }) => DRAWN.includes(channel));
+  const { time, values } = onCommonAxis(drawn);
+  const of = (channel: ChannelName) => {
+    const index = drawn.findIndex((entry) => entry.channel === channel);
+    return index < 0 ? undefined : values[index];
+  };
+  const panels = [windOf(of, windHeight), rainOf(of("rain")), heatOf(of)].filter((panel) => panel !== null);
+  if (panels.length === 0 || time.length === 0) return null;
+  if (window) for (const panel of panels) panel.window = { start: window.startsAt, end: window.endsAt };
+  const { svg, width, height } = drawTimeFigure(id, panels, time, context);
+  const sentences = drawn
+    .filter(({ channel }) => channel !== "windFrom")
+    .map(({ channel }) => {
+      const { label, quantity } = CHANNELS[channel];
+      return rangeSentence(label[0].toUpperCase() + label.slice(1), quantity, time, of(channel) ?? [], context);
+    });
+  const shown = panels.map(({ heading }) => heading).join("; ");
+  return {
+    id,
+    title,
+    caption: caption(
+      [
+        `${shown[0].toUpperCase()}${shown.slice(1)}, as recorded.`,
+        of("windFrom") && "Arrows point where the wind blows to.",
+        window && "The storm's window is tinted.",
+        `${periodOf(time, context)}.`,
+      ],
+      context,
+    ),
+    alt: [`${title}, ${periodOf(time, context)}.`, ...sentences].join(" "),
+    width,
+    height,
+    svg,
+    table: timeTable(
+      time,
+      drawn.map(({ channel }, index) => ({
+        name: CHANNELS[channel].label,
+        quantity: CHANNELS[channel].quantity,
+        values: values[index],
+      })),
+      context,
+    ),
+  };
+}
+
+type ValuesOf = (channel: ChannelName) => Float64Array | undefined;
+
+function windOf(of: ValuesOf, height: number | null): TimePanel | null {
+  const speed = of("windSpeed");
+  if (!speed) return null;
+  const from = of("windFrom");
+  const heading = height === null ? "wind" : `wind at ${height} m`;
+  const panel = windPanel({ quantity: "windSpeed", heading, speed, from: from ?? [], gust: of("windGust") });
+  return from ? panel : { ...panel, arrows: undefined };
+}
+
+function rainOf(rain: Float64Array | undefined): TimePanel | null {
+  if (!rain) return null;
+  return {
+    quantity: "rainRate",
+    heading: "rain",
+    colour: "rain",
+    lines: [{ values: rain, shape: "hold" }],
+    zero: true,
+    marked: extremes(rain)?.maxAt,
+    height: 72,
+  };
+}
+
+function heatOf(of: ValuesOf): TimePanel | null {
+  const net = of("netHeat");
+  const parts = HEAT_PARTS.flatMap(({ channel, label, dash }) => {
+    const values = of(channel);
+    return values ? [{ values, label, dash, openPauses: true }] : [];
+  });
+  if (!net && parts.length === 0) return null;
+  return {
+    quantity: "netHeat",
+    heading: net ? "net heat into the sea" : "heat into the sea",
+    colour: "heat",
+    lines: [...(net ? [{ values: net, label: "net", openPauses: true }] : []), ...parts],
+    zero: true,
+    height: 72,
+  };
+}

@@ -1,0 +1,92 @@
+import type { ChannelName } from "~/readers/reading";
+import { medianStep, type ChannelSeries } from "./channel-series";
+import { withinWindow, type StormWindow } from "./storm-window";
+
+const HOUR = 3600;
+/** The engine refuses to bridge more than this. */
+export const LONGEST_BRIDGED_GAP_HOURS = 6;
+/** A value that holds is not stretched over more than this many usual steps: beyond, the record has a gap. */
+const STEPS_HELD = 1.5;
+
+export interface Peak {
+  value: number;
+  /** Seconds since 1970-01-01T00:00:00Z. */
+  at: number;
+}
+
+export interface Gap {
+  channel: ChannelName;
+  from: number;
+  to: number;
+}
+
+export interface StormSummary {
+  /** m/s, at the record's own height. */
+  peakWind: Peak | null;
+  peakGust: Peak | null;
+  /** Wind at its peak came from, degrees true. */
+  peakWindFrom: number | null;
+  /** mm */
+  rainTotal: number | null;
+  /** W/m², mean over the window. */
+  meanNetHeat: number | null;
+  /** Gaps in the window that are too long to be bridged. */
+  gaps: Gap[];
+}
+
+/** What a storm's series say inside its window. */
+export function summariseStorm(series: readonly ChannelSeries[], window: StormWindow): StormSummary {
+  const inside = series.map((entry) => withinWindow(entry, window));
+  const channel = (name: ChannelName) => inside.find((entry) => entry.channel === name);
+  const wind = channel("windSpeed");
+  const peakWind = peakOf(wind);
+  const rain = channel("rain");
+  const heat = channel("netHeat");
+  return {
+    peakWind,
+    peakGust: peakOf(channel("windGust")),
+    peakWindFrom: peakWind && valueAt(channel("windFrom"), peakWind.at),
+    rainTotal: rain ? heldTotal(rain, window) : null,
+    meanNetHeat: heat && heat.values.length > 0 ? heat.values.reduce((sum, value) => sum + value, 0) / heat.values.length : null,
+    gaps: inside.flatMap((entry) => longGaps(entry, window)),
+  };
+}
+
+function peakOf(series: ChannelSeries | undefined): Peak | null {
+  let peak: Peak | null = null;
+  series?.values.forEach((value, index) => {
+    if (!peak || value > peak.value) peak = { value, at: series.time[index] };
+  });
+  return peak;
+}
+
+function valueAt(series: ChannelSeries | undefined, seconds: number): number | null {
+  const index = series?.time.indexOf(seconds) ?? -1;
+  return series && index >= 0 ? series.values[index] : null;
+}
+
+/**
+ * mm from rates in mm/h that hold until the next time, but not across a gap, nor beyond the window.
+ */
+export function heldTotal({ time, values }: Pick<ChannelSeries, "time" | "values">, window: StormWindow): number {
+  const step = medianStep(time) ?? HOUR;
+  let total = 0;
+  values.forEach((rate, index) => {
+    const next = index + 1 < time.length ? time[index + 1] : time[index] + step;
+    const held = next - time[index] > STEPS_HELD * step ? step : next - time[index];
+    total += (rate * Math.max(0, Math.min(held, window.endsAt - time[index]))) / HOUR;
+  });
+  return total;
+}
+
+/** The channels that the engine needs without a gap. */
+const FORCING: readonly ChannelName[] = ["windSpeed", "rain", "netHeat", "shortwave", "longwave", "sensible", "latent"];
+
+function longGaps({ channel, time }: ChannelSeries, { startsAt, endsAt }: StormWindow): Gap[] {
+  if (!FORCING.includes(channel)) return [];
+  const edges = [startsAt, ...time, endsAt];
+  return edges
+    .slice(1)
+    .map((to, index) => ({ channel, from: edges[index], to }))
+    .filter(({ from, to }) => to - from > LONGEST_BRIDGED_GAP_HOURS * HOUR);
+}
