@@ -1,0 +1,21 @@
+import type { RouteConfigEntry } from "@react-router/dev/routes";
+import routes from "../../app/routes";
+
+export interface RouteEntry {
+  /** `routes/org/area/edit.tsx` */
+  file: string;
+  /** `/o/:organisation/projects/:project/area/:box` */
+  path: string;
+}
+
+function walk(entries: RouteConfigEntry[], above: string): RouteEntry[] {
+  return entries.flatMap((entry) => {
+    const path = entry.path ? `${above}/${entry.path}` : above;
+    return [{ file: entry.file, path: path || "/" }, ...walk(entry.children ?? [], path)];
+  });
+}
+
+/** Every route of the product with its whole address, layouts too. */
+export async function routeTable(): Promise<RouteEntry[]> {
+  return walk(await routes, "");
+}
