@@ -47,3 +47,12 @@ export function axisHeading(
   }
   return markup;
 }
+
+/** Heading of the axis across, at the right edge beneath its ticks, with an arrow to the right. */
+export function acrossHeading(text: string, right: number, baseline: number): string {
+  const tip = right - 1;
+  return (
+    `<text x="${right - 14}" y="${baseline}" text-anchor="end">${escapeXml(text)}</text>` +
+    `<path d="M${tip - 9},${baseline - 4}h9m-3,-2.5l3,2.5l-3,2.5" fill="none" stroke="${INK}" stroke-width="0.9"/>`
+  );
+}
