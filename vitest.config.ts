@@ -11,7 +11,7 @@ export default defineConfig({
         resolve: { alias },
         test: {
           name: "unit",
-          include: ["app/**/*.test.ts", "app/**/*.test.tsx", "tests/published/**/*.test.ts", "tests/figures/**/*.test.ts"],
+          include: ["app/**/*.test.ts", "app/**/*.test.tsx", "tests/{published,figures,structure}/**/*.test.ts"],
           setupFiles: ["tests/setup/quiet-console.ts"],
           testTimeout: 30_000,
         },
