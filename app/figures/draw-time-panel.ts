@@ -64,10 +64,9 @@ export function drawTimePanel(panel: TimePanel, frame: TimeFrame): DrawnPanel {
 function ground(panel: TimePanel, axis: ValueAxis, frame: TimeFrame): Plot.Markish[] {
   const midnights = frame.ticks.filter((tick) => tick.midnight).map((tick) => tick.seconds);
   const [low, high] = axis.domain;
+  const window = panel.window ? insideFrame(panel.window, frame) : null;
   return [
-    ...(panel.window
-      ? [Plot.rect([panel.window], { x1: "start", x2: "end", y1: low, y2: high, fill: MIST, fillOpacity: 1 })]
-      : []),
+    ...(window ? [Plot.rect([window], { x1: "start", x2: "end", y1: low, y2: high, fill: MIST })] : []),
     Plot.ruleX(midnights, { stroke: HAIRLINE, strokeWidth: 0.5 }),
     Plot.ruleY(axis.ticks, { stroke: HAIRLINE, strokeWidth: 0.5 }),
     ...(panel.zero ? [Plot.ruleY([0], { stroke: INK, strokeWidth: 0.75 })] : []),
@@ -80,6 +79,13 @@ function ground(panel: TimePanel, axis: ValueAxis, frame: TimeFrame): Plot.Marki
       tickFormat: (value: number) => formatNumber(value, axis.decimals),
     }),
   ];
+}
+
+/** The part of an interval that the axis shows; null where it shows none. */
+function insideFrame(window: NonNullable<TimePanel["window"]>, frame: TimeFrame): TimePanel["window"] | null {
+  const start = Math.max(window.start, frame.domain[0]);
+  const end = Math.min(window.end, frame.domain[1]);
+  return start < end ? { start, end } : null;
 }
 
 function displayed(values: ArrayLike<number>, time: ArrayLike<number>, panel: TimePanel, frame: TimeFrame): Point[] {

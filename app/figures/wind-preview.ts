@@ -34,8 +34,7 @@ export function windPreview(data: WindPreviewData, context: FigureContext): Figu
     from: windFrom,
     gust: windGust,
   });
-  const window = stormWindow ? insideRecord(stormWindow, time) : undefined;
-  const drawn = drawTimeFigure("wind-preview", [{ ...panel, window }], time, context);
+  const drawn = drawTimeFigure("wind-preview", [{ ...panel, window: stormWindow }], time, context);
   const shaded = stormWindow
     ? `The storm's window is shaded: ${formatPeriod(stormWindow.start, stormWindow.end, context.zone)}.`
     : null;
@@ -74,14 +73,4 @@ export function windPreview(data: WindPreviewData, context: FigureContext): Figu
 
 function lengthText(metres: number, context: FigureContext): string {
   return formatQuantity(metres, "depth", context.units, { decimals: Number.isInteger(metres) ? 0 : 1 }).text;
-}
-
-/** The part of the window that the record covers; none where they do not meet. */
-function insideRecord(
-  window: { start: number; end: number },
-  time: ArrayLike<number>,
-): { start: number; end: number } | undefined {
-  const start = Math.max(window.start, time[0] ?? window.start);
-  const end = Math.min(window.end, time[time.length - 1] ?? window.end);
-  return start < end ? { start, end } : undefined;
 }
