@@ -71,16 +71,15 @@ export interface TableColumn {
 
 export interface MemoFitNote {
   severity: FitSeverity;
+  /** With the value found here and the limit. */
   message: string;
-  /** Value against threshold, formatted; empty where they say nothing. */
-  measured: string;
   source: string;
 }
 
 export interface EquationSymbol {
   symbol: Run[];
   meaning: string;
-  /** `1` where dimensionless. */
+  /** Empty where there is none. */
   unit: string;
 }
 

@@ -148,14 +148,12 @@ export function sampleMemo(changes: Partial<MemoDocument> = {}): MemoDocument {
         notes: [
           {
             severity: "ok",
-            message: "The storm lasts longer than the inertial period.",
-            measured: "120 h; at least 14.2 h",
+            message: "The storm lasts longer than the inertial period: 120 h, at least 14.2 h.",
             source: "Pollard and Millard 1970",
           },
           {
             severity: "caution",
             message: "The shore lies within one internal Rossby radius; rising or sinking along it is not carried.",
-            measured: "4.1 km; 9.0 km",
             source: "",
           },
         ],

@@ -24,10 +24,9 @@ export function placeFitNotes({ notes }: FitNotesBlock, parent: StructNode, colu
   const rows = gravestFirst(notes).map((note): Run[][] => [
     [{ text: SEVERITY_WORDS[note.severity], bold: note.severity !== "ok" }],
     [{ text: note.message }],
-    [{ text: note.measured }],
     [{ text: note.source, colour: "slate" }],
   ]);
-  const columns = ["Fit", "Note", "Here, and the limit", "Source"].map((label) => ({
+  const columns = ["Fit", "Note", "Source"].map((label) => ({
     label,
     unit: "",
     align: "left" as const,

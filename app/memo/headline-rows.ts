@@ -1,0 +1,161 @@
+/** The six headline figures of a response as rows of a memo's first table. */
+import type { Band, Response, TriggerOutcome } from "~/ocean/response";
+import { formatBearing, formatQuantity, formatRange, toDisplay } from "~/units/format-quantity";
+import { formatTime } from "~/units/format-time";
+import { quantity, type QuantityId } from "~/units/quantities";
+import type { UnitChoices } from "~/units/unit-choices";
+import type { HeadlineRow, RangeMark } from "./document";
+import { distanceDecimals, hoursText, transportDecimals, type WordsContext } from "./words";
+
+/** Rows in the order of the product: stress, drift, displacement, transport, salinity, then the layer's end. */
+export function headlineRows(response: Response, context: Omit<WordsContext, "boxName">): HeadlineRow[] {
+  return [
+    stress(response, context),
+    drift(response, context),
+    displacement(response, context),
+    transport(response, context),
+    salinity(response, context),
+    temperature(response, context),
+  ];
+}
+
+type Context = Omit<WordsContext, "boxName">;
+
+function stress({ headline }: Response, { units, zone }: Context): HeadlineRow {
+  const { value, time } = headline.peakStress;
+  return row("Peak wind stress", "stress", value, headline.peakStress, units, `at ${formatTime(time, zone)}`);
+}
+
+function drift({ headline }: Response, { units, zone }: Context): HeadlineRow {
+  const { value, towards, time, inertialShare } = headline.peakDrift;
+  const share = formatQuantity(inertialShare, "share", units).text;
+  const base = row("Peak drift", "driftSpeed", value, headline.peakDrift, units, "");
+  return {
+    ...base,
+    unit: withBearing(base.unit, towards),
+    remark: `at ${formatTime(time, zone)}; ${share} inertial`,
+  };
+}
+
+function displacement({ headline }: Response, { units }: Context): HeadlineRow {
+  const { value, towards } = headline.netDisplacement;
+  const decimals = distanceDecimals(value, units);
+  const base = row("Net displacement", "displacement", value, headline.netDisplacement, units, "", decimals);
+  return { ...base, unit: withBearing(base.unit, towards) };
+}
+
+function withBearing(unit: string, towards: number | null): string {
+  return towards === null ? unit : `${unit} to ${formatBearing(towards)}`;
+}
+
+function transport({ headline }: Response, { units, shore }: Context): HeadlineRow {
+  const { transportAcross: across, transportAlong: along } = headline;
+  const sides = shore ? (["offshore", "towards the shore"] as const) : (["east", "west"] as const);
+  const alongSides = shore ? (["to the right", "to the left"] as const) : (["north", "south"] as const);
+  const told = (value: number) =>
+    formatQuantity(Math.abs(value), "transportTotal", units, { decimals: transportDecimals(value, units) });
+  const label = shore ? "Ekman transport across the shore" : "Ekman transport to the east";
+  const base = row(label, "transportTotal", across.value, across, units, "", transportDecimals(across.value, units));
+  const main = told(across.value);
+  const still = Number(main.number) === 0;
+  return {
+    ...base,
+    value: main.number,
+    unit: still ? main.unit : `${main.unit} ${across.value > 0 ? sides[0] : sides[1]}`,
+    remark: [
+      ...(shore && !still ? [across.value > 0 ? "favours upwelling" : "favours sinking"] : []),
+      `along: ${told(along.value).text} ${along.value >= 0 ? alongSides[0] : alongSides[1]}${shore ? ", looking offshore" : ""}`,
+    ].join("; "),
+  };
+}
+
+function salinity({ headline }: Response, { units, zone }: Context): HeadlineRow {
+  const { value, change, time } = headline.surfaceSalinity;
+  const triggers = headline.triggers.filter((trigger) => trigger.quantity === "salinity");
+  const told = triggers.length > 0 ? triggers.map((trigger) => hoursBeyond(trigger, units)) : [];
+  const changed = formatQuantity(change, "salinityChange", units, { sign: true }).text;
+  const remark = [`${changed} at ${formatTime(time, zone)}`, ...told].join("; ");
+  return row(
+    "Lowest surface salinity",
+    "salinity",
+    value,
+    headline.surfaceSalinity,
+    units,
+    remark,
+    undefined,
+    triggers[0],
+  );
+}
+
+/** `19 h below 32.5 g/kg` */
+export function hoursBeyond(trigger: TriggerOutcome, units: UnitChoices): string {
+  const level = formatQuantity(trigger.value, trigger.quantity, units).text;
+  return `${hoursText(trigger.hoursBeyond)} ${trigger.side} ${level}`;
+}
+
+function temperature({ headline }: Response, { units }: Context): HeadlineRow {
+  const { value, change } = headline.surfaceTemperature;
+  const bands = headline.surfaceTemperature;
+  // The band is of the end value; the row tells the change from the same start.
+  const start = value - change;
+  const band: Band =
+    bands.p10 === undefined || bands.p90 === undefined ? {} : { p10: bands.p10 - start, p90: bands.p90 - start };
+  const depth = formatQuantity(headline.layerDepth.value, "layerDepth", units).text;
+  const step = headline.densityStep.value;
+  const below = step === null ? "" : `; density step ${formatQuantity(step, "densityStep", units).text}`;
+  const base = row("Surface temperature change", "temperatureChange", change, band, units, "");
+  return {
+    ...base,
+    value: formatQuantity(change, "temperatureChange", units, { sign: true }).number,
+    remark: `to ${formatQuantity(value, "temperature", units).text}; layer ${depth} deep${below}`,
+  };
+}
+
+function row(
+  label: string,
+  id: QuantityId,
+  value: number,
+  { p10, p90 }: Band,
+  units: UnitChoices,
+  remark: string,
+  decimals?: number,
+  trigger?: TriggerOutcome,
+): HeadlineRow {
+  const options = decimals === undefined ? {} : { decimals };
+  const shown = formatQuantity(value, id, units, options);
+  const banded = p10 !== undefined && p90 !== undefined;
+  return {
+    label,
+    value: shown.number || "no value",
+    unit: shown.unit,
+    mark: rangeMark(id, value, { p10, p90 }, trigger?.value, units),
+    band: banded ? formatRange(p10, p90, id, units, options) : "",
+    remark,
+  };
+}
+
+/** A mark is drawn only where there is something beside the value to compare it with. */
+function rangeMark(
+  id: QuantityId,
+  value: number,
+  { p10, p90 }: Band,
+  trigger: number | undefined,
+  units: UnitChoices,
+): RangeMark | null {
+  const banded = p10 !== undefined && p90 !== undefined;
+  const shown = [value, ...(banded ? [p10, p90] : []), ...(trigger === undefined ? [] : [trigger])].map((each) =>
+    toDisplay(each, id, units),
+  );
+  if (shown.length < 2 || !shown.every(Number.isFinite)) return null;
+  const low = Math.min(...shown);
+  const high = Math.max(...shown);
+  const room = (high - low || Math.abs(high) || 1) * 0.4;
+  return {
+    value: toDisplay(value, id, units),
+    ...(banded ? { p10: toDisplay(p10, id, units), p90: toDisplay(p90, id, units) } : {}),
+    ...(trigger === undefined ? {} : { trigger: toDisplay(trigger, id, units) }),
+    from: low - room,
+    to: high + room,
+    colour: quantity(id).colour,
+  };
+}

@@ -1,0 +1,51 @@
+/** Names of the engine's laws and parameters, as a memo prints them. */
+import type { MethodChoices } from "~/ocean/scenario";
+
+const PARAMETER_NAMES: Record<keyof Required<MethodChoices>, string> = {
+  model: "Model",
+  dragLaw: "Drag law",
+  dragCoefficient: "Drag coefficient",
+  highWindCap: "Wind speed above which the drag coefficient is held",
+  airDensity: "Density of the air",
+  waterDensity: "Reference density of sea water",
+  heatCapacity: "Specific heat capacity of sea water",
+  gravity: "Acceleration of gravity",
+  timeStep: "Time step",
+  dampingRate: "Damping rate of inertial motion",
+  ekman: "Ekman solution",
+  eddyViscosity: "Eddy viscosity",
+  penetratingShortwave: "Short-wave radiation penetrates",
+  waterType: "Jerlov water type",
+  heatInterpolation: "Heat between samples",
+  rainHeat: "Heat carried by rain",
+  cellSize: "Cell size",
+  maxDepth: "Depth of the column",
+  bottomDrag: "Bottom drag coefficient",
+  gradientMixing: "Mixing by the gradient Richardson number",
+  bulkRichardson: "Critical bulk Richardson number",
+  gradientRichardson: "Critical gradient Richardson number",
+  layerDensityStep: "Density step that bounds the layer",
+};
+
+/** A parameter's name; one that this list lacks by its key. */
+export function parameterName(key: string): string {
+  return key in PARAMETER_NAMES ? PARAMETER_NAMES[key as keyof MethodChoices] : key;
+}
+
+/** A parameter's value as text: as given, with a proper minus sign; powers of ten for the very small. */
+export function parameterValue(value: number | string | boolean): string {
+  if (typeof value === "boolean") return value ? "yes" : "no";
+  if (typeof value === "string") return value;
+  const [digits = "", power] = (
+    value !== 0 && (Math.abs(value) < 1e-3 || Math.abs(value) >= 1e7) ? value.toExponential() : String(value)
+  ).split("e");
+  const text = power === undefined ? digits : `${digits} × 10${superscript(Number(power))}`;
+  return text.replace("-", "−");
+}
+
+const SUPERSCRIPTS = "⁰¹²³⁴⁵⁶⁷⁸⁹";
+
+function superscript(power: number): string {
+  const digits = [...String(Math.abs(power))].map((digit) => SUPERSCRIPTS[Number(digit)]).join("");
+  return power < 0 ? `⁻${digits}` : digits;
+}

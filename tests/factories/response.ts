@@ -1,0 +1,88 @@
+import type { Response } from "~/ocean/response";
+
+const START = Date.parse("2026-11-03T00:00:00Z");
+
+/** A response as the engine gives one: a freshening storm of five days, with an ensemble. */
+export function sampleResponse(changes: Partial<Response> = {}): Response {
+  const hours = Array.from({ length: 121 }, (_, hour) => hour);
+  const time = hours.map((hour) => new Date(START + hour * 3_600_000).toISOString().replace(".000Z", "Z"));
+  const freshening = hours.map((hour) => 33.6 - 1.7 * Math.exp(-(((hour - 52) / 24) ** 2)));
+  const at = (value: (hour: number) => number) => hours.map(value);
+  return {
+    headline: {
+      peakStress: { value: 0.61, time: time[30]!, p10: 0.52, p50: 0.6, p90: 0.72 },
+      peakDrift: { value: 0.42, towards: 131, time: time[34]!, inertialShare: 0.64, p10: 0.33, p50: 0.41, p90: 0.52 },
+      netDisplacement: { value: 84_200, towards: 128, p10: 70_400, p50: 83_000, p90: 98_100 },
+      transportAlong: { value: 31_000, p10: 26_000, p50: 30_500, p90: 37_000 },
+      transportAcross: { value: -124_000, p10: -150_000, p50: -123_000, p90: -101_000 },
+      surfaceSalinity: { value: 31.9, time: time[52]!, change: -1.7, p10: 31.6, p50: 31.9, p90: 32.2 },
+      surfaceTemperature: { value: 11.3, change: -0.9, p10: 11.0, p50: 11.3, p90: 11.5 },
+      layerDepth: { value: 12, p10: 12, p50: 12, p90: 12 },
+      densityStep: { value: 1.84, p10: 1.6, p50: 1.83, p90: 2.0 },
+      triggers: [
+        {
+          quantity: "salinity",
+          side: "below",
+          value: 32.5,
+          hours: 6,
+          hoursBeyond: 19.2,
+          firstAt: time[42]!,
+          longestSpell: 19.2,
+          met: true,
+        },
+      ],
+    },
+    series: {
+      time,
+      stressX: at(() => 0.4),
+      stressY: at(() => -0.3),
+      driftEast: at((hour) => 0.3 * Math.sin(hour / 5)),
+      driftNorth: at((hour) => -0.3 * Math.cos(hour / 5)),
+      displacementEast: at((hour) => hour * 550),
+      displacementNorth: at((hour) => hour * -430),
+      transportAlong: at(() => 0.8),
+      transportAcross: at(() => -3.1),
+      temperature: at((hour) => 12.2 - (0.9 * hour) / 120),
+      salinity: freshening,
+      density: at((hour) => 1025 - (hour % 24) / 40),
+      layerDepth: at(() => 12),
+    },
+    fitNotes: [
+      {
+        code: "DURATION",
+        severity: "ok",
+        message: "The storm lasts 120 h, longer than the inertial period of 14.2 h.",
+        value: 8.5,
+        threshold: 1,
+        source: "Pollard & Millard (1970)",
+      },
+      {
+        code: "COAST",
+        severity: "caution",
+        message:
+          "The shore is 4.1 km away, within one internal Rossby radius of 9.0 km. Rising or sinking along it is not carried.",
+        value: 4.1,
+        threshold: 9,
+        source: "Gill (1982)",
+      },
+    ],
+    recommendedModel: "slab",
+    recommendation: "The slab model fits: the storm is long against the inertial period and the layer is known.",
+    method: {
+      model: { value: "slab", unit: "1", source: "chosen for this method sheet", origin: "chosen" },
+      dragLaw: { value: "largePond1981", unit: "1", source: "Large & Pond (1981)", origin: "chosen" },
+      airDensity: { value: 1.22, unit: "kg/m³", source: "common practice", origin: "default" },
+      dampingRate: { value: 0.000002, unit: "1/s", source: "Pollard & Millard (1970)", origin: "default" },
+      rainHeat: { value: false, unit: "1", source: "common practice", origin: "default" },
+    },
+    budgets: {
+      heat: { change: -4.4e7, input: -4.4e7, residual: 1.2e-6 },
+      salt: { change: 0, input: 0, residual: -3e-13 },
+      momentum: { change: 812.4, input: 812.4, residual: 2e-12 },
+    },
+    inputs: "9f2c7d1b3a5e80644c1d2e3f405162738495a6b7c8d9eafb0c1d2e3f40516273",
+    engine: "1.0.0",
+    caution: "A screening estimate.",
+    ...changes,
+  };
+}
