@@ -42,12 +42,26 @@ export interface ReadingProblem {
 /** Something that the reader cannot know; the import is not confirmed while a `needed` one is unanswered. */
 export interface ReadingQuestion {
   /** The key of `ReadingAnswers` that settles it. */
-  key: "zone" | "dateOrder" | "directionSense" | "windHeight" | "averagingMinutes" | "columns" | "missingRows";
+  key:
+    | "zone"
+    | "dateOrder"
+    | "serialEpoch"
+    | "directionSense"
+    | "windHeight"
+    | "averagingMinutes"
+    | "columns"
+    | "missingCodes"
+    | "leaveOutBadRows";
+  /** False once answered: an answered question stays in the list so that the answer can be changed. */
   needed: boolean;
   message: string;
+  /** For `columns` and `missingCodes`: index of the column in question. Options of `columns` are unit ids. */
+  column?: number;
   options?: { value: string; label: string }[];
   /** What the reader would take, if it has an opinion. */
   suggestion?: string;
+  /** What was answered, as text. */
+  answer?: string;
 }
 
 /** A line of the reading sheet: what was understood, and how sure the reader is. */
@@ -69,6 +83,8 @@ export interface ColumnReading {
   unit: string | null;
   /** Codes that count as missing in this column. */
   missingCodes: string[];
+  /** Records without a value in this column. */
+  missing: number;
   confidence: Understood["confidence"];
   /** Why it was left out, or what makes the reader think so. */
   note?: string;
@@ -84,9 +100,14 @@ export interface ReadingStep {
   count: number;
 }
 
+/**
+ * One channel. Counts and statistics are those of the file's records, duplicates included, as other programs would
+ * count them; `values` is what is used. The direction of a calm is counted as recorded but is NaN in `values`.
+ * For `windFrom`, `mean` is the direction of the vector mean; `min`, `max` are null (a circle has no largest value).
+ */
 export interface ChannelReading {
   unit: string;
-  /** One a row, NaN where missing; same length as `time`. */
+  /** One a stamp, NaN where missing; same length as `time`. */
   values: Float64Array;
   count: number;
   missing: number;
@@ -104,6 +125,8 @@ export interface ReadingAnswers {
   /** IANA zone, or `UTC`, or a fixed offset as `+05:30`. */
   zone?: string;
   dateOrder?: "ymd" | "dmy" | "mdy";
+  /** First year of spreadsheet day numbers. */
+  serialEpoch?: "1900" | "1904";
   directionSense?: "from" | "towards";
   /** m above the sea */
   windHeight?: number;

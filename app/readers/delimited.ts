@@ -1,0 +1,139 @@
+import { findDelimiter, type Delimiter } from "./delimiter";
+import { decimalSignOf, tidyCell } from "./number-text";
+import type { ProblemList } from "./problem-list";
+import { UnreadableFile, type ReadingAnswers, type SeriesReading, type Understood } from "./reading";
+import { seriesFromTable } from "./series-from-table";
+import type { SourceFile } from "./source-file";
+import { splitRows, type SplitRows } from "./split-table";
+import { findLayout, type TableLayout } from "./table-layout";
+import type { FormatKnowledge, TextTable } from "./text-table";
+
+const DELIMITER_WORDS: Record<Delimiter, string> = {
+  "\t": "tab",
+  ";": "semicolon",
+  "|": "bar",
+  ",": "comma",
+  " ": "space",
+};
+const DECIMAL_ROWS = 2000;
+
+/** Reads delimited text of any kind: finds delimiter, decimal sign, names, units, records and notes. */
+export function readDelimited(source: SourceFile, answers: ReadingAnswers, problems: ProblemList): SeriesReading {
+  const delimiter = findDelimiter(source.lines);
+  const split = delimiter === null ? null : splitRows(source, delimiter, problems);
+  const layout = split === null ? null : findLayout(split);
+  if (delimiter === null || split === null || layout === null) {
+    refuse(source, problems);
+    throw new UnreadableFile(problems.toArray());
+  }
+  const records = recordsOf(split, layout, problems);
+  const decimal = decimalSignOf(cellsOf(records.rows));
+  if (decimal.ambiguous) {
+    problems.add(
+      "warning",
+      "ambiguousDecimal",
+      "commas in numbers could be decimal signs or thousands separators; they were taken for decimal signs",
+      "Check the values.",
+    );
+  }
+  const table: TextTable = {
+    names: layout.names,
+    unitTexts: layout.unitTexts,
+    rows: records.rows,
+    lines: records.lines,
+    decimal: decimal.sign,
+    preamble: split.rows.slice(0, layout.firstData).map((cells) => cells.join(" ")),
+    named: layout.named,
+  };
+  if (!layout.named) {
+    problems.add("warning", "noHeader", "the columns have no names", "Say on the reading sheet what each column is.", {
+      row: records.lines[0] ?? 1,
+    });
+  }
+  return seriesFromTable(table, knowledgeOf(source, delimiter, decimal.sign), source.fileName, answers, problems);
+}
+
+function refuse(source: SourceFile, problems: ProblemList): void {
+  const first = source.lines.findIndex((line) => line.trim() !== "");
+  const filled = source.lines.filter((line) => line.trim() !== "");
+  const digits = filled.slice(1).some((line) => /\d/.test(line));
+  const shown = (source.lines[first] ?? "").trim().slice(0, 120);
+  if (!digits) {
+    problems.add(
+      "error",
+      "onlyHeader",
+      `the file has a header but no records: “${shown}”`,
+      "Give a file with records.",
+      { row: first + 1 },
+    );
+    return;
+  }
+  problems.add(
+    "error",
+    "noTable",
+    `no table of dates and numbers was found; the first line is “${shown}”`,
+    "Give a table with a line of column names, a column of dates and times, and numbers, parted by commas, semicolons, tabs, bars or spaces.",
+    { row: first + 1 },
+  );
+}
+
+/** Rows of the table without blank lines, remarks and repeated headers, each passed over with a note. */
+function recordsOf(split: SplitRows, layout: TableLayout, problems: ProblemList): SplitRows {
+  const rows: string[][] = [];
+  const lines: number[] = [];
+  for (let index = layout.firstData; index < split.rows.length; index += 1) {
+    const cells = split.rows[index] ?? [];
+    const row = split.lines[index] ?? 0;
+    if (cells.every((cell) => tidyCell(cell).trim() === "")) continue;
+    if (index >= layout.endData) {
+      problems.add("note", "footer", "notes below the table", "They were passed over.", { row });
+    } else if (/^\s*[#%]/.test(cells[0] ?? "")) {
+      problems.add("note", "remark", "a remark within the table", "It was passed over.", { row });
+    } else if (layout.named && isHeaderAgain(cells, layout.names)) {
+      problems.add("note", "repeatedHeader", "the header is repeated within the table", "The line was passed over.", {
+        row,
+      });
+    } else {
+      rows.push(cells);
+      lines.push(row);
+    }
+  }
+  return { rows, lines };
+}
+
+function isHeaderAgain(cells: readonly string[], names: readonly string[]): boolean {
+  return cells.length >= names.length && names.every((name, index) => name === tidyCell(cells[index] ?? "").trim());
+}
+
+function* cellsOf(rows: readonly string[][]): Iterable<string> {
+  const stride = Math.max(1, Math.floor(rows.length / DECIMAL_ROWS));
+  for (let index = 0; index < rows.length; index += stride) yield* rows[index] ?? [];
+}
+
+function knowledgeOf(source: SourceFile, delimiter: Delimiter, decimal: string): FormatKnowledge {
+  const { encoding, byteOrderMark, lineEnds } = source.decoded;
+  const understood: Understood[] = [
+    {
+      what: "Encoding",
+      taken: `${encoding}${byteOrderMark ? " with byte order mark" : ""}, line ends ${lineEnds}`,
+      confidence: "by content",
+    },
+    {
+      what: "Fields",
+      taken: `parted by ${DELIMITER_WORDS[delimiter]}, decimal ${decimal === "," ? "comma" : "point"}`,
+      confidence: "by content",
+    },
+  ];
+  return {
+    id: "delimited",
+    label: "delimited text",
+    zone: null,
+    columnByName: () => null,
+    windHeightHint: {
+      suggestion: "10",
+      message: "At which height was the wind measured, in m above the ground or the sea? The file does not say.",
+    },
+    averagingHint: null,
+    understood,
+  };
+}

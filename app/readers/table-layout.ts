@@ -1,0 +1,164 @@
+import { isStampName, nameParts, ruleForName, squashedName } from "./column-names";
+import { STAMP_NAMES } from "./column-vocabulary";
+import { unitFromText } from "./file-units";
+import { isMissingWord } from "./missing-codes";
+import { numberFromText, tidyCell } from "./number-text";
+import type { SplitRows } from "./split-table";
+import { stampFromText, timeFromText } from "./stamp-text";
+
+/** Where the parts of a table stand among its rows. */
+export interface TableLayout {
+  names: string[];
+  unitTexts: (string | null)[];
+  named: boolean;
+  firstData: number;
+  /** Row after the last record; what follows are notes. */
+  endData: number;
+}
+
+/** Rows looked at for the start of the records: no preamble is longer. */
+const SEARCHED = 500;
+const HEADER_ROWS = 4;
+
+/** Finds names, units, records and notes at the foot; null where no row looks like a record. */
+export function findLayout(split: SplitRows): TableLayout | null {
+  const { rows } = split;
+  const kinds = rows.slice(0, SEARCHED).map(kindOf);
+  const width = commonWidth(rows);
+  const stamped = kinds.filter((kind) => kind.stamps > 0).length > 0.3 * kinds.filter((kind) => kind.filled > 0).length;
+  const isRecord = (index: number): boolean => {
+    const kind = index < kinds.length ? kinds[index] : kindOf(rows[index] ?? []);
+    if (kind === undefined || kind.filled === 0) return false;
+    const enough = Math.abs((rows[index]?.length ?? 0) - width) <= 1 || kind.filled >= 0.7 * width;
+    return (
+      enough &&
+      kind.numbers + kind.stamps > 0 &&
+      kind.numbers + kind.stamps >= 0.5 * kind.filled &&
+      (!stamped || kind.stamps > 0)
+    );
+  };
+  const firstData = kinds.findIndex((_, index) => isRecord(index));
+  if (firstData < 0) return null;
+  let endData = rows.length;
+  while (endData > firstData + 1 && !isRecord(endData - 1) && isNote(rows[endData - 1] ?? [], width)) endData -= 1;
+  return { ...findHeader(rows, firstData, width), firstData, endData };
+}
+
+interface RowKind {
+  filled: number;
+  numbers: number;
+  stamps: number;
+}
+
+function kindOf(cells: readonly string[]): RowKind {
+  const kind: RowKind = { filled: 0, numbers: 0, stamps: 0 };
+  for (const cell of cells) {
+    const text = tidyCell(cell).trim();
+    if (text === "") continue;
+    kind.filled += 1;
+    if (numberFromText(text, ".") !== null || numberFromText(text, ",") !== null) kind.numbers += 1;
+    else if (
+      /\d/.test(text) &&
+      (stampFromText(text, "dmy") ?? stampFromText(text, "mdy") ?? timeFromText(text)) !== null
+    )
+      kind.stamps += 1;
+    else if (isMissingWord(text)) kind.numbers += 1;
+  }
+  return kind;
+}
+
+function commonWidth(rows: readonly string[][]): number {
+  const counts = new Map<number, number>();
+  for (const row of rows) if (row.length > 1) counts.set(row.length, (counts.get(row.length) ?? 0) + 1);
+  let width = 1;
+  let times = 0;
+  for (const [length, count] of counts) if (count > times) [width, times] = [length, count];
+  return width;
+}
+
+/** A row at the foot that is no record: blank, a remark, or a mean or total under a word. */
+function isNote(cells: readonly string[], width: number): boolean {
+  const kind = kindOf(cells);
+  const first = tidyCell(cells.find((cell) => cell.trim() !== "") ?? "").trim();
+  return (
+    kind.filled === 0 ||
+    (/\p{L}/u.test(first) && kind.stamps === 0) ||
+    /^[*#;"']/.test(first) ||
+    (kind.stamps === 0 && kind.filled < 0.3 * width)
+  );
+}
+
+function findHeader(
+  rows: readonly string[][],
+  firstData: number,
+  width: number,
+): Pick<TableLayout, "names" | "unitTexts" | "named"> {
+  const block: string[][] = [];
+  for (let index = firstData - 1; index >= 0 && block.length < HEADER_ROWS; index -= 1) {
+    const cells = rows[index] ?? [];
+    const kind = kindOf(cells);
+    if (kind.filled === 0 && block.length === 0) continue;
+    if (kind.filled < Math.max(1, 0.4 * width) || kind.numbers > 0.5 * kind.filled) break;
+    block.unshift(cells.map((cell) => tidyCell(cell).trim()));
+  }
+  const scores = block.map((cells) => ({
+    names: countIf(cells, isKnownName),
+    units: countIf(cells, (cell) => unitFromText(cell) !== null),
+  }));
+  let nameRow = -1;
+  for (const [index, score] of scores.entries()) {
+    if (score.units > score.names) continue;
+    if (nameRow < 0 || score.names >= (scores[nameRow]?.names ?? 0)) nameRow = index;
+  }
+  const dataWidth = widthWithoutTrailing(rows, firstData, width);
+  if (nameRow < 0) {
+    return {
+      names: Array.from({ length: dataWidth }, (_, index) => `column ${index + 1}`),
+      unitTexts: new Array<null>(dataWidth).fill(null),
+      named: false,
+    };
+  }
+  let names = block[nameRow] ?? [];
+  const merged = mergedNames(block[nameRow - 1], names);
+  if (merged !== null && countIf(merged, isKnownName) > countIf(names, isKnownName)) names = merged;
+  while (names.length > 1 && names.length > dataWidth - 1 && names.at(-1) === "") names = names.slice(0, -1);
+  const unitRow = scores.findIndex(
+    (score, index) => index !== nameRow && score.units > 0 && score.units >= score.names,
+  );
+  const units = unitRow < 0 ? [] : (block[unitRow] ?? []);
+  return {
+    names: names.map((name) => name.replace(/^[#%;]+\s*/, "")),
+    unitTexts: names.map((_, index) =>
+      units[index] === undefined || units[index] === "" ? null : (units[index] ?? null),
+    ),
+    named: true,
+  };
+}
+
+/** A trailing delimiter makes an empty last field in every row. */
+function widthWithoutTrailing(rows: readonly string[][], firstData: number, width: number): number {
+  const sample = rows.slice(firstData, firstData + 50).filter((row) => row.length === width);
+  const trailing = sample.length > 0 && sample.every((row) => (row.at(-1) ?? "").trim() === "");
+  return trailing ? width - 1 : width;
+}
+
+/** Group names above, spread to the right over their columns, before the names below: `Wind` + `Speed`. */
+function mergedNames(above: string[] | undefined, names: string[]): string[] | null {
+  if (above === undefined || !above.includes("")) return null;
+  let group = "";
+  return names.map((name, index) => {
+    if ((above[index] ?? "") !== "") group = above[index] ?? "";
+    return `${group} ${name}`.trim();
+  });
+}
+
+const PARTS: readonly string[] = Object.values(STAMP_NAMES).flat();
+
+function isKnownName(cell: string): boolean {
+  if (cell === "") return false;
+  return ruleForName(cell) !== null || isStampName(cell) || PARTS.includes(squashedName(nameParts(cell).bare));
+}
+
+function countIf(cells: readonly string[], test: (cell: string) => boolean): number {
+  return cells.reduce((count, cell) => (test(cell) ? count + 1 : count), 0);
+}

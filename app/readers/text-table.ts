@@ -1,0 +1,38 @@
+import type { DecimalSign } from "./number-text";
+import type { ColumnReading, Understood } from "./reading";
+
+/** A table of text as a format reader hands it on: names, units as written, cells, and where each row stands. */
+export interface TextTable {
+  names: string[];
+  /** From a row of units, or null. */
+  unitTexts: (string | null)[];
+  /** Cells as written; a row may be shorter or longer than `names`. */
+  rows: string[][];
+  /** Line of the file of each row, from 1. */
+  lines: number[];
+  decimal: DecimalSign;
+  /** Lines above the table. */
+  preamble: string[];
+  /** Whether the file has a line of names. */
+  named: boolean;
+}
+
+/** What a format fixes for a column by its definition. */
+export interface KnownColumn {
+  role: ColumnReading["role"];
+  unit: string | null;
+  missingCodes: string[];
+  note?: string;
+}
+
+/** What a format fixes for a whole file. */
+export interface FormatKnowledge {
+  id: string;
+  label: string;
+  /** Zone of the stamps where the format's definition fixes it. */
+  zone: string | null;
+  columnByName: (name: string) => KnownColumn | null;
+  windHeightHint: { suggestion: string; message: string };
+  averagingHint: { suggestion: string; message: string } | null;
+  understood: Understood[];
+}
