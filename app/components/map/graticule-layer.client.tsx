@@ -1,0 +1,103 @@
+import type { FeatureCollection } from "geojson";
+import { useEffect, useState } from "react";
+import { Layer, type MapRef, Source, useMap } from "react-map-gl/maplibre";
+import type { MapColours } from "./map-colours.client";
+import { graticule, type Graticule } from "~/area/graticule";
+
+interface Labelled {
+  lines: Graticule;
+  /** Pixels from the map's left and top edges. */
+  places: { key: string; label: string; left?: number; top?: number }[];
+}
+
+/** Meridians and parallels with labels along the map's left and upper edges; the labels are text of the page. */
+export function GraticuleLayer({ colours }: { colours: MapColours }) {
+  const { current: map } = useMap();
+  const [drawn, setDrawn] = useState<Labelled | null>(null);
+  useEffect(() => {
+    if (!map) return;
+    const redraw = () => setDrawn(labelled(map));
+    redraw();
+    map.on("move", redraw);
+    map.on("resize", redraw);
+    return () => {
+      map.off("move", redraw);
+      map.off("resize", redraw);
+    };
+  }, [map]);
+  if (!drawn) return null;
+  return (
+    <>
+      <Source id="graticule" type="geojson" data={toGeoJson(drawn.lines)}>
+        <Layer
+          id="graticule"
+          type="line"
+          paint={{ "line-color": colours.quiet, "line-width": 0.5, "line-opacity": 0.55 }}
+        />
+      </Source>
+      <div aria-hidden="true" className="graticule-labels">
+        {drawn.places.map(({ key, label, left, top }) => (
+          <span key={key} className={left === undefined ? "at-left" : "at-top"} style={{ left, top }}>
+            {label}
+          </span>
+        ))}
+      </div>
+    </>
+  );
+}
+
+/** Room kept free at the corner where both rows of labels would meet, and at the far ends, pixels. */
+const CLEARANCE = 36;
+
+function labelled(map: MapRef): Labelled {
+  const bounds = map.getBounds();
+  const view = { west: bounds.getWest(), south: bounds.getSouth(), east: bounds.getEast(), north: bounds.getNorth() };
+  const lines = graticule(view);
+  const { clientWidth: width, clientHeight: height } = map.getContainer();
+  const meridians = lines.meridians.map(({ at, label }) => ({
+    key: `m${at}`,
+    label,
+    left: map.project([at, (view.south + view.north) / 2]).x,
+  }));
+  const parallels = lines.parallels.map(({ at, label }) => ({
+    key: `p${at}`,
+    label,
+    top: map.project([(view.west + view.east) / 2, at]).y,
+  }));
+  return {
+    lines,
+    places: [
+      ...meridians.filter(({ left }) => left > CLEARANCE && left < width - 2 * CLEARANCE),
+      ...parallels.filter(({ top }) => top > CLEARANCE && top < height - CLEARANCE),
+    ],
+  };
+}
+
+const POLEWARD = 85;
+
+function toGeoJson({ meridians, parallels }: Graticule): FeatureCollection {
+  const line = (coordinates: [number, number][]) => ({
+    type: "Feature" as const,
+    properties: {},
+    geometry: { type: "LineString" as const, coordinates },
+  });
+  const west = (meridians[0]?.at ?? -180) - 360;
+  const east = (meridians.at(-1)?.at ?? 180) + 360;
+  return {
+    type: "FeatureCollection",
+    features: [
+      ...meridians.map(({ at }) =>
+        line([
+          [at, -POLEWARD],
+          [at, POLEWARD],
+        ]),
+      ),
+      ...parallels.map(({ at }) =>
+        line([
+          [west, at],
+          [east, at],
+        ]),
+      ),
+    ],
+  };
+}
