@@ -1,0 +1,20 @@
+import type { Project } from "~/db/models/project.server";
+import type { Tenant } from "~/db/scoped.server";
+import { stateSentence } from "~/estimates/estimate-state";
+import { loadLedger } from "~/estimates/load-ledger.server";
+import { estimateCode } from "./memo-estimates.server";
+
+/** The estimates that a memo of this project can point at. */
+export async function estimateChoices(tenant: Tenant, project: Project) {
+  const { cells, boxes, storms } = await loadLedger(tenant, project);
+  return cells.map(({ estimate, state }) => {
+    const box = boxes.find(({ id }) => id === estimate.studyBoxId)?.name ?? "";
+    const storm = storms.find((entry) => entry.storm.id === estimate.stormId)?.storm.name ?? "";
+    return {
+      id: estimate.id,
+      code: estimateCode(project, estimate.number),
+      name: `${box}, ${storm}`,
+      state: stateSentence(state),
+    };
+  });
+}

@@ -1,0 +1,106 @@
+/** The memo's register of what was put in: boxes, series, water and assumptions, each once. */
+import { measureBox } from "~/area/measure-box";
+import type { InputsRegister, RegisteredRecord } from "~/estimates/inputs-register";
+import { formatQuantity } from "~/units/format-quantity";
+import type { UnitChoices } from "~/units/unit-choices";
+import type { MemoAssumption, MemoBox, MemoSeries, MemoWater } from "./memo-input";
+
+function unique<T>(entries: T[], key: (entry: T) => string): T[] {
+  return [...new Map(entries.map((entry) => [key(entry), entry])).values()];
+}
+
+export function registerBoxes(registers: InputsRegister[]): MemoBox[] {
+  return unique(
+    registers.map(({ box }) => box),
+    ({ name }) => name,
+  ).map(({ name, polygon, waterDepth, distanceToShore, shoreNormal }) => ({
+    name,
+    corners: polygon,
+    area: measureBox(polygon).areaKm2 * 1e6,
+    waterDepth,
+    distanceToShore,
+    shoreNormal,
+    whyChosen: "",
+  }));
+}
+
+function missingShare({ channels }: NonNullable<RegisteredRecord["provenance"]>): number | null {
+  const present = channels.reduce((sum, { count }) => sum + count, 0);
+  const missing = channels.reduce((sum, channel) => sum + channel.missing, 0);
+  return present + missing === 0 ? null : missing / (present + missing);
+}
+
+const ORIGINS: Record<RegisteredRecord["origin"], string> = {
+  file: "file handed over, kept byte for byte",
+  pasted: "pasted from a spreadsheet, kept as pasted",
+  constant: "a constant over the storm's window",
+};
+
+function memoSeries(stormName: string, record: RegisteredRecord): MemoSeries[] {
+  const { provenance } = record;
+  if (!provenance) return [];
+  return [
+    {
+      name: `${record.name}, for ${stormName}`,
+      fileName: record.fileName ?? "none",
+      sha256: record.sha256 ?? "none",
+      rows: provenance.rows,
+      first: provenance.first,
+      last: provenance.last,
+      channels: provenance.channels
+        .map(({ channel, unit, fromColumns }) =>
+          fromColumns.length > 0 ? `${channel} (${unit}) from ${fromColumns.join(", ")}` : `${channel} (${unit})`,
+        )
+        .join("; "),
+      source: `${provenance.formatLabel}; ${ORIGINS[record.origin]}`,
+      zone: provenance.zone,
+      windHeight: provenance.windHeight,
+      averagingMinutes: provenance.averagingMinutes,
+      missingShare: missingShare(provenance),
+      steps: provenance.steps.map(({ label, count }) => `${label} (${count} values)`),
+      gaps: provenance.dropped.map(({ reason, count, firstRow }) => `${reason}: ${count}, first in row ${firstRow}`),
+    },
+  ];
+}
+
+export function registerSeries(registers: InputsRegister[]): MemoSeries[] {
+  return unique(
+    registers.flatMap(({ storm }) => storm.records.flatMap((record) => memoSeries(storm.name, record))),
+    ({ name, sha256 }) => `${name} ${sha256}`,
+  );
+}
+
+export function registerWaters(registers: InputsRegister[], units: UnitChoices): MemoWater[] {
+  return unique(
+    registers.map(({ water }) => water),
+    ({ name }) => name,
+  ).map((water) => {
+    const salinity = (value: number) =>
+      water.salinityScale === "absolute" ? formatQuantity(value, "salinity", units, { decimals: 2 }).text : `${value} (PSS-78)`;
+    const temperature = (value: number) => formatQuantity(value, "temperature", units, { decimals: 2 }).text;
+    const below =
+      water.belowTemperature === null || water.belowSalinity === null
+        ? "not known"
+        : `${temperature(water.belowTemperature)}, ${salinity(water.belowSalinity)}`;
+    return {
+      name: water.name,
+      kind: "two layers",
+      details: [
+        { label: "Source", text: water.source },
+        { label: "Layer", text: `${temperature(water.temperature)}, ${salinity(water.salinity)}` },
+        { label: "Layer depth", text: formatQuantity(water.layerDepth, "layerDepth", units).text },
+        { label: "Water below", text: below },
+      ],
+      fileName: null,
+      sha256: null,
+    };
+  });
+}
+
+export function registerAssumptions(assumptions: string[]): MemoAssumption[] {
+  return [...new Set(assumptions)].map((statement) => ({
+    statement,
+    basis: "taken by the method where the records say nothing",
+    effect: "not tested",
+  }));
+}
