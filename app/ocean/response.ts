@@ -8,7 +8,8 @@ export interface Band {
   p90?: number;
 }
 
-export interface TriggerOutcome extends TriggerLevel {
+/** A band, where an ensemble ran, is that of `hoursBeyond`. */
+export interface TriggerOutcome extends TriggerLevel, Band {
   hoursBeyond: number;
   /** ISO 8601 UTC, or seconds where the storm was given in seconds; null if never. */
   firstAt: string | number | null;
@@ -86,9 +87,27 @@ export interface Budget {
   residual: number;
 }
 
+/** The column model's answer through time and depth: every quantity is an array by time of arrays by depth. */
+export interface ResponseColumn {
+  /** Cell centres, m, positive down. */
+  depth: number[];
+  time: (string | number)[];
+  /** °C, in situ */
+  temperature: number[][];
+  /** g/kg */
+  salinity: number[][];
+  /** Potential density, kg/m³. */
+  density: number[][];
+  /** m/s */
+  driftEast: number[][];
+  driftNorth: number[][];
+}
+
 export interface Response {
   headline: Headline;
   series: ResponseSeries;
+  /** Model `column` only. */
+  column?: ResponseColumn;
   fitNotes: FitNote[];
   recommendedModel: ModelId;
   /** Why that model, in a sentence. */

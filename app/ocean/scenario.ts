@@ -26,8 +26,9 @@ export interface CastLevel {
   depth: number;
   /** In-situ temperature, °C (ITS-90). */
   temperature: number;
-  /** Absolute Salinity, g/kg. */
-  salinity: number;
+  /** Absolute Salinity, g/kg. Give this or `practicalSalinity`. */
+  salinity?: number;
+  practicalSalinity?: number;
 }
 
 /** A column as two layers: the layer the storm works on, and, where known, what lies below. */

@@ -1,0 +1,63 @@
+import { inertialPeriod } from "../ekman/coriolis";
+import { ekmanDepth } from "../ekman/spiral";
+import type { ModelRun } from "../models/run-model";
+import type { FitNote, FitSeverity } from "../response";
+import { potentialDensityOf } from "../seawater/density";
+import { internalWaveSpeed } from "./two-layer-speed";
+
+/** What the indicators look at. */
+export interface FitContext extends ModelRun {
+  /** s */
+  duration: number;
+  /** s; null at the equator */
+  inertialPeriod: number | null;
+  /** m; null at the equator */
+  ekmanDepth: number | null;
+  /** m/s at 10 m */
+  peakWind: number;
+  /** m/s */
+  peakDrift: number;
+  /** kg/m³, water beneath less layer, at the start; null where unknown */
+  densityStep: number | null;
+  /** Speed of long internal waves on the layer's base, m/s; null where unknown. */
+  internalSpeed: number | null;
+}
+
+/** One test of whether the method fits; null where it does not apply or cannot be judged. */
+export type Indicator = (context: FitContext) => FitNote | null;
+
+export function fitContext(run: ModelRun): FitContext {
+  const { place, forcing, motion, water, method } = run;
+  const densityStep =
+    water.below && potentialDensityOf(water.below.SA, water.below.CT) - potentialDensityOf(water.SA, water.CT);
+  const peak = (x: Float64Array, y: Float64Array) =>
+    x.reduce((most, value, k) => Math.max(most, Math.hypot(value, y[k])), 0);
+  const under = place.waterDepth === null ? Number.POSITIVE_INFINITY : place.waterDepth - water.layerDepth;
+  return {
+    ...run,
+    duration: forcing.seconds[forcing.seconds.length - 1],
+    inertialPeriod: inertialPeriod(place.f),
+    ekmanDepth: place.f === 0 ? null : ekmanDepth(method.eddyViscosity, place.f),
+    peakWind: peak(forcing.windU, forcing.windV),
+    peakDrift: peak(motion.driftEast, motion.driftNorth),
+    densityStep,
+    internalSpeed:
+      densityStep !== null && densityStep > 0 && under > 0
+        ? internalWaveSpeed((method.gravity * densityStep) / method.waterDensity, water.layerDepth, under)
+        : null,
+  };
+}
+
+/** Severity of a value that should be large: at least `good` is fine, below `bad` is not. */
+export function atLeast(value: number, good: number, bad: number): FitSeverity {
+  if (value >= good) return "ok";
+  return value >= bad ? "caution" : "doNotUse";
+}
+
+/** Severity of a value that should be small. */
+export function atMost(value: number, good: number, bad: number): FitSeverity {
+  if (value <= good) return "ok";
+  return value <= bad ? "caution" : "doNotUse";
+}
+
+export const CONVENTION = "convention of this engine";

@@ -1,0 +1,15 @@
+import { CONVENTION, type Indicator } from "./fit-context";
+
+/** A layer cannot be deeper than the water. */
+export const layerInWater: Indicator = ({ water, place }) => {
+  if (water.askedDepth === null || place.waterDepth === null) return null;
+  const message = `The layer of ${water.askedDepth} m is deeper than the water; the water depth of ${place.waterDepth} m is used, without friction on the bed.`;
+  return {
+    code: "LAYER_DEEPER_THAN_WATER",
+    severity: "caution",
+    message,
+    value: water.askedDepth,
+    threshold: place.waterDepth,
+    source: CONVENTION,
+  };
+};

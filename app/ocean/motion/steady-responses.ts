@@ -1,0 +1,90 @@
+import { complex, type Complex } from "../complex";
+import { coastalBalance } from "../ekman/finite-depth-coast";
+import { finiteDepthCurrent, finiteDepthTransport, type FiniteDepthSetting } from "../ekman/finite-depth";
+import type { Matrix2, SteadyResponse } from "./steady-motion";
+
+/** Deep water: M = -i τ/(ρf), spread over the layer. */
+export function deepResponse(f: number, layerDepth: number, waterDensity: number): SteadyResponse {
+  const transport = { xx: 0, xy: 1 / (waterDensity * f), yx: -1 / (waterDensity * f), yy: 0 };
+  const drift = { xx: 0, xy: transport.xy / layerDepth, yx: transport.yx / layerDepth, yy: 0 };
+  return { drift, transport, resistance: { xx: 0, xy: 0, yx: 0, yy: 0 }, f, waterDensity };
+}
+
+/** Water over a bed without slip; drift is the mean of the current from the surface to the layer's base. */
+export function finiteDepthResponse(
+  setting: FiniteDepthSetting,
+  layerDepth: number,
+  waterDensity: number,
+): SteadyResponse {
+  const perStress = (tau: Complex): Column => {
+    const T = complex(tau.re / waterDensity, tau.im / waterDensity);
+    return {
+      drift: layerMean((z) => finiteDepthCurrent(T, setting, z), layerDepth),
+      transport: finiteDepthTransport(T, setting),
+    };
+  };
+  return assembled(perStress, setting.f, waterDensity);
+}
+
+/** The same beside a straight shore that nothing passes through. */
+export function coastalResponse(
+  setting: FiniteDepthSetting,
+  layerDepth: number,
+  waterDensity: number,
+  shoreNormal: number,
+  gravity: number,
+): SteadyResponse {
+  const onshoreTo = (shoreNormal + 180) % 360;
+  const along = (azimuth: number): Complex =>
+    complex(Math.sin((azimuth * Math.PI) / 180), Math.cos((azimuth * Math.PI) / 180));
+  const left = along(onshoreTo - 90);
+  const perStress = (tau: Complex): Column => {
+    const balance = coastalBalance(complex(tau.re / waterDensity, tau.im / waterDensity), setting, onshoreTo, gravity);
+    return {
+      drift: layerMean(balance.currentAt, layerDepth),
+      transport: complex(left.re * balance.alongTransport, left.im * balance.alongTransport),
+    };
+  };
+  return assembled(perStress, setting.f, waterDensity);
+}
+
+interface Column {
+  drift: Complex;
+  transport: Complex;
+}
+
+function assembled(perStress: (tau: Complex) => Column, f: number, waterDensity: number): SteadyResponse {
+  const east = perStress(complex(1));
+  const north = perStress(complex(0, 1));
+  const matrix = (a: Complex, b: Complex): Matrix2 => ({ xx: a.re, xy: b.re, yx: a.im, yy: b.im });
+  const transport = matrix(east.transport, north.transport);
+  const turning = waterDensity * f;
+  // Whatever the rotating transport does not balance of the wind's stress is carried by the bed and the shore.
+  const resistance = {
+    xx: 1 + turning * transport.yx,
+    xy: turning * transport.yy,
+    yx: -turning * transport.xx,
+    yy: 1 - turning * transport.xy,
+  };
+  return { drift: matrix(east.drift, north.drift), transport, resistance, f, waterDensity };
+}
+
+/** Nodes and weights of Gauss–Legendre quadrature of order 5 on -1…1. Abramowitz & Stegun, table 25.4. */
+const NODES = [0, 0.538469310105683, -0.538469310105683, 0.906179845938664, -0.906179845938664];
+const WEIGHTS = [0.568888888888889, 0.478628670499366, 0.478628670499366, 0.236926885056189, 0.236926885056189];
+const PANELS = 64;
+
+/** Mean of a smooth current from the surface to `layerDepth`. */
+function layerMean(currentAt: (z: number) => Complex, layerDepth: number): Complex {
+  let re = 0;
+  let im = 0;
+  const half = layerDepth / PANELS / 2;
+  for (let panel = 0; panel < PANELS; panel++) {
+    for (let node = 0; node < NODES.length; node++) {
+      const current = currentAt(Math.max(-layerDepth, -(2 * panel + 1 + NODES[node]) * half));
+      re += WEIGHTS[node] * current.re;
+      im += WEIGHTS[node] * current.im;
+    }
+  }
+  return complex(re / (2 * PANELS), im / (2 * PANELS));
+}

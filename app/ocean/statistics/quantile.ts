@@ -1,0 +1,19 @@
+import { OceanError } from "../errors";
+import { requireFinite } from "../guards";
+
+/**
+ * Quantile by linear interpolation at (n - 1)p, type 7 of Hyndman & Fan (1996).
+ * @param values n ≥ 1 numbers in any order @param p 0…1
+ * @throws OceanError INVALID_INPUT for no values, no numbers or p outside 0…1
+ */
+export function quantile(values: ArrayLike<number>, p: number): number {
+  requireFinite({ p });
+  if (p < 0 || p > 1) throw new OceanError("INVALID_INPUT", `A quantile's share must lie within 0…1; it is ${p}.`);
+  if (values.length === 0) throw new OceanError("INVALID_INPUT", "A quantile needs at least one value.");
+  const sorted = Float64Array.from(values).sort();
+  for (let k = 0; k < sorted.length; k++) requireFinite({ [`values[${k}]`]: sorted[k] });
+  const position = (sorted.length - 1) * p;
+  const below = Math.floor(position);
+  const above = Math.min(below + 1, sorted.length - 1);
+  return sorted[below] + (position - below) * (sorted[above] - sorted[below]);
+}

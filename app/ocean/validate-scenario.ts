@@ -1,0 +1,72 @@
+import type { z } from "zod";
+import type { Scenario, ScenarioProblem } from "./scenario";
+import { modelRules } from "./validation/model-rules";
+import { boxRules, waterRules } from "./validation/place-and-water-rules";
+import {
+  boxSchema,
+  castSchema,
+  ensembleSchema,
+  methodSchema,
+  stormSchema,
+  triggersSchema,
+  twoLayerSchema,
+} from "./validation/scenario-schema";
+import { stormRules } from "./validation/storm-rules";
+
+/** As many as a person can work through; the last one then says that there are more. */
+const MOST_PROBLEMS = 50;
+
+/**
+ * Everything that is wrong with a scenario, whatever was handed in; empty when it can be computed. Never throws.
+ * Codes are those of `OceanErrorCode`; paths read like `storm.windSpeed[3]`.
+ */
+export function validateScenario(scenario: unknown): ScenarioProblem[] {
+  if (typeof scenario !== "object" || scenario === null || Array.isArray(scenario)) {
+    return [
+      { path: "", code: "INVALID_INPUT", message: "A scenario must be a JSON object with box, water and storm." },
+    ];
+  }
+  const parts = scenario as Record<string, unknown>;
+  const hasCast = typeof parts.water === "object" && parts.water !== null && "cast" in parts.water;
+  const shape = [
+    ...shapeProblems(boxSchema, parts.box, "box"),
+    ...shapeProblems(hasCast ? castSchema : twoLayerSchema, parts.water, "water"),
+    ...shapeProblems(stormSchema, parts.storm, "storm"),
+    ...shapeProblems(methodSchema.optional(), parts.method, "method"),
+    ...shapeProblems(triggersSchema.optional(), parts.triggerLevels, "triggerLevels"),
+    ...shapeProblems(ensembleSchema.optional(), parts.ensemble, "ensemble"),
+  ];
+  if (shape.length > 0) return shortened(shape);
+
+  const sound = scenario as Scenario;
+  const rules = [...boxRules(sound.box), ...waterRules(sound.water), ...stormRules(sound.storm)];
+  return shortened(rules.length > 0 ? rules : modelRules(sound));
+}
+
+function shapeProblems(schema: z.ZodType, part: unknown, name: string): ScenarioProblem[] {
+  if (part === undefined && !schema.safeParse(undefined).success) {
+    return [{ path: name, code: "INVALID_INPUT", message: `The scenario needs "${name}".` }];
+  }
+  const parsed = schema.safeParse(part);
+  if (parsed.success) return [];
+  return parsed.error.issues.map((issue) => ({
+    path: pathText(name, issue.path),
+    code: issue.code === "custom" && typeof issue.params?.code === "string" ? issue.params.code : "INVALID_INPUT",
+    message:
+      issue.code === "unrecognized_keys" ? `Unknown: ${issue.keys.join(", ")}. Check the spelling.` : issue.message,
+  }));
+}
+
+function pathText(root: string, path: readonly PropertyKey[]): string {
+  return path.reduce<string>(
+    (text, step) => (typeof step === "number" ? `${text}[${step}]` : `${text}.${String(step)}`),
+    root,
+  );
+}
+
+function shortened(problems: ScenarioProblem[]): ScenarioProblem[] {
+  if (problems.length <= MOST_PROBLEMS) return problems;
+  const more = problems.length - MOST_PROBLEMS;
+  const last = { path: "", code: "INVALID_INPUT", message: `${more} more problems of this kind; mend these first.` };
+  return [...problems.slice(0, MOST_PROBLEMS), last];
+}
