@@ -2,7 +2,7 @@ import { chooseCandidates } from "./choose-candidates";
 import { convertColumn, looksLikeCounter, type ConvertedColumn } from "./convert-column";
 import { describeColumns } from "./describe-columns";
 import { unitById, type FileUnit } from "./file-units";
-import { ProblemList } from "./problem-list";
+import type { ProblemList } from "./problem-list";
 import { isValueRole, proposeColumns, type ColumnProposal } from "./propose-columns";
 import { windQuestions } from "./wind-questions";
 import { readStamps, type Stamps } from "./read-stamps";
@@ -149,7 +149,7 @@ function settleAll(
   );
   for (const column of order) {
     const scan = scans.get(column.index);
-    const first = scan === undefined ? null : settleColumn(column, scan, speedUnit, state);
+    const first: SettledColumn | null = scan === undefined ? null : settleColumn(column, scan, speedUnit, state);
     if (first === null) continue;
     if (column.role === "windSpeed") speedUnit = first.unit;
     const turned = settleHeatSense(first, state);
