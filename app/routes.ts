@@ -1,5 +1,5 @@
 /** The URL map. What is not on this page is not on the web; the access matrix is generated from it. */
-import { index, layout, prefix, route, type RouteConfig } from "@react-router/dev/routes";
+import { index, prefix, route, type RouteConfig } from "@react-router/dev/routes";
 
 export default [
   index("routes/public/landing.tsx"),
@@ -31,10 +31,8 @@ export default [
       ...prefix("storms", [
         index("routes/org/storms/list.tsx"),
         route("new", "routes/org/storms/new.tsx"),
-        layout("routes/org/storms/layout.tsx", [
-          route(":storm", "routes/org/storms/show.tsx"),
-          route(":storm/records/:record", "routes/org/storms/reading-sheet.tsx"),
-        ]),
+        route(":storm", "routes/org/storms/show.tsx"),
+        route(":storm/records/:record", "routes/org/storms/reading-sheet.tsx"),
         route(":storm/series.csv", "routes/org/storms/series-csv.ts"),
       ]),
       route("files/:file", "routes/org/storms/source-file.ts"),

@@ -1,5 +1,11 @@
 import { CHANNEL_QUANTITIES, FILE_UNITS } from "~/readers/file-units";
-import { CHANNEL_NAMES, type ColumnReading, type ReadingAnswers, type SeriesReading } from "~/readers/reading";
+import {
+  CHANNEL_NAMES,
+  type ColumnReading,
+  type ReadingAnswers,
+  type ReadingQuestion,
+  type SeriesReading,
+} from "~/readers/reading";
 import { zoneClock } from "~/units/format-time";
 import { CHANNELS } from "./channels";
 
@@ -24,7 +30,10 @@ export function roleLabel(role: ColumnReading["role"]): string {
 export function unitsFor(role: ColumnReading["role"]): { value: string; label: string }[] {
   if (role === "time" || role === "leftOut") return [];
   const quantities = CHANNEL_QUANTITIES[role];
-  return FILE_UNITS.filter(({ quantity }) => quantities.includes(quantity)).map(({ id, label }) => ({ value: id, label }));
+  return FILE_UNITS.filter(({ quantity }) => quantities.includes(quantity)).map(({ id, label }) => ({
+    value: id,
+    label,
+  }));
 }
 
 export const NO_CODES = "none";
@@ -36,7 +45,7 @@ export interface AnswersRead {
 }
 
 /** Reads the posted fields against the sheet they were shown on. */
-export function readAnswers(form: FormData, shown: Pick<SeriesReading, "columns">): AnswersRead {
+export function readAnswers(form: FormData, shown: Pick<SeriesReading, "columns" | "questions">): AnswersRead {
   const errors: Record<string, string> = {};
   const text = (name: string) => {
     const value = form.get(name);
@@ -46,14 +55,16 @@ export function readAnswers(form: FormData, shown: Pick<SeriesReading, "columns"
 
   const zone = text("zone");
   if (zone !== "" && isZone(zone)) answers.zone = zone;
-  else if (zone !== "") errors.zone = `"${zone}" is no time zone: write UTC, a name such as Europe/Dublin, or an offset such as +05:30.`;
+  else if (zone !== "")
+    errors.zone = `"${zone}" is no time zone: write UTC, a name such as Europe/Dublin, or an offset such as +05:30.`;
 
   const dateOrder = text("dateOrder");
   if (isOneOf(dateOrder, ["ymd", "dmy", "mdy"])) answers.dateOrder = dateOrder;
   const epoch = text("serialEpoch");
   if (isOneOf(epoch, ["1900", "1904"])) answers.serialEpoch = epoch;
   const sense = text("directionSense");
-  if (isOneOf(sense, ["from", "towards"])) answers.directionSense = sense;
+  if (isOneOf(sense, ["from", "towards"]) && !isAsRead("directionSense", sense, shown.questions))
+    answers.directionSense = sense;
 
   const height = readNumber(text("windHeight"), 0.5, 500);
   if (height === "wrong") errors.windHeight = "Write a height from 0.5 to 500 m above the sea.";
@@ -82,6 +93,12 @@ export function readAnswers(form: FormData, shown: Pick<SeriesReading, "columns"
   }
   if (text("leaveOutBadRows") === "on") answers.leaveOutBadRows = true;
   return { answers, errors };
+}
+
+/** A radio button cannot be left empty: one that stands where the reader put it is no answer. */
+function isAsRead(key: ReadingQuestion["key"], value: string, questions: readonly ReadingQuestion[]): boolean {
+  const question = questions.find((candidate) => candidate.key === key);
+  return question !== undefined && !question.needed && question.answer === undefined && question.suggestion === value;
 }
 
 function isOneOf<const T extends string>(value: string, options: readonly T[]): value is T {

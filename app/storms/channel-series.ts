@@ -9,7 +9,11 @@ export interface ChannelSeries {
 }
 
 /** A channel of a reading without its missing samples; null where none is left. */
-export function presentSamples(channel: ChannelName, reading: ChannelReading, time: Float64Array): ChannelSeries | null {
+export function presentSamples(
+  channel: ChannelName,
+  reading: ChannelReading,
+  time: Float64Array,
+): ChannelSeries | null {
   const kept: number[] = [];
   reading.values.forEach((value, index) => {
     if (Number.isFinite(value)) kept.push(index);

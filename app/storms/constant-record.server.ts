@@ -37,7 +37,9 @@ function provenanceOf(
     understood: [{ what: groupLabel(groupOf(constant.channel)), taken: label, confidence: "answered" }],
     steps: [],
     dropped: [],
-    channels: [{ channel: constant.channel, unit: series.unit, count: series.time.length, missing: 0, fromColumns: [] }],
+    channels: [
+      { channel: constant.channel, unit: series.unit, count: series.time.length, missing: 0, fromColumns: [] },
+    ],
     constant,
     confirmedBy: confirmed.by,
     confirmedAt: confirmed.at,
@@ -63,7 +65,11 @@ export async function addConstant(tenant: Tenant, storm: Storm, request: Constan
   const { kind, value, replace, confirmedBy, confirmedAt } = request;
   const window = windowOf(storm);
   if (!window) throw new StormRefusal("The storm has no window yet: confirm a record with wind first.");
-  const constant: ConstantForcing = { channel: kind.channel, value: value * kind.toSi, asWritten: { value, unit: kind.unit } };
+  const constant: ConstantForcing = {
+    channel: kind.channel,
+    value: value * kind.toSi,
+    asWritten: { value, unit: kind.unit },
+  };
   const series = constantSeries(constant, window);
   await tenant.write(async (inner) => {
     const channel = channelsOf(groupOf(kind.channel));

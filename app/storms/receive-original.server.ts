@@ -64,5 +64,10 @@ export async function originalFrom(form: FormData): Promise<Original> {
 /** Browsers send the name alone, other senders may send a path; control characters have no place in a name. */
 function baseName(name: string): string {
   const last = name.split(/[\\/]/).at(-1) ?? "";
-  return last.replace(/\p{Cc}/gu, "").trim().slice(-255) || "unnamed file";
+  return (
+    last
+      .replace(/\p{Cc}/gu, "")
+      .trim()
+      .slice(-255) || "unnamed file"
+  );
 }

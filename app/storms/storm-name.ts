@@ -1,5 +1,6 @@
 import type { SeriesReading } from "~/readers/reading";
 import { zoneClock } from "~/units/format-time";
+import { StormRefusal } from "./refusal";
 
 export const STORM_NAME_LENGTH = 120;
 
@@ -18,4 +19,15 @@ export function freeName(wanted: string, taken: ReadonlySet<string>): string {
     const numbered = `${wanted.slice(0, STORM_NAME_LENGTH - 5)} ${number}`;
     if (!taken.has(numbered)) return numbered;
   }
+}
+
+/**
+ * The name in a form; empty where none was given.
+ * @throws StormRefusal for one that is too long
+ */
+export function postedName(form: FormData): string {
+  const text = form.get("name");
+  const name = typeof text === "string" ? text.trim() : "";
+  if (name.length > STORM_NAME_LENGTH) throw new StormRefusal(`Use at most ${STORM_NAME_LENGTH} characters.`, "name");
+  return name;
 }

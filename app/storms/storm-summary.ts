@@ -47,7 +47,8 @@ export function summariseStorm(series: readonly ChannelSeries[], window: StormWi
     peakGust: peakOf(channel("windGust")),
     peakWindFrom: peakWind && valueAt(channel("windFrom"), peakWind.at),
     rainTotal: rain ? heldTotal(rain, window) : null,
-    meanNetHeat: heat && heat.values.length > 0 ? heat.values.reduce((sum, value) => sum + value, 0) / heat.values.length : null,
+    meanNetHeat:
+      heat && heat.values.length > 0 ? heat.values.reduce((sum, value) => sum + value, 0) / heat.values.length : null,
     gaps: inside.flatMap((entry) => longGaps(entry, window)),
   };
 }

@@ -1,0 +1,156 @@
+import { Link, redirect } from "react-router";
+import type { Route } from "./+types/show";
+import { ConfirmButton } from "~/components/confirm-button";
+import { FigureView } from "~/components/figure-view";
+import { EmptyState, PageTitle } from "~/components/page-title";
+import { SectionHeading } from "~/components/section-heading";
+import { AddRecord } from "~/components/storms/add-record";
+import { RecordCard } from "~/components/storms/record-card";
+import { StormFacts } from "~/components/storms/storm-facts";
+import { StormSettings } from "~/components/storms/storm-settings";
+import { FIGURE_WIDTHS } from "~/figures/figure-context";
+import { serverPlotDocument } from "~/figures/plot-document.server";
+import { may } from "~/organisations/permissions";
+import { currentProject } from "~/projects/current-project.server";
+import { config } from "~/services/config.server";
+import { answerRefusal } from "~/storms/answer-refusal.server";
+import { addConstant } from "~/storms/constant-record.server";
+import { postedConstant } from "~/storms/posted-constant";
+import { postedWindow } from "~/storms/posted-window";
+import { originalFrom, receiveForm } from "~/storms/receive-original.server";
+import { removeRecord, removeStorm } from "~/storms/remove-record.server";
+import { renameStorm } from "~/storms/rename-storm.server";
+import { changeWindow } from "~/storms/set-window.server";
+import { showStorm } from "~/storms/show-storm.server";
+import { startRecord } from "~/storms/start-record.server";
+import { recordOf, stormOf } from "~/storms/stored-record.server";
+import { stormFigure } from "~/storms/storm-figure";
+import { postedName } from "~/storms/storm-name";
+import { summariseStorm } from "~/storms/storm-summary";
+import { extentOf, wallClock, windowOf, withinWindow } from "~/storms/storm-window";
+
+export async function loader({ context, params }: Route.LoaderArgs) {
+  const { organisation, tenant, project } = await currentProject(context, params, "project.view");
+  const storm = await stormOf(tenant, project.id, params.storm);
+  const { series, ...shown } = await showStorm(tenant, storm);
+  const window = windowOf(storm);
+  const inside = window ? series.map((entry) => withinWindow(entry, window)) : series;
+  const draw = (width: number) =>
+    stormFigure(
+      inside,
+      { id: "storm-series", title: storm.name, windHeight: shown.windHeight },
+      { document: serverPlotDocument(), zone: project.timeZone, units: organisation.units, width },
+    );
+  return {
+    storm: { id: storm.id, name: storm.name },
+    ...shown,
+    window,
+    extent: extentOf(series),
+    clock: window && {
+      startsAt: wallClock(window.startsAt, project.timeZone),
+      endsAt: wallClock(window.endsAt, project.timeZone),
+    },
+    summary: window && summariseStorm(series, window),
+    figure: draw(FIGURE_WIDTHS.wide),
+    narrowFigure: draw(FIGURE_WIDTHS.narrow),
+    zone: project.timeZone,
+    units: organisation.units,
+    uploadLimitBytes: config().uploadLimitBytes,
+    mayEdit: may(organisation.role, "project.edit"),
+  };
+}
+
+export async function action({ request, context, params }: Route.ActionArgs) {
+  const { actor, tenant, project } = await currentProject(context, params, "project.edit");
+  const storm = await stormOf(tenant, project.id, params.storm);
+  const storms = `/o/${params.organisation}/projects/${project.id}/storms`;
+  const here = `${storms}/${storm.id}`;
+  return answerRefusal(async () => {
+    const form = await receiveForm(request);
+    switch (form.get("intent")) {
+      case "rename":
+        await renameStorm(tenant, storm, postedName(form));
+        return redirect(here);
+      case "window":
+        await changeWindow(tenant, storm, postedWindow(form, project.timeZone), project.timeZone);
+        return redirect(here);
+      case "constant":
+        await addConstant(tenant, storm, {
+          ...postedConstant(form),
+          confirmedBy: actor.id,
+          confirmedAt: new Date().toISOString(),
+        });
+        return redirect(here);
+      case "remove-record":
+        await removeRecord(tenant, storm, await recordOf(tenant, storm.id, String(form.get("record"))));
+        return redirect(here);
+      case "remove-storm":
+        await removeStorm(tenant, storm);
+        return redirect(storms);
+      default: {
+        const record = await startRecord(tenant, storm, await originalFrom(form), actor.id);
+        return redirect(`${here}/records/${record.id}`);
+      }
+    }
+  });
+}
+
+export default function ShowStorm({ loaderData, actionData }: Route.ComponentProps) {
+  const { storm, figure, narrowFigure, records, window, mayEdit, estimates } = loaderData;
+  const errors = actionData?.errors ?? {};
+  return (
+    <>
+      <title>{`${storm.name} · Galeprint`}</title>
+      <PageTitle
+        actions={
+          window && (
+            <a href={`${storm.id}/series.csv`} className="button" download>
+              Series as CSV
+            </a>
+          )
+        }
+      >
+        {storm.name}
+      </PageTitle>
+      {figure ? (
+        <>
+          <StormFacts {...loaderData} />
+          <div className="mt-5">
+            <FigureView figure={figure} narrow={narrowFigure ?? undefined} csvHref={`${storm.id}/series.csv`} />
+          </div>
+        </>
+      ) : (
+        <EmptyState title="Nothing confirmed yet">
+          {records.length === 0
+            ? "Bring a record with wind below; its reading sheet comes next."
+            : "Open the reading sheet of the record below, look it through and confirm it."}
+        </EmptyState>
+      )}
+      <SectionHeading>Records</SectionHeading>
+      {records.length === 0 && <p className="text-slate">None yet.</p>}
+      <div className="grid gap-4 lg:grid-cols-2">
+        {records.map((record) => (
+          <RecordCard key={record.id} record={record} zone={loaderData.zone} mayEdit={mayEdit} />
+        ))}
+      </div>
+      {mayEdit && (
+        <>
+          <AddRecord errors={errors} uploadLimitBytes={loaderData.uploadLimitBytes} hasWindow={window !== null} />
+          <StormSettings name={storm.name} clock={loaderData.clock} zone={loaderData.zone} errors={errors} />
+          <div className="mt-10 border-t border-hairline pt-4">
+            <ConfirmButton label="Remove the storm" title={`Remove ${storm.name}?`} fields={{ intent: "remove-storm" }}>
+              Its records and series go with it, their original files where no other storm uses them, and{" "}
+              {estimates === 0 ? "no estimate" : estimates === 1 ? "one estimate" : `${estimates} estimates`}. Issued
+              memos keep what they say. This cannot be taken back.
+            </ConfirmButton>
+          </div>
+        </>
+      )}
+      <p className="mt-8">
+        <Link to=".." relative="path">
+          All storms
+        </Link>
+      </p>
+    </>
+  );
+}

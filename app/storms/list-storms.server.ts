@@ -1,0 +1,43 @@
+import type { Storm } from "~/db/models/storm.server";
+import type { Tenant } from "~/db/scoped.server";
+import { loadSeries } from "./load-series.server";
+import { windowOf, type StormWindow } from "./storm-window";
+import { summariseStorm, type Peak } from "./storm-summary";
+
+export interface StormLine {
+  id: string;
+  name: string;
+  window: StormWindow | null;
+  peakWind: Peak | null;
+  /** mm; null without a rain record. */
+  rainTotal: number | null;
+  records: { id: string; name: string; state: "reading" | "confirmed" }[];
+  /** Pauses that are too long for an estimate to bridge. */
+  gaps: number;
+}
+
+/** The storms of a project, the latest first; those that still wait for their first record come before. */
+export async function listStorms(tenant: Tenant, projectId: string): Promise<StormLine[]> {
+  const storms = await tenant.storms.list({ where: { projectId }, order: [["createdAt", "ASC"]] });
+  const lines = await Promise.all(storms.map((storm) => describe(tenant, storm)));
+  const startOf = (line: StormLine) => line.window?.startsAt ?? Number.POSITIVE_INFINITY;
+  return lines.sort((a, b) => (startOf(a) === startOf(b) ? 0 : startOf(b) - startOf(a)));
+}
+
+async function describe(tenant: Tenant, storm: Storm): Promise<StormLine> {
+  const [records, series] = await Promise.all([
+    tenant.records.list({ where: { stormId: storm.id }, order: [["createdAt", "ASC"]] }),
+    loadSeries(tenant, storm.id, ["windSpeed", "rain"]),
+  ]);
+  const window = windowOf(storm);
+  const summary = window && summariseStorm(series, window);
+  return {
+    id: storm.id,
+    name: storm.name,
+    window,
+    peakWind: summary?.peakWind ?? null,
+    rainTotal: summary?.rainTotal ?? null,
+    records: records.map(({ id, name, state }) => ({ id, name, state })),
+    gaps: summary?.gaps.length ?? 0,
+  };
+}
