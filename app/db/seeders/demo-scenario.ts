@@ -37,7 +37,7 @@ function rectangle(west: number, south: number, east: number, north: number): Po
   ];
 }
 
-const INTAKE_LIMIT: TriggerLevel = { quantity: "salinity", side: "below", value: 34.6, hours: 6 };
+const INTAKE_LIMIT: TriggerLevel = { quantity: "salinity", side: "below", value: 34.9, hours: 6 };
 
 export const DEMO_BOXES: DemoBox[] = [
   {
@@ -72,7 +72,7 @@ export const DEMO_WATER = {
   temperature: 14.2,
   salinity: 35.1,
   salinityScale: "absolute" as const,
-  layerDepth: 18,
+  layerDepth: 24,
   belowTemperature: 13.1,
   belowSalinity: 35.24,
 };
@@ -99,7 +99,7 @@ export const DEMO_STORMS: DemoStorm[] = [
       width: 17,
       windFromBefore: 205,
       windFromAfter: 310,
-      peakRain: 7.5,
+      peakRain: 11,
       lowestPressure: 968,
       seaTemperature: 14.2,
       airTemperature: 12.1,
@@ -133,7 +133,7 @@ export const DEMO_STORMS: DemoStorm[] = [
 export const DEMO_MEMO = {
   title: "All Souls gale: salinity at the Pellan Sound intake",
   question:
-    "Did the gale of early November freshen the surface layer at the intake below the 34.6 g/kg at which the plant lowers its recovery, and for how long?",
+    "Did the gale of early November freshen the surface layer at the intake below the 34.9 g/kg at which the plant lowers its recovery, and for how long?",
   findings: "",
   purpose: "client decision" as const,
 };
