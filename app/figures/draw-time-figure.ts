@@ -14,6 +14,7 @@ export interface DrawnTimeFigure {
   svg: string;
   width: number;
   height: number;
+  levelsShown: PanelLevel[];
   /** Levels that lie too far off the data to be drawn: for the caption. */
   levelsBeyond: PanelLevel[];
 }
@@ -30,6 +31,7 @@ export function drawTimeFigure(
 ): DrawnTimeFigure {
   const frame = timeFrame(time, context);
   const ids = new IdKeeper(idPrefix(id, context));
+  const levelsShown: PanelLevel[] = [];
   const levelsBeyond: PanelLevel[] = [];
   let markup = "";
   let top = 0;
@@ -45,11 +47,12 @@ export function drawTimeFigure(
     const drawn = drawTimePanel(panel, frame);
     markup += plainGroup(drawn.plot, 0, top, ids);
     top += drawn.height;
+    levelsShown.push(...drawn.axis.levels);
     levelsBeyond.push(...drawn.axis.levelsBeyond);
   });
   markup += timeAxis(frame, top);
   const height = Math.ceil(top + TIME_AXIS_HEIGHT);
-  return { svg: svgSheet(frame.width, height, markup), width: frame.width, height, levelsBeyond };
+  return { svg: svgSheet(frame.width, height, markup), width: frame.width, height, levelsShown, levelsBeyond };
 }
 
 /** Ticks and labels that all panels share. */

@@ -37,7 +37,7 @@ export function layerStack(data: LayerStackData, context: FigureContext): Figure
   );
   const drawn = drawTimeFigure("layer-stack", panels, time, context);
   const names = shown.map(({ id }) => QUANTITIES[id].name.replace("surface ", ""));
-  const levels = panels.flatMap((panel) => panel.levels ?? []).map((level) => level.label);
+  const levels = drawn.levelsShown.map((level) => level.label);
   return {
     id: "layer-stack",
     title: "What the layer did",

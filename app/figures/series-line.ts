@@ -32,7 +32,7 @@ export function seriesLine(id: SeriesQuantity, data: SeriesLineData, context: Fi
   const name = sentenceCase(QUANTITIES[id].name);
   const panel = { ...seriesPanel(id, data, context.units), height: 130 };
   const drawn = drawTimeFigure(FIGURE_IDS[id], [panel], time, context);
-  const levels = (panel.levels ?? []).map((level) => level.label);
+  const levels = drawn.levelsShown.map((level) => level.label);
   return {
     id: FIGURE_IDS[id],
     title: name,

@@ -21,6 +21,8 @@ export interface ZoneClock {
   iso(seconds: number): string;
   /** Whole hours of the wall clock between two moments that are multiples of `hours` since midnight, ascending. */
   multiples(from: number, to: number, hours: number): ClockTick[];
+  /** First midnights of every so many months, counted from January of the year 0, between two moments. */
+  monthStarts(from: number, to: number, months: number): ClockTick[];
 }
 
 export interface ClockTick {
@@ -50,7 +52,20 @@ export function zoneClock(zone: string): ZoneClock {
     },
     multiples: (from, to, hours) =>
       hours >= 24 ? dayMultiples(at(from), to, hours / 24) : hourMultiples(at, from, to, hours),
+    monthStarts: (from, to, months) => monthStarts(at(from), to, months),
   };
+}
+
+function monthStarts(start: Temporal.ZonedDateTime, to: number, months: number): ClockTick[] {
+  const from = start.epochMilliseconds / 1000;
+  const ticks: ClockTick[] = [];
+  let first = start.with({ day: 1 }).startOfDay();
+  first = first.subtract({ months: (first.year * 12 + first.month - 1) % months }).startOfDay();
+  while (first.epochMilliseconds / 1000 <= to) {
+    if (first.epochMilliseconds / 1000 >= from) ticks.push(tickOf(first));
+    first = first.add({ months }).startOfDay();
+  }
+  return ticks;
 }
 
 /** Days are counted from the first midnight on or before the start, so that steps of several days begin with it. */

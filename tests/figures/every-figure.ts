@@ -1,0 +1,72 @@
+import type { Figure } from "~/figures/figure";
+import type { FigureContext } from "~/figures/figure-context";
+import { driftTrack } from "~/figures/drift-track";
+import { forcingStack } from "~/figures/forcing-stack";
+import { hodograph } from "~/figures/hodograph";
+import { layerStack } from "~/figures/layer-stack";
+import { seriesLine } from "~/figures/series-line";
+import { stressAndDrift } from "~/figures/stress-and-drift";
+import { windPreview } from "~/figures/wind-preview";
+import type { TriggerLevel } from "~/ocean/scenario";
+import type { LocalPosition } from "~/figures/drift-track";
+
+/** One storm and what it left: all that the figures can be given. */
+export interface EverySeries {
+  time: number[];
+  windSpeed10: number[];
+  windFrom: number[];
+  windGust: number[];
+  rainRate: number[];
+  netHeat: number[];
+  stressX: number[];
+  stressY: number[];
+  driftEast: number[];
+  driftNorth: number[];
+  displacementEast: number[];
+  displacementNorth: number[];
+  salinity: number[];
+  temperature: number[];
+  density: number[];
+  layerDepth: number[];
+  triggerLevels?: readonly TriggerLevel[];
+  boxOutline?: readonly LocalPosition[];
+  coast?: readonly (readonly LocalPosition[])[];
+}
+
+/** Every figure there is, of one set of series. */
+export function everyFigure(series: EverySeries, context: FigureContext): Figure[] {
+  const { time, triggerLevels: triggers } = series;
+  const middle = Math.floor(time.length / 2);
+  return [
+    forcingStack(series, context),
+    windPreview(
+      {
+        time,
+        windSpeed: series.windSpeed10,
+        windFrom: series.windFrom,
+        windHeight: 4,
+        stormWindow: { start: time[Math.floor(middle / 2)] ?? 0, end: (time[middle] ?? 0) + 3600 },
+      },
+      context,
+    ),
+    seriesLine("stress", { time, values: series.stressX }, context),
+    seriesLine("driftSpeed", { time, values: series.driftEast }, context),
+    seriesLine("temperature", { time, values: series.temperature, triggers }, context),
+    seriesLine(
+      "salinity",
+      {
+        time,
+        values: series.salinity,
+        triggers,
+        band: { p10: series.salinity.map((value) => value - 0.3), p90: series.salinity.map((value) => value + 0.2) },
+      },
+      context,
+    ),
+    seriesLine("density", { time, values: series.density }, context),
+    seriesLine("layerDepth", { time, values: series.layerDepth }, context),
+    layerStack({ ...series, triggers }, context),
+    stressAndDrift(series, context),
+    hodograph({ ...series, inertialAmplitude: 0.5 }, context),
+    driftTrack({ ...series, box: series.boxOutline, land: series.coast }, context),
+  ];
+}
