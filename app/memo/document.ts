@@ -69,6 +69,12 @@ export interface TableColumn {
   align: "left" | "right";
 }
 
+/** One thing that is known, and what it is called. */
+export interface FactRow {
+  label: string;
+  value: Run[];
+}
+
 export interface MemoFitNote {
   severity: FitSeverity;
   /** With the value found here and the limit. */
@@ -96,6 +102,7 @@ export type Block =
   | { kind: "headlines"; caption: string; rows: HeadlineRow[] }
   | { kind: "figure"; number: number; figure: Figure; source: string }
   | { kind: "table"; caption: string; columns: TableColumn[]; rows: Run[][][] }
+  | { kind: "facts"; rows: FactRow[] }
   | { kind: "fitNotes"; notes: MemoFitNote[] }
   | { kind: "equation"; number: number; name: string; runs: Run[]; symbols: EquationSymbol[]; source: string }
   | { kind: "references"; items: ReferenceItem[] }

@@ -50,11 +50,11 @@ function withBearing(unit: string, towards: number | null): string {
 
 function transport({ headline }: Response, { units, shore }: Context): HeadlineRow {
   const { transportAcross: across, transportAlong: along } = headline;
-  const sides = shore ? (["offshore", "towards the shore"] as const) : (["east", "west"] as const);
+  const sides = shore ? (["offshore", "onshore"] as const) : (["east", "west"] as const);
   const alongSides = shore ? (["to the right", "to the left"] as const) : (["north", "south"] as const);
   const told = (value: number) =>
     formatQuantity(Math.abs(value), "transportTotal", units, { decimals: transportDecimals(value, units) });
-  const label = shore ? "Ekman transport across the shore" : "Ekman transport to the east";
+  const label = shore ? "Transport across the shore" : "Transport to the east";
   const base = row(label, "transportTotal", across.value, across, units, "", transportDecimals(across.value, units));
   const main = told(across.value);
   const still = Number(main.number) === 0;

@@ -43,6 +43,13 @@ export function parameterValue(value: number | string | boolean): string {
   return text.replace("-", "−");
 }
 
+/** A sentence of the engine's sources as it is printed: minus signs, and powers of ten for `7.29e-5`. */
+export function printedNumbers(text: string): string {
+  return text
+    .replace(/(\d)e(-?\d+)/g, (_, digit: string, power: string) => `${digit} × 10${superscript(Number(power))}`)
+    .replace(/(?<![\p{L}\d])-(?=\d)/gu, "−");
+}
+
 const SUPERSCRIPTS = "⁰¹²³⁴⁵⁶⁷⁸⁹";
 
 function superscript(power: number): string {

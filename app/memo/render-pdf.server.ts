@@ -2,7 +2,7 @@
 import type { MemoDocument } from "./document";
 import { drawSheets } from "./pdf/draw.server";
 import { columnOf, furniture, geometryOf } from "./pdf/furniture";
-import { type FontBytes, fontSet, shippedFonts } from "./pdf/fonts.server";
+import { type Fonts, fontSet, shippedFonts } from "./pdf/fonts.server";
 import { paginate } from "./pdf/paginate";
 import { placeMemo } from "./pdf/place";
 import { dateOf, type TaggedPdf, taggedPdf } from "./pdf/tagged-pdf.server";
@@ -17,7 +17,7 @@ export interface Attachment {
 }
 
 export interface RenderOptions {
-  fonts?: FontBytes;
+  fonts?: Fonts;
   attachments?: readonly Attachment[];
 }
 

@@ -110,14 +110,17 @@ function triggers({ headline }: Response, { units, zone }: WordsContext): Senten
     const rank = index === 0 ? 1 : 5 + index;
     if (trigger.hoursBeyond <= 0)
       return { rank, runs: [plain(`${subject} was never ${trigger.side} the trigger level of ${level}.`)] };
+    const beyond = hoursText(trigger.hoursBeyond);
     const spell = hoursText(trigger.longestSpell);
-    const told = trigger.firstAt === null ? "" : `, from ${formatTime(trigger.firstAt, zone)}, ${spell} at a stretch`;
-    const verdict = trigger.met ? "the limit is met" : "the limit is not met";
+    const first = trigger.firstAt === null ? "" : `, first at ${formatTime(trigger.firstAt, zone)}`;
+    const told = spell === beyond ? first : `${first}, at most ${spell} at a stretch`;
+    const limit = hoursText(trigger.hours);
+    const verdict = trigger.met ? `this meets the limit of ${limit}` : `this stays short of the limit of ${limit}`;
     return {
       rank,
       runs: [
         plain(`${subject} was ${trigger.side} the trigger level of ${level} for `),
-        strong(hoursText(trigger.hoursBeyond), trigger.quantity),
+        strong(beyond, trigger.quantity),
         plain(`${told}; ${verdict}.`),
       ],
     };
@@ -153,8 +156,8 @@ function displacement({ headline }: Response, { units }: WordsContext): Sentence
     runs: [
       plain("It moved about "),
       strong(text, "displacement"),
-      plain(` towards the ${compassWord(towards)} (${formatBearing(towards)})`),
-      plain(`${band({ p10, p90 }, "displacement", units, decimals)}.`),
+      plain(band({ p10, p90 }, "displacement", units, decimals)),
+      plain(` towards the ${compassWord(towards)} (${formatBearing(towards)}).`),
     ],
   };
 }

@@ -1,22 +1,30 @@
 import { readFileSync } from "node:fs";
 import { createRequire } from "node:module";
-import { type Coverage, FACE_FILES, splitByFace } from "./faces";
+import { inflateSync } from "node:zlib";
+import { type Coverage, FACE_FILES, splitByFace, type Stretch } from "./faces";
+import { codePointsOf, unpackWoff } from "./sfnt";
 import type { Typefaces } from "./typeset";
 
-/** Bytes of each face's font file, by the names in `FACE_FILES`. */
-export type FontBytes = ReadonlyMap<string, Buffer>;
-
-/** The part of a loaded font that pdfkit keeps to itself: its types do not say what a font covers. */
-interface LoadedFont {
-  font: { hasGlyphForCodePoint(codePoint: number): boolean };
+export interface Face {
+  /** The unpacked font: pdfkit would unpack it again for every memo. */
+  font: Buffer;
+  codePoints: ReadonlySet<number>;
 }
 
-let shipped: FontBytes | undefined;
+/** By the names in `FACE_FILES`. */
+export type Fonts = ReadonlyMap<string, Face>;
+
+let shipped: Fonts | undefined;
 
 /** The fonts that ship with the application, read once. The files lie beside the bundle in `node_modules`. */
-export function shippedFonts(): FontBytes {
+export function shippedFonts(): Fonts {
   const { resolve } = createRequire(import.meta.url);
-  shipped ??= new Map([...FACE_FILES].map(([face, path]) => [face, readFileSync(resolve(path))]));
+  shipped ??= new Map(
+    [...FACE_FILES].map(([face, path]) => {
+      const font = Buffer.from(unpackWoff(readFileSync(resolve(path)), inflateSync));
+      return [face, { font, codePoints: codePointsOf(font) }];
+    }),
+  );
   return shipped;
 }
 
@@ -24,32 +32,27 @@ export interface FontSet extends Typefaces {
   covers: Coverage;
 }
 
-/** Registers the faces with a document; those that draw nothing are not embedded. */
-export function fontSet(pdf: PDFKit.PDFDocument, fonts: FontBytes): FontSet {
-  for (const [face, bytes] of fonts) pdf.registerFont(face, bytes);
-  const loaded = new Map<string, LoadedFont["font"]>();
-  const covered = new Map<string, boolean>();
-  const widths = new Map<string, number>();
+/** Which characters the shipped fonts draw. */
+export const shippedCoverage: Coverage = (face, codePoint) =>
+  shippedFonts().get(face)?.codePoints.has(codePoint) ?? false;
 
-  const load = (face: string) => {
-    const known = loaded.get(face);
-    if (known) return known;
-    pdf.font(face);
-    const { font } = (pdf as unknown as { _font: LoadedFont })._font;
-    loaded.set(face, font);
-    return font;
-  };
-  const covers: Coverage = (face, codePoint) => {
-    const key = `${face} ${codePoint}`;
-    const known = covered.get(key);
-    if (known !== undefined) return known;
-    const answer = load(face).hasGlyphForCodePoint(codePoint);
-    covered.set(key, answer);
-    return answer;
-  };
+/** Registers the faces with a document; those that draw nothing are not embedded. */
+export function fontSet(pdf: PDFKit.PDFDocument, fonts: Fonts): FontSet {
+  for (const [face, { font }] of fonts) pdf.registerFont(face, font);
+  const covers: Coverage = (face, codePoint) => fonts.get(face)?.codePoints.has(codePoint) ?? false;
+  const widths = new Map<string, number>();
+  const splits = new Map<string, Stretch[]>();
   return {
     covers,
-    split: (text, style) => splitByFace(text, style, covers),
+    split(text, style) {
+      const key = `${style.bold} ${style.italic} ${text}`;
+      let stretches = splits.get(key);
+      if (!stretches) {
+        stretches = splitByFace(text, style, covers);
+        splits.set(key, stretches);
+      }
+      return stretches;
+    },
     width(text, face, size) {
       const key = `${face} ${text}`;
       // Widths scale with the size, so one is enough.

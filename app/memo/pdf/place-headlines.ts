@@ -9,7 +9,7 @@ import { type TypesetText, typeset } from "./typeset";
 type Headlines = Extract<Block, { kind: "headlines" }>;
 
 /** Shares of the width: label, value, mark, remark. */
-const SHARES = [0.26, 0.26, 0.24, 0.24];
+const SHARES = [0.235, 0.245, 0.17, 0.35];
 const GAP = 12;
 const PAD = 6;
 const BAND_HEIGHT = 6;

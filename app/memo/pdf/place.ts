@@ -2,6 +2,7 @@
 import type { Block, MemoDocument } from "../document";
 import type { Strip } from "./paginate";
 import { placeEquation } from "./place-equation";
+import { placeFacts } from "./place-facts";
 import { placeFigure } from "./place-figure";
 import { placeFitNotes } from "./place-fit-notes";
 import { placeHeadlines } from "./place-headlines";
@@ -41,6 +42,8 @@ function placeBlock(block: Exclude<Block, { kind: "pageBreak" }>, root: StructNo
       return placeFigure(block, root, column);
     case "table":
       return placeTable(block, root, column);
+    case "facts":
+      return placeFacts(block.rows, root, column);
     case "fitNotes":
       return placeFitNotes(block, root, column);
     case "equation":

@@ -2,7 +2,7 @@
 import type { TextStyle, Typefaces } from "./typeset";
 
 export const TITLE: TextStyle = { size: 19, bold: true, leading: 1.2 };
-export const LEAD: TextStyle = { size: 12.5, leading: 1.42 };
+export const LEAD: TextStyle = { size: 11.5, leading: 1.42 };
 export const HEADING: Record<1 | 2, TextStyle> = {
   1: { size: 12.5, bold: true, leading: 1.3 },
   2: { size: 10, bold: true, leading: 1.3 },

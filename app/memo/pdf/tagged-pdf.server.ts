@@ -39,9 +39,9 @@ export function taggedPdf(memo: MemoDocument): TaggedPdf {
   return pdf;
 }
 
-/** Midnight UTC of the memo's date: the same memo always gives the same bytes. */
+/** Midnight UTC of the memo's date, a zone's name after it aside: the same memo always gives the same bytes. */
 export function dateOf(memo: MemoDocument): Date {
-  const date = new Date(`${memo.titleBlock.date}T00:00:00Z`);
+  const date = new Date(`${memo.titleBlock.date.slice(0, 10)}T00:00:00Z`);
   if (Number.isNaN(date.getTime()))
     throw new RangeError(`A memo needs an ISO date (as 2026-11-11) to be printed; it has "${memo.titleBlock.date}".`);
   return date;

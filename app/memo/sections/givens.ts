@@ -4,7 +4,7 @@ import { formatBearing, formatNumber, formatQuantity } from "~/units/format-quan
 import { formatPeriod } from "~/units/format-time";
 import type { Block } from "../document";
 import type { MemoBox, MemoInput, MemoSeries, MemoWater } from "../memo-input";
-import { cell, column, factTable, NOT_KNOWN } from "./section";
+import { cell, column, factBlocks, NOT_KNOWN } from "./section";
 
 export function boxBlocks({ boxes, units }: MemoInput): Block[] {
   if (boxes.length === 0) return [];
@@ -61,12 +61,12 @@ function degrees(value: number, positive: string, negative: string): string {
 }
 
 export function inputBlocks(input: MemoInput): Block[] {
-  return [...input.series.map((series) => seriesTable(series, input)), ...input.waters.map(waterTable)];
+  return [...input.series.flatMap((series) => seriesFacts(series, input)), ...input.waters.flatMap(waterFacts)];
 }
 
-function seriesTable(series: MemoSeries, { project, units }: MemoInput): Block {
+function seriesFacts(series: MemoSeries, { project, units }: MemoInput): Block[] {
   const missing = series.missingShare;
-  return factTable(`Series: ${series.name}`, [
+  return factBlocks(`Series: ${series.name}`, [
     ["Source", series.source || NOT_KNOWN],
     ["File", series.fileName],
     ["SHA-256", series.sha256],
@@ -82,8 +82,8 @@ function seriesTable(series: MemoSeries, { project, units }: MemoInput): Block {
   ]);
 }
 
-function waterTable({ name, kind, details, fileName, sha256 }: MemoWater): Block {
-  return factTable(`Water column: ${name}`, [
+function waterFacts({ name, kind, details, fileName, sha256 }: MemoWater): Block[] {
+  return factBlocks(`Water column: ${name}`, [
     ["Kind", kind],
     ["File", fileName ?? ""],
     ["SHA-256", sha256 ?? ""],

@@ -3,7 +3,7 @@ import type { MethodSource } from "~/ocean/method-source";
 import type { MethodEntry, MethodUsed } from "~/ocean/response";
 import { methodSources } from "~/ocean/sources";
 import type { Block, ReferenceItem } from "../document";
-import { parameterName, parameterValue } from "../method-words";
+import { parameterName, parameterValue, printedNumbers } from "../method-words";
 import { equationRuns } from "../equation-runs";
 import type { MemoInput } from "../memo-input";
 import { cell, column } from "./section";
@@ -67,8 +67,8 @@ function equation(method: MethodSource, number: number, references: readonly Ref
   const reference = references.findIndex(({ text }) => text === method.citation);
   const source = [
     reference >= 0 ? `Source: [${reference + 1}], ${method.provenance}.` : `Source: ${method.provenance}.`,
-    method.validRange ? `Valid range: ${method.validRange}.` : "",
-    method.remark,
+    method.validRange ? printedNumbers(`Valid range: ${method.validRange}.`) : "",
+    printedNumbers(method.remark),
   ];
   return {
     kind: "equation",
@@ -77,7 +77,7 @@ function equation(method: MethodSource, number: number, references: readonly Ref
     runs: equationRuns(method.equation),
     symbols: method.symbols.map(({ symbol, meaning, unit }) => ({
       symbol: equationRuns(symbol),
-      meaning,
+      meaning: printedNumbers(meaning),
       unit: unit === "1" ? "" : unit,
     })),
     source: source.filter((part) => part !== "").join(" "),

@@ -29,6 +29,7 @@ function comparison({ estimates, units, project }: MemoInput): Block {
     const text = formatQuantity(value, id, units, options).text;
     return p10 === undefined || p90 === undefined ? text : `${text} (${formatRange(p10, p90, id, units, options)})`;
   };
+  const transportLabels = labelsOf(estimates);
   const rows: [label: string, told: Told][] = [
     ["Storm", ({ stormName }) => stormName],
     ["Water column", ({ waterName }) => waterName],
@@ -64,7 +65,7 @@ function comparison({ estimates, units, project }: MemoInput): Block {
         `${banded(it.value, "displacement", it.p10, it.p90, distanceDecimals(it.value, units))} to ${formatBearing(it.towards)}`,
     ],
     [
-      "Ekman transport, across the shore (positive offshore) or east",
+      transportLabels.across,
       ({
         response: {
           headline: { transportAcross: it },
@@ -72,7 +73,7 @@ function comparison({ estimates, units, project }: MemoInput): Block {
       }) => banded(it.value, "transportTotal", it.p10, it.p90, transportDecimals(it.value, units)),
     ],
     [
-      "Ekman transport, along the shore (positive to the right looking offshore) or north",
+      transportLabels.along,
       ({
         response: {
           headline: { transportAlong: it },
@@ -126,6 +127,18 @@ function comparison({ estimates, units, project }: MemoInput): Block {
     columns: [column("Figure"), ...estimates.map(({ code, boxName }) => column(`${code}, ${boxName}`))],
     rows: rows.map(([label, told]) => [cell(label), ...estimates.map((estimate) => cell(told(estimate)))]),
   };
+}
+
+/** What the two transports point along depends on whether a box has a shore. */
+function labelsOf(estimates: readonly MemoEstimate[]): { across: string; along: string } {
+  const shores = new Set(estimates.map(({ shore }) => shore));
+  const across = shores.has(true) ? ["across the shore, positive offshore"] : [];
+  const along = shores.has(true) ? ["along the shore, positive to the right looking offshore"] : [];
+  if (shores.has(false)) {
+    across.push(shores.has(true) ? "or, without a shore, to the east" : "to the east");
+    along.push(shores.has(true) ? "or, without a shore, to the north" : "to the north");
+  }
+  return { across: `Ekman transport ${across.join("; ")}`, along: `Ekman transport ${along.join("; ")}` };
 }
 
 function triggerBlocks({ estimates, units, project }: MemoInput): Block[] {

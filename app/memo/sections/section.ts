@@ -12,14 +12,13 @@ export function column(label: string, unit = "", align: TableColumn["align"] = "
   return { label, unit, align };
 }
 
-/** A fact a row, its name in bold; facts without a text are left out. */
-export function factTable(caption: string, facts: readonly (readonly [label: string, text: string])[]): Block {
-  return {
-    kind: "table",
-    caption,
-    columns: [column("Item"), column("What is known")],
-    rows: facts.filter(([, text]) => text !== "").map(([label, text]) => [cell(label), cell(text)]),
-  };
+/** Facts under a heading of their own; those without a text are left out. */
+export function factBlocks(heading: string, facts: readonly (readonly [label: string, text: string])[]): Block[] {
+  const rows = facts.filter(([, text]) => text !== "").map(([label, text]) => ({ label, value: cell(text) }));
+  return [
+    { kind: "heading", level: 2, text: heading },
+    { kind: "facts", rows },
+  ];
 }
 
 export function paragraph(text: string): Block {
