@@ -5,7 +5,7 @@ import { Form } from "react-router";
 import type { z } from "zod";
 import { Field, FormErrors } from "./field";
 import { SubmitButton } from "./submit-button";
-import { memoSchema } from "~/memo/memo-schema";
+import { memoSchema, type MemoValues } from "~/memo/memo-schema";
 import { MEMO_PURPOSES } from "~/memo/purposes";
 
 type MemoFormValues = z.input<typeof memoSchema>;
@@ -31,7 +31,7 @@ interface MemoFieldsProps {
 
 /** Shared by the page that begins a memo and the one that writes it. */
 export function MemoFields({ lastResult, choices, values, submit, draftedFindings, children }: MemoFieldsProps) {
-  const [form, fields] = useForm<MemoFormValues, MemoFormValues, string[]>({
+  const [form, fields] = useForm<MemoFormValues, MemoValues, string[]>({
     id: "memo",
     lastResult,
     defaultValue: values,

@@ -1,8 +1,10 @@
 import { getInputProps, getSelectProps, type FieldMetadata } from "@conform-to/react";
 import { Field } from "./field";
 
+type FactField = FieldMetadata<string, Record<string, unknown>, string[]>;
+
 interface ProjectFactsFieldsProps {
-  fields: Record<"name" | "jobNumber" | "client" | "timeZone", FieldMetadata<string>>;
+  fields: Record<"name" | "jobNumber" | "client" | "timeZone", FactField>;
   timeZones: readonly string[];
 }
 

@@ -6,7 +6,7 @@ import type { z } from "zod";
 import { Field, FormErrors } from "./field";
 import { BoxEditor } from "./map/box-editor";
 import { SubmitButton } from "./submit-button";
-import { boxSchema, MOST_TRIGGER_LEVELS, TRIGGER_QUANTITY_IDS } from "~/area/box-schema";
+import { boxSchema, type BoxValues, MOST_TRIGGER_LEVELS, TRIGGER_QUANTITY_IDS } from "~/area/box-schema";
 import { TRIGGER_QUANTITIES, type Position } from "~/ocean/scenario";
 import { displayUnit, quantity } from "~/units/quantities";
 import type { UnitChoices } from "~/units/unit-choices";
@@ -28,7 +28,7 @@ export function StudyBoxForm({ lastResult, units, otherBoxes, ring: stored, valu
   const [ring, setRing] = useState<Position[] | null>(stored);
   const schema = useMemo(() => boxSchema(units), [units]);
   const busy = useNavigation().state !== "idle";
-  const [form, fields] = useForm<BoxFormValues, BoxFormValues, string[]>({
+  const [form, fields] = useForm<BoxFormValues, BoxValues, string[]>({
     lastResult: busy ? undefined : lastResult,
     defaultValue: values,
     onValidate: ({ formData }) => parseWithZod(formData, { schema }),

@@ -5,7 +5,7 @@ import { sequelize } from "../connection.server";
 export class Session extends Model<InferAttributes<Session>, InferCreationAttributes<Session>> {
   declare id: string;
   declare userId: string | null;
-  declare data: Record<string, unknown>;
+  declare data: { userId?: string; [key: string]: unknown };
   declare lastSeenAt: Date;
   declare expiresAt: Date;
   declare createdAt: CreationOptional<Date>;

@@ -1,6 +1,7 @@
 import { getFormProps, getInputProps, useForm } from "@conform-to/react";
 import { getZodConstraint, parseWithZod } from "@conform-to/zod/v4";
 import { data, Form, Link, redirect, useSearchParams } from "react-router";
+import type { z } from "zod";
 import type { Route } from "./+types/sign-in";
 import { AccountPage } from "~/components/account-page";
 import { Field, FormErrors } from "~/components/field";
@@ -32,7 +33,7 @@ export async function action({ request }: Route.ActionArgs) {
 }
 
 export default function SignIn({ actionData }: Route.ComponentProps) {
-  const [form, fields] = useForm({
+  const [form, fields] = useForm<z.input<typeof signInSchema>, z.output<typeof signInSchema>, string[]>({
     lastResult: actionData,
     constraint: getZodConstraint(signInSchema),
     onValidate: ({ formData }) => parseWithZod(formData, { schema: signInSchema }),

@@ -1,6 +1,7 @@
 import { getFormProps, getInputProps, useForm } from "@conform-to/react";
 import { getZodConstraint, parseWithZod } from "@conform-to/zod/v4";
 import { data, Form, Link, redirect } from "react-router";
+import type { z } from "zod";
 import type { Route } from "./+types/sign-up";
 import { AccountPage } from "~/components/account-page";
 import { Field, FormErrors } from "~/components/field";
@@ -30,7 +31,7 @@ export async function action({ request }: Route.ActionArgs) {
 }
 
 export default function SignUp({ actionData }: Route.ComponentProps) {
-  const [form, fields] = useForm({
+  const [form, fields] = useForm<z.input<typeof signUpSchema>, z.output<typeof signUpSchema>, string[]>({
     lastResult: actionData,
     constraint: getZodConstraint(signUpSchema),
     onValidate: ({ formData }) => parseWithZod(formData, { schema: signUpSchema }),

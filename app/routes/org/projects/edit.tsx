@@ -1,6 +1,7 @@
 import { getFormProps, useForm } from "@conform-to/react";
 import { getZodConstraint, parseWithZod } from "@conform-to/zod/v4";
 import { data, Form, redirect } from "react-router";
+import type { z } from "zod";
 import type { Route } from "./+types/edit";
 import { ConfirmButton } from "~/components/confirm-button";
 import { FormErrors } from "~/components/field";
@@ -39,7 +40,7 @@ export async function action({ request, context, params }: Route.ActionArgs) {
 }
 
 export default function EditProject({ actionData, loaderData }: Route.ComponentProps) {
-  const [form, fields] = useForm({
+  const [form, fields] = useForm<z.input<typeof projectFactsSchema>, z.output<typeof projectFactsSchema>, string[]>({
     lastResult: actionData,
     defaultValue: loaderData.facts,
     constraint: getZodConstraint(projectFactsSchema),

@@ -1,6 +1,7 @@
 import { getFormProps, getInputProps, useForm } from "@conform-to/react";
 import { getZodConstraint, parseWithZod } from "@conform-to/zod/v4";
 import { data, Form, Link, redirect } from "react-router";
+import type { z } from "zod";
 import type { Route } from "./+types/new";
 import { FormErrors } from "~/components/field";
 import { PageTitle } from "~/components/page-title";
@@ -28,7 +29,7 @@ export async function action({ request, context }: Route.ActionArgs) {
 }
 
 export default function NewProject({ actionData, loaderData }: Route.ComponentProps) {
-  const [form, fields] = useForm({
+  const [form, fields] = useForm<z.input<typeof newProjectSchema>, z.output<typeof newProjectSchema>, string[]>({
     lastResult: actionData,
     constraint: getZodConstraint(newProjectSchema),
     onValidate: ({ formData }) => parseWithZod(formData, { schema: newProjectSchema }),
