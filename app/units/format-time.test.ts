@@ -1,3 +1,5 @@
+import fc from "fast-check";
+import { Temporal } from "temporal-polyfill";
 import { describe, expect, it } from "vitest";
 import { epochSeconds, formatDate, formatPeriod, formatTime, zoneClock } from "./format-time";
 
@@ -22,6 +24,7 @@ describe("formatTime", () => {
   it("says so when there is no time", () => {
     expect(formatTime(null, "UTC")).toBe("no time");
     expect(formatTime("soon", "UTC")).toBe("no time");
+    expect(formatTime(1e18, "UTC")).toBe("no time");
     expect(formatDate(undefined, "UTC")).toBe("no date");
   });
 
@@ -43,6 +46,28 @@ describe("zoneClock", () => {
     expect(zoneClock("UTC").iso(seconds)).toBe("2026-10-25T01:30:00Z");
     expect(zoneClock("Europe/Berlin").iso(seconds)).toBe("2026-10-25T02:30:00+01:00");
     expect(zoneClock("Europe/Berlin").iso(seconds - 3600)).toBe("2026-10-25T02:30:00+02:00");
+  });
+
+  it("agrees with the calendar at any moment of any zone, in any order", () => {
+    const zones = ["UTC", "Europe/Dublin", "America/St_Johns", "Asia/Kathmandu", "Australia/Lord_Howe", "+05:30"];
+    fc.assert(
+      fc.property(fc.constantFrom(...zones), fc.array(fc.integer({ min: 0, max: 2.5e9 })), (zone, moments) => {
+        const clock = zoneClock(zone);
+        for (const seconds of moments) {
+          const calendar = Temporal.Instant.fromEpochMilliseconds(seconds * 1000).toZonedDateTimeISO(zone);
+          expect(clock.iso(seconds).slice(0, 19)).toBe(calendar.toPlainDateTime().toString({ smallestUnit: "second" }));
+          expect(epochSeconds(clock.iso(seconds))).toBe(seconds);
+        }
+      }),
+    );
+  });
+
+  it("changes its offset at the very second (Europe/Dublin, 2026-10-25 01:00 UTC)", () => {
+    const change = epochSeconds("2026-10-25T01:00:00Z");
+    const clock = zoneClock("Europe/Dublin");
+    for (const seconds of [change - 1, change, change - 1, change + 1]) {
+      expect(clock.iso(seconds).endsWith(seconds < change ? "+01:00" : "+00:00")).toBe(true);
+    }
   });
 
   it("finds local midnights across a change of the clock", () => {

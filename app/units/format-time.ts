@@ -38,22 +38,45 @@ export interface ClockTick {
 export function zoneClock(zone: string): ZoneClock {
   const at = (seconds: number) =>
     Temporal.Instant.fromEpochMilliseconds(Math.round(seconds * 1000)).toZonedDateTimeISO(zone);
-  const two = (value: number) => String(value).padStart(2, "0");
+  const offset = offsets(at);
+  const wall = (seconds: number) => new Date((seconds + offset(seconds)) * 1000).toISOString();
   return {
     zone: at(0).timeZoneId,
-    date: (seconds) => at(seconds).toPlainDate().toString(),
-    dateTime(seconds) {
-      const time = at(Math.round(seconds / 60) * 60);
-      return `${time.toPlainDate().toString()} ${two(time.hour)}:${two(time.minute)}`;
-    },
+    date: (seconds) => wall(seconds).slice(0, -14),
+    dateTime: (seconds) =>
+      wall(Math.round(seconds / 60) * 60)
+        .slice(0, -8)
+        .replace("T", " "),
     iso(seconds) {
-      const text = at(seconds).toString({ timeZoneName: "never", smallestUnit: "second", roundingMode: "halfExpand" });
-      return zone === "UTC" ? text.replace(/\+00:00$/, "Z") : text;
+      const whole = Math.round(seconds);
+      return wall(whole).slice(0, -5) + (zone === "UTC" ? "Z" : offsetText(offset(whole)));
     },
     multiples: (from, to, hours) =>
       hours >= 24 ? dayMultiples(at(from), to, hours / 24) : hourMultiples(at, from, to, hours),
     monthStarts: (from, to, months) => monthStarts(at(from), to, months),
   };
+}
+
+/** Seconds that the wall clock is ahead of UTC. Kept from one change of the clock to the next: tables are long. */
+function offsets(at: (seconds: number) => Temporal.ZonedDateTime): (seconds: number) => number {
+  let [from, until, offset] = [Number.POSITIVE_INFINITY, Number.NEGATIVE_INFINITY, 0];
+  return (seconds) => {
+    if (seconds >= from && seconds < until) return offset;
+    const time = at(seconds);
+    // A change at this very moment counts as past.
+    const previous = time.add({ nanoseconds: 1 }).getTimeZoneTransition("previous");
+    const next = time.getTimeZoneTransition("next");
+    from = previous === null ? Number.NEGATIVE_INFINITY : previous.epochMilliseconds / 1000;
+    until = next === null ? Number.POSITIVE_INFINITY : next.epochMilliseconds / 1000;
+    offset = time.offsetNanoseconds / 1e9;
+    return offset;
+  };
+}
+
+function offsetText(seconds: number): string {
+  const minutes = Math.round(Math.abs(seconds) / 60);
+  const two = (value: number) => String(value).padStart(2, "0");
+  return `${seconds < 0 ? "-" : "+"}${two(Math.floor(minutes / 60))}:${two(minutes % 60)}`;
 }
 
 function monthStarts(start: Temporal.ZonedDateTime, to: number, months: number): ClockTick[] {
@@ -110,7 +133,7 @@ function tickOf(time: Temporal.ZonedDateTime): ClockTick {
 export function formatTime(moment: Moment | null | undefined, zone: string): string {
   if (moment === null || moment === undefined) return "no time";
   const seconds = epochSeconds(moment);
-  if (!Number.isFinite(seconds)) return "no time";
+  if (!isTime(seconds)) return "no time";
   const clock = zoneClock(zone);
   return `${clock.dateTime(seconds)} ${clock.zone}`;
 }
@@ -119,7 +142,7 @@ export function formatTime(moment: Moment | null | undefined, zone: string): str
 export function formatDate(moment: Moment | null | undefined, zone: string): string {
   if (moment === null || moment === undefined) return "no date";
   const seconds = epochSeconds(moment);
-  if (!Number.isFinite(seconds)) return "no date";
+  if (!isTime(seconds)) return "no date";
   const clock = zoneClock(zone);
   return `${clock.date(seconds)} ${clock.zone}`;
 }
@@ -128,6 +151,11 @@ export function formatDate(moment: Moment | null | undefined, zone: string): str
 export function formatPeriod(from: Moment, to: Moment, zone: string): string {
   const clock = zoneClock(zone);
   const [start, end] = [epochSeconds(from), epochSeconds(to)];
-  if (!Number.isFinite(start) || !Number.isFinite(end)) return "no time";
+  if (!isTime(start) || !isTime(end)) return "no time";
   return `${clock.dateTime(start)} to ${clock.dateTime(end)} ${clock.zone}`;
+}
+
+/** Within the years that a calendar can hold. */
+function isTime(seconds: number): boolean {
+  return Math.abs(seconds) < 8.64e12;
 }
