@@ -4,6 +4,7 @@
  */
 import type { FitSeverity } from "~/ocean/response";
 import type { Figure } from "~/figures/figure";
+import type { SmallMark } from "~/figures/small-marks";
 
 export type PageSize = "A4" | "Letter";
 
@@ -37,26 +38,14 @@ export interface TitleBlock {
   stamp: string;
 }
 
-/** Numbers of a range mark, in the unit of the row it stands in. */
-export interface RangeMark {
-  value: number;
-  p10?: number;
-  p90?: number;
-  /** A client's limit, drawn dashed. */
-  trigger?: number;
-  /** Ends of the hairline: they hold everything above. */
-  from: number;
-  to: number;
-  colour: ColourToken;
-}
-
 export interface HeadlineRow {
   label: string;
   /** Formatted number, without its unit. */
   value: string;
   /** The unit, and a direction where there is one: `km to 128°`. */
   unit: string;
-  mark: RangeMark | null;
+  /** Band, value and trigger level on a line; null where there is nothing to compare the value with. */
+  mark: SmallMark | null;
   /** The band in words: `31.6 to 32.2 g/kg`. Empty where there is none. */
   band: string;
   remark: string;

@@ -1,10 +1,11 @@
 /** The six headline figures of a response as rows of a memo's first table. */
 import type { Band, Response, TriggerOutcome } from "~/ocean/response";
-import { formatBearing, formatQuantity, formatRange, toDisplay } from "~/units/format-quantity";
+import { formatBearing, formatQuantity, formatRange } from "~/units/format-quantity";
 import { formatTime } from "~/units/format-time";
-import { quantity, type QuantityId } from "~/units/quantities";
+import type { QuantityId } from "~/units/quantities";
 import type { UnitChoices } from "~/units/unit-choices";
-import type { HeadlineRow, RangeMark } from "./document";
+import { bandEnds, bandMark, type SmallMark } from "~/figures/small-marks";
+import type { HeadlineRow } from "./document";
 import { distanceDecimals, hoursText, transportDecimals, type WordsContext } from "./words";
 
 /** Rows in the order of the product: stress, drift, displacement, transport, salinity, then the layer's end. */
@@ -57,10 +58,19 @@ function transport({ headline }: Response, { units, shore }: Context): HeadlineR
   const label = shore ? "Transport across the shore" : "Transport to the east";
   const base = row(label, "transportTotal", across.value, across, units, "", transportDecimals(across.value, units));
   const main = told(across.value);
+  const low = across.p10 ?? Number.NaN;
+  const high = across.p90 ?? Number.NaN;
+  // The value is told by its size and side; so is its band, unless that holds both sides.
+  const oneSided = low * high > 0 && low * across.value > 0;
+  const [near, far] = [Math.abs(low), Math.abs(high)].sort((a, b) => a - b);
+  const decimals = transportDecimals(across.value, units);
   const still = Number(main.number) === 0;
   return {
     ...base,
     value: main.number,
+    band: oneSided
+      ? formatRange(near, far, "transportTotal", units, { decimals })
+      : base.band && `${base.band}, positive ${sides[0]}`,
     unit: still ? main.unit : `${main.unit} ${across.value > 0 ? sides[0] : sides[1]}`,
     remark: [
       ...(shore && !still ? [across.value > 0 ? "favours upwelling" : "favours sinking"] : []),
@@ -141,21 +151,7 @@ function rangeMark(
   { p10, p90 }: Band,
   trigger: number | undefined,
   units: UnitChoices,
-): RangeMark | null {
-  const banded = p10 !== undefined && p90 !== undefined;
-  const shown = [value, ...(banded ? [p10, p90] : []), ...(trigger === undefined ? [] : [trigger])].map((each) =>
-    toDisplay(each, id, units),
-  );
-  if (shown.length < 2 || !shown.every(Number.isFinite)) return null;
-  const low = Math.min(...shown);
-  const high = Math.max(...shown);
-  const room = (high - low || Math.abs(high) || 1) * 0.4;
-  return {
-    value: toDisplay(value, id, units),
-    ...(banded ? { p10: toDisplay(p10, id, units), p90: toDisplay(p90, id, units) } : {}),
-    ...(trigger === undefined ? {} : { trigger: toDisplay(trigger, id, units) }),
-    from: low - room,
-    to: high + room,
-    colour: quantity(id).colour,
-  };
+): SmallMark | null {
+  if ((p10 === undefined || p90 === undefined) && trigger === undefined) return null;
+  return bandMark({ value, p10, p90, trigger, ...bandEnds([value, p10, p90, trigger], id, units) }, id, units);
 }

@@ -1,5 +1,7 @@
+import { bandMark } from "~/figures/small-marks";
 import type { Block, MemoDocument, Run } from "~/memo/document";
 import { CAUTION } from "~/ocean/caution";
+import { DEFAULT_UNITS } from "~/units/unit-choices";
 
 const cell = (text: string): Run[] => [{ text }];
 
@@ -93,7 +95,11 @@ export function sampleMemo(changes: Partial<MemoDocument> = {}): MemoDocument {
             label: "Lowest surface salinity",
             value: "31.9",
             unit: "g/kg",
-            mark: { value: 31.9, p10: 31.6, p90: 32.2, trigger: 32.5, from: 31, to: 34, colour: "rain" },
+            mark: bandMark(
+              { value: 31.9, p10: 31.6, p90: 32.2, trigger: 32.5, from: 31, to: 34 },
+              "salinity",
+              DEFAULT_UNITS,
+            ),
             band: "31.6 to 32.2 g/kg",
             remark: "19 h below 32.5 g/kg",
           },
@@ -101,7 +107,11 @@ export function sampleMemo(changes: Partial<MemoDocument> = {}): MemoDocument {
             label: "Net displacement",
             value: "84",
             unit: "km to 128°",
-            mark: { value: 84, p10: 70, p90: 98, from: 0, to: 120, colour: "drift" },
+            mark: bandMark(
+              { value: 84_000, p10: 70_000, p90: 98_000, from: 0, to: 120_000 },
+              "displacement",
+              DEFAULT_UNITS,
+            ),
             band: "70 to 98 km",
             remark: "5 days",
           },

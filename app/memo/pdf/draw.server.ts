@@ -35,15 +35,7 @@ function drawItem(pdf: TaggedPdf, item: Item, tree: StructTree, outline: Outline
     case "line":
       return artifact(pdf, () => {
         pdf.lineWidth(item.weight).strokeColor(hex(item.colour)).lineCap("butt");
-        if (item.dash) pdf.dash(item.dash, { space: item.dash });
         pdf.moveTo(item.x1, item.y1).lineTo(item.x2, item.y2).stroke();
-        if (item.dash) pdf.undash();
-      });
-    case "box":
-      return artifact(pdf, () => {
-        pdf.save();
-        pdf.fillOpacity(item.opacity).rect(item.x, item.y, item.width, item.height).fill(hex(item.colour));
-        pdf.restore();
       });
   }
 }

@@ -1,24 +1,12 @@
 /** Where the method does and does not apply here, the gravest first. */
-import type { Block, MemoFitNote, Run } from "../document";
-import type { FitSeverity } from "~/ocean/response";
+import type { Block, Run } from "../document";
+import { gravestFirst, SEVERITY_WORDS } from "../fit-words";
 import type { Strip } from "./paginate";
 import { placeTable } from "./place-table";
 import type { Column } from "./scale";
 import type { StructNode } from "./sheet";
 
 type FitNotesBlock = Extract<Block, { kind: "fitNotes" }>;
-
-export const SEVERITY_WORDS: Record<FitSeverity, string> = {
-  doNotUse: "Do not use",
-  caution: "Caution",
-  ok: "Holds",
-};
-const ORDER: FitSeverity[] = ["doNotUse", "caution", "ok"];
-
-/** The gravest first, else in the order given. */
-export function gravestFirst(notes: readonly MemoFitNote[]): MemoFitNote[] {
-  return ORDER.flatMap((severity) => notes.filter((note) => note.severity === severity));
-}
 
 export function placeFitNotes({ notes }: FitNotesBlock, parent: StructNode, column: Column): Strip[] {
   const rows = gravestFirst(notes).map((note): Run[][] => [

@@ -1,5 +1,6 @@
 /** The table that answers the question: one row a headline figure, with its range mark. */
-import type { Block, HeadlineRow, RangeMark } from "../document";
+import type { SmallMark } from "~/figures/small-marks";
+import type { Block, HeadlineRow } from "../document";
 import type { Strip } from "./paginate";
 import { textItem } from "./place-text";
 import { BODY, type Column, HAIRLINE, HEAVY_RULE, LEAD, SMALL } from "./scale";
@@ -9,11 +10,9 @@ import { type TypesetText, typeset } from "./typeset";
 type Headlines = Extract<Block, { kind: "headlines" }>;
 
 /** Shares of the width: label, value, mark, remark. */
-const SHARES = [0.235, 0.245, 0.17, 0.35];
+const SHARES = [0.225, 0.235, 0.2, 0.34];
 const GAP = 12;
 const PAD = 6;
-const BAND_HEIGHT = 6;
-const TICK = 11;
 
 export function placeHeadlines(
   { rows, caption }: Headlines,
@@ -37,7 +36,7 @@ export function placeHeadlines(
     const items: Item[] = [
       ...centred(label, { type: "TH", parent: node, scope: "Row" }, edges[0]!, height),
       ...centred(value, { type: "TD", parent: node }, edges[1]!, height),
-      ...(row.mark ? rangeMark(row.mark, edges[2]!, widths[2]!, height / 2) : []),
+      ...(row.mark ? [drawn(row.mark, edges[2]!, widths[2]!, height / 2)] : []),
       ...centred(remark, { type: "TD", parent: node }, edges[3]!, height),
       { kind: "line", x1: left, x2: left + width, y1: height, y2: height, weight: HAIRLINE, colour: "hairline" },
     ];
@@ -57,34 +56,8 @@ function centred(cell: TypesetText, node: StructNode, x: number, height: number)
   return cell.lines.map((line, index) => textItem(line, node, x, top + index * cell.lineHeight + cell.ascent));
 }
 
-/** A hairline for the scale, a bar for the band, a tick for the value, a dashed tick for a trigger level. */
-function rangeMark(mark: RangeMark, x: number, width: number, middle: number): Item[] {
-  const span = mark.to - mark.from;
-  const at = (value: number) => x + (span > 0 ? (value - mark.from) / span : 0.5) * width;
-  const tick = (value: number, half: number, weight: number, dash?: number): Item => ({
-    kind: "line",
-    x1: at(value),
-    x2: at(value),
-    y1: middle - half,
-    y2: middle + half,
-    weight,
-    colour: dash ? "ink" : mark.colour,
-    ...(dash ? { dash } : {}),
-  });
-  const items: Item[] = [
-    { kind: "line", x1: x, x2: x + width, y1: middle, y2: middle, weight: HAIRLINE, colour: "hairline" },
-  ];
-  if (mark.p10 !== undefined && mark.p90 !== undefined)
-    items.push({
-      kind: "box",
-      x: at(mark.p10),
-      y: middle - BAND_HEIGHT / 2,
-      width: at(mark.p90) - at(mark.p10),
-      height: BAND_HEIGHT,
-      colour: mark.colour,
-      opacity: 0.35,
-    });
-  items.push(tick(mark.value, TICK / 2, 1.4));
-  if (mark.trigger !== undefined) items.push(tick(mark.trigger, TICK / 2 + 1.5, 0.8, 1.6));
-  return items;
+/** The words beside a mark say what it shows, so a screen reader passes over it. */
+function drawn({ svg, width, height }: SmallMark, x: number, room: number, middle: number): Item {
+  const scale = room / width;
+  return { kind: "svg", node: null, x, y: middle - (height * scale) / 2, width: room, height: height * scale, svg };
 }

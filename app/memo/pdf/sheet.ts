@@ -34,8 +34,7 @@ export interface StructNode {
 export type Item =
   | { kind: "text"; node: StructNode | null; x: number; baseline: number; segments: Segment[] }
   | { kind: "svg"; node: StructNode | null; x: number; y: number; width: number; height: number; svg: string }
-  | { kind: "line"; x1: number; y1: number; x2: number; y2: number; weight: number; colour: LineColour; dash?: number }
-  | { kind: "box"; x: number; y: number; width: number; height: number; colour: LineColour; opacity: number }
+  | { kind: "line"; x1: number; y1: number; x2: number; y2: number; weight: number; colour: LineColour }
   /** A node without content, so that a table keeps its cells in place. */
   | { kind: "hollow"; node: StructNode }
   | { kind: "bookmark"; y: number; title: string; level: 1 | 2 };
@@ -70,7 +69,6 @@ export function shift(item: Item, down: number, right = 0): Item {
     case "text":
       return { ...item, x: item.x + right, baseline: item.baseline + down };
     case "svg":
-    case "box":
       return { ...item, x: item.x + right, y: item.y + down };
     case "line":
       return { ...item, x1: item.x1 + right, x2: item.x2 + right, y1: item.y1 + down, y2: item.y2 + down };
@@ -92,7 +90,6 @@ export function asFurniture(items: readonly Item[]): Item[] {
       case "svg":
         return [{ ...item, node: null }];
       case "line":
-      case "box":
         return [item];
     }
   });
