@@ -1,12 +1,5 @@
 /** Why the engine refuses. Codes are fixed: they leave the house in check files and in the API's answers. */
-export const OCEAN_ERROR_CODES = [
-  "INVALID_INPUT",
-  "NONPOSITIVE_DEPTH",
-  "EQUATORIAL",
-  "GAP",
-  "NOT_CONVERGED",
-  "MODEL_UNAVAILABLE",
-] as const;
+export const OCEAN_ERROR_CODES = ["INVALID_INPUT", "NONPOSITIVE_DEPTH", "EQUATORIAL", "GAP", "NOT_CONVERGED"] as const;
 export type OceanErrorCode = (typeof OCEAN_ERROR_CODES)[number];
 
 /** A refusal with a code and a sentence that says what to do. */

@@ -4,6 +4,7 @@ import { fitNotes } from "./fit/fit-notes";
 import { recommendModel } from "./fit/recommend-model";
 import { headlineOf } from "./headline/headline";
 import { responseSeries } from "./headline/response-series";
+import { responseColumn } from "./headline/response-column";
 import { inputHash } from "./input-hash";
 import { describeMethod } from "./method/resolve-method";
 import { runModel } from "./models/run-model";
@@ -20,8 +21,8 @@ import { ENGINE_VERSION } from "./version";
  *   water    → Conservative Temperature and Absolute Salinity of the layer and what lies beneath
  *   storm    → wind at 10 m, interpolated as a vector → stress; rain; heat
  *   method   → every choice that was not made takes its default, and says so
- *   stress   → motion of the layer: steady Ekman, slab or coastal balance
- *   heat, rain → temperature and salinity of the layer
+ *   stress   → motion of the layer: steady Ekman, slab or coastal balance; or of every cell of a column
+ *   heat, rain → temperature and salinity of the layer, or of every cell
  *   all of it → series, headline figures, triggers, fit notes
  *
  * @throws ScenarioInvalid with every problem found, each with its path, code and what to do
@@ -35,6 +36,7 @@ export function estimate(scenario: Scenario): Response {
   return {
     headline: headlineOf(scenario, run, series),
     series,
+    ...(run.column && { column: responseColumn(scenario, run.column) }),
     fitNotes: notes,
     ...recommendModel(run),
     method: describeMethod(run.method, scenario.method ?? {}),

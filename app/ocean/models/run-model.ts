@@ -1,6 +1,7 @@
 import { placeOf, type Place } from "../box/place";
 import { readForcing, type Forcing } from "../forcing/read-forcing";
 import { layerContent } from "../layer/layer-content";
+import { runColumn, type ColumnRecord } from "./column-run";
 import { resolveMethod, type ResolvedMethod } from "../method/resolve-method";
 import type { Motion } from "../motion/motion";
 import { slabMotion } from "../motion/slab-motion";
@@ -37,6 +38,8 @@ export interface ModelRun {
   water: InitialWater;
   motion: Motion;
   layer: LayerState;
+  /** Model `column` only. */
+  column: ColumnRecord | null;
 }
 
 /**
@@ -57,7 +60,13 @@ export function runModel(scenario: Scenario): ModelRun {
   const forcing = readForcing(scenario.storm, law, method.heatInterpolation);
   const stress = stressRecord(forcing, law, method.airDensity, method.timeStep);
   const shared = { place, method, law, forcing, stress, water };
-  return { ...shared, motion: layerMotion(place, method, stress, water), layer: fixedLayer(forcing, water, method) };
+  if (method.model === "column") return { ...shared, ...runColumn(shared) };
+  return {
+    ...shared,
+    column: null,
+    motion: layerMotion(place, method, stress, water),
+    layer: fixedLayer(forcing, water, method),
+  };
 }
 
 function layerMotion(place: Place, method: ResolvedMethod, stress: StressRecord, water: InitialWater): Motion {

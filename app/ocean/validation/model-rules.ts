@@ -15,10 +15,6 @@ export function modelRules(scenario: Scenario): ScenarioProblem[] {
   const problems: ScenarioProblem[] = [];
   const needs = (path: string, message: string) => problems.push({ path, code: "INVALID_INPUT", message });
 
-  if (model === "column") {
-    const message = "Model column is not available yet; choose budget, slab or coastal.";
-    return [{ path: "method.model", code: "MODEL_UNAVAILABLE", message }];
-  }
   const latitude = placeOf(box).latitude;
   if (model === "budget" && method.ekman !== "finiteDepth" && Math.abs(latitude) < EQUATORIAL_LIMIT) {
     const message = `At ${latitude.toFixed(2)}° the steady Ekman balance of model budget does not hold (within ${EQUATORIAL_LIMIT}° of the equator); use model slab or column.`;
