@@ -2,6 +2,8 @@ import { squashedName } from "./column-names";
 import { isValueRole, type ColumnProposal } from "./propose-columns";
 import type { ReadingAnswers, Understood } from "./reading";
 
+const HEIGHT_RULE = "the speed nearest to 10 m, the direction nearest to that height, the gust of the same instrument";
+
 /**
  * Keeps one column for each channel. Of several speeds the one measured nearest to 10 m is taken; the direction is the
  * one nearest to that height and the gust the one of the same instrument; of equals, the first in the file that has
@@ -22,9 +24,10 @@ export function chooseCandidates(
     if (best !== null && candidates.length > 1) {
       const others = candidates.filter((column) => column !== best).map((column) => `“${column.name}”`);
       const confidence = answered(best) ? "answered" : "assumed";
+      const rule = best.height === null || answered(best) ? "" : ` by the rule: ${HEIGHT_RULE}`;
       understood.push({
         what: `Column for ${role}`,
-        taken: `“${best.name}”; ${others.join(", ")} left out`,
+        taken: `“${best.name}”${rule}; ${others.join(", ")} left out`,
         confidence,
       });
     }
@@ -66,13 +69,6 @@ export function chooseCandidates(
     if (!isValueRole(column.role) || chosen.has(column)) return column;
     return { ...column, role: "leftOut" as const, note: `another column was taken for ${column.role}` };
   });
-  if (speed?.height !== null && speed !== null) {
-    understood.push({
-      what: "Rule for several heights",
-      taken: "the speed nearest to 10 m, with the direction and gust of the same height",
-      confidence: "assumed",
-    });
-  }
   return { columns, understood };
 }
 

@@ -16,7 +16,7 @@ const WIND =
   /\b(?:winds?\b|wind(?:speed|dir|gust|geschw|richt|boe|bo|spitze|stark)|windgeschwindigkeit|windrichtung|ventos?|vientos?|vents?\b|wnd|wspd|spd|speed|anemom)/;
 const SPEED =
   /(?:speed|spd|veloc|vitesse|geschw|windstark|force|intensidade|sustain|mean|avg|average|media|moyen|mittel)/;
-const DIRECTION = /(?:\bdir|direc|richtung|bearing|winddir|\bdegt?\b)/;
+const DIRECTION = /(?:\bdir|direc|richtung|bearing|winddir|\bdegt?\b|\bfrom\b|\btowards?\b|\bto\b)/;
 const GUST = /(?:gust|rajada|racha|rafaga|rafale|\bboen?\b|\bbo\b|windbo|windspitze|spitze|peak)/;
 const TEMPERATURE = /(?:temp|tmp|\btair\b|\btwat|celsius|\bt \d+ m\b)/;
 

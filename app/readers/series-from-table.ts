@@ -9,7 +9,7 @@ import { readStamps, type Stamps } from "./read-stamps";
 import type { ChannelName, ReadingAnswers, ReadingQuestion, ReadingStep, SeriesReading, Understood } from "./reading";
 import { assembleSeries, type RowChannel } from "./assemble-series";
 import { scanColumn, type ColumnScan } from "./scan-column";
-import { settleColumn, settleHeatSense, type SettledColumn } from "./settle-columns";
+import { answeredUnit, settleColumn, settleHeatSense, type SettledColumn, type Settling } from "./settle-columns";
 import { columnsOfPlan, findStampColumns } from "./stamp-columns";
 import type { FormatKnowledge, TextTable } from "./text-table";
 import { timeAxis } from "./time-axis";
@@ -139,7 +139,7 @@ function settleAll(
   columns: ColumnProposal[],
   scans: Map<number, ColumnScan>,
   rows: readonly number[],
-  state: Parameters<typeof settleColumn>[3],
+  state: Settling,
 ): SettledColumn[] {
   const settled: SettledColumn[] = [];
   let speedUnit: FileUnit | null = null;
@@ -154,17 +154,15 @@ function settleAll(
     if (column.role === "windSpeed") speedUnit = first.unit;
     const turned = settleHeatSense(first, state);
     settled.push(
-      turned.role === "rain" && column.confidence !== "answered" ? settleCounter(turned, rows, state) : turned,
+      turned.role === "rain" && answeredUnit(column, state.answers) === null
+        ? settleCounter(turned, rows, state)
+        : turned,
     );
   }
   return settled;
 }
 
-function settleCounter(
-  settled: SettledColumn,
-  order: readonly number[],
-  state: Parameters<typeof settleColumn>[3],
-): SettledColumn {
+function settleCounter(settled: SettledColumn, order: readonly number[], state: Settling): SettledColumn {
   const counter = unitById(settled.unit.id === "in" ? "in counter" : "mm counter");
   const amount = settled.unit.quantity === "waterAmount";
   if (!amount || counter === null || !looksLikeCounter(settled.scan.values, order)) return settled;

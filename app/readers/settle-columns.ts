@@ -21,7 +21,7 @@ export function channelOfRole(role: ValueRole): ChannelName {
   return role === "windTowards" ? "windFrom" : role;
 }
 
-interface Settling {
+export interface Settling {
   answers: ReadingAnswers;
   problems: ProblemList;
   lines: readonly number[];
@@ -39,6 +39,10 @@ export function settleColumn(
   if (!isValueRole(column.role)) return null;
   const role = column.role;
   const unit = column.unit ?? unitOfValues(column, role, scan, speedUnit, state);
+  const answer = answeredUnit(column, state.answers);
+  if (answer !== null && column.statedUnit === null && !guessUnit(role, scan, speedUnit).sure) {
+    ask(column, role, unit, unitUnknown(column), state);
+  }
   const missingCodes = column.missingCodes ?? sentinelsOf(column, role, unit, scan, state);
   return { column, role, unit, scan, missingCodes };
 }
@@ -67,18 +71,29 @@ function unitOfValues(
     );
   }
   const asked = !guess.sure && !(role === "windGust" && speedUnit !== null);
-  if (asked) ask(column, role, unit, `The file does not say in which unit “${column.name}” is given.`, state);
+  if (asked) ask(column, role, unit, unitUnknown(column), state);
   return unit;
 }
 
+function unitUnknown(column: ColumnProposal): string {
+  return `The file does not say in which unit “${column.name}” is given.`;
+}
+
+/** The unit that an answer gave a column, or null. */
+export function answeredUnit(column: ColumnProposal, answers: ReadingAnswers): string | null {
+  return answers.columns?.[String(column.index)]?.unit ?? null;
+}
+
 function ask(column: ColumnProposal, role: ValueRole, unit: FileUnit, message: string, state: Settling): void {
+  const answer = answeredUnit(column, state.answers);
   state.questions.push({
     key: "columns",
     column: column.index,
-    needed: state.answers.columns?.[String(column.index)] === undefined,
+    needed: answer === null,
     message,
     options: unitsFor(role).map(({ id, label }) => ({ value: id, label })),
     suggestion: unit.id,
+    ...(answer === null ? {} : { answer }),
   });
 }
 
@@ -179,7 +194,7 @@ export function settleHeatSense(settled: SettledColumn, state: Settling): Settle
   const { column, unit, role, scan } = settled;
   if (
     !hasHeatSense(role) ||
-    column.confidence === "answered" ||
+    answeredUnit(column, state.answers) !== null ||
     column.confidence === "by the format" ||
     statesHeatSense(column.name)
   )

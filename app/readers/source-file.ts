@@ -23,7 +23,7 @@ export function openText(bytes: Uint8Array, fileName: string, problems: ProblemL
     problems.add(
       "error",
       "tooLarge",
-      `${fileName} has ${size} MB; the limit is ${MAX_SERIES_FILE_BYTES / (1024 * 1024)} MB`,
+      `“${fileName}” has ${size} MB; the limit is ${MAX_SERIES_FILE_BYTES / (1024 * 1024)} MB`,
       "Cut it to the days around the storm.",
     );
     return null;
@@ -32,14 +32,14 @@ export function openText(bytes: Uint8Array, fileName: string, problems: ProblemL
     problems.add(
       "error",
       "emptyFile",
-      `${fileName} is empty`,
+      `“${fileName}” is empty`,
       "Check that the download or export was finished, and give it again.",
     );
     return null;
   }
   const binary = binaryKind(bytes);
   if (binary !== null) {
-    problems.add("error", "notText", `${fileName} is ${binary.what}, not a table of text`, binary.toDo);
+    problems.add("error", "notText", `“${fileName}” is ${binary.what}, not a table of text`, binary.toDo);
     return null;
   }
   const decoded = decodeText(bytes);
@@ -47,7 +47,7 @@ export function openText(bytes: Uint8Array, fileName: string, problems: ProblemL
     problems.add(
       "error",
       "notText",
-      `${fileName} is a binary file of a kind that is not known`,
+      `“${fileName}” is a binary file of a kind that is not known`,
       "Export the table as text (CSV) and give that file.",
     );
     return null;
@@ -57,7 +57,7 @@ export function openText(bytes: Uint8Array, fileName: string, problems: ProblemL
     problems.add(
       "error",
       "emptyFile",
-      `${fileName} has no text in it`,
+      `“${fileName}” has no text in it`,
       "Check that the download or export was finished, and give it again.",
     );
     return null;
