@@ -24,7 +24,8 @@ export async function action({ request, context, params }: Route.ActionArgs) {
   return answerRefusal(async () => {
     const form = await receiveForm(request);
     const record = await startStorm(tenant, project, postedName(form), await originalFrom(form), actor.id);
-    return redirect(`../${record.stormId}/records/${record.id}`);
+    const storms = `/o/${params.organisation}/projects/${project.id}/storms`;
+    return redirect(`${storms}/${record.stormId}/records/${record.id}`);
   });
 }
 
