@@ -58,10 +58,11 @@ export function geodesicDistance(from: Position, to: Position): number {
   return WGS84.Inverse(from[1], from[0], to[1], to[0]).s12 ?? 0;
 }
 
-/** Area centroid in the sinusoidal projection (equal-area on the sphere) about the box's own meridian. */
+/** Area centroid in the sinusoidal projection (equal-area on the sphere) about the box's middle meridian. */
 function centroidOf(corners: readonly Position[]): Position {
   const unwrapped = unwrapRing(corners);
-  const [originLongitude, originLatitude] = unwrapped[0];
+  const { west, east, south, north } = ringExtent(corners);
+  const [originLongitude, originLatitude] = [(west + east) / 2, (south + north) / 2];
   const plane = unwrapped.map(([longitude, latitude]): Position => [
     (longitude - originLongitude) * Math.cos((latitude * Math.PI) / 180),
     latitude - originLatitude,

@@ -73,6 +73,7 @@ function toPlainSigns(line: string): string {
     .replace(/[\u2032\u2019\u2018'\u00b4`]/g, "m")
     .replace(/[\u00b0\u00ba\u02da]|deg(rees)?\b/gi, "d")
     .replace(/[nsew](?![a-z])/gi, (letter, at: number, whole: string) => asLetter(letter, whole, at))
+    .replace(/(?<=\d):(?=\d)/g, " ")
     .replace(/[;\t]/g, "|")
     .trim();
 }

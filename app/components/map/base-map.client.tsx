@@ -47,11 +47,13 @@ export default function BaseMap({ view, distanceUnit, label, calm = false, child
       attributionControl={false}
       locale={{ "Map.Title": label }}
       onLoad={({ target }) => target.touchZoomRotate.disableRotation()}
+      onMoveStart={({ target }) => target.getContainer().setAttribute("aria-busy", "true")}
+      onIdle={({ target }) => target.getContainer().setAttribute("aria-busy", "false")}
     >
       <GraticuleLayer colours={colours} />
       {children}
       <NavigationControl position="top-right" showCompass={false} />
-      <ScaleControl position="bottom-right" unit={distanceUnit === "nm" ? "nautical" : "metric"} maxWidth={110} />
+      <ScaleControl position="bottom-left" unit={distanceUnit === "nm" ? "nautical" : "metric"} maxWidth={110} />
       <AttributionControl position="bottom-right" compact={false} />
     </ReactMap>
   );

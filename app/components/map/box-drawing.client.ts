@@ -86,15 +86,19 @@ export class BoxDrawing {
     });
   }
 
-  /** Shows corners that came from elsewhere; those that the drawing itself reported are there already. */
-  show(ring: DrawnRing): void {
-    if (sameRing(ring, this.shown)) return;
+  /**
+   * Shows corners that came from elsewhere; those that the drawing itself reported are there already.
+   * @returns the shape when it is new to the map
+   */
+  show(ring: DrawnRing): Position[] | null {
+    if (sameRing(ring, this.shown)) return null;
     this.shown = ring;
     this.draw.clear();
-    if (ring === null || ring.length < 3) return;
+    if (ring === null || ring.length < 3) return null;
     const id = this.draw.getFeatureId();
     this.draw.addFeatures([{ ...this.toFeature(ring), id }]);
     if (this.draw.getMode() === "select") this.select();
+    return ring;
   }
 
   use(tool: DrawingTool): void {

@@ -1,5 +1,5 @@
 import { useEffect, useEffectEvent, useRef, useState } from "react";
-import { useMap } from "react-map-gl/maplibre";
+import { type MapRef, useMap } from "react-map-gl/maplibre";
 import BaseMap from "./base-map.client";
 import { BoxDrawing } from "./box-drawing.client";
 import type { DrawingTool } from "./box-editor";
@@ -78,7 +78,10 @@ function Drawing({
     };
   }, [map, colours]);
 
-  useEffect(() => drawing.current?.show(ring), [ring]);
+  useEffect(() => {
+    const shape = drawing.current?.show(ring);
+    if (map && shape) bringIntoView(map, shape);
+  }, [map, ring]);
   useEffect(() => drawing.current?.use(tool), [tool]);
 
   const leave = useEffectEvent((event: KeyboardEvent) => {
@@ -93,4 +96,13 @@ function Drawing({
     return () => canvas?.removeEventListener("keyup", onKey);
   }, [map]);
   return null;
+}
+
+/** Corners that were typed may lie far from what the map shows. */
+function bringIntoView(map: MapRef, ring: Position[]): void {
+  const { west, south, east, north } = viewOf([ring]);
+  const corners = [map.project([west, north]), map.project([east, south])];
+  const { clientWidth: width, clientHeight: height } = map.getContainer();
+  if (corners.every(({ x, y }) => x >= 0 && y >= 0 && x <= width && y <= height)) return;
+  map.fitBounds([west, south, east, north], { padding: 64, maxZoom: 11, animate: false });
 }

@@ -5,7 +5,9 @@ import type { MapColours } from "./map-colours.client";
 import { graticule, type Graticule } from "~/area/graticule";
 
 interface Labelled {
-  lines: Graticule;
+  /** Changes only when other lines come into view, so that panning does not send them to the map anew. */
+  lines: FeatureCollection;
+  key: string;
   /** Pixels from the map's left and top edges. */
   places: { key: string; label: string; left?: number; top?: number }[];
 }
@@ -16,7 +18,7 @@ export function GraticuleLayer({ colours }: { colours: MapColours }) {
   const [drawn, setDrawn] = useState<Labelled | null>(null);
   useEffect(() => {
     if (!map) return;
-    const redraw = () => setDrawn(labelled(map));
+    const redraw = () => setDrawn((before) => labelled(map, before));
     redraw();
     map.on("move", redraw);
     map.on("resize", redraw);
@@ -28,7 +30,7 @@ export function GraticuleLayer({ colours }: { colours: MapColours }) {
   if (!drawn) return null;
   return (
     <>
-      <Source id="graticule" type="geojson" data={toGeoJson(drawn.lines)}>
+      <Source id="graticule" type="geojson" data={drawn.lines}>
         <Layer
           id="graticule"
           type="line"
@@ -49,7 +51,7 @@ export function GraticuleLayer({ colours }: { colours: MapColours }) {
 /** Room kept free at the corner where both rows of labels would meet, and at the far ends, pixels. */
 const CLEARANCE = 36;
 
-function labelled(map: MapRef): Labelled {
+function labelled(map: MapRef, before: Labelled | null): Labelled {
   const bounds = map.getBounds();
   const view = { west: bounds.getWest(), south: bounds.getSouth(), east: bounds.getEast(), north: bounds.getNorth() };
   const lines = graticule(view);
@@ -64,8 +66,10 @@ function labelled(map: MapRef): Labelled {
     label,
     top: map.project([(view.west + view.east) / 2, at]).y,
   }));
+  const key = [...lines.meridians, ...lines.parallels].map(({ label }) => label).join();
   return {
-    lines,
+    key,
+    lines: before?.key === key ? before.lines : toGeoJson(lines),
     places: [
       ...meridians.filter(({ left }) => left > CLEARANCE && left < width - 2 * CLEARANCE),
       ...parallels.filter(({ top }) => top > CLEARANCE && top < height - CLEARANCE),

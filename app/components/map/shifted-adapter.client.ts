@@ -18,15 +18,11 @@ export class ShiftedAdapter extends TerraDrawMapLibreGLAdapter<MapLibreMap> {
     this.meridian = meridian;
   }
 
-  override getLngLatFromEvent(event: PointerEvent | MouseEvent): { lng: number; lat: number } {
-    const { lng, lat } = super.getLngLatFromEvent(event);
-    return { lng: lng - this.meridian, lat };
-  }
-
   override project(lng: number, lat: number): { x: number; y: number } {
     return super.project(lng + this.meridian, lat);
   }
 
+  /** Events find their place through here too. */
   override unproject(x: number, y: number): { lng: number; lat: number } {
     const { lng, lat } = super.unproject(x, y);
     return { lng: lng - this.meridian, lat };

@@ -1,0 +1,133 @@
+import { spawnSync } from "node:child_process";
+import fc from "fast-check";
+import { describe, expect, it } from "vitest";
+import { geodesicDistance, measureBox } from "./measure-box";
+import { shortestTurn } from "./ring";
+import type { Position } from "~/ocean/scenario";
+
+const box = (west: number, south: number, east: number, north: number): Position[] => [
+  [west, south],
+  [east, south],
+  [east, north],
+  [west, north],
+];
+
+/** Boxes of 0.01 to 4 degrees anywhere a box may lie, the antimeridian included. */
+const boxes = fc
+  .record({
+    west: fc.double({ min: -180, max: 180, noNaN: true }),
+    south: fc.double({ min: -80, max: 76, noNaN: true }),
+    width: fc.double({ min: 0.01, max: 4, noNaN: true }),
+    height: fc.double({ min: 0.01, max: 4, noNaN: true }),
+  })
+  .map(({ west, south, width, height }) => box(west, south, west + width, south + height));
+
+describe("measureBox", () => {
+  it("gives an octant an eighth of the WGS 84 ellipsoid, 510 065 621.724 km² in all (from a and f, closed form)", () => {
+    // Surface of an oblate ellipsoid: 2π a² (1 + (1 − e²)/e artanh e).
+    const a = 6378.137;
+    const f = 1 / 298.257223563;
+    const e = Math.sqrt(f * (2 - f));
+    const surface = 2 * Math.PI * a ** 2 * (1 + ((1 - e ** 2) / e) * Math.atanh(e));
+    expect(surface).toBeCloseTo(510_065_621.724, 2);
+    const octant: Position[] = [
+      [0, 0],
+      [90, 0],
+      [45, 90],
+    ];
+    expect(measureBox(octant).areaKm2).toBeCloseTo(surface / 8, 3);
+  });
+
+  it("knows a degree of longitude at the equator, π a / 180 with a = 6378.137 km (WGS 84)", () => {
+    expect(geodesicDistance([0, 0], [1, 0]) / 1000).toBeCloseTo((Math.PI * 6378.137) / 180, 6);
+  });
+
+  it("knows the length of the meridian's first degree, 110.574 km (WGS 84 table values, e.g. NGA.SIG.0012)", () => {
+    expect(geodesicDistance([0, 0], [0, 1]) / 1000).toBeCloseTo(110.574, 3);
+  });
+
+  it("puts the centroid of a rectangle on its meridian, a little towards the wider parallel", () => {
+    const { centroid } = measureBox(box(10, 50, 12, 52));
+    expect(centroid[0]).toBeCloseTo(11, 10);
+    expect(centroid[1]).toBeLessThan(51);
+    expect(centroid[1]).toBeGreaterThan(50.97);
+  });
+
+  it("gives f and inertial period at the centroid: 30° has 1 sidereal day (23.934 h)", () => {
+    const { f, inertialPeriodHours } = measureBox(box(-0.001, 29.999, 0.001, 30.001));
+    expect(f).toBeCloseTo(7.292115e-5, 9);
+    expect(inertialPeriodHours).toBeCloseTo(23.934, 2);
+  });
+
+  it("has no inertial period on the equator", () => {
+    expect(measureBox(box(0, -1, 1, 1)).inertialPeriodHours).toBeNull();
+  });
+
+  it("refuses fewer than three corners", () => {
+    expect(() =>
+      measureBox([
+        [0, 0],
+        [1, 1],
+        [0, 0],
+      ]),
+    ).toThrow("at least 3 corners, not 2");
+  });
+
+  it("does not depend on the sense, the first corner, closing, or the turn of longitude", () => {
+    fc.assert(
+      fc.property(boxes, fc.integer({ min: 0, max: 3 }), fc.constantFrom(-360, 0, 360), (ring, start, turn) => {
+        const measured = measureBox(ring);
+        const moved = [...ring.slice(start), ...ring.slice(0, start)].reverse();
+        const other = measureBox([...moved, moved[0]].map(([x, y]): Position => [x + turn, y]));
+        expect(other.areaKm2).toBeCloseTo(measured.areaKm2, 6);
+        expect(other.perimeterKm).toBeCloseTo(measured.perimeterKm, 6);
+        expect(other.centroid[1]).toBeCloseTo(measured.centroid[1], 8);
+        expect(shortestTurn(other.centroid[0] - measured.centroid[0])).toBeCloseTo(0, 8);
+      }),
+    );
+  });
+
+  it("measures the same across the antimeridian as anywhere on that parallel", () => {
+    fc.assert(
+      fc.property(boxes, fc.double({ min: -180, max: 180, noNaN: true }), (ring, away) => {
+        const wrapped = ring.map(([x, y]): Position => [((x + away + 540) % 360) - 180, y]);
+        const [here, there] = [measureBox(ring), measureBox(wrapped)];
+        expect(there.areaKm2 / here.areaKm2).toBeCloseTo(1, 6);
+        expect(there.widthKm / here.widthKm).toBeCloseTo(1, 6);
+        expect(there.f).toBeCloseTo(here.f, 12);
+      }),
+    );
+  });
+});
+
+const python = ["/usr/bin/python3", "python3"].find(
+  (command) => spawnSync(command, ["-c", "import geographiclib"]).status === 0,
+);
+if (!python) process.stdout.write("Skipped: python3-geographiclib is not installed, areas not checked against it.\n");
+
+describe.skipIf(!python)("measureBox against python3-geographiclib (Debian)", () => {
+  it("agrees in area and perimeter to the digits that are printed", () => {
+    const rings = fc.sample(boxes, { numRuns: 60, seed: 7 });
+    const script = `
+import json, sys
+from geographiclib.geodesic import Geodesic
+for ring in json.load(sys.stdin):
+    polygon = Geodesic.WGS84.Polygon()
+    for lon, lat in ring: polygon.AddPoint(lat, lon)
+    n, perimeter, area = polygon.Compute(False, True)
+    print(abs(area) / 1e6, perimeter / 1e3)
+`;
+    const { stdout } = spawnSync(python ?? "python3", ["-c", script], {
+      input: JSON.stringify(rings),
+      encoding: "utf8",
+    });
+    const lines = stdout.trim().split("\n");
+    expect(lines).toHaveLength(rings.length);
+    lines.forEach((line, i) => {
+      const [area, perimeter] = line.split(" ").map(Number);
+      const measured = measureBox(rings[i]);
+      expect(measured.areaKm2 / area).toBeCloseTo(1, 9);
+      expect(measured.perimeterKm / perimeter).toBeCloseTo(1, 11);
+    });
+  });
+});
