@@ -100,7 +100,7 @@ if (!existsSync(process.env.BASEMAP_FILE || path.join(root, process.env.DATA_DIR
   if (code !== 0) say("The base map could not be made; the application runs without it. Try npm run basemap later.");
 }
 if (!buildIsCurrent()) {
-  await step("Building", "npm", ["run", "build"], "The message above names the file; run npm run typecheck for more.");
+  await step("Building", "npm", ["run", "build"], "The message above names the file; npm run typecheck tells more.");
 }
 const command = ["run", "--silent", "galeprint", "--"];
 await step("Preparing the database", "npm", [...command, "migrate"], "Check that the data folder can be written to.");

@@ -27,7 +27,7 @@ const FLAGS = [
  * One browser for the tests of a file; call it at the file's top. A test fails when one of its pages wrote an error to the
  * console or threw.
  */
-export function useBrowser(): TestBrowser {
+export function browserForTests(): TestBrowser {
   let browser: Browser | undefined;
   let errors: string[] = [];
 
