@@ -19,7 +19,7 @@ export interface ZoneClock {
   dateTime(seconds: number): string;
   /** `2026-11-04T20:00:00+00:00`: unambiguous by itself, for tables and files. */
   iso(seconds: number): string;
-  /** Whole hours of the wall clock between two moments that are multiples of `hours` since midnight, ascending. */
+  /** Times between two moments at which the wall clock shows whole multiples of `hours` (a divisor or multiple of 24). */
   multiples(from: number, to: number, hours: number): ClockTick[];
   /** First midnights of every so many months, counted from January of the year 0, between two moments. */
   monthStarts(from: number, to: number, months: number): ClockTick[];
@@ -52,7 +52,7 @@ export function zoneClock(zone: string): ZoneClock {
       return wall(whole).slice(0, -5) + (zone === "UTC" ? "Z" : offsetText(offset(whole)));
     },
     multiples: (from, to, hours) =>
-      hours >= 24 ? dayMultiples(at(from), to, hours / 24) : hourMultiples(at, from, to, hours),
+      hours >= 24 ? dayMultiples(at(from), to, hours / 24) : hourMultiples(offset, from, to, hours),
     monthStarts: (from, to, months) => monthStarts(at(from), to, months),
   };
 }
@@ -104,17 +104,15 @@ function dayMultiples(start: Temporal.ZonedDateTime, to: number, days: number): 
   return ticks;
 }
 
-function hourMultiples(
-  at: (seconds: number) => Temporal.ZonedDateTime,
-  from: number,
-  to: number,
-  hours: number,
-): ClockTick[] {
+function hourMultiples(offset: (seconds: number) => number, from: number, to: number, hours: number): ClockTick[] {
   const ticks: ClockTick[] = [];
   // A quarter of an hour is the finest offset in use, so every full hour of any zone is met.
   for (let seconds = Math.ceil(from / 900) * 900; seconds <= to; seconds += 900) {
-    const time = at(seconds);
-    if (time.minute === 0 && time.hour % hours === 0) ticks.push(tickOf(time));
+    const wall = seconds + offset(seconds);
+    if (wall % (hours * 3600) !== 0) continue;
+    const time = new Date(wall * 1000);
+    const [year, month, day] = [time.getUTCFullYear(), time.getUTCMonth() + 1, time.getUTCDate()];
+    ticks.push({ seconds, year, month, day, hour: time.getUTCHours() });
   }
   return ticks;
 }
