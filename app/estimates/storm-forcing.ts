@@ -4,6 +4,7 @@
  * heat on the straight line between its times, or held where the method says so.
  */
 import { heldAt, linearAt, lastAtOrBefore, medianStep, unionAxis, type Samples } from "./resample";
+import { LONGEST_GAP } from "~/ocean/constants";
 import type { HeatSeries, ScenarioProblem } from "~/ocean/scenario";
 import type { ChannelName } from "~/readers/reading";
 import { formatTime } from "~/units/format-time";
@@ -42,9 +43,6 @@ export interface ReadForcing {
   /** What was taken for granted, a sentence each. */
   assumptions: string[];
 }
-
-/** Pauses that are longer are refused, never bridged: the engine's own limit. Common practice, no source. seconds */
-export const LONGEST_PAUSE = 6 * 3600;
 
 const HEAT_PARTS = ["shortwave", "longwave", "sensible", "latent"] as const;
 
@@ -115,9 +113,9 @@ function pausesOf(time: ArrayLike<number>, from: number, to: number, longest: nu
 
 /** Wind is held to the limit; a channel of longer regular steps (a daily gauge) may pause for as long as it always does. */
 function longestPause(channel: ChannelName, time: ArrayLike<number>): number {
-  if (channel === "windSpeed") return LONGEST_PAUSE;
+  if (channel === "windSpeed") return LONGEST_GAP;
   const step = medianStep(time);
-  return Number.isFinite(step) ? Math.max(LONGEST_PAUSE, 1.5 * step) : LONGEST_PAUSE;
+  return Number.isFinite(step) ? Math.max(LONGEST_GAP, 1.5 * step) : LONGEST_GAP;
 }
 
 function pauseProblem(channel: ChannelName, path: string, pause: Pause, zone: string): ScenarioProblem {
@@ -208,7 +206,7 @@ export function readForcing(input: StormInput, zone: string): ReadForcing {
     [startsAt, Math.min(from, endsAt)],
     [Math.max(to, startsAt), endsAt],
   ]) {
-    if (end - start > LONGEST_PAUSE) {
+    if (end - start > LONGEST_GAP) {
       problems.push(pauseProblem("windSpeed", "storm.windSpeed", { from: start, to: end }, zone));
     } else if (end > start) {
       assumptions.push(
@@ -244,7 +242,13 @@ export function readForcing(input: StormInput, zone: string): ReadForcing {
 
   if (input.windHeight === null) assumptions.push("The record does not state the wind's height: taken as 10 m.");
   if (!channels.rain) assumptions.push("No rain is given: taken as 0 mm/h.");
-  if (!channels.evaporation) assumptions.push("No evaporation is given: taken as 0 mm/h.");
+  if (!channels.evaporation) {
+    assumptions.push(
+      channels.latent && !channels.netHeat
+        ? "No evaporation is given: derived from the latent heat."
+        : "No evaporation is given: taken as 0 mm/h.",
+    );
+  }
   const speeds = axis.map((moment) => windAt(wind, moment));
   const heat = heatOf(input, axis, assumptions);
   return {

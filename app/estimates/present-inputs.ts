@@ -1,0 +1,129 @@
+/** The inputs of an estimate in rows that can be read and checked, in the organisation's units and the project's zone. */
+import type { InputsRegister, RegisteredRecord } from "./inputs-register";
+import { sheetLabel } from "./estimate-code";
+import { formatPosition } from "~/area/format-coordinates";
+import { measureBox } from "~/area/measure-box";
+import type { TriggerLevel } from "~/ocean/scenario";
+import { SALINITY_PER_PSS } from "~/ocean/constants";
+import { formatBearing, formatQuantity } from "~/units/format-quantity";
+import { formatPeriod } from "~/units/format-time";
+import { quantity } from "~/units/quantities";
+import type { UnitChoices } from "~/units/unit-choices";
+
+export interface Row {
+  label: string;
+  value: string;
+}
+
+export interface RecordView {
+  name: string;
+  sourceFileId: string | null;
+  fileName: string | null;
+  sha256: string | null;
+  rows: Row[];
+}
+
+export interface InputsView {
+  box: Row[];
+  corners: string[];
+  storm: Row[];
+  records: RecordView[];
+  water: Row[];
+}
+
+function triggerRow({ quantity: id, side, value, hours }: TriggerLevel, units: UnitChoices): string {
+  return `${quantity(id).name} ${side} ${formatQuantity(value, id, units).text} for ${hours}\u00a0h`;
+}
+
+function recordRows({ origin, provenance }: RegisteredRecord, zone: string, units: UnitChoices): Row[] {
+  if (!provenance) return [{ label: "Origin", value: origin }];
+  const { rows, first, last, windHeight, averagingMinutes, channels, steps, dropped } = provenance;
+  const said = (label: string, values: (string | null)[]): Row[] => {
+    const value = values.filter(Boolean).join("; ");
+    return value === "" ? [] : [{ label, value }];
+  };
+  return [
+    ...said("Format", [provenance.formatLabel]),
+    ...said("Rows", [String(rows)]),
+    ...said("Period", [formatPeriod(first, last, zone)]),
+    ...said("Time zone of the file", [provenance.zone]),
+    ...said("Wind height", [windHeight === null ? null : formatQuantity(windHeight, "depth", units).text]),
+    ...said("Averaging", [averagingMinutes === null ? null : `${averagingMinutes}\u00a0min`]),
+    ...said(
+      "Channels",
+      channels.map(({ channel, unit, count, missing }) => `${channel} (${unit}): ${count} values, ${missing} missing`),
+    ),
+    ...said(
+      "Steps",
+      steps.map(({ label, count }) => `${label}, ${count} values`),
+    ),
+    ...said(
+      "Left out",
+      dropped.map(({ reason, count, firstRow }) => `${count} rows: ${reason} (first in row ${firstRow})`),
+    ),
+  ];
+}
+
+/** Both scales where the numbers are practical, since the engine computes with the absolute one. */
+function salinityText(value: number, { salinityScale }: InputsRegister["water"], units: UnitChoices): string {
+  if (salinityScale === "absolute") return `${formatQuantity(value, "salinity", units, { decimals: 2 }).text}`;
+  return `${value.toFixed(2)}\u00a0PSS-78 as given, about ${(value * SALINITY_PER_PSS).toFixed(2)}\u00a0g/kg`;
+}
+
+export function presentInputs(register: InputsRegister, zone: string, units: UnitChoices): InputsView {
+  const { box, storm, water, method } = register;
+  const { areaKm2, centroid } = measureBox(box.polygon);
+  const given = (value: number | null, id: "depth" | "distance") =>
+    value === null ? "not given" : formatQuantity(value, id, units).text;
+  const below = water.belowTemperature !== null && water.belowSalinity !== null;
+  return {
+    box: [
+      { label: "Study box", value: box.name },
+      { label: "Centre (WGS 84)", value: formatPosition(centroid) },
+      { label: "Area", value: formatQuantity(areaKm2 * 1e6, "area", units).text },
+      { label: "Water depth", value: given(box.waterDepth, "depth") },
+      { label: "Distance to the shore", value: given(box.distanceToShore, "distance") },
+      {
+        label: "Shore normal, pointing offshore",
+        value: box.shoreNormal === null ? "not given" : formatBearing(box.shoreNormal),
+      },
+      {
+        label: "Trigger levels",
+        value: box.triggerLevels.map((level) => triggerRow(level, units)).join("; ") || "none",
+      },
+    ],
+    corners: box.polygon.map((corner) => formatPosition(corner, "decimal", 5)),
+    storm: [
+      { label: "Storm", value: storm.name },
+      {
+        label: "Window",
+        value:
+          storm.startsAt === null || storm.endsAt === null
+            ? "not set"
+            : formatPeriod(storm.startsAt, storm.endsAt, zone),
+      },
+    ],
+    records: storm.records.map((record) => ({
+      name: record.name,
+      sourceFileId: record.sourceFileId,
+      fileName: record.fileName,
+      sha256: record.sha256,
+      rows: recordRows(record, zone, units),
+    })),
+    water: [
+      { label: "Water column", value: water.name },
+      { label: "Source of the numbers", value: water.source || "not given" },
+      {
+        label: "Layer",
+        value: `${formatQuantity(water.temperature, "temperature", units, { decimals: 2 }).text}, ${salinityText(water.salinity, water, units)}, ${formatQuantity(water.layerDepth, "layerDepth", units).text} deep`,
+      },
+      {
+        label: "Water below",
+        value: below
+          ? `${formatQuantity(water.belowTemperature, "temperature", units, { decimals: 2 }).text}, ${salinityText(water.belowSalinity ?? Number.NaN, water, units)}`
+          : "not given",
+      },
+      { label: "Method sheet", value: sheetLabel(method) },
+    ],
+  };
+}

@@ -1,0 +1,116 @@
+/** The figures of a response page, drawn once for each width and kept while they are asked for. */
+import type { InputsRegister } from "./inputs-register";
+import { Recent } from "./recent";
+import type { StormForcing } from "./storm-forcing";
+import { windAtTenMetres } from "./wind-at-ten-metres";
+import { driftTrack, type LocalPosition } from "~/figures/drift-track";
+import type { Figure } from "~/figures/figure";
+import { FIGURE_WIDTHS, type FigureContext } from "~/figures/figure-context";
+import { forcingStack } from "~/figures/forcing-stack";
+import { hodograph } from "~/figures/hodograph";
+import { layerStack } from "~/figures/layer-stack";
+import { serverPlotDocument } from "~/figures/plot-document.server";
+import { stressAndDrift } from "~/figures/stress-and-drift";
+import { measureBox } from "~/area/measure-box";
+import type { Response } from "~/ocean/response";
+import type { Position } from "~/ocean/scenario";
+import type { UnitChoices } from "~/units/unit-choices";
+import { epochSeconds } from "~/units/format-time";
+
+/** The same figure for the page and, without its table, for a telephone. */
+export interface FigurePair {
+  wide: Figure;
+  narrow: Figure;
+}
+
+export interface ResponseFigures {
+  forcing: FigurePair | null;
+  stressAndDrift: FigurePair;
+  layer: FigurePair;
+  track: FigurePair;
+  hodograph: FigurePair;
+}
+
+export interface FigureRequest {
+  response: Response;
+  register: InputsRegister;
+  /** Null where the storm's series are no longer those of the response. */
+  forcing: StormForcing | null;
+  zone: string;
+  units: UnitChoices;
+  estimateCode: string;
+}
+
+const recent = new Recent<ResponseFigures>(32);
+
+const EARTH_RADIUS = 6_371_008.8;
+const RADIANS = Math.PI / 180;
+/** px: a third of the page. */
+const SIDE_WIDTH = 400;
+
+/** Corners in metres from the middle, on a tangent plane: within a thousandth at the size of a box. */
+function localOutline(polygon: Position[]): LocalPosition[] {
+  const [longitude, latitude] = measureBox(polygon).centroid;
+  return polygon.map(([lon, lat]) => {
+    const east = ((lon - longitude + 540) % 360) - 180;
+    return [
+      east * RADIANS * EARTH_RADIUS * Math.cos(latitude * RADIANS),
+      (lat - latitude) * RADIANS * EARTH_RADIUS,
+    ] as const;
+  });
+}
+
+function netHeat(forcing: StormForcing): number[] | undefined {
+  const { heat, time } = forcing;
+  if (!heat) return undefined;
+  const series = [heat.net, heat.shortwave, heat.longwave, heat.sensible, heat.latent].flatMap((part) =>
+    part ? [part] : [],
+  );
+  return time.map((_, index) => series.reduce((sum, part) => sum + part[index], 0));
+}
+
+/** Depth that never changes says nothing through time. */
+function changing(values: number[]): number[] | undefined {
+  return values.some((value) => value !== values[0]) ? values : undefined;
+}
+
+function draw({ response, register, forcing, ...shared }: FigureRequest): ResponseFigures {
+  const { series, headline } = response;
+  const time = series.time.map(epochSeconds);
+  const triggers = headline.triggers;
+  const pair = (make: (context: FigureContext) => Figure, width: number = FIGURE_WIDTHS.page): FigurePair => {
+    const at = (px: number) => make({ ...shared, document: serverPlotDocument(), width: px });
+    const narrow = at(FIGURE_WIDTHS.narrow);
+    return { wide: at(width), narrow: { ...narrow, table: { columns: [], rows: [] } } };
+  };
+  const drivenBy = forcing && {
+    time: forcing.time,
+    windSpeed10: windAtTenMetres(forcing, response.method),
+    windFrom: forcing.windFrom,
+    rainRate: forcing.rain,
+    netHeat: netHeat(forcing),
+  };
+  return {
+    forcing: drivenBy && pair((context) => forcingStack(drivenBy, context)),
+    stressAndDrift: pair((context) => stressAndDrift({ ...series, time, triggers }, context)),
+    layer: pair((context) =>
+      layerStack({ ...series, time, layerDepth: changing(series.layerDepth), triggers }, context),
+    ),
+    track: pair(
+      (context) => driftTrack({ ...series, time, box: localOutline(register.box.polygon) }, context),
+      SIDE_WIDTH,
+    ),
+    hodograph: pair((context) => hodograph({ ...series, time }, context), SIDE_WIDTH),
+  };
+}
+
+export function responseFigures(request: FigureRequest): ResponseFigures {
+  const { response, register, forcing, zone, units, estimateCode } = request;
+  const key = JSON.stringify([
+    [response.inputs, response.engine, zone, units, estimateCode],
+    [register.box.polygon, forcing !== null],
+  ]);
+  const figures = recent.get(key) ?? draw(request);
+  recent.set(key, figures);
+  return figures;
+}

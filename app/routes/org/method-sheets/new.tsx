@@ -1,0 +1,119 @@
+import { getFormProps, getInputProps, getSelectProps, useForm } from "@conform-to/react";
+import { parseWithZod } from "@conform-to/zod/v4";
+import { data, Form, Link, redirect } from "react-router";
+import type { Route } from "./+types/new";
+import { Field, FormErrors } from "~/components/field";
+import { PageTitle } from "~/components/page-title";
+import { SubmitButton } from "~/components/submit-button";
+import { forOrganisation } from "~/db/scoped.server";
+import { METHOD_KEYS, PARAMETERS, type MethodKey } from "~/estimates/method-parameters";
+import { formValues, methodSheetSchema } from "~/estimates/method-sheet-schema";
+import { saveMethodSheet } from "~/estimates/save-method-sheet.server";
+import { allowed } from "~/services/guard.server";
+import { readForm } from "~/services/read-form.server";
+
+/** What most sheets settle; everything else stands below, folded. */
+const FIRST: MethodKey[] = ["model", "dragLaw", "highWindCap", "dampingRate"];
+const REST = METHOD_KEYS.filter((key) => !FIRST.includes(key));
+
+export async function loader({ request, context }: Route.LoaderArgs) {
+  const { organisation } = allowed(context, "project.edit");
+  const from = new URL(request.url).searchParams.get("from");
+  const sheet = from ? await forOrganisation(organisation.id).methodSheets.find(from) : null;
+  return { values: sheet && formValues(sheet.name, sheet.choices), next: sheet ? sheet.version + 1 : null };
+}
+
+export async function action({ request, context }: Route.ActionArgs) {
+  const { organisation } = allowed(context, "project.edit");
+  const submission = await readForm(request, methodSheetSchema);
+  if (submission.status !== "success") return data(submission.reply(), { status: 400 });
+  const { name, choices } = submission.value;
+  const saved = await saveMethodSheet(forOrganisation(organisation.id), name, choices);
+  if (!saved.changed) {
+    const message = `Version ${saved.version} of this sheet says the same already: change something, or give another name.`;
+    return data(submission.reply({ fieldErrors: { name: [message] } }), { status: 400 });
+  }
+  return redirect(`/o/${organisation.slug}/method-sheets`);
+}
+
+export default function NewMethodSheet({ actionData, loaderData }: Route.ComponentProps) {
+  const [form, fields] = useForm<Record<"name" | MethodKey, string>>({
+    lastResult: actionData,
+    defaultValue: loaderData.values ?? undefined,
+    onValidate: ({ formData }) => parseWithZod(formData, { schema: methodSheetSchema }) as never,
+    shouldRevalidate: "onInput",
+  });
+  const field = (key: MethodKey) => {
+    const parameter = PARAMETERS[key];
+    const { errors, id, key: remount } = fields[key];
+    return (
+      <Field
+        key={key}
+        id={id}
+        label={parameter.label}
+        unit={parameter.kind === "number" ? parameter.unit : undefined}
+        hint={parameter.hint}
+        errors={errors}
+        optional
+      >
+        {(described) =>
+          parameter.kind === "choice" ? (
+            <select {...getSelectProps(fields[key])} {...described} key={remount} className="input">
+              <option value="">default</option>
+              {Object.entries(parameter.options).map(([value, label]) => (
+                <option key={value} value={value}>
+                  {label}
+                </option>
+              ))}
+            </select>
+          ) : (
+            <input
+              {...getInputProps(fields[key], { type: "text" })}
+              {...described}
+              key={remount}
+              inputMode="decimal"
+              className="input"
+            />
+          )
+        }
+      </Field>
+    );
+  };
+  const wrongBelow = REST.some((key) => fields[key].errors?.length);
+  return (
+    <>
+      <title>New method sheet · Galeprint</title>
+      <PageTitle>{loaderData.next ? `Method sheet, version ${loaderData.next}` : "New method sheet"}</PageTitle>
+      <Form method="post" {...getFormProps(form)} className="grid max-w-4xl gap-5">
+        <FormErrors errors={form.errors} id={form.errorId} />
+        <Field
+          id={fields.name.id}
+          label="Name"
+          errors={fields.name.errors}
+          hint="The same name as an existing sheet makes its next version."
+          className="max-w-md"
+        >
+          {(described) => (
+            <input
+              {...getInputProps(fields.name, { type: "text" })}
+              {...described}
+              key={fields.name.key}
+              className="input"
+            />
+          )}
+        </Field>
+        <div className="grid items-start gap-5 sm:grid-cols-2">{FIRST.map(field)}</div>
+        <details open={wrongBelow || undefined} className="border-y border-hairline py-3">
+          <summary className="font-bold">All other parameters</summary>
+          <div className="mt-4 grid items-start gap-5 sm:grid-cols-2">{REST.map(field)}</div>
+        </details>
+        <div className="flex gap-2">
+          <SubmitButton busy="Saving…">Save</SubmitButton>
+          <Link to=".." relative="path" className="button">
+            Cancel
+          </Link>
+        </div>
+      </Form>
+    </>
+  );
+}
