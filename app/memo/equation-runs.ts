@@ -1,7 +1,7 @@
 import type { Run } from "./document";
 
 /** `_index`, `^power`, either with one pair of brackets, or the power of ten of a number as `8.84e-6`. */
-const MARKED = /([_^])(?:\(([^()]+)\)|([\p{L}\d]+(?:\.\d+)?))|(?<=\d)e(-?\d+)/gu;
+const MARKED = /([_^])(?:\(([^()]+)\)|([\p{L}\d]+(?:\.\d+)?))|(?<![\d.])1e(-?\d+)|(?<=\d)e(-?\d+)/gu;
 
 /**
  * An equation written as plain text, set as one: `V_abk` lowers, `s^2` raises, `8.84e-6` becomes a power of ten, and
@@ -14,11 +14,12 @@ export function equationRuns(text: string): Run[] {
   };
   let from = 0;
   for (const match of text.matchAll(MARKED)) {
-    const [whole, sign, bracketed, bare, power] = match;
+    const [whole, sign, bracketed, bare, loneTen, power] = match;
     push(text.slice(from, match.index));
-    if (power !== undefined) {
-      push(" × 10");
-      push(power, "super");
+    const exponent = loneTen ?? power;
+    if (exponent !== undefined) {
+      push(loneTen === undefined ? " × 10" : "10");
+      push(exponent, "super");
     } else push(bracketed ?? bare ?? "", sign === "_" ? "sub" : "super");
     from = match.index + whole.length;
   }

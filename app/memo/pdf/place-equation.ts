@@ -15,7 +15,12 @@ const UNIT_WIDTH = 56;
 
 export function placeEquation(block: EquationBlock, parent: StructNode, column: Column): Strip[] {
   const { faces, left, width } = column;
-  const named = lineStrips(typeset([{ text: block.name }], SMALL, width, faces), { type: "P", parent }, left, 9);
+  const named = lineStrips(
+    typeset([{ text: block.name, colour: "ink" }], SMALL, width, faces),
+    { type: "P", parent },
+    left,
+    9,
+  );
   const set = typeset(block.runs, { ...BODY, size: 11 }, width - INDENT - NUMBER_WIDTH, faces);
   const lines = lineStrips(set, { type: "Formula", parent, alt: spoken(block) }, left + INDENT, 3);
   const label = typeset([{ text: `(${block.number})` }], SMALL, NUMBER_WIDTH, faces);
@@ -30,8 +35,9 @@ export function placeEquation(block: EquationBlock, parent: StructNode, column: 
         2,
       )
     : [];
-  const kept = [...named, ...lines].map((strip) => ({ ...strip, keepWithNext: true }));
-  return [...kept, ...symbolStrips(block, parent, column), ...source];
+  // An equation is read with its symbols and its source, so they share a sheet.
+  const all = [...named, ...lines, ...symbolStrips(block, parent, column), ...source];
+  return all.map((strip, index) => ({ ...strip, keepWithNext: index < all.length - 1 }));
 }
 
 function spoken({ name, runs }: EquationBlock): string {
