@@ -80,8 +80,14 @@ export class BoxDrawing {
     this.draw.on("change", (_, type) => {
       if (type === "update" && this.draw.getMode() === "select") this.report(this.events.onPreview);
     });
-    this.draw.on("finish", (_, { action }) => {
-      if (action === "draw") this.events.onDrawn();
+    this.draw.on("finish", (id, { action }) => {
+      if (action === "draw") {
+        // The new shape takes the place of an earlier one.
+        this.draw.removeFeatures(
+          this.boxes().flatMap((box) => (box.id === undefined || box.id === id ? [] : [box.id])),
+        );
+        this.events.onDrawn();
+      }
       this.report(this.events.onCommit);
     });
   }
@@ -119,7 +125,6 @@ export class BoxDrawing {
     if (box?.id !== undefined) this.draw.selectFeature(box.id);
   }
 
-  /** Finished shapes; the last one drawn takes the place of an earlier one. */
   private boxes(): GeoJSONStoreFeatures[] {
     return this.draw.getSnapshot().filter(({ geometry }) => geometry.type === "Polygon");
   }
