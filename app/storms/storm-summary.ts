@@ -1,10 +1,9 @@
+import { LONGEST_GAP } from "~/ocean/constants";
 import type { ChannelName } from "~/readers/reading";
 import { medianStep, type ChannelSeries } from "./channel-series";
 import { withinWindow, type StormWindow } from "./storm-window";
 
 const HOUR = 3600;
-/** The engine refuses to bridge more than this. */
-export const LONGEST_BRIDGED_GAP_HOURS = 6;
 /** A value that holds is not stretched over more than this many usual steps: beyond, the record has a gap. */
 const STEPS_HELD = 1.5;
 
@@ -83,11 +82,13 @@ export function heldTotal({ time, values }: Pick<ChannelSeries, "time" | "values
 /** The channels that the engine needs without a gap. */
 const FORCING: readonly ChannelName[] = ["windSpeed", "rain", "netHeat", "shortwave", "longwave", "sensible", "latent"];
 
+/** Wind is held to the limit; rain or heat of longer regular steps (a daily gauge) may pause as long as it always does. */
 function longGaps({ channel, time }: ChannelSeries, { startsAt, endsAt }: StormWindow): Gap[] {
   if (!FORCING.includes(channel)) return [];
+  const longest = channel === "windSpeed" ? LONGEST_GAP : Math.max(LONGEST_GAP, STEPS_HELD * (medianStep(time) ?? 0));
   const edges = [startsAt, ...time, endsAt];
   return edges
     .slice(1)
     .map((to, index) => ({ channel, from: edges[index], to }))
-    .filter(({ from, to }) => to - from > LONGEST_BRIDGED_GAP_HOURS * HOUR);
+    .filter(({ from, to }) => to - from > longest);
 }

@@ -1,5 +1,5 @@
 import { Temporal } from "temporal-polyfill";
-import { formatTime } from "~/units/format-time";
+import { formatTime, zoneClock } from "~/units/format-time";
 import { firstNotBefore, type ChannelSeries } from "./channel-series";
 
 /** Seconds since 1970-01-01T00:00:00Z. */
@@ -103,12 +103,9 @@ export function withinWindow<S extends Pick<ChannelSeries, "time" | "values">>(s
   return { ...series, time: series.time.slice(from, to), values: series.values.slice(from, to) };
 }
 
-/** `2026-11-04T20:00` on the zone's wall clock, as a `datetime-local` field wants it. */
+/** `2026-11-04 20:00` on the zone's wall clock: for fields, with the zone named beside it. */
 export function wallClock(seconds: number, zone: string): string {
-  return Temporal.Instant.fromEpochMilliseconds(Math.round(seconds / MINUTE) * MINUTE * 1000)
-    .toZonedDateTimeISO(zone)
-    .toPlainDateTime()
-    .toString({ smallestUnit: "minute" });
+  return zoneClock(zone).dateTime(seconds);
 }
 
 export type ReadClock = { seconds: number } | { problem: string };

@@ -5,7 +5,7 @@ export function SampleFile() {
   return (
     <p className="mt-6 text-small text-quiet">
       Nothing at hand?{" "}
-      <a href={SAMPLE_BUOY_FILE} download className="text-slate">
+      <a href={SAMPLE_BUOY_FILE} download className="text-slate underline">
         Download a sample file
       </a>
       : an invented buoy, an invented storm, in an agency's archive format.

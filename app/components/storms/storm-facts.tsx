@@ -61,7 +61,7 @@ export function StormFacts({ window, extent, summary, windHeight, averagingMinut
   ];
   return (
     <>
-      <dl className="grid gap-x-6 gap-y-3 sm:grid-cols-2 lg:grid-cols-4">
+      <dl className="grid gap-x-6 gap-y-3 sm:grid-cols-2 lg:grid-cols-5">
         {facts.map(({ label, value, note }) => (
           <div key={label} className="border-t border-hairline pt-1">
             <dt className="text-small text-quiet">{label}</dt>

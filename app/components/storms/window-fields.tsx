@@ -2,7 +2,7 @@ import { Field } from "~/components/field";
 import type { FormErrorsByField } from "~/storms/refusal";
 
 interface WindowFieldsProps {
-  /** Wall-clock times of `zone`, as `2026-11-04T20:00`. */
+  /** Wall-clock times of `zone`, as `2026-11-04 20:00`. */
   startsAt: string;
   endsAt: string;
   zone: string;
@@ -24,7 +24,9 @@ export function WindowFields({ startsAt, endsAt, zone, errors, hint }: WindowFie
             <input
               {...described}
               key={value}
-              type="datetime-local"
+              inputMode="numeric"
+              autoComplete="off"
+              placeholder="2026-11-04 20:00"
               name={name}
               defaultValue={value}
               required

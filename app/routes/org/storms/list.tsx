@@ -82,7 +82,7 @@ function StormRow({ storm }: { storm: Route.ComponentProps["loaderData"]["storms
   return (
     <tr>
       <td className="min-w-40">
-        <Link to={storm.id} className="font-bold">
+        <Link to={storm.id} className="font-bold underline">
           {storm.name}
         </Link>
       </td>
@@ -102,7 +102,7 @@ function StormRow({ storm }: { storm: Route.ComponentProps["loaderData"]["storms
       <td className="min-w-40">
         {storm.waiting.length === 0 ? (storm.window ? "confirmed" : "no record") : null}
         {storm.waiting.map(({ id, name }) => (
-          <Link key={id} to={`${storm.id}/records/${id}`} className="block">
+          <Link key={id} to={`${storm.id}/records/${id}`} className="block underline">
             confirm {name}
           </Link>
         ))}

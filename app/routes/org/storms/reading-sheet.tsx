@@ -131,7 +131,11 @@ export default function ReadingSheet({ loaderData, actionData }: Route.Component
         Reading sheet: {record.name}
       </PageTitle>
       <p className="max-w-prose text-slate">
-        Read as {reading.formatLabel} for <Link to="../..">{storm.name}</Link>.{" "}
+        Read as {reading.formatLabel} for{" "}
+        <Link to="../.." relative="path" className="underline">
+          {storm.name}
+        </Link>
+        .{" "}
         {record.state === "confirmed"
           ? "It is confirmed; a change here counts once it is confirmed again."
           : "Nothing of it counts before it is confirmed."}

@@ -147,7 +147,7 @@ export default function ShowStorm({ loaderData, actionData }: Route.ComponentPro
         </>
       )}
       <p className="mt-8">
-        <Link to=".." relative="path">
+        <Link to=".." relative="path" className="underline">
           All storms
         </Link>
       </p>

@@ -1,0 +1,90 @@
+import { Link } from "react-router";
+import type { Route } from "./+types/list";
+import { EmptyState, PageTitle } from "~/components/page-title";
+import { WideTable } from "~/components/wide-table";
+import { may } from "~/organisations/permissions";
+import { currentProject } from "~/projects/current-project.server";
+import { presentColumn, type PresentedLayer } from "~/water/present-column";
+import { twoLayersOf } from "~/water/stored-column.server";
+
+export async function loader({ context, params }: Route.LoaderArgs) {
+  const { organisation, tenant, project } = await currentProject(context, params, "project.view");
+  const columns = await tenant.waterColumns.list({ where: { projectId: project.id }, order: [["name", "ASC"]] });
+  return {
+    columns: columns.map((column) => ({
+      id: column.id,
+      name: column.name,
+      source: column.source,
+      ...presentColumn(twoLayersOf(column), organisation.units),
+    })),
+    mayEdit: may(organisation.role, "project.edit"),
+  };
+}
+
+export default function WaterList({ loaderData }: Route.ComponentProps) {
+  const { columns, mayEdit } = loaderData;
+  const describeOne = mayEdit && (
+    <Link to="new" className="button button-primary">
+      New water column
+    </Link>
+  );
+  return (
+    <>
+      <PageTitle actions={columns.length > 0 && describeOne}>Water</PageTitle>
+      {columns.length === 0 ? (
+        <EmptyState title="No water column yet" action={describeOne}>
+          A water column is what the storm finds: a layer with its temperature, salinity and depth, and where they are
+          known those of the water below. Take them from a cast, a mooring or an atlas, and say from which.
+        </EmptyState>
+      ) : (
+        <WideTable label="Water columns">
+          <thead>
+            <tr>
+              <th scope="col">Column</th>
+              <th scope="col">Layer</th>
+              <th scope="col" className="number">
+                Layer depth
+              </th>
+              <th scope="col">Water below</th>
+              <th scope="col" className="number">
+                Density step
+              </th>
+              <th scope="col">Source</th>
+            </tr>
+          </thead>
+          <tbody>
+            {columns.map(({ id, name, source, layer, layerDepth, below, densityStep }) => (
+              <tr key={id}>
+                <td className="min-w-36 font-bold">
+                  {mayEdit ? (
+                    <Link to={id} className="underline">
+                      {name}
+                    </Link>
+                  ) : (
+                    name
+                  )}
+                </td>
+                <td className="min-w-40">
+                  <LayerCell layer={layer} />
+                </td>
+                <td className="number whitespace-nowrap">{layerDepth}</td>
+                <td className="min-w-40">{below ? <LayerCell layer={below} /> : "not given"}</td>
+                <td className="number whitespace-nowrap">{densityStep ?? "not known"}</td>
+                <td className="min-w-48 text-small text-slate">{source}</td>
+              </tr>
+            ))}
+          </tbody>
+        </WideTable>
+      )}
+    </>
+  );
+}
+
+function LayerCell({ layer }: { layer: PresentedLayer }) {
+  return (
+    <>
+      <span className="text-heat">{layer.temperature}</span> · <span className="text-rain">{layer.salinity}</span>
+      <span className="block text-small text-density">{layer.density}</span>
+    </>
+  );
+}
