@@ -86,7 +86,7 @@ export function assembleSeries(parts: SeriesParts): SeriesReading {
       confidence: "by content",
     });
   }
-  const time = Float64Array.from(axis.unique, (row) => utc[row] ?? NaN);
+  const time = pick(utc, axis.unique);
   return {
     kind: "series",
     format: parts.knowledge.id,
@@ -124,7 +124,7 @@ function readChannel(
   meanFrom: number | null,
 ): ChannelReading {
   const statistics = statisticsOf(channel.values, utc, rows);
-  const values = Float64Array.from(axis.unique, (row) => channel.values[row] ?? NaN);
+  const values = pick(channel.values, axis.unique);
   const reading: ChannelReading = {
     unit: CHANNEL_UNITS[name],
     values,
@@ -135,13 +135,18 @@ function readChannel(
   if (name === "rain" || name === "evaporation") {
     const hours = (axis.medianStepSeconds ?? NaN) / 3600;
     const total =
-      channel.amounts === null
-        ? exactSum(rows.map((row) => channel.values[row] ?? NaN)) * hours
-        : exactSum(rows.map((row) => channel.amounts?.[row] ?? NaN));
+      channel.amounts === null ? exactSum(pick(channel.values, rows)) * hours : exactSum(pick(channel.amounts, rows));
     // Twelve digits: the last bits of a long sum of decimals are noise.
     if (Number.isFinite(total)) reading.total = Number(total.toPrecision(12));
   }
   return reading;
+}
+
+/** A plain loop: mapping through an iterator takes ten times as long, and series have millions of values. */
+function pick(values: Float64Array, rows: readonly number[]): Float64Array {
+  const picked = new Float64Array(rows.length);
+  for (let index = 0; index < rows.length; index += 1) picked[index] = values[rows[index] ?? 0] ?? NaN;
+  return picked;
 }
 
 function calmRows(channels: Map<ChannelName, RowChannel>, rows: readonly number[]): Set<number> {

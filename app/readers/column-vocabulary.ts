@@ -67,7 +67,7 @@ export const NAME_RULES: readonly NameRule[] = [
   { role: "windFrom", words: WIND, also: DIRECTION, not: GUST },
   {
     role: "windFrom",
-    words: /^dir\b(?!ect)/,
+    words: /^(?:dir|wd|wdir)\b(?!ect)/,
     whole: [
       "wd",
       "wdir",

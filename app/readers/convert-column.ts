@@ -73,7 +73,8 @@ function checkLimits(
   const component = settled.role === "windU" || settled.role === "windV";
   const low = component ? -limits.high : limits.low;
   const bad: number[] = [];
-  for (const [row, value] of values.entries()) {
+  for (let row = 0; row < values.length; row += 1) {
+    const value = values[row] ?? NaN;
     if (Number.isNaN(value) || (value >= low - SLACK && value <= limits.high + SLACK)) continue;
     const raw = settled.scan.values[row] ?? NaN;
     const where = { row: lines[row] ?? 0, column: settled.column.name };

@@ -56,7 +56,8 @@ export function seriesFromTable(
   const chosen = chooseCandidates(proposals, hasValues, answers);
   understood.push(...chosen.understood);
 
-  const timed = [...stamps.utc.keys()].filter((row) => !Number.isNaN(stamps.utc[row]));
+  const timed: number[] = [];
+  for (let row = 0; row < stamps.utc.length; row += 1) if (!Number.isNaN(stamps.utc[row])) timed.push(row);
   const rough = timeAxis(stamps.utc, timed, () => true);
   const state = { answers, problems, lines: table.lines, understood, questions };
   const settled = settleAll(chosen.columns, scans, rough.unique, state);

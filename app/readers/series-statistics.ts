@@ -2,10 +2,11 @@ import { isoFromSeconds } from "./stamp-text";
 import { componentsOfWind, windFromComponents } from "./wind-vectors";
 
 /** Sum without growing rounding error (Neumaier 1974, doi:10.1002/zamm.19740540106); NaN is passed over. */
-export function exactSum(values: Iterable<number>): number {
+export function exactSum(values: ArrayLike<number>): number {
   let sum = 0;
   let lost = 0;
-  for (const value of values) {
+  for (let index = 0; index < values.length; index += 1) {
+    const value = values[index] ?? NaN;
     if (Number.isNaN(value)) continue;
     const next = sum + value;
     lost += Math.abs(sum) >= Math.abs(value) ? sum - next + value : value - next + sum;

@@ -25,7 +25,8 @@ export function findLayout(split: SplitRows): TableLayout | null {
   const { rows } = split;
   const kinds = rows.slice(0, SEARCHED).map(kindOf);
   const width = commonWidth(rows);
-  const stamped = kinds.filter((kind) => kind.stamps > 0).length > 0.3 * kinds.filter((kind) => kind.filled > 0).length;
+  const digital = kinds.filter((kind) => kind.numbers + kind.stamps > 0);
+  const stamped = digital.filter((kind) => kind.stamps > 0).length > 0.3 * digital.length;
   const isRecord = (index: number): boolean => {
     const kind = index < kinds.length ? kinds[index] : kindOf(rows[index] ?? []);
     if (kind === undefined || kind.filled === 0) return false;
@@ -76,16 +77,18 @@ function commonWidth(rows: readonly string[][]): number {
   return width;
 }
 
-/** A row at the foot that is no record: blank, a remark, or a mean or total under a word. */
+const SUMMARY =
+  /^(?:mean|average|avg|media|moyenne|mittel\w*|total|sum|suma|soma|somme|summe|max\w*|min\w*|std\w*|count|n|end|eof|source|note\w*)\b/i;
+
+/**
+ * A row at the foot that is no record: blank, a remark, or a mean or total under a word. A full row of numbers under any
+ * other word is a record with an unreadable time.
+ */
 function isNote(cells: readonly string[], width: number): boolean {
   const kind = kindOf(cells);
   const first = tidyCell(cells.find((cell) => cell.trim() !== "") ?? "").trim();
-  return (
-    kind.filled === 0 ||
-    (/\p{L}/u.test(first) && kind.stamps === 0) ||
-    /^[*#;"']/.test(first) ||
-    (kind.stamps === 0 && kind.filled < 0.3 * width)
-  );
+  if (kind.filled === 0 || /^[*#;"']/.test(first) || (kind.stamps === 0 && SUMMARY.test(first))) return true;
+  return kind.stamps === 0 && kind.numbers < 0.5 * width;
 }
 
 function findHeader(
