@@ -66,8 +66,9 @@ function pressureResponse(setting: FiniteDepthSetting) {
   const { f, depth, eddyViscosity } = setting;
   const lambda = ekmanWavenumber(setting);
   if (modulus(lambda) * depth < WEAK_ROTATION) {
+    const lambdaH2 = multiply(scale(lambda, depth), scale(lambda, depth));
     return {
-      transport: complex(depth ** 3 / (3 * eddyViscosity)),
+      transport: scale(subtract(complex(1), scale(lambdaH2, 2 / 5)), depth ** 3 / (3 * eddyViscosity)),
       currentAt: (z: number) => complex((depth * depth - z * z) / (2 * eddyViscosity)),
     };
   }

@@ -7,7 +7,7 @@ const FRICTIONAL = 0.5;
 export const waterDepth: Indicator = ({ place, ekmanDepth, method }) => {
   if (place.waterDepth === null || ekmanDepth === null) return null;
   const value = place.waterDepth / ekmanDepth;
-  const aware = method.model === "coastal" || method.ekman === "finiteDepth";
+  const aware = method.model === "coastal" || method.model === "column" || method.ekman === "finiteDepth";
   const depths = `Water depth ${place.waterDepth.toFixed(0)} m against an Ekman depth of ${ekmanDepth.toFixed(0)} m`;
   const source = "Ekman (1905), finite depth; computed here";
   if (value >= DEEP) {

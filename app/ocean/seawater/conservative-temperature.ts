@@ -1,8 +1,7 @@
 import { HEAT_CAPACITY } from "../constants";
 import { OceanError } from "../errors";
 import { requireSeawater } from "../guards";
-import { POTENTIAL_ENTHALPY } from "./gibbs-coefficients";
-import { polynomial2 } from "./polynomial";
+import { potentialEnthalpy, potentialEnthalpySlope } from "./gibbs-polynomials";
 import { SALINITY_SCALE } from "./specific-volume";
 
 /**
@@ -15,7 +14,7 @@ import { SALINITY_SCALE } from "./specific-volume";
  */
 export function conservativeFromPotential(SA: number, pt: number): number {
   requireSeawater(SA, pt, 0);
-  return polynomial2(POTENTIAL_ENTHALPY, Math.sqrt(SALINITY_SCALE * SA), pt / 40) / HEAT_CAPACITY;
+  return potentialEnthalpy(Math.sqrt(SALINITY_SCALE * SA), pt / 40) / HEAT_CAPACITY;
 }
 
 /**
@@ -26,12 +25,11 @@ export function conservativeFromPotential(SA: number, pt: number): number {
  */
 export function potentialFromConservative(SA: number, CT: number): number {
   requireSeawater(SA, CT, 0);
+  const x = Math.sqrt(SALINITY_SCALE * SA);
   let pt = CT;
-  const step = 1e-3;
   for (let iteration = 0; iteration < 20; iteration++) {
-    const miss = conservativeFromPotential(SA, pt) - CT;
-    const slope = (conservativeFromPotential(SA, pt + step) - conservativeFromPotential(SA, pt - step)) / (2 * step);
-    const correction = miss / slope;
+    const miss = potentialEnthalpy(x, pt / 40) - CT * HEAT_CAPACITY;
+    const correction = (40 * miss) / potentialEnthalpySlope(x, pt / 40);
     pt -= correction;
     if (Math.abs(correction) < 1e-12) return pt;
   }

@@ -1,9 +1,8 @@
 import { CELSIUS_ZERO, HEAT_CAPACITY, STANDARD_SALINITY } from "../constants";
 import { OceanError } from "../errors";
 import { requireSeawater } from "../guards";
-import { ENTROPY_PART, ENTROPY_PART_SURFACE, GIBBS_CURVATURE_SURFACE } from "./gibbs-coefficients";
 import { conservativeFromPotential, potentialFromConservative } from "./conservative-temperature";
-import { polynomial2, polynomial3 } from "./polynomial";
+import { entropyPart, entropyPartAtSurface, gibbsCurvatureAtSurface } from "./gibbs-polynomials";
 import { SALINITY_SCALE } from "./specific-volume";
 
 /**
@@ -19,8 +18,8 @@ export function potentialFromInSitu(SA: number, t: number, p: number): number {
   requireSeawater(SA, t, p);
   if (p === 0) return t;
   const x = Math.sqrt(SALINITY_SCALE * SA);
-  const target = -polynomial3(ENTROPY_PART, x, t / 40, p / 1e4) / 40;
-  const entropyMiss = (pt: number) => -polynomial2(ENTROPY_PART_SURFACE, x, pt / 40) / 40 - target;
+  const target = entropyPart(x, t / 40, p / 1e4);
+  const entropyMiss = (pt: number) => entropyPartAtSurface(x, pt / 40) - target;
 
   let pt = firstGuess(SA, t, p);
   let slope = HEAT_CAPACITY / ((CELSIUS_ZERO + pt) * (1 - 0.05 * (1 - SA / STANDARD_SALINITY)));
@@ -28,7 +27,7 @@ export function potentialFromInSitu(SA: number, t: number, p: number): number {
     const old = pt;
     const miss = entropyMiss(old);
     pt = old - miss / slope;
-    slope = -polynomial2(GIBBS_CURVATURE_SURFACE, x, (pt + old) / 2 / 40) / 1600;
+    slope = -gibbsCurvatureAtSurface(x, (pt + old) / 80);
     pt = old - miss / slope;
   }
   return pt;
