@@ -59,7 +59,7 @@ function Numbers({ figure, csvHref }: { figure: Figure; csvHref?: string }) {
                 <th
                   key={column}
                   scope="col"
-                  className={`sticky top-0 border-b border-ink bg-paper py-1 pr-4 align-bottom font-bold ${isNumeric(unit) ? "text-right" : ""}`}
+                  className={`sticky top-0 min-w-24 border-b border-ink bg-paper py-1 pr-4 align-bottom font-bold ${isNumeric(unit) ? "text-right" : ""}`}
                 >
                   {name}
                   {unit !== "" && <span className="whitespace-nowrap font-normal"> ({unit})</span>}
@@ -144,5 +144,6 @@ function save(fileName: string, type: string, content: string): void {
   link.href = address;
   link.download = fileName;
   link.click();
-  URL.revokeObjectURL(address);
+  // Some browsers read it only after the click has been handled.
+  setTimeout(() => URL.revokeObjectURL(address), 60_000);
 }

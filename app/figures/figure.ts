@@ -4,6 +4,8 @@ export interface FigureColumn {
   name: string;
   /** Empty for text and times. */
   unit: string;
+  /** To read it by on a page, one more than the methods support; files carry the numbers unrounded. */
+  decimals?: number;
 }
 
 export interface FigureTable {

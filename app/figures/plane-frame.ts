@@ -38,7 +38,7 @@ export function planeFrame(x: ArrayLike<number>, y: ArrayLike<number>, width: nu
   const perPx = Math.max(xSpan / innerWidth, ySpan / innerHeight);
   const xDomain = around(xMiddle, perPx * innerWidth);
   const yDomain = around(yMiddle, perPx * innerHeight);
-  const axis = niceAxis(0, perPx * innerWidth, Math.max(3, Math.floor(innerWidth / 55)));
+  const axis = niceAxis(0, perPx * innerWidth, Math.min(10, Math.max(3, Math.floor(innerWidth / 45))));
   const step = (axis.ticks[1] ?? 1) - (axis.ticks[0] ?? 0);
   return {
     width,

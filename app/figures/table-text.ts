@@ -1,8 +1,10 @@
 import { formatNumber } from "~/units/format-quantity";
 import type { FigureTable } from "./figure";
 
-/** Decimals to read a column by: about six figures for its greatest number, at most three decimals. */
+/** Decimals to read a column by: its own, else about six figures for its greatest number, at most three decimals. */
 export function columnDecimals(table: FigureTable, column: number): number {
+  const own = table.columns[column]?.decimals;
+  if (own !== undefined) return own;
   let greatest = 0;
   for (const row of table.rows) {
     const value = row[column];

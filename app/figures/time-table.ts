@@ -17,10 +17,10 @@ export function timeTable(time: ArrayLike<number>, channels: TableChannel[], con
   return {
     columns: [
       { name: `time (${clock.zone})`, unit: "" },
-      ...channels.map((channel) => ({
-        name: channel.name,
-        unit: displayUnit(channel.quantity, context.units).unit,
-      })),
+      ...channels.map(({ name, quantity }) => {
+        const { unit, decimals } = displayUnit(quantity, context.units);
+        return { name, unit, decimals: decimals + 1 };
+      }),
     ],
     rows: Array.from({ length: time.length }, (_, index) => [
       clock.iso(time[index] ?? 0),

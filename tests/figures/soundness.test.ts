@@ -108,7 +108,7 @@ describe("figures", () => {
           }
         },
       ),
-      { numRuns: 25 },
+      { numRuns: 12 },
     );
   });
 

@@ -44,10 +44,10 @@ describe("forcing stack", () => {
   it("holds every number in its table, with units and ISO times", () => {
     expect(figure.table.columns).toEqual([
       { name: "time (UTC)", unit: "" },
-      { name: "wind speed at 10 m", unit: "m/s" },
-      { name: "wind direction from", unit: "°" },
-      { name: "rain rate", unit: "mm/h" },
-      { name: "net heat into the sea", unit: "W/m²" },
+      { name: "wind speed at 10 m", unit: "m/s", decimals: 2 },
+      { name: "wind direction from", unit: "°", decimals: 1 },
+      { name: "rain rate", unit: "mm/h", decimals: 2 },
+      { name: "net heat into the sea", unit: "W/m²", decimals: 1 },
     ]);
     expect(figure.table.rows.slice(1, 3)).toEqual([
       ["2026-11-04T21:00:00Z", 25.14, 231, 9.5, -340],
