@@ -1,8 +1,8 @@
 /**
- * Bundles what runs in Node beside the React Router build: the server's entry and, since that build does not bundle
- * worker threads, the worker that computes estimates. Packages stay outside the bundles.
+ * Bundles what runs in Node beside the React Router build: the server's entry, the operator's command line (for images
+ * without the tools of development) and, since that build does not bundle worker threads, the worker that computes
+ * estimates. Packages stay outside the bundles.
  */
-import { existsSync } from "node:fs";
 import { fileURLToPath } from "node:url";
 import { build } from "esbuild";
 
@@ -10,8 +10,9 @@ const root = fileURLToPath(new URL("../..", import.meta.url));
 
 const bundles = [
   { from: "app/server.ts", to: "build/start.mjs" },
+  { from: "app/cli/galeprint.ts", to: "build/galeprint.mjs" },
   { from: "app/estimates/estimate-worker.ts", to: "build/worker/estimate-worker.mjs" },
-].filter(({ from }) => existsSync(`${root}/${from}`));
+];
 
 await Promise.all(
   bundles.map(({ from, to }) =>

@@ -17,7 +17,12 @@ const BUILD_SOURCES = [
   "react-router.config.ts",
   "tsconfig.json",
 ];
-const BUILD_RESULTS = ["build/server/index.js", "build/start.mjs"];
+const BUILD_RESULTS = [
+  "build/server/index.js",
+  "build/start.mjs",
+  "build/galeprint.mjs",
+  "build/worker/estimate-worker.mjs",
+];
 
 /** The file of a program on the PATH, or undefined. */
 export function findProgram(...names) {
