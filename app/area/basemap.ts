@@ -1,7 +1,7 @@
 /** What the builder, the server and the map all need to agree on about the basemap. */
 
 /** Raised when the way of cutting changes: an older file is then cut anew and browsers fetch its tiles again. */
-export const BASEMAP_RECIPE = "land-1";
+export const BASEMAP_RECIPE = "land-2";
 
 /** Layer of the vector tiles that holds land as polygons. */
 export const LAND_LAYER = "land";

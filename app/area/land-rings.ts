@@ -20,13 +20,18 @@ export type LandPolygon = LandRing[];
 /** How far land that ends at 180° is carried on past the world's edge, so that no coast is drawn along the seam. */
 const SEAM_OVERHANG = 0.5 / 360;
 
+/** The source has simplified most of its lakes to triangles, which tell nothing of their shape: they count as land. */
+const FEWEST_LAKE_POINTS = 5;
+
 /**
  * Projects a GeoJSON polygon (longitude, latitude in degrees) to the world square and weighs every point for
- * simplification.
+ * simplification. Lakes of three corners are left out.
  * @param finest squared distance (world-square units) below which points need no weight
  */
-export function projectPolygon(rings: readonly (readonly number[])[][] | number[][][], finest: number): LandPolygon {
-  return rings.map((ring) => projectRing(ring as number[][], finest));
+export function projectPolygon(rings: readonly (readonly (readonly number[])[])[], finest: number): LandPolygon {
+  return rings
+    .filter((ring, i) => i === 0 || ring.length >= FEWEST_LAKE_POINTS)
+    .map((ring) => projectRing(ring, finest));
 }
 
 function projectRing(ring: readonly (readonly number[])[], finest: number): LandRing {

@@ -8,7 +8,7 @@ import { shareOfLand, type TilePlace, tilesUnder } from "./share-of-land";
 import { basemapState, readTile } from "./tiles.server";
 
 /**
- * Share of a box that land covers, 0…1, by the basemap's finest tiles (coast at 100 m); lakes count as water.
+ * Share of a box that land covers, 0…1, by the basemap's finest tiles (coast at 100 m); larger lakes count as water.
  * @param polygon [longitude, latitude] in degrees, open or closed, also across ±180
  * @returns null when there is no basemap
  */
