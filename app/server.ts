@@ -1,7 +1,6 @@
 import { createServer, type RequestListener, type Server } from "node:http";
 import path from "node:path";
 import { fileURLToPath, pathToFileURL } from "node:url";
-import { createRequestHandler } from "@react-router/express";
 import type { ServerBuild } from "react-router";
 import { config, ConfigurationError, type Config } from "~/services/config.server";
 import { createApplication } from "~/services/http/application.server";
@@ -36,6 +35,8 @@ async function start(settings: Config): Promise<void> {
   const port = await listen(server, settings);
   if (!process.env.PUBLIC_URL) process.env.PUBLIC_URL = `http://localhost:${port}`;
 
+  // Loads React, which picks its build by NODE_ENV: not before that is set.
+  const { createRequestHandler } = await import("@react-router/express");
   const { databaseReadiness } = await import("~/db/readiness.server");
   const { closeDatabase } = await import("~/db/connection.server");
   onShutdown("readiness check's database connection", closeDatabase);
