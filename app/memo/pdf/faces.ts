@@ -12,7 +12,7 @@ export interface FaceStyle {
 export type Coverage = (face: string, codePoint: number) => boolean;
 
 /** Files in the order in which they are asked for a character. */
-const SCRIPTS = ["latin", "latin-ext", "greek", "cyrillic", "vietnamese", "greek-ext", "cyrillic-ext"] as const;
+const SCRIPTS = ["latin", "latin-ext", "greek", "cyrillic", "vietnamese", "cyrillic-ext"] as const;
 type Script = (typeof SCRIPTS)[number];
 
 /** Operators, arrows and roots, which the text family has in no style. */

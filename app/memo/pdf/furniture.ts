@@ -5,7 +5,7 @@ import { titleBlockCells } from "../title-block";
 import { textItem } from "./place-text";
 import { type Column, FINE_PRINT, FURNITURE, HAIRLINE, HEAVY_RULE, INK_RULE, SMALL } from "./scale";
 import { type Geometry, type Item, PAGE_POINTS } from "./sheet";
-import { type Typefaces, typeset } from "./typeset";
+import { type Line, type Typefaces, typeset } from "./typeset";
 
 const SIDE = 48;
 const HEAD_TOP = 40;
@@ -113,7 +113,7 @@ function titleBlock(memo: MemoDocument, number: number, count: number, column: C
     if (index > 0) items.push(line(x, top, x, bottom, INK_RULE));
     const name = typeset([{ text: label, colour: "slate" }], { ...FURNITURE, size: 6.5 }, room, faces);
     const text = typeset([{ text: value }], FURNITURE, room, faces);
-    const shown = text.lines.length > CELL_LINES ? shortened(value, room, faces) : text.lines;
+    const shown = text.lines.length > CELL_LINES ? shortened(text.lines, room, faces) : text.lines;
     const nameLine = name.lines[0];
     if (nameLine) items.push(textItem(nameLine, null, x + CELL_PAD, top + CELL_PAD + name.ascent));
     shown.forEach((part, at) =>
@@ -125,13 +125,14 @@ function titleBlock(memo: MemoDocument, number: number, count: number, column: C
 }
 
 /** As much of a value as the cell holds, and an ellipsis; the whole stands in the memo's own text. */
-function shortened(value: string, room: number, faces: Typefaces) {
-  const letters = [...value];
-  for (let keep = letters.length - 1; keep > 0; keep--) {
-    const { lines } = typeset([{ text: `${letters.slice(0, keep).join("").trimEnd()}…` }], FURNITURE, room, faces);
-    if (lines.length <= CELL_LINES) return lines;
+function shortened(lines: readonly Line[], room: number, faces: Typefaces): Line[] {
+  const fitting = lines.slice(0, CELL_LINES).flatMap((part) => part.segments.map((segment) => segment.text));
+  const letters = [...fitting.join("").trimEnd()];
+  for (;;) {
+    const set = typeset([{ text: `${letters.join("").trimEnd()}…` }], FURNITURE, room, faces);
+    if (set.lines.length <= CELL_LINES || letters.length === 0) return set.lines.slice(0, CELL_LINES);
+    letters.pop();
   }
-  return [];
 }
 
 function footCaution(memo: MemoDocument, column: Column): Item[] {

@@ -54,7 +54,7 @@ const DESCENDER = 0.244;
 type Piece = Omit<Segment, "x"> & { space: boolean; breakAfter: boolean };
 
 /**
- * Breaks runs into lines no wider than `width`; a line feed starts a new one. A word that is wider than the line is
+ * Breaks runs into lines no wider than `width`; a line feed starts a new one, several no more than one. A word that is wider than the line is
  * broken after a separator where it has one, else between letters. No runs give no lines.
  */
 export function typeset(runs: readonly Run[], style: TextStyle, width: number, faces: Typefaces): TypesetText {
@@ -79,7 +79,7 @@ function paragraphsOf(runs: readonly Run[]): Run[][] {
       if (text !== "") paragraphs.at(-1)!.push({ ...run, text });
     });
   }
-  return paragraphs.filter((paragraph, index) => paragraph.length > 0 || (index > 0 && index < paragraphs.length - 1));
+  return paragraphs.filter((paragraph) => paragraph.length > 0);
 }
 
 /** Words, spaces, and the parts of words that a line may end after (`south-` of `south-east`; never within a date or a number). */
