@@ -1,4 +1,5 @@
 import { CAUTION } from "./caution";
+import { withBands } from "./ensemble/run-ensemble";
 import { OceanError } from "./errors";
 import { fitNotes } from "./fit/fit-notes";
 import { recommendModel } from "./fit/recommend-model";
@@ -24,6 +25,7 @@ import { ENGINE_VERSION } from "./version";
  *   stress   → motion of the layer: steady Ekman, slab or coastal balance; or of every cell of a column
  *   heat, rain → temperature and salinity of the layer, or of every cell
  *   all of it → series, headline figures, triggers, fit notes
+ *   members   → the same with uncertain inputs varied: a band beside every headline figure
  *
  * @throws ScenarioInvalid with every problem found, each with its path, code and what to do
  */
@@ -34,7 +36,7 @@ export function estimate(scenario: Scenario): Response {
   const series = responseSeries(scenario, run);
   const notes = fitNotes(run);
   return {
-    headline: headlineOf(scenario, run, series),
+    headline: refusing(() => withBands(scenario, headlineOf(scenario, run, series))),
     series,
     ...(run.column && { column: responseColumn(scenario, run.column) }),
     fitNotes: notes,
