@@ -181,7 +181,7 @@ export const FILE_UNITS: readonly FileUnit[] = [
     quantity: "temperature",
     factor: 5 / 9,
     zero: 32,
-    written: ["°f", "ºf", "f", "degf", "fahrenheit", "℉", "degreesf", "degreesfahrenheit"],
+    written: ["°f", "f", "degf", "fahrenheit", "℉", "degreesf", "degreesfahrenheit"],
     source: NIST,
   },
   {
@@ -493,7 +493,9 @@ export function unitById(id: string): FileUnit | null {
  * `MJ` and `mJ`, `hPa` and `HPA` fall together, which does no harm among the units above.
  */
 export function unitKey(written: string): string {
+  // The masculine ordinal is often written for the degree sign, and would be taken apart into an o.
   return written
+    .replaceAll("°")
     .normalize("NFKD")
     .replace(/[\u0300-\u036f]/g, "")
     .toLowerCase()

@@ -146,7 +146,7 @@ export function offsetFromText(text: string | undefined): number | null {
   return match[1] === "-" ? -seconds : seconds;
 }
 
-const SPLIT = /^(\S+|\d{1,2}[ ]\p{L}+\.?[ ]\d{4}|\p{L}+\.? \d{1,2},? \d{4})[T, _]+(\S.*)$/u;
+const SPLIT = /^(\d{1,2} \p{L}+\.? \d{4}|\p{L}+\.? \d{1,2},? \d{4}|\S+)[T, _]+(\S.*)$/u;
 const ISO_T = /^(\d{4}-\d{2}-\d{2}|\d{8})[Tt](\d.*)$/;
 
 /**
