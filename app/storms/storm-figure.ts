@@ -19,6 +19,8 @@ interface StormFigureOptions {
   windHeight: number | null;
   /** Shown on a tinted ground. */
   window?: StormWindow | null;
+  /** A longer table is left out: it would weigh more than the rest of the page. */
+  mostTableRows: number;
 }
 
 const HEAT_PARTS: readonly { channel: ChannelName; label: string; dash: string }[] = [
@@ -40,7 +42,7 @@ const DRAWN: readonly ChannelName[] = [
 /** Wind at its own height, rain and heat as recorded, above one time axis; null where there is none of the three. */
 export function stormFigure(
   series: readonly ChannelSeries[],
-  { id, title, windHeight, window }: StormFigureOptions,
+  { id, title, windHeight, window, mostTableRows }: StormFigureOptions,
   context: FigureContext,
 ): Figure | null {
   const drawn = series.filter(({ channel }) => DRAWN.includes(channel));
@@ -77,7 +79,7 @@ export function stormFigure(
     height,
     svg,
     table: timeTable(
-      time,
+      time.length > mostTableRows ? [] : time,
       drawn.map(({ channel }, index) => ({
         name: CHANNELS[channel].label,
         quantity: CHANNELS[channel].quantity,

@@ -2,7 +2,6 @@ import { data, Form, Link, redirect, useNavigation } from "react-router";
 import type { Route } from "./+types/reading-sheet";
 import { ConfirmButton } from "~/components/confirm-button";
 import { FormErrors } from "~/components/field";
-import { FigureView } from "~/components/figure-view";
 import { PageTitle } from "~/components/page-title";
 import { SectionHeading } from "~/components/section-heading";
 import { ChannelsRead } from "~/components/storms/channels-read";
@@ -12,8 +11,10 @@ import { DifferenceTable } from "~/components/storms/difference-table";
 import { ProblemTable } from "~/components/storms/problem-table";
 import { QuestionField } from "~/components/storms/question-field";
 import { RowsPreview } from "~/components/storms/rows-preview";
+import { SeriesFigure } from "~/components/storms/series-figure";
 import { UnderstoodTable } from "~/components/storms/understood-table";
 import { WindowFields } from "~/components/storms/window-fields";
+import { FIGURE_WIDTHS } from "~/figures/figure-context";
 import { serverPlotDocument } from "~/figures/plot-document.server";
 import { currentProject } from "~/projects/current-project.server";
 import { TIME_ZONES } from "~/projects/project-schema";
@@ -41,11 +42,12 @@ export async function loader({ context, params }: Route.LoaderArgs) {
   const record = await recordOf(tenant, storm.id, params.record);
   const sheet = (await readingSheet(tenant, storm, record)) ?? notFound();
   const { reading, window } = sheet;
-  const figure = stormFigure(
-    sheet.series,
-    { id: "record-as-read", title: "As read", windHeight: reading.windHeight, window },
-    { document: serverPlotDocument(), zone: project.timeZone, units: organisation.units, width: 960 },
-  );
+  const draw = (width: number) =>
+    stormFigure(
+      sheet.series,
+      { id: "record-as-read", title: "As read", windHeight: reading.windHeight, window, mostTableRows: 0 },
+      { document: serverPlotDocument(), zone: project.timeZone, units: organisation.units, width },
+    );
   return {
     storm: { id: storm.id, name: storm.name },
     record: { name: record.name, origin: record.origin, state: record.state, answers: record.answers },
@@ -60,7 +62,8 @@ export async function loader({ context, params }: Route.LoaderArgs) {
     },
     conflicts: sheet.conflicts,
     alsoIn: sheet.alsoIn,
-    figure,
+    figure: draw(FIGURE_WIDTHS.wide),
+    narrowFigure: draw(FIGURE_WIDTHS.narrow),
     zone: project.timeZone,
     zones: TIME_ZONES,
     units: organisation.units,
@@ -178,10 +181,10 @@ export default function ReadingSheet({ loaderData, actionData }: Route.Component
         <ChannelsRead reading={reading} units={loaderData.units} zone={zone} />
         {figure && (
           <div className="mt-5">
-            <FigureView figure={figure} />
+            <SeriesFigure figure={figure} narrow={loaderData.narrowFigure} />
           </div>
         )}
-        <SectionHeading>Confirm</SectionHeading>
+        <SectionHeading id="confirm">Confirm</SectionHeading>
         {window ? (
           <div className="grid max-w-2xl gap-5">
             <WindowFields
@@ -222,7 +225,15 @@ function OpenQuestions({
 }: Pick<Route.ComponentProps, "loaderData"> & { errors: FormErrorsByField }) {
   const { open } = loaderData;
   if (mayConfirm(open))
-    return <p className="border-l-4 border-ink py-1 pl-3">Nothing is open: look it through and confirm.</p>;
+    return (
+      <p className="border-l-4 border-ink py-1 pl-3">
+        Nothing is open: look it through and{" "}
+        <a href="#confirm" className="underline">
+          confirm it
+        </a>
+        .
+      </p>
+    );
   const toMend = open.errors.length;
   return (
     <section aria-label="Open questions" className="border-2 border-ink p-4">

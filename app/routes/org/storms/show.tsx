@@ -1,11 +1,11 @@
 import { Link, redirect } from "react-router";
 import type { Route } from "./+types/show";
 import { ConfirmButton } from "~/components/confirm-button";
-import { FigureView } from "~/components/figure-view";
 import { EmptyState, PageTitle } from "~/components/page-title";
 import { SectionHeading } from "~/components/section-heading";
 import { AddRecord } from "~/components/storms/add-record";
 import { RecordCard } from "~/components/storms/record-card";
+import { SeriesFigure } from "~/components/storms/series-figure";
 import { StormFacts } from "~/components/storms/storm-facts";
 import { StormSettings } from "~/components/storms/storm-settings";
 import { FIGURE_WIDTHS } from "~/figures/figure-context";
@@ -29,6 +29,8 @@ import { postedName } from "~/storms/storm-name";
 import { summariseStorm } from "~/storms/storm-summary";
 import { extentOf, wallClock, windowOf, withinWindow } from "~/storms/storm-window";
 
+const MOST_TABLE_ROWS = 1000;
+
 export async function loader({ context, params }: Route.LoaderArgs) {
   const { organisation, tenant, project } = await currentProject(context, params, "project.view");
   const storm = await stormOf(tenant, project.id, params.storm);
@@ -38,7 +40,7 @@ export async function loader({ context, params }: Route.LoaderArgs) {
   const draw = (width: number) =>
     stormFigure(
       inside,
-      { id: "storm-series", title: storm.name, windHeight: shown.windHeight },
+      { id: "storm-series", title: storm.name, windHeight: shown.windHeight, mostTableRows: MOST_TABLE_ROWS },
       { document: serverPlotDocument(), zone: project.timeZone, units: organisation.units, width },
     );
   return {
@@ -116,7 +118,7 @@ export default function ShowStorm({ loaderData, actionData }: Route.ComponentPro
         <>
           <StormFacts {...loaderData} />
           <div className="mt-5">
-            <FigureView figure={figure} narrow={narrowFigure ?? undefined} csvHref={`${storm.id}/series.csv`} />
+            <SeriesFigure figure={figure} narrow={narrowFigure} csvHref={`${storm.id}/series.csv`} />
           </div>
         </>
       ) : (
@@ -135,7 +137,12 @@ export default function ShowStorm({ loaderData, actionData }: Route.ComponentPro
       </div>
       {mayEdit && (
         <>
-          <AddRecord errors={errors} uploadLimitBytes={loaderData.uploadLimitBytes} hasWindow={window !== null} />
+          <AddRecord
+            key={records.length}
+            errors={errors}
+            uploadLimitBytes={loaderData.uploadLimitBytes}
+            hasWindow={window !== null}
+          />
           <StormSettings name={storm.name} clock={loaderData.clock} zone={loaderData.zone} errors={errors} />
           <div className="mt-10 border-t border-hairline pt-4">
             <ConfirmButton label="Remove the storm" title={`Remove ${storm.name}?`} fields={{ intent: "remove-storm" }}>
