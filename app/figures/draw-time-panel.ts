@@ -18,6 +18,8 @@ export interface DrawnPanel {
 export const PANEL_HEIGHT = 92;
 /** Room for the label of a peak above or below the data. */
 const LABEL_ROOM = 15;
+/** A line at the very top of its axis is still seen whole. */
+const AIR = 3;
 const ARROW_ROOM = 18;
 
 interface Point {
@@ -46,7 +48,7 @@ export function drawTimePanel(panel: TimePanel, frame: TimeFrame): DrawnPanel {
       domain: axis.domain,
       axis: null,
       reverse: panel.downwards === true,
-      insetTop: side === "above" ? LABEL_ROOM : 0,
+      insetTop: side === "above" ? LABEL_ROOM : AIR,
       insetBottom: side === "below" ? LABEL_ROOM : 0,
     },
     marks: [

@@ -14,6 +14,12 @@ describe("timeTicks", () => {
     expect(labels(24 * 30, 280)).toEqual(["11-03", "11-08", "11-13", "11-18", "11-23", "11-28", "12-03"]);
   });
 
+  it("names the date within a day without midnight", () => {
+    const noon = from + 12 * 3600;
+    const ticks = timeTicks(noon, noon + 3 * 3600, 200, zoneClock("UTC"));
+    expect(ticks.map((tick) => tick.label)).toEqual(["11-03 12h", "13h", "14h", "15h"]);
+  });
+
   it("follows the zone's wall clock, not UTC", () => {
     expect(labels(24, 100, "Asia/Kolkata")).toEqual(["12h", "11-04"]);
   });
