@@ -114,7 +114,6 @@ export const FILE_UNITS: readonly FileUnit[] = [
       "degree",
       "degrees",
       "°",
-      "º",
       "°t",
       "°true",
       "gr",
@@ -161,7 +160,6 @@ export const FILE_UNITS: readonly FileUnit[] = [
     zero: 0,
     written: [
       "°c",
-      "ºc",
       "c",
       "degc",
       "deg.c",
@@ -495,7 +493,7 @@ export function unitById(id: string): FileUnit | null {
 export function unitKey(written: string): string {
   // The masculine ordinal is often written for the degree sign, and would be taken apart into an o.
   return written
-    .replaceAll("°")
+    .replaceAll("º", "°")
     .normalize("NFKD")
     .replace(/[\u0300-\u036f]/g, "")
     .toLowerCase()

@@ -58,7 +58,7 @@ describe("readSeries", () => {
       fc.property(fc.array(signs, { maxLength: 200 }), (parts) =>
         expectSound(read(new TextEncoder().encode(parts.join("")))),
       ),
-      { seed: 2, numRuns: 500 },
+      { seed: 2, numRuns: 250 },
     );
   });
 
@@ -81,7 +81,7 @@ describe("readSeries", () => {
         }
         expectSound(read(bytes));
       }),
-      { seed: 3, numRuns: 200 },
+      { seed: 3, numRuns: 100 },
     );
   });
 
@@ -112,7 +112,7 @@ describe("readSeries", () => {
         for (const [index, value] of values.entries())
           expect(value).toBeCloseTo(Number(written[index]) * FACTORS[unit], 9);
       }),
-      { seed: 4, numRuns: 200 },
+      { seed: 4, numRuns: 100 },
     );
   });
 
@@ -132,7 +132,7 @@ describe("readSeries", () => {
         expect(reading.channels.windSpeed?.values).toEqual(wanted.channels.windSpeed?.values);
         expect(reading.duplicates).toBe(repeated.length);
       }),
-      { seed: 5, numRuns: 60 },
+      { seed: 5, numRuns: 25 },
     );
   });
 });
