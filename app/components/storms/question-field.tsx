@@ -63,9 +63,10 @@ export function QuestionField({ question, sheet, errors }: QuestionFieldProps) {
 const idOf = (question: ReadingQuestion) =>
   `answer-${question.key}${question.column === undefined ? "" : `-${question.column}`}`;
 
-function suggested(question: ReadingQuestion): string {
+function suggested(question: ReadingQuestion, unit = ""): string {
   if (question.suggestion === undefined) return "";
-  const label = question.options?.find(({ value }) => value === question.suggestion)?.label ?? question.suggestion;
+  const option = question.options?.find(({ value }) => value === question.suggestion)?.label;
+  const label = `${option ?? question.suggestion} ${unit}`.trim();
   return question.needed ? ` Suggested: ${label}.` : ` As read: ${label}.`;
 }
 
@@ -95,7 +96,7 @@ function ZoneField({
             name="zone"
             list="time-zones"
             defaultValue={question.answer ?? ""}
-            placeholder={question.suggestion}
+            placeholder={question.needed ? undefined : question.suggestion}
             autoComplete="off"
             className="input"
           />
@@ -117,7 +118,7 @@ function NumberField({ question, name, label, unit, errors }: ControlProps & { u
       label={label}
       unit={unit}
       optional={!question.needed}
-      hint={question.message + suggested(question)}
+      hint={question.message + suggested(question, unit)}
       errors={errors[name]}
     >
       {(described) => (
@@ -126,7 +127,7 @@ function NumberField({ question, name, label, unit, errors }: ControlProps & { u
           name={name}
           inputMode="decimal"
           defaultValue={question.answer ?? ""}
-          placeholder={question.suggestion}
+          placeholder={question.needed ? undefined : question.suggestion}
           autoComplete="off"
           className="input max-w-40"
         />

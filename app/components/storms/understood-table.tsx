@@ -25,16 +25,16 @@ export function UnderstoodTable({ reading }: { reading: PresentedReading }) {
       <tbody>
         {[...lines, ...reading.understood].map(({ what, taken, confidence }) => (
           <tr key={`${what} ${taken}`}>
-            <td className="min-w-32">{what}</td>
-            <td className="min-w-52">{taken}</td>
-            <td className="whitespace-nowrap">{confidence}</td>
+            <td>{what}</td>
+            <td className="min-w-36">{taken}</td>
+            <td>{confidence}</td>
           </tr>
         ))}
         {reading.steps.map(({ id, label, channel, count }) => (
           <tr key={`${id} ${channel}`}>
             <td>Conversion</td>
             <td>{label}</td>
-            <td className="whitespace-nowrap">{count === 1 ? "1 value" : `${count} values`}</td>
+            <td>{count === 1 ? "1 value" : `${count} values`}</td>
           </tr>
         ))}
       </tbody>

@@ -8,7 +8,7 @@ import { ChannelsRead } from "~/components/storms/channels-read";
 import { ColumnsTable } from "~/components/storms/columns-table";
 import { ConflictFields } from "~/components/storms/conflict-fields";
 import { DifferenceTable } from "~/components/storms/difference-table";
-import { ProblemTable } from "~/components/storms/problem-table";
+import { ProblemList } from "~/components/storms/problem-list";
 import { QuestionField } from "~/components/storms/question-field";
 import { RowsPreview } from "~/components/storms/rows-preview";
 import { SeriesFigure } from "~/components/storms/series-figure";
@@ -153,7 +153,7 @@ export default function ReadingSheet({ loaderData, actionData }: Route.Component
       >
         <FormErrors errors={errors[WHOLE_FORM]} />
         <OpenQuestions loaderData={loaderData} errors={errors} />
-        <ProblemTable problems={reading.problems} dropped={reading.dropped} />
+        <ProblemList problems={reading.problems} dropped={reading.dropped} />
         <SectionHeading>What was understood</SectionHeading>
         <UnderstoodTable reading={reading} />
         {settled.length > 0 && (

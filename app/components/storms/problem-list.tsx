@@ -2,43 +2,27 @@ import { SectionHeading } from "~/components/section-heading";
 import { WideTable } from "~/components/wide-table";
 import type { ReadingProblem, SeriesReading } from "~/readers/reading";
 
-interface ProblemTableProps {
+interface ProblemListProps {
   problems: ReadingProblem[];
   dropped: SeriesReading["dropped"];
 }
 
 /** What is wrong, where, and what to do; then the rows that were dropped and why. */
-export function ProblemTable({ problems, dropped }: ProblemTableProps) {
+export function ProblemList({ problems, dropped }: ProblemListProps) {
   return (
     <>
       {problems.length > 0 && (
         <>
           <SectionHeading>Problems</SectionHeading>
-          <WideTable label="Problems">
-            <thead>
-              <tr>
-                <th scope="col">Kind</th>
-                <th scope="col" className="number">
-                  Line
-                </th>
-                <th scope="col">Column</th>
-                <th scope="col">What, and what to do</th>
-              </tr>
-            </thead>
-            <tbody>
-              {problems.map(({ severity, code, row, column, message, count }) => (
-                <tr key={`${code} ${row} ${column}`}>
-                  <td className={severity === "error" ? "font-bold text-error" : undefined}>{severity}</td>
-                  <td className="number">{row ?? "–"}</td>
-                  <td>{column ?? "–"}</td>
-                  <td className="min-w-64">
-                    {message}
-                    {count !== undefined && count > 1 && <span className="text-quiet"> Met {count} times.</span>}
-                  </td>
-                </tr>
-              ))}
-            </tbody>
-          </WideTable>
+          <ul className="grid gap-2">
+            {problems.map(({ severity, code, row, column, message, count }) => (
+              <li key={`${code} ${row} ${column}`} className="border-b border-hairline pb-2">
+                <span className={`mr-2 font-bold ${severity === "error" ? "text-error" : ""}`}>{severity}</span>
+                {message}
+                {count !== undefined && count > 1 && <span className="text-quiet"> Met {count} times.</span>}
+              </li>
+            ))}
+          </ul>
         </>
       )}
       {dropped.length > 0 && (
