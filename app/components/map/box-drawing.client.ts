@@ -31,6 +31,8 @@ export class BoxDrawing {
   private readonly meridian: number;
   private readonly events: DrawingEvents;
   private shown: DrawnRing = null;
+  /** While the map is made to follow, its own reports would only echo. */
+  private following = false;
 
   /** @param meridian longitude near the work, degrees: the drawing counts from here */
   constructor(map: MapLibreMap, meridian: number, colours: MapColours, events: DrawingEvents) {
@@ -99,21 +101,26 @@ export class BoxDrawing {
   show(ring: DrawnRing): Position[] | null {
     if (sameRing(ring, this.shown)) return null;
     this.shown = ring;
-    this.draw.clear();
-    if (ring === null || ring.length < 3) return null;
-    const id = this.draw.getFeatureId();
-    this.draw.addFeatures([{ ...this.toFeature(ring), id }]);
-    if (this.draw.getMode() === "select") this.select();
-    return ring;
+    const drawable = ring !== null && ring.length >= 3;
+    this.follow(() => {
+      this.draw.clear();
+      if (drawable) this.draw.addFeatures([{ ...this.toFeature(ring), id: this.draw.getFeatureId() }]);
+      if (drawable && this.draw.getMode() === "select") this.select();
+    });
+    return drawable ? ring : null;
   }
 
   use(tool: DrawingTool): void {
-    if (tool === "edit") {
-      this.draw.setMode("select");
-      this.select();
-    } else {
-      this.draw.setMode(tool);
-    }
+    this.follow(() => {
+      this.draw.setMode(tool === "edit" ? "select" : tool);
+      if (tool === "edit") this.select();
+    });
+  }
+
+  private follow(change: () => void): void {
+    this.following = true;
+    change();
+    this.following = false;
   }
 
   stop(): void {
@@ -131,7 +138,7 @@ export class BoxDrawing {
 
   private report(to: (ring: DrawnRing) => void): void {
     const latest = this.boxes().at(-1);
-    if (!latest || latest.geometry.type !== "Polygon") return;
+    if (this.following || !latest || latest.geometry.type !== "Polygon") return;
     const ring = latest.geometry.coordinates[0]
       .slice(0, -1)
       .map(([longitude, latitude]): Position => [rounded(wrapLongitude(longitude + this.meridian)), rounded(latitude)]);
