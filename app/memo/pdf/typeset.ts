@@ -191,16 +191,20 @@ function toLine(all: readonly Piece[]): Line {
   const segments: Segment[] = [];
   let x = 0;
   let width = 0;
-  for (const { space, breakAfter: _, ...piece } of all) {
+  for (const piece of all) {
     const last = segments.at(-1);
     if (last && joins(last, piece)) {
       last.text += piece.text;
       last.width += piece.width;
-    } else segments.push({ ...piece, x });
+    } else segments.push(segmentAt(piece, x));
     x += piece.width;
-    if (!space) width = x;
+    if (!piece.space) width = x;
   }
   return { segments, width };
+}
+
+function segmentAt({ text, face, size, colour, width, rise, link }: Piece, x: number): Segment {
+  return { text, face, size, colour, x, width, rise, ...(link === undefined ? {} : { link }) };
 }
 
 function joins(left: Segment, right: Omit<Segment, "x">): boolean {
