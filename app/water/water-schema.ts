@@ -21,15 +21,19 @@ export function scaleUnit(scale: SalinityScale): string {
   return scale === "absolute" ? "g/kg" : "PSS-78";
 }
 
+// Checks stop at the first that fails: what is no seawater has no density to be compared by.
 const temperature = z
   .number({ error: "Write the temperature in °C." })
-  .min(TEMPERATURE.min, `Seawater is not colder than ${TEMPERATURE.min} °C.`)
-  .max(TEMPERATURE.max, `This must be at most ${TEMPERATURE.max} °C: is it in °F?`);
+  .min(TEMPERATURE.min, { error: `Seawater is not colder than ${TEMPERATURE.min} °C.`, abort: true })
+  .max(TEMPERATURE.max, { error: `This must be at most ${TEMPERATURE.max} °C: is it in °F?`, abort: true });
 
 const salinity = z
   .number({ error: "Write the salinity." })
-  .min(SALINITY.min, "Salinity cannot be negative.")
-  .max(SALINITY.max, `This must be at most ${SALINITY.max}: saltier water is beyond the equation of state.`);
+  .min(SALINITY.min, { error: "Salinity cannot be negative.", abort: true })
+  .max(SALINITY.max, {
+    error: `This must be at most ${SALINITY.max}: saltier water is beyond the equation of state.`,
+    abort: true,
+  });
 
 /** Digits that survive a conversion there and back. */
 const SURE_DIGITS = 10;
@@ -42,6 +46,7 @@ function layerDepth(units: UnitChoices) {
     .transform((value) => Number(fromDisplay(value, "layerDepth", units).toPrecision(SURE_DIGITS)))
     .refine((metres) => metres >= LAYER_DEPTH.min && metres <= LAYER_DEPTH.max, {
       error: `This must lie between ${shown(LAYER_DEPTH.min)} and ${shown(LAYER_DEPTH.max)}.`,
+      abort: true,
     });
 }
 
