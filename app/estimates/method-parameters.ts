@@ -1,4 +1,5 @@
 /** Laws and parameters of a method sheet as a person reads and chooses them. */
+import type { MethodUsed } from "~/ocean/response";
 import type { MethodChoices } from "~/ocean/scenario";
 
 export type MethodKey = keyof MethodChoices;
@@ -167,6 +168,36 @@ export const PARAMETERS: Record<MethodKey, Parameter> = {
   },
 };
 
+const COLUMN_ONLY: readonly MethodKey[] = [
+  "cellSize",
+  "maxDepth",
+  "bottomDrag",
+  "gradientMixing",
+  "bulkRichardson",
+  "gradientRichardson",
+  "layerDensityStep",
+];
+
+/** Whether a response's model and laws ask for a parameter, or leave it aside. */
+export function isInUse(key: MethodKey, method: MethodUsed): boolean {
+  const model = method.model?.value;
+  const finiteDepth = method.ekman?.value === "finiteDepth";
+  switch (key) {
+    case "dragCoefficient":
+      return method.dragLaw?.value === "constant";
+    case "ekman":
+      return model === "budget";
+    case "eddyViscosity":
+      return model === "coastal" || (model === "budget" && finiteDepth);
+    case "dampingRate":
+      return model === "slab" || model === "column";
+    case "waterType":
+      return method.penetratingShortwave?.value === true;
+    default:
+      return model === "column" || !COLUMN_ONLY.includes(key);
+  }
+}
+
 export const METHOD_KEYS = Object.keys(PARAMETERS) as MethodKey[];
 
 /** A value as it is read: an option's words, or a number with its unit. */
@@ -177,11 +208,11 @@ export function parameterText(key: MethodKey, value: number | string | boolean, 
   return unit === "" || unit === "1" ? number : `${number}\u00a0${unit}`;
 }
 
-/** At most six figures; powers of ten where the number is small. */
+/** Seven figures at most, three below one; powers of ten where the number is very small or large. */
 export function tidyNumber(value: number): string {
   if (value === 0) return "0";
-  if (Math.abs(value) >= 1e-3 && Math.abs(value) < 1e6)
-    return String(Number(value.toPrecision(6))).replace("-", "\u2212");
+  const size = Math.abs(value);
+  if (size >= 1e-3 && size < 1e6) return String(Number(value.toPrecision(size < 1 ? 3 : 7))).replace("-", "\u2212");
   return scientific(value, 3);
 }
 

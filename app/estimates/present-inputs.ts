@@ -8,6 +8,7 @@ import { SALINITY_PER_PSS } from "~/ocean/constants";
 import { formatBearing, formatQuantity } from "~/units/format-quantity";
 import { formatPeriod } from "~/units/format-time";
 import { quantity } from "~/units/quantities";
+import { CHANNELS } from "~/storms/channels";
 import type { UnitChoices } from "~/units/unit-choices";
 
 export interface Row {
@@ -51,7 +52,10 @@ function recordRows({ origin, provenance }: RegisteredRecord, zone: string, unit
     ...said("Averaging", [averagingMinutes === null ? null : `${averagingMinutes}\u00a0min`]),
     ...said(
       "Channels",
-      channels.map(({ channel, unit, count, missing }) => `${channel} (${unit}): ${count} values, ${missing} missing`),
+      channels.map(
+        ({ channel, unit, count, missing }) =>
+          `${CHANNELS[channel].label} (${unit}): ${count} values, ${missing} missing`,
+      ),
     ),
     ...said(
       "Steps",

@@ -36,7 +36,7 @@ export interface LedgerCellView {
   /** The gravest note where the method does not fit well. */
   fit: { severity: FitSeverity; message: string } | null;
   problems: string[];
-  /** Column and sheet of the run. */
+  /** Column and sheet of the run, where the project has several. */
   made: string;
 }
 
@@ -137,7 +137,9 @@ function presentCell(cell: LedgerCell, ledger: Ledger, context: LedgerContext, f
     arrow: net ? driftArrow({ distance: net.value, towards: net.towards, fullCircle }, units) : null,
     fit: response && gravestNote(response),
     problems: problemsOf(state),
-    made: [water, ...(sheet ? [sheetLabel(sheet)] : [])].join(" · "),
+    made: [ledger.columns.length > 1 ? water : "", ledger.sheets.length > 1 && sheet ? sheetLabel(sheet) : ""]
+      .filter(Boolean)
+      .join(" · "),
   };
 }
 

@@ -1,6 +1,14 @@
 /** A response in words and formatted numbers, as its page shows them. */
 import { headlineRows, triggerText, type FigureContext, type HeadlineFigure } from "./headline-figures";
-import { METHOD_KEYS, MODEL_LABELS, PARAMETERS, parameterText, scientific, tidyNumber } from "./method-parameters";
+import {
+  isInUse,
+  METHOD_KEYS,
+  MODEL_LABELS,
+  PARAMETERS,
+  parameterText,
+  scientific,
+  tidyNumber,
+} from "./method-parameters";
 import { bandEnds, bandMark, type SmallMark } from "~/figures/small-marks";
 import type { FitSeverity, Response, TriggerOutcome } from "~/ocean/response";
 import { methodSources, type MethodSource } from "~/ocean/sources";
@@ -28,6 +36,8 @@ export interface TriggerView {
 
 export interface MethodRowView {
   label: string;
+  /** Whether the model in use asks for it. */
+  inUse: boolean;
   value: string;
   origin: "chosen" | "default";
   source: string;
@@ -69,7 +79,7 @@ function presentTrigger(trigger: TriggerOutcome, { units, zone }: FigureContext)
     level: `${quantity(trigger.quantity).name} ${triggerText(trigger, units)}`,
     met,
     verdict: met ? "met" : "not met",
-    detail: [...first, ...spell, `the limit is met at ${hours}\u00a0h`].join(" · "),
+    detail: [...first, ...spell, `counts as met from ${hours}\u00a0h`].join(" · "),
   };
 }
 
@@ -109,7 +119,15 @@ export function presentResponse(response: Response, context: FigureContext): Res
       const entry = method[key];
       if (!entry) return [];
       const { value, unit, origin, source } = entry;
-      return [{ label: PARAMETERS[key].label, value: parameterText(key, value, unit), origin, source }];
+      return [
+        {
+          label: PARAMETERS[key].label,
+          inUse: isInUse(key, method),
+          value: parameterText(key, value, unit),
+          origin,
+          source,
+        },
+      ];
     }),
     sources: methodSources(method),
     budgets: BUDGETS.map(({ key, label, unit }) => ({

@@ -45,7 +45,8 @@ const recent = new Recent<ResponseFigures>(32);
 
 const EARTH_RADIUS = 6_371_008.8;
 const RADIANS = Math.PI / 180;
-/** px: a third of the page. */
+/** px: two thirds of the page, and one. */
+const MAIN_WIDTH = 780;
 const SIDE_WIDTH = 400;
 
 /** Corners in metres from the middle, on a tangent plane: within a thousandth at the size of a box. */
@@ -78,7 +79,7 @@ function draw({ response, register, forcing, ...shared }: FigureRequest): Respon
   const { series, headline } = response;
   const time = series.time.map(epochSeconds);
   const triggers = headline.triggers;
-  const pair = (make: (context: FigureContext) => Figure, width: number = FIGURE_WIDTHS.page): FigurePair => {
+  const pair = (make: (context: FigureContext) => Figure, width = MAIN_WIDTH): FigurePair => {
     const at = (px: number) => make({ ...shared, document: serverPlotDocument(), width: px });
     const narrow = at(FIGURE_WIDTHS.narrow);
     return { wide: at(width), narrow: { ...narrow, table: { columns: [], rows: [] } } };

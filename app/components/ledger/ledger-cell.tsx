@@ -41,21 +41,21 @@ export function LedgerCell({ cell, home, mayRun, name }: LedgerCellProps) {
         <p className="mt-1 text-small font-bold">{underWay ? `${cell.stateText}…` : cell.stateText}</p>
       )}
       {cell.fit && cell.value !== null && cell.state !== "failed" && (
-        <p className="mt-2 border-l-4 border-wind pl-2 text-small text-slate">
+        <p className="mt-2 line-clamp-3 border-l-4 border-wind pl-2 text-small text-slate">
           <strong className="text-ink">{cell.fit.severity === "doNotUse" ? "Do not use. " : "Caution. "}</strong>
           {cell.fit.message}
         </p>
       )}
-      <p className="mt-auto flex flex-wrap items-baseline gap-x-3 pt-2 text-small text-quiet">
+      <p className="mt-auto flex flex-wrap items-baseline justify-between gap-x-3 pt-2 text-small text-quiet">
         <Link to={to} className="text-slate">
           {cell.code}
         </Link>
-        <span className="min-w-0 grow">{cell.made}</span>
         {mayRun && !underWay && (
           <RunButton run={`cell:${cell.boxId}:${cell.stormId}`} name={name}>
             Run again
           </RunButton>
         )}
+        {cell.made && <span className="w-full">{cell.made}</span>}
       </p>
     </div>
   );

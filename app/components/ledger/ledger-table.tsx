@@ -11,18 +11,18 @@ interface LedgerTableProps {
 }
 
 const ROW_HEAD =
-  "sticky left-0 z-10 w-[9.5rem] border-r border-hairline bg-paper p-3 text-left align-top sm:w-[14.5rem] sm:min-w-[14.5rem]";
+  "sticky left-0 z-10 w-[8rem] min-w-[8rem] border-r border-hairline bg-paper p-3 text-left align-top sm:w-[14.5rem] sm:min-w-[14.5rem]";
 
 /** Boxes by storms. Wider than the page, it scrolls inside its own box while the boxes' names stay in sight. */
 export function LedgerTable({ ledger, home, mayRun }: LedgerTableProps) {
   const { boxes, storms, cells } = ledger;
   return (
-    <div role="region" aria-label="Ledger" tabIndex={0} className="overflow-x-auto border-t-2 border-ink">
-      <table className="h-px w-full border-collapse border border-t-0 border-hairline">
+    <div role="region" aria-label="Ledger" tabIndex={0} className="relative overflow-x-auto border-t-2 border-ink">
+      <table className="h-px w-full border-separate border-spacing-0 border-l border-hairline">
         <caption className="sr-only">Estimates by study box and storm</caption>
         <thead>
           <tr>
-            <td className={ROW_HEAD} />
+            <td className={`${ROW_HEAD} border-b`} />
             {storms.map((storm) => (
               <th
                 key={storm.id}

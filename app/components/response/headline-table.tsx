@@ -9,7 +9,7 @@ export function HeadlineTable({ rows }: { rows: HeadlineRowView[] }) {
       {rows.map((row) => (
         <div
           key={row.label}
-          className="grid gap-x-5 gap-y-0.5 border-b border-hairline py-2.5 sm:grid-cols-[11rem_minmax(0,11rem)_minmax(0,1fr)] sm:items-baseline"
+          className="grid gap-x-5 gap-y-0.5 border-b border-hairline py-2.5 sm:grid-cols-[13rem_minmax(0,10rem)_minmax(0,1fr)] sm:items-baseline"
         >
           <dt>{row.label}</dt>
           <dd>

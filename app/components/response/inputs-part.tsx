@@ -3,11 +3,11 @@ import type { InputsView, Row } from "~/estimates/present-inputs";
 
 function Rows({ rows }: { rows: Row[] }) {
   return (
-    <dl className="grid gap-x-4 sm:grid-cols-[13rem_minmax(0,1fr)]">
+    <dl>
       {rows.map(({ label, value }) => (
-        <div key={label} className="contents">
-          <dt className="pt-1.5 text-small text-quiet sm:border-b sm:border-hairline sm:pb-1.5">{label}</dt>
-          <dd className="min-w-0 break-words border-b border-hairline pb-1.5 sm:pt-1.5">{value}</dd>
+        <div key={label} className="grid gap-x-4 border-b border-hairline py-1.5 sm:grid-cols-[12rem_minmax(0,1fr)]">
+          <dt className="text-small leading-6 text-quiet">{label}</dt>
+          <dd className="min-w-0 break-words">{value}</dd>
         </div>
       ))}
     </dl>
@@ -23,40 +23,48 @@ interface InputsPartProps {
 /** Everything that the numbers came from, file by file. */
 export function InputsPart({ inputs, assumptions, home }: InputsPartProps) {
   return (
-    <>
-      <SectionHeading>Box</SectionHeading>
-      <Rows rows={inputs.box} />
-      <details className="py-2">
-        <summary className="text-small">Corners, {inputs.corners.length} positions in WGS 84</summary>
-        <ol className="pl-4 text-small">
-          {inputs.corners.map((corner, index) => (
-            <li key={index}>{corner}</li>
-          ))}
-        </ol>
-      </details>
-      <SectionHeading>Storm</SectionHeading>
-      <Rows rows={inputs.storm} />
-      {inputs.records.map((record, index) => (
-        <div key={index} className="mt-4 border-l-2 border-hairline pl-4">
-          <p className="break-words font-bold">
-            {record.sourceFileId ? <a href={`${home}/files/${record.sourceFileId}`}>{record.fileName}</a> : record.name}
-          </p>
-          {record.sha256 && <p className="break-all text-small text-slate">SHA-256 {record.sha256}</p>}
-          <Rows rows={record.rows} />
-        </div>
-      ))}
-      {assumptions.length > 0 && (
-        <>
-          <SectionHeading>Assumed</SectionHeading>
-          <ul className="list-disc pl-5">
-            {assumptions.map((assumption) => (
-              <li key={assumption}>{assumption}</li>
+    <div className="grid gap-x-10 lg:grid-cols-2">
+      <div className="min-w-0">
+        <SectionHeading>Box</SectionHeading>
+        <Rows rows={inputs.box} />
+        <details className="py-2">
+          <summary className="text-small">Corners, {inputs.corners.length} positions in WGS 84</summary>
+          <ol className="pl-4 text-small">
+            {inputs.corners.map((corner, index) => (
+              <li key={index}>{corner}</li>
             ))}
-          </ul>
-        </>
-      )}
-      <SectionHeading>Water and method</SectionHeading>
-      <Rows rows={inputs.water} />
-    </>
+          </ol>
+        </details>
+        <SectionHeading>Water and method</SectionHeading>
+        <Rows rows={inputs.water} />
+        {assumptions.length > 0 && (
+          <>
+            <SectionHeading>Assumed</SectionHeading>
+            <ul className="list-disc pl-5">
+              {assumptions.map((assumption) => (
+                <li key={assumption}>{assumption}</li>
+              ))}
+            </ul>
+          </>
+        )}
+      </div>
+      <div className="min-w-0">
+        <SectionHeading>Storm</SectionHeading>
+        <Rows rows={inputs.storm} />
+        {inputs.records.map((record, index) => (
+          <div key={index} className="mt-4 border-l-2 border-hairline pl-4">
+            <p className="break-words font-bold">
+              {record.sourceFileId ? (
+                <a href={`${home}/files/${record.sourceFileId}`}>{record.fileName}</a>
+              ) : (
+                record.name
+              )}
+            </p>
+            {record.sha256 && <p className="break-all text-small text-slate">SHA-256 {record.sha256}</p>}
+            <Rows rows={record.rows} />
+          </div>
+        ))}
+      </div>
+    </div>
   );
 }

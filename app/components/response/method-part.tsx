@@ -2,6 +2,9 @@ import { WideTable } from "~/components/wide-table";
 import type { BudgetView, MethodRowView } from "~/estimates/present-response";
 import type { MethodSource } from "~/ocean/sources";
 
+/** Heads a row, without the rule that heads a column. */
+const ROW_HEAD = "border-b border-hairline align-top text-base font-normal text-ink";
+
 /** Every law and parameter with its value, its source, and whether someone chose it. */
 export function MethodTable({ rows }: { rows: MethodRowView[] }) {
   return (
@@ -17,7 +20,9 @@ export function MethodTable({ rows }: { rows: MethodRowView[] }) {
       <tbody>
         {rows.map(({ label, value, origin, source }) => (
           <tr key={label}>
-            <th scope="row">{label}</th>
+            <th scope="row" className={ROW_HEAD}>
+              {label}
+            </th>
             <td>{value}</td>
             <td className={origin === "chosen" ? "font-bold" : "text-quiet"}>{origin}</td>
             <td className="text-small text-slate">{source}</td>
@@ -30,7 +35,7 @@ export function MethodTable({ rows }: { rows: MethodRowView[] }) {
 
 export function EquationList({ sources }: { sources: MethodSource[] }) {
   return (
-    <ul className="border-t border-hairline">
+    <ul>
       {sources.map((source) => (
         <li key={source.id} className="border-b border-hairline">
           <details>
@@ -92,7 +97,7 @@ export function BudgetTable({ rows }: { rows: BudgetView[] }) {
       <tbody>
         {rows.map(({ label, unit, change, input, residual }) => (
           <tr key={label}>
-            <th scope="row">
+            <th scope="row" className={ROW_HEAD}>
               {label} ({unit})
             </th>
             <td className="number">{change}</td>

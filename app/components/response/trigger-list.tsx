@@ -8,7 +8,7 @@ export function TriggerList({ triggers }: { triggers: TriggerView[] }) {
     );
   }
   return (
-    <ul className="border-t border-hairline">
+    <ul>
       {triggers.map(({ level, verdict, met, detail }) => (
         <li key={level + detail} className="flex flex-wrap items-baseline gap-x-4 border-b border-hairline py-2">
           <span className="min-w-0 grow basis-56">

@@ -151,7 +151,7 @@ export default function ResponsePage({ loaderData, actionData }: Route.Component
             </section>
           </div>
           <div className="min-w-0">
-            <section aria-labelledby="went">
+            <section aria-labelledby="went" className="lg:[&>h3]:mt-0">
               <SectionHeading id="went">Where the layer went</SectionHeading>
               <StudyAreaMap
                 boxes={[box]}
@@ -181,7 +181,11 @@ export default function ResponsePage({ loaderData, actionData }: Route.Component
           <div className="grid gap-x-10 lg:grid-cols-2">
             <div className="min-w-0">
               <SectionHeading>Laws and parameters</SectionHeading>
-              <MethodTable rows={shown.view.method} />
+              <MethodTable rows={shown.view.method.filter(({ inUse }) => inUse)} />
+              <details className="py-3">
+                <summary>Parameters that this model leaves aside</summary>
+                <MethodTable rows={shown.view.method.filter(({ inUse }) => !inUse)} />
+              </details>
             </div>
             <div className="min-w-0">
               <SectionHeading>Equations and sources</SectionHeading>
