@@ -38,9 +38,19 @@ export function formatPosition(
   return `${formatLatitude(latitude, style, decimals)} ${formatLongitude(longitude, style, decimals)}`;
 }
 
-/** One corner a line, exact enough to be read back by `parseCoordinates`. */
+/** One corner a line, exact enough to be read back by `parseCoordinates`; decimal degrees without needless zeros. */
 export function formatCorners(corners: readonly Position[], style: CoordinateStyle): string {
-  return corners.map((corner) => formatPosition(corner, style, EXACT_DECIMALS[style])).join("\n");
+  const decimals = style === "decimal" ? decimalsOf(corners) : EXACT_DECIMALS[style];
+  return corners.map((corner) => formatPosition(corner, style, decimals)).join("\n");
+}
+
+/** As many decimals as the most exact corner needs, the same for all so that they stand in columns. */
+function decimalsOf(corners: readonly Position[]): number {
+  const needed = corners.flat().map((angle) => {
+    const [, decimals = ""] = angle.toFixed(EXACT_DECIMALS.decimal).split(".");
+    return decimals.replace(/0+$/, "").length;
+  });
+  return Math.max(READING_DECIMALS.decimal, ...needed);
 }
 
 function formatAngle(degrees: number, style: CoordinateStyle, decimals: number): string {

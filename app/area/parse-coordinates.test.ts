@@ -133,6 +133,14 @@ describe("parseCoordinates", () => {
   });
 });
 
+describe("formatCorners", () => {
+  it("writes as many decimals as the most exact corner needs, the same for all", () => {
+    expect(formatCorners([WANTED, [8.5, 54]], "decimal")).toBe("54.412° N 8.231° W\n54.000° N 8.500° E");
+    expect(formatCorners([[8.12345, 54]], "decimal")).toBe("54.00000° N 8.12345° E");
+    expect(formatCorners([], "minutes")).toBe("");
+  });
+});
+
 describe("formatPosition", () => {
   it("writes latitude first with letters", () => {
     expect(formatPosition(WANTED)).toBe("54.412° N 8.231° W");

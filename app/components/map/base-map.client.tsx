@@ -34,7 +34,8 @@ export default function BaseMap({ view, distanceUnit, label, calm = false, child
       mapStyle={style}
       initialViewState={{
         bounds: [west, south, east, north],
-        fitBoundsOptions: { padding: 48, maxZoom: 11 },
+        // Clear of the zoom buttons, the scale bar and the attribution.
+        fitBoundsOptions: { padding: { top: 48, right: 64, bottom: 56, left: 48 }, maxZoom: 11 },
       }}
       maxZoom={15}
       minZoom={0.5}

@@ -1,7 +1,7 @@
 import type { FeatureCollection } from "geojson";
 import { Layer, Marker, Source } from "react-map-gl/maplibre";
 import type { MapColours } from "./map-colours.client";
-import { ringExtent, unwrapRing } from "~/area/ring";
+import { openRing, ringExtent, unwrapRing } from "~/area/ring";
 import type { Position } from "~/ocean/scenario";
 
 export interface MapBox {
@@ -53,7 +53,7 @@ function toGeoJson(boxes: readonly MapBox[], selectedId: string | undefined): Fe
     features: boxes.map(({ id, polygon }) => ({
       type: "Feature",
       properties: { selected: id !== undefined && id === selectedId },
-      geometry: { type: "Polygon", coordinates: [unwrapRing(polygon)] },
+      geometry: { type: "Polygon", coordinates: [unwrapRing([...openRing(polygon), polygon[0]])] },
     })),
   };
 }
