@@ -16,11 +16,23 @@ const DELIMITER_WORDS: Record<Delimiter, string> = {
   " ": "space",
 };
 const DECIMAL_ROWS = 2000;
+/** No station has so many instruments: more are a grid, or not a table of times. */
+const MAX_COLUMNS = 1000;
 
 /** Reads delimited text of any kind: finds delimiter, decimal sign, names, units, records and notes. */
 export function readDelimited(source: SourceFile, answers: ReadingAnswers, problems: ProblemList): SeriesReading {
   const delimiter = findDelimiter(source.lines);
   const split = delimiter === null ? null : splitRows(source, delimiter, problems);
+  const widest = split?.rows.reduce((width, cells) => Math.max(width, cells.length), 0) ?? 0;
+  if (widest > MAX_COLUMNS) {
+    problems.add(
+      "error",
+      "tooManyColumns",
+      `a line has ${widest} fields; the limit is ${MAX_COLUMNS}`,
+      "Give a table with one line a time and a column a quantity.",
+    );
+    throw new UnreadableFile(problems.toArray());
+  }
   const layout = split === null ? null : findLayout(split);
   if (delimiter === null || split === null || layout === null) {
     refuse(source, problems);

@@ -11,7 +11,7 @@ import { assembleSeries, type RowChannel } from "./assemble-series";
 import { scanColumn, type ColumnScan } from "./scan-column";
 import { answeredUnit, settleColumn, settleHeatSense, type SettledColumn, type Settling } from "./settle-columns";
 import { columnsOfPlan, findStampColumns } from "./stamp-columns";
-import type { FormatKnowledge, TextTable } from "./text-table";
+import { columnsSeen, type FormatKnowledge, type TextTable } from "./text-table";
 import { timeAxis } from "./time-axis";
 import { channelsFromColumns } from "./channels-from-columns";
 
@@ -102,7 +102,7 @@ function noStamps(table: TextTable, problems: ProblemList): Stamps {
   problems.add(
     "error",
     "noTimeColumn",
-    `no column holds dates and times. Columns seen: ${table.names.map((name) => `“${name.trim()}”`).join(", ")}`,
+    `no column holds dates and times. Columns seen: ${columnsSeen(table)}`,
     "Say on the reading sheet which column is the time, or add one to the file.",
   );
   return {
@@ -184,7 +184,7 @@ function settleCounter(settled: SettledColumn, order: readonly number[], state: 
 }
 
 function sayWhatIsMissing(table: TextTable, channels: Map<ChannelName, RowChannel>, problems: ProblemList): void {
-  const seen = table.names.map((name) => `“${name.trim()}”`).join(", ");
+  const seen = columnsSeen(table);
   const ask = "Say on the reading sheet what each column is.";
   if (channels.size === 0)
     problems.add(

@@ -13,6 +13,9 @@ export interface SourceFile {
 /** Largest series file that is read, bytes. */
 export const MAX_SERIES_FILE_BYTES = 64 * 1024 * 1024;
 
+/** Most lines that are read: 38 years of 10-minute records. Beyond, a table no longer fits into memory beside its cells. */
+export const MAX_SERIES_FILE_LINES = 2_000_000;
+
 /**
  * Opens a file as text.
  * @returns null where it is none; `problems` then says why and what to do
@@ -52,6 +55,15 @@ export function openText(bytes: Uint8Array, fileName: string, problems: ProblemL
     );
     return null;
   }
+  if (countLines(decoded.text) > MAX_SERIES_FILE_LINES) {
+    problems.add(
+      "error",
+      "tooManyLines",
+      `“${fileName}” has more than ${MAX_SERIES_FILE_LINES} lines`,
+      "Cut it to the days around the storm.",
+    );
+    return null;
+  }
   const lines = decoded.text.split("\n");
   if (lines.every((line) => line.trim() === "")) {
     problems.add(
@@ -63,4 +75,10 @@ export function openText(bytes: Uint8Array, fileName: string, problems: ProblemL
     return null;
   }
   return { fileName, decoded, lines };
+}
+
+function countLines(text: string): number {
+  let count = 1;
+  for (let at = text.indexOf("\n"); at >= 0; at = text.indexOf("\n", at + 1)) count += 1;
+  return count;
 }

@@ -8,6 +8,9 @@ export interface WrittenStamp {
   offset: number | null;
 }
 
+/** Longer text is no stamp, and patterns need not be tried on it. */
+const LONGEST_STAMP = 64;
+
 const TIME =
   /^(\d{1,2})(?:[:hH.]|\s?h\s?)(\d{2})(?:m(?:in)?)?(?:[:.](\d{2})(?:[.,](\d+))?)?\s*([aApP])?\.?(?:[mM]\.?)?\s*(Z|z|UTC|utc|GMT|(?:UTC|GMT)?\s*[+-]\d{1,2}(?::?\d{2})?)?$/;
 const TIME_DIGITS = /^(\d{1,2})(\d{2})(\d{2})?\s*(Z|z|UTC|utc|GMT|H|h)?$/;
@@ -81,6 +84,7 @@ export function secondsOfDay(hour: number, minute: number, second: number): numb
 
 /** Reads a date; the order matters only where the year is not first and the month no word. Days since 1970-01-01. */
 export function dateFromText(text: string, order: DateOrder): number | null {
+  if (text.length > LONGEST_STAMP) return null;
   let match = DATE_YEAR_FIRST.exec(text);
   if (match) return daysFromDate(Number(match[1]), Number(match[3]), Number(match[4]));
   match = DATE_YEAR_LAST.exec(text);
@@ -116,6 +120,7 @@ export function dateFromText(text: string, order: DateOrder): number | null {
 
 /** Reads a time of day: `15:30`, `15h30`, `0330 UTC`, `3:30:00 pm`, `24:00`, with an offset where it states one. */
 export function timeFromText(text: string): { seconds: number; offset: number | null } | null {
+  if (text.length > LONGEST_STAMP) return null;
   let match = TIME.exec(text);
   if (match) {
     let hour = Number(match[1]);
@@ -154,6 +159,7 @@ const ISO_T = /^(\d{4}-\d{2}-\d{2}|\d{8})[Tt](\d.*)$/;
  * @returns null where the text is no stamp
  */
 export function stampFromText(text: string, order: DateOrder): WrittenStamp | null {
+  if (text.length > LONGEST_STAMP) return null;
   const iso = ISO_T.exec(text);
   const parts = iso ?? SPLIT.exec(text);
   if (parts) {

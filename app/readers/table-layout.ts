@@ -19,6 +19,7 @@ export interface TableLayout {
 /** Rows looked at for the start of the records: no preamble is longer. */
 const SEARCHED = 500;
 const HEADER_ROWS = 4;
+const LONGEST_NAME = 120;
 
 /** Finds names, units, records and notes at the foot; null where no row looks like a record. */
 export function findLayout(split: SplitRows): TableLayout | null {
@@ -130,7 +131,7 @@ function findHeader(
   );
   const units = unitRow < 0 ? [] : (block[unitRow] ?? []);
   return {
-    names: names.map((name) => name.replace(/^[#%;]+\s*/, "")),
+    names: names.map((name) => name.replace(/^[#%;]+\s*/, "").slice(0, LONGEST_NAME)),
     unitTexts: names.map((_, index) =>
       units[index] === undefined || units[index] === "" ? null : (units[index] ?? null),
     ),

@@ -36,3 +36,12 @@ export interface FormatKnowledge {
   averagingHint: { suggestion: string; message: string } | null;
   understood: Understood[];
 }
+
+const NAMES_SHOWN = 20;
+
+/** The columns of a table for a message: their names, the first twenty. */
+export function columnsSeen(table: Pick<TextTable, "names">): string {
+  const shown = table.names.slice(0, NAMES_SHOWN).map((name) => `“${name.trim()}”`);
+  const more = table.names.length - shown.length;
+  return `${shown.join(", ")}${more > 0 ? ` and ${more} more` : ""}`;
+}

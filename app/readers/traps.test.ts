@@ -495,6 +495,27 @@ describe("bad input", () => {
     expect(refusal(new Uint8Array(64 * 1024 * 1024 + 1)).problems[0]).toMatchObject({ code: "tooLarge" });
   });
 
+  it.each([
+    ["one endless line", "a".repeat(2_000_000)],
+    ["one line of commas", ",".repeat(2_000_000)],
+    ["quotation marks alone", '"'.repeat(1_000_000)],
+    ["an open quotation mark before many lines", `time,wind\n"${"2024-03-01 00:00,5\n".repeat(50_000)}`],
+    ["brackets alone", `time (UTC),${"(".repeat(200_000)}\n2024-03-01 00:00,5\n`],
+    ["two million empty lines", `${"\n".repeat(2_000_001)}`],
+    ["a cell of a million digits", `time (UTC),wind speed (m/s)\n2024-03-01 00:00,${"1".repeat(1_000_000)}\n`],
+  ])("comes to an end with %s", (_, text) => {
+    const outcome = ((): SeriesReading | UnreadableFile => {
+      try {
+        return read(text);
+      } catch (error) {
+        if (error instanceof UnreadableFile) return error;
+        throw error;
+      }
+    })();
+    expect(outcome.problems.length).toBeGreaterThan(0);
+    expect(outcome.problems.every(({ message }) => message.length < 2000)).toBe(true);
+  });
+
   it("says which columns were seen where none is a time or a quantity", () => {
     const reading = read("alpha,beta\n1,2\n3,4\n");
     expect(reading.problems.find(({ code }) => code === "noTimeColumn")?.message).toContain("“alpha”, “beta”");
