@@ -1,4 +1,5 @@
 import { measureBox } from "./measure-box";
+import { formatCoriolis } from "./format-coriolis";
 import { formatPosition } from "./format-coordinates";
 import type { Position, TriggerLevel } from "~/ocean/scenario";
 import { formatBearing, formatQuantity } from "~/units/format-quantity";
@@ -30,8 +31,8 @@ export interface PresentedBox {
 /** A box as it is read on the Area page, in the organisation's units. */
 export function presentBox(box: StoredBox, units: UnitChoices): PresentedBox {
   const { areaKm2, centroid, f, inertialPeriodHours } = measureBox(box.polygon);
-  const quantity = (value: number | null, id: "area" | "depth" | "distance" | "share") =>
-    value === null ? "not given" : formatQuantity(value, id, units).text;
+  const quantity = (value: number | null, id: "area" | "depth" | "distance" | "share", missing = "not given") =>
+    value === null ? missing : formatQuantity(value, id, units).text;
   return {
     id: box.id,
     name: box.name,
@@ -39,7 +40,7 @@ export function presentBox(box: StoredBox, units: UnitChoices): PresentedBox {
     facts: [
       { label: "Centre", value: formatPosition(centroid) },
       { label: "Area", value: quantity(areaKm2 * 1e6, "area") },
-      { label: "Coriolis f", value: `${f.toExponential(3)} 1/s` },
+      { label: "Coriolis f", value: formatCoriolis(f) },
       {
         label: "Inertial period",
         value: inertialPeriodHours === null ? "none on the equator" : `${inertialPeriodHours.toFixed(1)} h`,
@@ -47,7 +48,7 @@ export function presentBox(box: StoredBox, units: UnitChoices): PresentedBox {
       { label: "Water depth", value: quantity(box.waterDepth, "depth") },
       { label: "Shore", value: quantity(box.distanceToShore, "distance") },
       { label: "Shore normal", value: box.shoreNormal === null ? "not given" : formatBearing(box.shoreNormal) },
-      { label: "Land share", value: quantity(box.landShare, "share") },
+      { label: "Land share", value: quantity(box.landShare, "share", "not measured") },
       {
         label: "Trigger levels",
         value: box.triggerLevels.length === 0 ? "none" : String(box.triggerLevels.length),

@@ -1,7 +1,8 @@
+import { formatCoriolis } from "~/area/format-coriolis";
 import { formatPosition } from "~/area/format-coordinates";
 import { measureBox } from "~/area/measure-box";
 import type { Position } from "~/ocean/scenario";
-import { formatQuantity, joinUnit, MINUS } from "~/units/format-quantity";
+import { formatQuantity, joinUnit } from "~/units/format-quantity";
 import type { UnitChoices } from "~/units/unit-choices";
 
 /** What is measured while a box is drawn: told politely to screen readers as it changes. */
@@ -31,16 +32,10 @@ function factsOf(ring: Position[], units: UnitChoices): { label: string; value: 
     { label: "Extent, west–east by south–north", value: `${across(widthKm)} by ${across(heightKm)}` },
     { label: "Area", value: formatQuantity(areaKm2 * 1e6, "area", units).text },
     { label: "Centre (WGS 84)", value: formatPosition(centroid) },
-    { label: "Coriolis f", value: joinUnit(scientific(f), "1/s") },
+    { label: "Coriolis f", value: formatCoriolis(f) },
     {
       label: "Inertial period",
       value: inertialPeriodHours === null ? "none on the equator" : joinUnit(inertialPeriodHours.toFixed(1), "h"),
     },
   ];
-}
-
-/** `1.18 × 10⁻⁴`, always in 10⁻⁴, so that boxes compare at a glance. */
-function scientific(f: number): string {
-  const size = Math.abs(f * 1e4).toFixed(3);
-  return `${f < 0 ? MINUS : ""}${size} × 10⁻⁴`;
 }

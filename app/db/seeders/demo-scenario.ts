@@ -43,7 +43,7 @@ export const DEMO_BOXES: DemoBox[] = [
   {
     name: "Intake box",
     polygon: rectangle(-5.2, 50.44, -5.155, 50.465),
-    waterDepth: 32,
+    waterDepth: 46,
     shoreNormal: 300,
     distanceToShore: 6_200,
     triggerLevels: [INTAKE_LIMIT],
@@ -51,7 +51,7 @@ export const DEMO_BOXES: DemoBox[] = [
   {
     name: "Outer sound",
     polygon: rectangle(-5.48, 50.47, -5.38, 50.53),
-    waterDepth: 58,
+    waterDepth: 110,
     shoreNormal: 300,
     distanceToShore: 21_000,
     triggerLevels: [INTAKE_LIMIT],
@@ -72,9 +72,9 @@ export const DEMO_WATER = {
   temperature: 14.2,
   salinity: 35.1,
   salinityScale: "absolute" as const,
-  layerDepth: 24,
-  belowTemperature: 13.1,
-  belowSalinity: 35.24,
+  layerDepth: 28,
+  belowTemperature: 11.2,
+  belowSalinity: 35.3,
 };
 
 interface DemoStorm {
@@ -94,7 +94,7 @@ export const DEMO_STORMS: DemoStorm[] = [
       start: "2026-10-31T00:00:00Z",
       hours: 168,
       peakHour: 72,
-      peakWind: 24.5,
+      peakWind: 18,
       calmWind: 5,
       width: 17,
       windFromBefore: 205,
@@ -115,7 +115,7 @@ export const DEMO_STORMS: DemoStorm[] = [
       start: "2026-10-12T00:00:00Z",
       hours: 96,
       peakHour: 40,
-      peakWind: 16,
+      peakWind: 13,
       calmWind: 4.5,
       width: 12,
       windFromBefore: 170,
