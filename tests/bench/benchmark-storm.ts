@@ -66,7 +66,7 @@ export function runBenchmarkColumn(levels: number, steps: number, windFactor = 1
   return {
     sst: state.T[0],
     sss: state.S[0],
-    mld03: mixedLayerDepth(depth, state.rho, 0.03),
+    mld03: mixedLayerDepth(depth, state.rho, 0.03, levels * CELL_SIZE),
     u0: state.u[0],
     v0: state.v[0],
     exchanges: model.exchanges,

@@ -98,10 +98,7 @@ export const driftMethods: CheckMethods = {
   },
   "slab.step": (inputs) => {
     const slab = slabOf(inputs);
-    slab.u = inputs.number("u0");
-    slab.v = inputs.number("v0");
-    slab.x = inputs.number("x0", 0);
-    slab.y = inputs.number("y0", 0);
+    slab.startFrom(inputs.number("u0"), inputs.number("v0"), inputs.number("x0", 0), inputs.number("y0", 0));
     slab.step(
       inputs.number("dt"),
       inputs.number("tau0x"),

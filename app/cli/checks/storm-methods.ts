@@ -92,8 +92,8 @@ function wakeAt(inputs: CaseInputs, offKm: number): Wake {
   }
   return {
     dSST: state.T[0] - T[0],
-    mld03: mixedLayerDepth(depth, state.rho, 0.03),
-    mld125: mixedLayerDepth(depth, state.rho, 0.125),
+    mld03: mixedLayerDepth(depth, state.rho, 0.03, cells * dz),
+    mld125: mixedLayerDepth(depth, state.rho, 0.125, cells * dz),
     speed25After: count === 0 ? 0 : speeds / count,
   };
 }

@@ -188,7 +188,7 @@ export function runColumn({ place, method, law, forcing, water }: ColumnCase): {
   function record(k: number): void {
     CT[k] = state.T[0];
     SA[k] = state.S[0];
-    layerDepth[k] = mixedLayerDepth(depth, state.rho, method.layerDensityStep);
+    layerDepth[k] = mixedLayerDepth(depth, state.rho, method.layerDensityStep, state.cells * state.cellSize);
     motion.driftEast[k] = state.u[0];
     motion.driftNorth[k] = state.v[0];
     motion.displacementEast[k] = totals.displacementX;

@@ -14,6 +14,8 @@ export interface SlabSetting {
 /** Below this size of (r + if)Δt the weights are summed as series: the closed forms lose digits. */
 const SMALL = 1e-2;
 const SERIES_TERMS = 9;
+/** φ₀, φ₁ and φ₂ at x = 0: each φ is what is left of it of the one before, over x. */
+const PHI_AT_ZERO = [1, 1, 0.5] as const;
 
 /**
  * Wind-driven motion of a slab: dZ/dt + (if + r) Z = τ/(ρH), Z = u + iv, exact for a stress that runs linearly
@@ -28,16 +30,13 @@ const SERIES_TERMS = 9;
  * @see Pollard & Millard (1970), Deep-Sea Research 17:813-821
  */
 export class SlabIntegrator {
-  u = 0;
-  v = 0;
-  x = 0;
-  y = 0;
   private readonly setting: SlabSetting;
+  /** u, v, x, y. In one array, as are the weights: numbers kept as fields of an object are several times slower to change. */
+  private readonly state = new Float64Array(4);
+  /** e⁻ˣ, φ₁, φ₂, φ₃: real and imaginary part of each. */
+  private readonly weights = new Float64Array(8);
+  private readonly mass: number;
   private weightedStep = Number.NaN;
-  private e = new Float64Array(2);
-  private phi1 = new Float64Array(2);
-  private phi2 = new Float64Array(2);
-  private phi3 = new Float64Array(2);
 
   /** @throws OceanError NONPOSITIVE_DEPTH or INVALID_INPUT */
   constructor(setting: SlabSetting) {
@@ -46,38 +45,59 @@ export class SlabIntegrator {
     requirePositive({ waterDensity: setting.waterDensity });
     requireDepth("layerDepth", setting.layerDepth);
     this.setting = setting;
+    this.mass = setting.waterDensity * setting.layerDepth;
+  }
+
+  /** Velocity, m/s, and displacement, m, towards east and north. */
+  get u(): number {
+    return this.state[0];
+  }
+  get v(): number {
+    return this.state[1];
+  }
+  get x(): number {
+    return this.state[2];
+  }
+  get y(): number {
+    return this.state[3];
+  }
+
+  /** Starts from a velocity (m/s) and a displacement (m) other than rest. @throws OceanError INVALID_INPUT */
+  startFrom(u: number, v: number, x: number, y: number): void {
+    requireFinite({ u, v, x, y });
+    this.state.set([u, v, x, y]);
   }
 
   /** Moves on by `dt` seconds while the stress runs from (τ₀x, τ₀y) to (τ₁x, τ₁y), N/m². */
   step(dt: number, tau0x: number, tau0y: number, tau1x: number, tau1y: number): void {
     if (dt !== this.weightedStep) this.weigh(dt);
-    const { e, phi1, phi2, phi3, u, v } = this;
-    const perMass = dt / (this.setting.waterDensity * this.setting.layerDepth);
+    const { state, weights: w } = this;
+    const u = state[0];
+    const v = state[1];
+    const perMass = dt / this.mass;
     const ax = tau0x * perMass;
     const ay = tau0y * perMass;
     const bx = (tau1x - tau0x) * perMass;
     const by = (tau1y - tau0y) * perMass;
-    this.x += dt * (u * phi1[0] - v * phi1[1] + ax * phi2[0] - ay * phi2[1] + bx * phi3[0] - by * phi3[1]);
-    this.y += dt * (u * phi1[1] + v * phi1[0] + ax * phi2[1] + ay * phi2[0] + bx * phi3[1] + by * phi3[0]);
-    this.u = u * e[0] - v * e[1] + ax * phi1[0] - ay * phi1[1] + bx * phi2[0] - by * phi2[1];
-    this.v = u * e[1] + v * e[0] + ax * phi1[1] + ay * phi1[0] + bx * phi2[1] + by * phi2[0];
+    state[2] += dt * (u * w[2] - v * w[3] + ax * w[4] - ay * w[5] + bx * w[6] - by * w[7]);
+    state[3] += dt * (u * w[3] + v * w[2] + ax * w[5] + ay * w[4] + bx * w[7] + by * w[6]);
+    state[0] = u * w[0] - v * w[1] + ax * w[2] - ay * w[3] + bx * w[4] - by * w[5];
+    state[1] = u * w[1] + v * w[0] + ax * w[3] + ay * w[2] + bx * w[5] + by * w[4];
   }
 
   private weigh(dt: number): void {
     requirePositive({ dt });
+    const { weights } = this;
     const xr = this.setting.dampingRate * dt;
     const xi = this.setting.f * dt;
     const decay = Math.exp(-xr);
-    this.e[0] = decay * Math.cos(xi);
-    this.e[1] = -decay * Math.sin(xi);
-    if (Math.hypot(xr, xi) < SMALL) {
-      seriesInto(this.phi1, xr, xi, 1);
-      seriesInto(this.phi2, xr, xi, 2);
-      seriesInto(this.phi3, xr, xi, 3);
-    } else {
-      quotientInto(this.phi1, 1 - this.e[0], -this.e[1], xr, xi);
-      quotientInto(this.phi2, 1 - this.phi1[0], -this.phi1[1], xr, xi);
-      quotientInto(this.phi3, 0.5 - this.phi2[0], -this.phi2[1], xr, xi);
+    weights[0] = decay * Math.cos(xi);
+    weights[1] = -decay * Math.sin(xi);
+    const small = Math.hypot(xr, xi) < SMALL;
+    for (let n = 1; n <= 3; n++) {
+      const phi = weights.subarray(2 * n, 2 * n + 2);
+      if (small) seriesInto(phi, xr, xi, n);
+      else quotientInto(phi, PHI_AT_ZERO[n - 1] - weights[2 * n - 2], -weights[2 * n - 1], xr, xi);
     }
     this.weightedStep = dt;
   }
