@@ -44,8 +44,14 @@ export function mixAtGradients(state: ColumnState, work: GradientWork, critical:
   for (let block = 0; block < blocks; block++) leastInBlock[block] = leastOf(richardson, block);
 
   for (let exchanges = 0; ; exchanges++) {
+    let block = 0;
     let least = leastInBlock[0];
-    for (let b = 1; b < blocks; b++) least = Math.min(least, leastInBlock[b]);
+    for (let b = 1; b < blocks; b++) {
+      if (leastInBlock[b] < least) {
+        least = leastInBlock[b];
+        block = b;
+      }
+    }
     if (!(least < critical)) return exchanges;
     if (exchanges >= most) {
       throw new OceanError(
@@ -53,8 +59,6 @@ export function mixAtGradients(state: ColumnState, work: GradientWork, critical:
         `Gradient mixing did not settle in ${most} exchanges; use a shorter time step or larger cells.`,
       );
     }
-    let block = 0;
-    while (leastInBlock[block] !== least) block++;
     let k = block << BLOCK_BITS;
     while (richardson[k] !== least) k++;
 
@@ -96,6 +100,8 @@ function richardsonAt(rho: Float64Array, u: Float64Array, v: Float64Array, k: nu
 function leastOf(richardson: Float64Array, block: number): number {
   const start = block << BLOCK_BITS;
   let least = richardson[start];
-  for (let k = start + 1; k < start + BLOCK; k++) least = Math.min(least, richardson[k]);
+  for (let k = start + 1; k < start + BLOCK; k++) {
+    if (richardson[k] < least) least = richardson[k];
+  }
   return least;
 }
