@@ -113,6 +113,25 @@ describe("composeMemo", () => {
     ]);
   });
 
+  it("puts a tall first figure after the question, so that the first sheet is not left half empty", () => {
+    const [estimate] = memoInput().estimates;
+    const tall = { ...estimate!.figures[0]!, height: 400 };
+    const { blocks } = composeMemo(memoInput({ estimates: [{ ...estimate!, figures: [tall] }] }));
+    const place = blocks.findIndex(({ kind }) => kind === "figure");
+    expect(sections(blocks.slice(0, place))).toEqual(["Question", "Intended use"]);
+    expect(all(blocks, "figure")).toHaveLength(1);
+  });
+
+  it("names a figure's estimate once", () => {
+    const [estimate] = memoInput().estimates;
+    const named = { ...estimate!.figures[0]!, caption: "Salinity. Estimate 2617-07." };
+    const [first, second] = all(
+      composeMemo(memoInput({ estimates: [{ ...estimate!, figures: [named, estimate!.figures[1]!] }] })).blocks,
+      "figure",
+    );
+    expect([first!.source, second!.source]).toEqual(["", "Estimate 2617-07."]);
+  });
+
   it("numbers figures in the order in which they stand", () => {
     expect(all(memo.blocks, "figure").map(({ number, figure }) => [number, figure.id])).toEqual([
       [1, "series-salinity"],

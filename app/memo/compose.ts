@@ -50,12 +50,21 @@ function engineVersions(estimates: readonly MemoEstimate[]): string[] {
   return [...new Set(estimates.map(({ response }) => response.engine))];
 }
 
+/** Height against width of a figure that the first sheet has room for under the answer; a taller one would leave a gap. */
+const FIRST_SHEET_FIGURE = 0.36;
+
 function blocksOf(input: MemoInput): Block[] {
   const numbers = new FigureNumbers();
   const references = referencesOf(input);
+  const [lead] = input.estimates;
+  const [first] = lead?.figures ?? [];
+  const figure = lead && first ? [numbers.block(first, lead.code)] : [];
+  const figureFits = first !== undefined && first.height / first.width <= FIRST_SHEET_FIGURE;
   return [
-    ...answerBlocks(input, numbers),
+    ...answerBlocks(input),
+    ...(figureFits ? figure : []),
     ...questionBlocks(input),
+    ...(figureFits ? [] : figure),
     ...input.facts.sections.flatMap(({ heading, text }) => titled(heading, authorBlocks(text))),
     ...titled("Results", resultBlocks(input, numbers)),
     ...titled("Where the method holds here", fitBlocks(input)),
@@ -76,7 +85,7 @@ function titled(text: string, blocks: Block[]): Block[] {
   return text.trim() === "" ? blocks : [{ kind: "heading", level: 1, text: text.trim() }, ...blocks];
 }
 
-function answerBlocks({ estimates, facts, project, units }: MemoInput, numbers: FigureNumbers): Block[] {
+function answerBlocks({ estimates, facts, project, units }: MemoInput): Block[] {
   const [lead] = estimates;
   const caution: Block = { kind: "caution", text: CAUTION };
   if (!lead)
@@ -89,7 +98,6 @@ function answerBlocks({ estimates, facts, project, units }: MemoInput, numbers: 
   const answer = facts.answer?.trim()
     ? [{ text: facts.answer.trim() }]
     : draftAnswer(lead.response, { ...context, boxName: lead.boxName });
-  const [first] = lead.figures;
   return [
     leadParagraph(answer),
     {
@@ -98,7 +106,6 @@ function answerBlocks({ estimates, facts, project, units }: MemoInput, numbers: 
       rows: headlineRows(lead.response, context),
     },
     caution,
-    ...(first ? [numbers.block(first, lead.code)] : []),
   ];
 }
 

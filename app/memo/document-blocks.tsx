@@ -39,7 +39,13 @@ export function BlockView({ block, headings }: BlockViewProps) {
       return <Headlines {...block} />;
     case "figure":
       return (
-        <div className="mt-6">
+        <div
+          role="region"
+          aria-label={`Figure ${block.number}`}
+          tabIndex={0}
+          // On a telephone a figure keeps a size that can be read, and scrolls.
+          className="mt-6 overflow-x-auto [&_svg]:min-w-[34rem] sm:[&_svg]:min-w-0 print:[&_svg]:min-w-0"
+        >
           <FigureView
             number={block.number}
             figure={{ ...block.figure, caption: `${block.figure.caption} ${block.source}`.trim() }}

@@ -97,10 +97,11 @@ function salinity({ headline }: Response, { units, zone }: Context): HeadlineRow
   );
 }
 
-/** `19 h below 32.5 g/kg` */
-export function hoursBeyond(trigger: TriggerOutcome, units: UnitChoices): string {
+/** `19 h below 32.5 g/kg`, or `never below 32.5 g/kg` */
+function hoursBeyond(trigger: TriggerOutcome, units: UnitChoices): string {
   const level = formatQuantity(trigger.value, trigger.quantity, units).text;
-  return `${hoursText(trigger.hoursBeyond)} ${trigger.side} ${level}`;
+  const time = trigger.hoursBeyond > 0 ? hoursText(trigger.hoursBeyond) : "never";
+  return `${time} ${trigger.side} ${level}`;
 }
 
 function temperature({ headline }: Response, { units }: Context): HeadlineRow {

@@ -48,9 +48,10 @@ describe("draftAnswer", () => {
       threshold: 2,
       source: "",
     };
-    expect(answer({}, { fitNotes: [...sampleResponse().fitNotes, note] })).toContain(
-      "The method should not be used here: the box lies at 1° latitude.",
-    );
+    const text = answer({}, { fitNotes: [...sampleResponse().fitNotes, note] });
+    expect(text).toMatch(/^The method should not be used here: the box lies at 1° latitude\. At Skarrow Bay/);
+    const wordy = { ...note, message: "a word ".repeat(60) };
+    expect(answer({}, { fitNotes: [wordy] })).toMatch(/^The method should not be used here: see the fit notes\. At /);
   });
 
   it("claims no change that the decimals do not show", () => {

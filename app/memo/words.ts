@@ -27,12 +27,13 @@ interface Sentence {
 /** Drafts the bottom line. Sentences that do not fit in 120 words are left out, the least telling first. */
 export function draftAnswer(response: Response, context: WordsContext): Run[] {
   let sentences = [
+    ...unfit(response),
     salinity(response, context),
     ...triggers(response, context),
     temperature(response, context),
     displacement(response, context),
     ...transport(response, context),
-    ...limits(response),
+    ...limit(response),
     ...range(response),
   ];
   while (sentences.length > 1 && countWords(sentences) > MOST_WORDS) {
@@ -182,17 +183,23 @@ export function transportDecimals(value: number, units: UnitChoices): number {
   return Math.abs(toDisplay(value, "transportTotal", units)) >= 10 ? 0 : 1;
 }
 
-function limits({ fitNotes }: Response): Sentence[] {
-  const worst =
-    fitNotes.find((note) => note.severity === "doNotUse") ?? fitNotes.find((note) => note.severity === "caution");
-  if (!worst) return [];
-  const start = worst.severity === "doNotUse" ? "The method should not be used here:" : "What limits this:";
-  return [{ rank: worst.severity === "doNotUse" ? 0 : 3, runs: [plain(`${start} ${asClause(worst.message)}`)] }];
+/** A method that does not hold here is said before any number that it gave. */
+function unfit({ fitNotes }: Response): Sentence[] {
+  const worst = fitNotes.find((note) => note.severity === "doNotUse");
+  return worst ? [{ rank: 0.5, runs: [plain(`The method should not be used here: ${asClause(worst.message)}`)] }] : [];
 }
+
+function limit({ fitNotes }: Response): Sentence[] {
+  const worst = fitNotes.find((note) => note.severity === "caution");
+  return worst ? [{ rank: 3, runs: [plain(`What limits this: ${asClause(worst.message)}`)] }] : [];
+}
+
+const LONGEST_CLAUSE = 40;
 
 /** A note's first sentence, to follow a colon. */
 function asClause(message: string): string {
   const first = /^.*?[.!?](?=\s|$)/s.exec(message.trim())?.[0] ?? `${message.trim()}.`;
+  if (wordsIn(first) > LONGEST_CLAUSE) return "see the fit notes.";
   const [head = "", second = ""] = first;
   const lowered = second === second.toLowerCase() && /\p{L}|\s/u.test(second);
   return lowered ? head.toLowerCase() + first.slice(1) : first;

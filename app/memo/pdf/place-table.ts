@@ -29,6 +29,8 @@ export function placeTable({ caption, columns, rows }: TableData, parent: Struct
     ? lineStrips(typeset([{ text: caption }], SMALL, width, faces), { type: "Caption", parent: table }, left, 10)
     : [];
   const body = rows.flatMap((row) => rowStrips(row, columns, widths, edges, table, column, head));
+  // Neither the first nor the last row stands alone on a sheet.
+  for (const index of [0, body.length - 2]) if (index >= 0 && index < body.length - 1) body[index]!.keepWithNext = true;
   const empty: Strip[] =
     rows.length > 0
       ? []

@@ -15,7 +15,7 @@ export function resultBlocks(input: MemoInput, numbers: FigureNumbers): Block[] 
     comparison(input),
     ...triggerBlocks(input),
     ...input.estimates.flatMap(({ code, figures }, index) =>
-      // The first figure of the first estimate stands on the first sheet.
+      // The first figure of the first estimate stands beside the answer.
       (index === 0 ? figures.slice(1) : figures).map((figure) => numbers.block(figure, code)),
     ),
   ];

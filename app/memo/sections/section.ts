@@ -31,6 +31,8 @@ export class FigureNumbers {
 
   block(figure: Figure, estimateCode: string): Block {
     this.last += 1;
-    return { kind: "figure", number: this.last, figure, source: `Estimate ${estimateCode}.` };
+    // A caption that names its estimate already needs no second name.
+    const source = figure.caption.includes(estimateCode) ? "" : `Estimate ${estimateCode}.`;
+    return { kind: "figure", number: this.last, figure, source };
   }
 }
