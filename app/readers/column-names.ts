@@ -55,6 +55,10 @@ const UNIT_BY_NAME: Readonly<Record<string, string>> = {
   relh: "%",
 };
 
+/** What stands in brackets without being a unit: a statistic, a sense, a clock, a height. */
+const NO_UNIT =
+  /^(?:avg|average|mean|max\w*|min\w*|tot\w*|sum|inst\w*|raw|aut|auto|utc|gmt|local|lst|from|to|towards|true|mag\w*|\d+(?:\.\d+)? ?m(?:in\w*)?|hourly|daily)$/i;
+
 /** Takes a header cell apart: bare name, unit in brackets or at the end of the name, height. */
 export function nameParts(name: string): NameParts {
   const clean = name.replace(/^[\s#%;"']+/, "").trim();
@@ -87,7 +91,8 @@ export function nameParts(name: string): NameParts {
     else if (tail !== undefined) unit = unitFromText(tail.replace("_", ""));
     if (unit !== null) unitText = byName ?? tail ?? null;
   }
-  if (unit === null && groups.length > 0) unitText = groups.find((group) => /[a-z%°º/]/i.test(group)) ?? null;
+  if (unit === null && groups.length > 0)
+    unitText = groups.find((group) => /[a-z%°º/]/i.test(group) && !NO_UNIT.test(group)) ?? null;
   const height = HEIGHT.exec(bare)?.[1];
   return { bare: bare === "" ? clean : bare, unitText, unit, height: height === undefined ? null : Number(height) };
 }

@@ -18,7 +18,7 @@ const SPEED =
   /(?:speed|spd|veloc|vitesse|geschw|windstark|force|intensidade|sustain|mean|avg|average|media|moyen|mittel)/;
 const DIRECTION = /(?:\bdir|direc|richtung|bearing|winddir|\bdegt?\b|\bfrom\b|\btowards?\b|\bto\b)/;
 const GUST = /(?:gust|rajada|racha|rafaga|rafale|\bboen?\b|\bbo\b|windbo|windspitze|spitze|peak)/;
-const TEMPERATURE = /(?:temp|tmp|\btair\b|\btwat|celsius|\bt \d+ m\b)/;
+const TEMPERATURE = /(?:temp|tmp|\btair\b|\btwat|celsius|\bt \d+ m\b|\bair t[cf]?\b)/;
 
 /**
  * Words that name a quantity in English, Portuguese, Spanish, French and German, most particular first: the first rule
@@ -140,7 +140,7 @@ export const NAME_RULES: readonly NameRule[] = [
   {
     role: "shortwave",
     words:
-      /(?:short ?wave|\bsw\w*|solar|radiac|radiat|rayonn|strahlung|irradian|\bghi\b|insolat|pyran|\brad\b|onda corta)/,
+      /(?:short ?wave|\bsw\w*|solar|radiac|radiat|rayonn|strahlung|irradian|\bghi\b|insolat|pyran|\bslr|\brad\b|onda corta)/,
     whole: ["ssrd", "ssr", "rsds", "srad", "ghi", "sr", "swdn", "swnet", "rg"],
     not: /(?:diffuse|difusa|uv\b|\bpar\b|photosynth|net all)/,
   },

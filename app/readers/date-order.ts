@@ -40,7 +40,9 @@ export function chooseDateOrder(cells: readonly string[], answers: ReadingAnswer
     taken: LABELS[order],
     confidence,
   });
-  const ambiguous = firstOver === 0 && secondOver === 0 && !sameNumbers;
+  // Dates with dots are written day first wherever they are written (common practice, no source).
+  const dotted = cells.every((cell) => dayMonthNumbers(tidyCell(cell)) === null || /^\d{1,2}\./.test(tidyCell(cell)));
+  const ambiguous = firstOver === 0 && secondOver === 0 && !sameNumbers && !dotted;
   const suggestion = ambiguous ? shorterSpan([...distinct]) : firstOver >= secondOver ? "dmy" : "mdy";
   const question: ReadingQuestion = {
     key: "dateOrder",

@@ -5,6 +5,7 @@ import { unitById, type FileUnit } from "./file-units";
 import type { ProblemList } from "./problem-list";
 import { isValueRole, proposeColumns, type ColumnProposal } from "./propose-columns";
 import { windQuestions } from "./wind-questions";
+import { repeatsDailyTotal } from "./repeated-daily-total";
 import { readStamps, type Stamps } from "./read-stamps";
 import type { ChannelName, ReadingAnswers, ReadingQuestion, ReadingStep, SeriesReading, Understood } from "./reading";
 import { assembleSeries, type RowChannel } from "./assemble-series";
@@ -65,6 +66,15 @@ export function seriesFromTable(
   for (const column of settled) {
     const result = convertColumn(column, rough.unique, rough.medianStepSeconds, table.lines, problems);
     converted.set(column, result);
+    if (column.unit.quantity === "waterAmount" && repeatsDailyTotal(column.scan.values, stamps.utc, rough.unique)) {
+      problems.add(
+        "warning",
+        "dailyTotalRepeated",
+        "the same amount stands in every row of a day, as where the day's total is repeated; summed, it counts many times over",
+        "Give the rain of each interval, or a file with one row a day.",
+        { column: column.column.name },
+      );
+    }
     for (const row of result.bad) bad.set(row, `an error in “${column.column.name}”`);
   }
   const wind = windQuestions(settled, knowledge, answers);

@@ -54,7 +54,9 @@ function unitOfValues(
   speedUnit: FileUnit | null,
   state: Settling,
 ): FileUnit {
-  const guess = guessUnit(role, scan, speedUnit);
+  const guessed = guessUnit(role, scan, speedUnit);
+  // A unit that is stated but not known may be any: the values alone cannot settle it.
+  const guess = { ...guessed, sure: guessed.sure && column.statedUnit === null };
   const unit = unitById(guess.id) ?? (unitsFor(role)[0] as FileUnit);
   state.understood.push({
     what: `Unit of “${column.name}”`,

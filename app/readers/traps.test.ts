@@ -72,6 +72,12 @@ describe("wind", () => {
     expect(answered.questions.find(({ key }) => key === "columns")).toMatchObject({ needed: false, answer: "kn" });
   });
 
+  it("trap 4: a unit that is stated but not known is never guessed past", () => {
+    const reading = read(hourly("time,global radiation (furlongs)", ["3", "4"]));
+    expect(codes(reading)).toContain("unknownUnit");
+    expect(reading.questions).toContainEqual(expect.objectContaining({ key: "columns", column: 1, needed: true }));
+  });
+
   it("trap 5: a gust is never taken for the mean", () => {
     const both = read(hourly("time,wind gust (m/s),wind speed (m/s)", ["14,10"]));
     expect(values(both, "windSpeed")).toEqual([10]);
@@ -327,6 +333,14 @@ describe("rain and heat", () => {
     );
   });
 
+  it("trap 24: a day's total repeated in every hour is pointed out, hours of equal drizzle within a day are not", () => {
+    const totals = [0, 12.4, 3, 8.6, 0];
+    const cells = Array.from({ length: 97 }, (_, hour) => `${totals[Math.ceil(hour / 24)]}`);
+    expect(codes(read(hourly("time,rain (mm)", cells)))).toContain("dailyTotalRepeated");
+    const drizzle = cells.map((_, hour) => (hour % 24 < 12 ? "0.2" : "0"));
+    expect(codes(read(hourly("time,rain (mm)", drizzle)))).not.toContain("dailyTotalRepeated");
+  });
+
   it("trap 26: T is a trace of rain: 0, counted", () => {
     const reading = read(hourly("time,rain (in)", ["T", "0.01", "T"]));
     expect(values(reading, "rain")[0]).toBe(0);
@@ -460,6 +474,73 @@ describe("numbers and text", () => {
     const reading = read("date       time  ws   wd\n2024-03-01 00:00 5.5  90\n2024-03-01 01:00 6.5 100\n");
     expect(values(reading, "windSpeed")).toEqual([5.5, 6.5]);
     expect(values(reading, "windFrom")).toEqual([90, 100]);
+  });
+});
+
+describe("tables as instruments and services write them", () => {
+  it("reads a logger's table: station line, names, units, kind of statistic", () => {
+    const text = [
+      '"TOA5","Invented","1234"',
+      '"TIMESTAMP","RECORD","WS_ms_Avg","WindDir","AirTC_Avg","Rain_mm_Tot","BattV_Min","SlrW_Avg"',
+      '"TS","RN","meters/second","Deg","Deg C","mm","Volts","W/m^2"',
+      '"","","Avg","Smp","Avg","Tot","Min","Avg"',
+      '"2024-03-01 00:00:00",1,5.1,270,12.1,0,12.6,0',
+      '"2024-03-01 00:10:00",2,5.4,"NAN",12.2,0.2,12.6,410',
+    ].join("\n");
+    const reading = read(text);
+    expect(codes(reading)).toEqual([]);
+    expect(Object.keys(reading.channels).sort()).toEqual([
+      "airTemperature",
+      "rain",
+      "shortwave",
+      "windFrom",
+      "windSpeed",
+    ]);
+    expect(values(reading, "windSpeed")).toEqual([5.1, 5.4]);
+    expect(reading.questions.some(({ key }) => key === "columns")).toBe(false);
+  });
+
+  it.each([
+    [
+      "German",
+      "Datum (UTC);Windgeschwindigkeit [km/h];Windböen [km/h];Windrichtung [°];Niederschlag [mm];Lufttemperatur [°C];Taupunkt [°C];Luftdruck [hPa];rel. Feuchte [%];Globalstrahlung [J/cm²];Wassertemperatur [°C]",
+    ],
+    [
+      "Spanish",
+      "Fecha (UTC);Velocidad del viento (km/h);Ráfaga (km/h);Dirección del viento;Precipitación (mm);Temperatura del aire (°C);Punto de rocío (°C);Presión atmosférica (hPa);Humedad relativa (%);Radiación solar (J/cm²);Temperatura del agua (°C)",
+    ],
+    [
+      "French",
+      "Date (UTC);Vitesse du vent (km/h);Rafale (km/h);Direction du vent (°);Précipitations (mm);Température de l'air (°C);Point de rosée (°C);Pression mer (hPa);Humidité (%);Rayonnement global (J/cm²);Température de l'eau (°C)",
+    ],
+    [
+      "Portuguese",
+      "Data (UTC);Vento velocidade (km/h);Vento rajada (km/h);Vento direção (°);Chuva (mm);Temperatura do ar (°C);Ponto de orvalho (°C);Pressão (hPa);Umidade (%);Radiação global (J/cm²);Temperatura da água (°C)",
+    ],
+    [
+      "English",
+      "Date (UTC);Wind speed (km/h);Wind gust (km/h);Wind direction (°);Rain (mm);Air temperature (°C);Dew point (°C);Pressure (hPa);Humidity (%);Solar radiation (J/cm²);Water temperature (°C)",
+    ],
+  ])("reads %s names", (_, header) => {
+    const reading = read(
+      `${header}\n01.03.2024 00:00;36,0;54,0;270;0,2;8,1;4,0;1.013,2;88;36;7,5\n01.03.2024 01:00;36,0;54,0;270;0,2;8,1;4,0;1.013,2;88;36;7,5\n`,
+    );
+    const taken = Object.fromEntries(
+      Object.entries(reading.channels).map(([name, channel]) => [name, channel.values[0]]),
+    );
+    expect(taken).toEqual({
+      windSpeed: 10,
+      windGust: 15,
+      windFrom: 270,
+      rain: 0.2,
+      airTemperature: 8.1,
+      dewPoint: 4,
+      airPressure: 1013.2,
+      relativeHumidity: 88,
+      shortwave: 100,
+      seaTemperature: 7.5,
+    });
+    expect(reading.questions.filter(({ needed }) => needed).map(({ key }) => key)).toEqual(["windHeight"]);
   });
 });
 
