@@ -2,8 +2,9 @@ import "maplibre-gl/dist/maplibre-gl.css";
 import "./map.css";
 import * as maplibre from "maplibre-gl";
 import workerUrl from "maplibre-gl/dist/maplibre-gl-worker.mjs?url";
-import { type ReactNode, useMemo } from "react";
+import { type ReactNode, useState } from "react";
 import { AttributionControl, Map as ReactMap, NavigationControl, ScaleControl } from "react-map-gl/maplibre";
+import { BasemapColours } from "./basemap-colours.client";
 import { GraticuleLayer } from "./graticule-layer.client";
 import { useMapColours } from "./map-colours.client";
 import { basemapStyle } from "./map-style";
@@ -26,7 +27,7 @@ interface BaseMapProps {
 /** Sea, land, coast, graticule, scale bar and attribution: what every map of the product stands on. */
 export default function BaseMap({ view, distanceUnit, label, calm = false, children }: BaseMapProps) {
   const colours = useMapColours();
-  const style = useMemo(() => basemapStyle(colours, window.location.origin), [colours]);
+  const [style] = useState(() => basemapStyle(colours, window.location.origin));
   const { west, south, east, north } = view;
   return (
     <ReactMap
@@ -51,6 +52,7 @@ export default function BaseMap({ view, distanceUnit, label, calm = false, child
       onMoveStart={({ target }) => target.getContainer().setAttribute("aria-busy", "true")}
       onIdle={({ target }) => target.getContainer().setAttribute("aria-busy", "false")}
     >
+      <BasemapColours colours={colours} />
       <GraticuleLayer colours={colours} />
       {children}
       <NavigationControl position="top-right" showCompass={false} />

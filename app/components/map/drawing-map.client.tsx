@@ -1,4 +1,4 @@
-import { useEffect, useEffectEvent, useRef, useState } from "react";
+import { useEffect, useEffectEvent, useLayoutEffect, useRef, useState } from "react";
 import { type MapRef, useMap } from "react-map-gl/maplibre";
 import BaseMap from "./base-map.client";
 import { BoxDrawing } from "./box-drawing.client";
@@ -58,7 +58,8 @@ function Drawing({
     on.use(tool);
   });
 
-  useEffect(() => {
+  // A layout effect, so that the drawing leaves before the map under it is taken away.
+  useLayoutEffect(() => {
     if (!map) return;
     const begin = () => {
       const events = {

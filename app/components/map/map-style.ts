@@ -47,3 +47,10 @@ export function basemapStyle(colours: BasemapColours, origin: string): StyleSpec
     ],
   };
 }
+
+/** Where the basemap's colours sit in its style, to change them in place. */
+export const BASEMAP_PAINTS = [
+  { layer: "sea", property: "background-color", colour: "sea" },
+  { layer: "land", property: "fill-color", colour: "land" },
+  { layer: "coast", property: "line-color", colour: "quiet" },
+] as const;
