@@ -54,7 +54,7 @@ export function parseFormula(text: string): Formula {
     for (;;) {
       const divided = isSign("/");
       const next = peek();
-      const touching = next !== undefined && (next.kind !== "sign" || next.value === "(");
+      const touching = next?.kind === "name" || isSign("(");
       if (!divided && !isSign("*") && !touching) return left;
       if (!touching) at++;
       const [a, b] = [left, signed()];
