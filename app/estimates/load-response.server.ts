@@ -7,11 +7,14 @@ import type { StormForcing } from "./storm-forcing";
 import type { Estimate } from "~/db/models/estimate.server";
 import type { Project } from "~/db/models/project.server";
 import type { Tenant } from "~/db/scoped.server";
+import { namesOfUsers } from "~/db/unscoped.server";
 import type { Response } from "~/ocean/response";
 import { ENGINE_VERSION } from "~/ocean/version";
 
 export interface LoadedResponse {
   estimate: Estimate;
+  /** Name of the person who asked for the last run. */
+  requestedBy: string;
   state: EstimateState;
   /** To the inputs as they are now where there is one, else of the last run; null where there is none. */
   response: Response | null;
@@ -47,6 +50,7 @@ export async function loadResponse(
   const sameStorm = !response || response.inputs === now.hash || parts?.storm === now.parts?.storm;
   return {
     estimate,
+    requestedBy: (await namesOfUsers([estimate.requestedBy])).get(estimate.requestedBy) ?? "",
     state,
     response,
     register: stands.register,

@@ -36,7 +36,7 @@ export interface LedgerCellView {
   /** The gravest note where the method does not fit well. */
   fit: { severity: FitSeverity; message: string } | null;
   problems: string[];
-  /** Column and sheet of the run, where the project has several. */
+  /** Column and sheet of the run. */
   made: string;
 }
 
@@ -48,6 +48,8 @@ export interface LedgerView {
   fullCircle: string;
   underWay: boolean;
   toRun: number;
+  /** Whether cells may differ by column or sheet, and so have to name theirs. */
+  several: boolean;
 }
 
 export interface LedgerContext {
@@ -137,9 +139,7 @@ function presentCell(cell: LedgerCell, ledger: Ledger, context: LedgerContext, f
     arrow: net ? driftArrow({ distance: net.value, towards: net.towards, fullCircle }, units) : null,
     fit: response && gravestNote(response),
     problems: problemsOf(state),
-    made: [ledger.columns.length > 1 ? water : "", ledger.sheets.length > 1 && sheet ? sheetLabel(sheet) : ""]
-      .filter(Boolean)
-      .join(" · "),
+    made: [water, ...(sheet ? [sheetLabel(sheet)] : [])].join(" · "),
   };
 }
 
@@ -160,5 +160,6 @@ export function presentLedger(ledger: Ledger, context: LedgerContext): LedgerVie
       : "",
     underWay: ledger.cells.some(({ state }) => isUnderWay(state)),
     toRun: cells.filter((cell) => cell.needsRun).length,
+    several: ledger.columns.length > 1 || ledger.sheets.length > 1,
   };
 }

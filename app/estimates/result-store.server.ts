@@ -1,25 +1,23 @@
 /** Responses are kept once for each organisation, input hash and engine version; their series as blobs beside them. */
-import { isoTime } from "./build-scenario";
+import { readColumn, readSeries, storedSeries } from "./stored-series";
 import type { Tenant } from "~/db/scoped.server";
 import { fromBlob, toBlob } from "~/db/typed-array.server";
-import { SERIES_UNITS, type Response, type ResponseSeries, type SeriesName } from "~/ocean/response";
+import type { Response } from "~/ocean/response";
 import { epochSeconds } from "~/units/format-time";
 
-export type ResponseWithoutSeries = Omit<Response, "series">;
+export type ResponseWithoutSeries = Omit<Response, "series" | "column">;
 
 export interface ResultKey {
   inputHash: string;
   engineVersion: string;
 }
 
-const SERIES_NAMES = Object.keys(SERIES_UNITS) as SeriesName[];
-
 /** Stores a response whose times are ISO 8601; one that is there already stays as it is. */
 export async function storeResult(tenant: Tenant, response: Response): Promise<void> {
-  const { series, ...rest } = response;
+  const { series, column, ...rest } = response;
+  const { inputs: inputHash, engine: engineVersion } = response;
   await tenant.write(async (inner) => {
-    const { inputs: inputHash, engine: engineVersion } = response;
-    if (await inner.results.first({ where: { inputHash, engineVersion }, without: ["response", "time"] })) return;
+    if (await resultIsStored(inner, { inputHash, engineVersion })) return;
     const { id: resultId } = await inner.results.create({
       inputHash,
       engineVersion,
@@ -27,15 +25,8 @@ export async function storeResult(tenant: Tenant, response: Response): Promise<v
       length: series.time.length,
       time: toBlob(series.time.map(epochSeconds)),
     });
-    for (const name of SERIES_NAMES) {
-      const values = series[name];
-      await inner.resultSeries.create({
-        resultId,
-        name,
-        unit: SERIES_UNITS[name],
-        length: values.length,
-        values: toBlob(values),
-      });
+    for (const { name, unit, values } of storedSeries(series, column)) {
+      await inner.resultSeries.create({ resultId, name, unit, length: values.length, values: toBlob(values) });
     }
   });
 }
@@ -62,9 +53,11 @@ export async function readResponse(tenant: Tenant, { inputHash, engineVersion }:
   const result = await tenant.results.first({ where: { inputHash, engineVersion } });
   if (!result) return null;
   const rows = await tenant.resultSeries.list({ where: { resultId: result.id } });
-  const series = Object.fromEntries(rows.map(({ name, values, length }) => [name, [...fromBlob(values, length)]]));
+  const values = new Map(rows.map((row) => [row.name, [...fromBlob(row.values, row.length)]]));
+  const column = readColumn(values);
   return {
     ...result.response,
-    series: { time: [...fromBlob(result.time, result.length)].map(isoTime), ...series } as ResponseSeries,
+    series: readSeries([...fromBlob(result.time, result.length)], values),
+    ...(column && { column }),
   };
 }

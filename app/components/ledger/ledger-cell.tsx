@@ -7,6 +7,8 @@ import { RunButton } from "./run-button";
 
 interface LedgerCellProps {
   cell: LedgerCellView;
+  /** Name the column and sheet. */
+  showMade: boolean;
   /** Address of the project. */
   home: string;
   mayRun: boolean;
@@ -14,7 +16,7 @@ interface LedgerCellProps {
   name: string;
 }
 
-export function LedgerCell({ cell, home, mayRun, name }: LedgerCellProps) {
+export function LedgerCell({ cell, showMade, home, mayRun, name }: LedgerCellProps) {
   const underWay = cell.state === "queued" || cell.state === "running";
   const to = `${home}/estimates/${cell.estimateId}`;
   return (
@@ -55,7 +57,7 @@ export function LedgerCell({ cell, home, mayRun, name }: LedgerCellProps) {
             Run again
           </RunButton>
         )}
-        {cell.made && <span className="w-full">{cell.made}</span>}
+        {showMade && <span className="w-full">{cell.made}</span>}
       </p>
     </div>
   );

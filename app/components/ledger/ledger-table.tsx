@@ -73,7 +73,7 @@ export function LedgerTable({ ledger, home, mayRun }: LedgerTableProps) {
                 return (
                   <td key={storm.id} className="h-full border-b border-r border-hairline p-0 align-top">
                     {cell ? (
-                      <LedgerCell cell={cell} home={home} mayRun={mayRun} name={name} />
+                      <LedgerCell cell={cell} showMade={ledger.several} home={home} mayRun={mayRun} name={name} />
                     ) : (
                       <p className="flex items-baseline justify-between gap-3 p-3 text-small text-slate">
                         not run

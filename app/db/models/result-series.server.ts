@@ -1,12 +1,12 @@
 import { type CreationOptional, DataTypes, type InferAttributes, type InferCreationAttributes, Model } from "sequelize";
 import { sequelize } from "../connection.server";
-import type { SeriesName } from "~/ocean/response";
+import type { StoredSeriesName } from "~/estimates/stored-series";
 
 export class ResultSeries extends Model<InferAttributes<ResultSeries>, InferCreationAttributes<ResultSeries>> {
   declare id: string;
   declare organisationId: string;
   declare resultId: string;
-  declare name: SeriesName;
+  declare name: StoredSeriesName;
   declare unit: string;
   declare length: number;
   declare values: Buffer;

@@ -8,7 +8,7 @@ export class Result extends Model<InferAttributes<Result>, InferCreationAttribut
   declare organisationId: string;
   declare inputHash: string;
   declare engineVersion: string;
-  declare response: Omit<Response, "series">;
+  declare response: Omit<Response, "series" | "column">;
   declare length: number;
   declare time: Buffer;
   declare createdAt: CreationOptional<Date>;

@@ -26,7 +26,6 @@ import { choiceOf, KEEP, runSchema } from "~/estimates/run-request";
 import { CannotStart, startEstimates } from "~/estimates/start-estimates.server";
 import { may } from "~/organisations/permissions";
 import { currentProject } from "~/projects/current-project.server";
-import { namesOfUsers } from "~/db/unscoped.server";
 import { notFound } from "~/services/guard.server";
 import { readForm } from "~/services/read-form.server";
 import { formatTime } from "~/units/format-time";
@@ -39,10 +38,9 @@ export async function loader({ context, params }: Route.LoaderArgs) {
   const { units } = organisation;
   const { timeZone: zone, jobNumber } = project;
   const code = estimateCode(jobNumber, estimate.number);
-  const [columns, sheets, people] = await Promise.all([
+  const [columns, sheets] = await Promise.all([
     tenant.waterColumns.list({ where: { projectId: project.id } }),
     tenant.methodSheets.list(),
-    namesOfUsers([estimate.requestedBy]),
   ]);
   const shown = response && {
     view: presentResponse(response, { units, zone, shore: register.box.shoreNormal !== null }),
@@ -64,7 +62,7 @@ export async function loader({ context, params }: Route.LoaderArgs) {
     assumptions,
     units,
     run: {
-      by: people.get(estimate.requestedBy) ?? "",
+      by: loaded.requestedBy,
       at: formatTime(estimate.finishedAt, zone),
     },
     columns: columns.map(({ id, name }) => ({ id, name })),

@@ -1,15 +1,13 @@
 import { Link } from "react-router";
 import type { Route } from "./+types/list";
 import { PageTitle } from "~/components/page-title";
-import { forOrganisation } from "~/db/scoped.server";
 import { METHOD_KEYS, PARAMETERS, parameterText } from "~/estimates/method-parameters";
 import { defaultMethodSheet } from "~/estimates/start-estimates.server";
+import { currentTenant } from "~/organisations/current-tenant.server";
 import { may } from "~/organisations/permissions";
-import { allowed } from "~/services/guard.server";
 
 export async function loader({ context }: Route.LoaderArgs) {
-  const { organisation } = allowed(context, "project.view");
-  const tenant = forOrganisation(organisation.id);
+  const { organisation, tenant } = currentTenant(context, "project.view");
   const [sheets, standard] = await Promise.all([
     tenant.methodSheets.list({
       order: [

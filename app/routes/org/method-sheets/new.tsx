@@ -5,11 +5,10 @@ import type { Route } from "./+types/new";
 import { Field, FormErrors } from "~/components/field";
 import { PageTitle } from "~/components/page-title";
 import { SubmitButton } from "~/components/submit-button";
-import { forOrganisation } from "~/db/scoped.server";
 import { METHOD_KEYS, PARAMETERS, type MethodKey } from "~/estimates/method-parameters";
 import { formValues, methodSheetSchema } from "~/estimates/method-sheet-schema";
 import { saveMethodSheet } from "~/estimates/save-method-sheet.server";
-import { allowed } from "~/services/guard.server";
+import { currentTenant } from "~/organisations/current-tenant.server";
 import { readForm } from "~/services/read-form.server";
 
 /** What most sheets settle; everything else stands below, folded. */
@@ -17,18 +16,18 @@ const FIRST: MethodKey[] = ["model", "dragLaw", "highWindCap", "dampingRate"];
 const REST = METHOD_KEYS.filter((key) => !FIRST.includes(key));
 
 export async function loader({ request, context }: Route.LoaderArgs) {
-  const { organisation } = allowed(context, "project.edit");
+  const { tenant } = currentTenant(context, "project.edit");
   const from = new URL(request.url).searchParams.get("from");
-  const sheet = from ? await forOrganisation(organisation.id).methodSheets.find(from) : null;
+  const sheet = from ? await tenant.methodSheets.find(from) : null;
   return { values: sheet && formValues(sheet.name, sheet.choices), next: sheet ? sheet.version + 1 : null };
 }
 
 export async function action({ request, context }: Route.ActionArgs) {
-  const { organisation } = allowed(context, "project.edit");
+  const { organisation, tenant } = currentTenant(context, "project.edit");
   const submission = await readForm(request, methodSheetSchema);
   if (submission.status !== "success") return data(submission.reply(), { status: 400 });
   const { name, choices } = submission.value;
-  const saved = await saveMethodSheet(forOrganisation(organisation.id), name, choices);
+  const saved = await saveMethodSheet(tenant, name, choices);
   if (!saved.changed) {
     const message = `Version ${saved.version} of this sheet says the same already: change something, or give another name.`;
     return data(submission.reply({ fieldErrors: { name: [message] } }), { status: 400 });
