@@ -32,13 +32,16 @@ export function parameterName(key: string): string {
   return key in PARAMETER_NAMES ? PARAMETER_NAMES[key as keyof MethodChoices] : key;
 }
 
-/** A parameter's value as text: as given, with a proper minus sign; powers of ten for the very small. */
+/**
+ * A parameter's value as text: as given, with a proper minus sign; powers of ten for the very small. Nobody states more
+ * than 15 digits: a value that has them was computed, and six are told.
+ */
 export function parameterValue(value: number | string | boolean): string {
   if (typeof value === "boolean") return value ? "yes" : "no";
   if (typeof value === "string") return value;
-  const [digits = "", power] = (
-    value !== 0 && (Math.abs(value) < 1e-3 || Math.abs(value) >= 1e7) ? value.toExponential() : String(value)
-  ).split("e");
+  const stated = significantDigits(value) > 15 ? Number(value.toPrecision(6)) : value;
+  const small = stated !== 0 && (Math.abs(stated) < 1e-3 || Math.abs(stated) >= 1e7);
+  const [digits = "", power] = (small ? stated.toExponential() : String(stated)).split("e");
   const text = power === undefined ? digits : `${digits} × 10${superscript(Number(power))}`;
   return text.replace("-", "−");
 }
@@ -48,6 +51,10 @@ export function printedNumbers(text: string): string {
   return text
     .replace(/(\d)e(-?\d+)/g, (_, digit: string, power: string) => `${digit} × 10${superscript(Number(power))}`)
     .replace(/(?<![\p{L}\d])-(?=\d)/gu, "−");
+}
+
+function significantDigits(value: number): number {
+  return value.toExponential().replace(/e.*$/, "").replace(/\D/g, "").length;
 }
 
 const SUPERSCRIPTS = "⁰¹²³⁴⁵⁶⁷⁸⁹";
