@@ -22,4 +22,3 @@ export interface CurrentOrganisation {
 
 export const actorContext = createContext<Actor | null>(null);
 export const organisationContext = createContext<CurrentOrganisation>();
-

@@ -78,10 +78,7 @@ export default function handleRequest(
 }
 
 /** What was thrown and is not an answer: the person sees a plain page with the request's id, the log has the rest. */
-export function handleError(
-  error: unknown,
-  { request }: { request: Request },
-): void {
+export function handleError(error: unknown, { request }: { request: Request }): void {
   if (request.signal.aborted || (isRouteErrorResponse(error) && error.status < 500)) return;
   requestLog(requestIdOf(request)).error({ err: error, path: new URL(request.url).pathname }, "a request failed");
 }

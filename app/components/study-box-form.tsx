@@ -90,7 +90,10 @@ export function StudyBoxForm({ lastResult, units, otherBoxes, ring: stored, valu
           const parts = level.getFieldset();
           const chosen = TRIGGER_QUANTITIES.find((id) => id === parts.quantity.value) ?? "salinity";
           return (
-            <div key={level.key} className="mt-3 grid grid-cols-2 items-start gap-3 sm:grid-cols-[2fr_1fr_1fr_1fr_auto]">
+            <div
+              key={level.key}
+              className="mt-3 grid grid-cols-2 items-start gap-3 sm:grid-cols-[2fr_1fr_1fr_1fr_auto]"
+            >
               <Field id={parts.quantity.id} label="Quantity" errors={parts.quantity.errors}>
                 {(described) => (
                   <select {...getSelectProps(parts.quantity)} {...described} key={parts.quantity.key} className="input">

@@ -22,7 +22,14 @@ interface Signing {
 const CHANGED = "The memo changed since you opened this page. Read it again as it stands now.";
 
 /** Puts the checker's name to what the memo says now; why it was refused, or null. */
-export async function signMemo({ tenant, organisation, project, memo, actor, content }: Signing): Promise<string | null> {
+export async function signMemo({
+  tenant,
+  organisation,
+  project,
+  memo,
+  actor,
+  content,
+}: Signing): Promise<string | null> {
   if (actor.id === memo.originatorId) return "The originator cannot check their own memo.";
   const draft = await composeDraft(tenant, organisation, project, memo);
   if (draft.content !== content) return CHANGED;

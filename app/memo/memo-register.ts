@@ -76,7 +76,9 @@ export function registerWaters(registers: InputsRegister[], units: UnitChoices):
     ({ name }) => name,
   ).map((water) => {
     const salinity = (value: number) =>
-      water.salinityScale === "absolute" ? formatQuantity(value, "salinity", units, { decimals: 2 }).text : `${value} (PSS-78)`;
+      water.salinityScale === "absolute"
+        ? formatQuantity(value, "salinity", units, { decimals: 2 }).text
+        : `${value} (PSS-78)`;
     const temperature = (value: number) => formatQuantity(value, "temperature", units, { decimals: 2 }).text;
     const below =
       water.belowTemperature === null || water.belowSalinity === null

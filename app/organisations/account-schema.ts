@@ -12,7 +12,11 @@ export const signInSchema = z.object({
 });
 
 export const signUpSchema = z.object({
-  organisationName: z.string("Write the name of your organisation.").trim().min(2, "Write at least two characters.").max(120),
+  organisationName: z
+    .string("Write the name of your organisation.")
+    .trim()
+    .min(2, "Write at least two characters.")
+    .max(120),
   name: z.string("Write your name, as it stands on a memo.").trim().min(2, "Write at least two characters.").max(120),
   email: z.preprocess((value) => value ?? "", email),
   password: z

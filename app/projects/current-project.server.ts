@@ -1,7 +1,7 @@
 import type { RouterContextProvider } from "react-router";
 import type { Actor, CurrentOrganisation } from "~/context";
 import type { Project } from "~/db/models/project.server";
-import { forOrganisation, type Tenant } from "~/db/scoped.server";
+import type { Tenant } from "~/db/scoped.server";
 import type { Action } from "~/organisations/permissions";
 import { allowed, notFound } from "~/services/guard.server";
 
@@ -18,8 +18,7 @@ export async function currentProject(
   params: { project?: string },
   action: Action,
 ): Promise<CurrentProject> {
-  const { actor, organisation } = allowed(context, action);
-  const tenant = forOrganisation(organisation.id);
+  const { actor, organisation, tenant } = allowed(context, action);
   const project = await tenant.projects.find(params.project ?? "");
   if (!project) notFound();
   return { actor, organisation, tenant, project };

@@ -4,6 +4,7 @@
  */
 import { data, redirect, type MiddlewareFunction } from "react-router";
 import { actorContext, organisationContext } from "~/context";
+import { forOrganisation } from "~/db/scoped.server";
 import { findUser, membershipBySlug } from "~/db/unscoped.server";
 import { may, type Action } from "~/organisations/permissions";
 import { readSession } from "./session.server";
@@ -54,12 +55,12 @@ export const refuseCrossSite: Middleware = ({ request }) => {
   }
 };
 
-/** The current organisation, where the actor may do this; 403 where the role does not allow it. */
+/** The current organisation and the way to its rows, where the actor may do this; 403 where the role does not allow it. */
 export function allowed(context: Readonly<RouterContextProvider>, action: Action) {
   const organisation = context.get(organisationContext);
   const actor = context.get(actorContext);
   if (!actor || !may(organisation.role, action)) {
     throw data("Your role in this organisation does not allow this.", { status: 403 });
   }
-  return { actor, organisation };
+  return { actor, organisation, tenant: forOrganisation(organisation.id) };
 }

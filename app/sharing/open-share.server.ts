@@ -50,11 +50,7 @@ export interface OpenShare {
 }
 
 /** What a link opens, for a browser that holds its cookie; counts the visit. */
-export async function openShare(
-  request: Request,
-  linkId: string,
-  act: "opened" | "downloaded",
-): Promise<OpenShare> {
+export async function openShare(request: Request, linkId: string, act: "opened" | "downloaded"): Promise<OpenShare> {
   const token: unknown = await shareCookie(linkId).parse(request.headers.get("Cookie"));
   const link = typeof token === "string" ? await findShareLinkByTokenHash(hashToken(token)) : null;
   if (!link || link.id !== linkId || !isOpen(link, new Date())) closed();

@@ -74,7 +74,8 @@ function hoursOf(storm: InventedStorm): InventedHour[] {
       windFrom: (((turn + 4 * noise(random)) % 360) + 360) % 360,
       gust: windSpeed * (1.28 + 0.05 * random()),
       rain: rainShape * storm.peakRain * shower,
-      pressure: 1014 - (1014 - storm.lowestPressure) * bell(hour, storm.peakHour - 3, storm.width * 1.2) + 0.2 * noise(random),
+      pressure:
+        1014 - (1014 - storm.lowestPressure) * bell(hour, storm.peakHour - 3, storm.width * 1.2) + 0.2 * noise(random),
       air,
       sea: storm.seaTemperature - 0.4 * (1 / (1 + Math.exp(-(hour - storm.peakHour) / 8))),
       netHeat: sun - 55 - 9 * windSpeed * Math.max(0.2, (storm.seaTemperature - air) / 4),

@@ -11,8 +11,14 @@ export function loader({ context }: Route.LoaderArgs) {
 
 const STEPS = [
   ["Area", "Draw study boxes on the map, or type their corners. Area, f and the inertial period stand beside them."],
-  ["Storms", "Bring the buoy's or the gauge's own file. A reading sheet says what was understood and asks where it is unsure."],
-  ["Water", "Describe the layer and what lies below it. A column that would overturn is refused before anything is run."],
+  [
+    "Storms",
+    "Bring the buoy's or the gauge's own file. A reading sheet says what was understood and asks where it is unsure.",
+  ],
+  [
+    "Water",
+    "Describe the layer and what lies below it. A column that would overturn is refused before anything is run.",
+  ],
   ["Estimates", "Drift and transport, freshening, warming or cooling, density; and where the method does not apply."],
   ["Memos", "Text, figures and numbers that point at estimates, checked, issued as a revision, shared by a link."],
 ] as const;
@@ -26,7 +32,9 @@ export default function Landing() {
         content="Screening estimates of the surface layer under a storm, from raw records to a checked memo."
       />
       <Mark size={64} />
-      <h1 className="mt-6 text-title font-bold sm:text-[2.75rem] sm:leading-tight">What the storm leaves in the water.</h1>
+      <h1 className="mt-6 text-title font-bold sm:text-[2.75rem] sm:leading-tight">
+        What the storm leaves in the water.
+      </h1>
       <p className="mt-4 max-w-prose text-large text-slate">
         For coastal consultancies: from a wind record, a rain gauge and one cast to a memo that a checker can retrace
         number by number.

@@ -1,35 +1,14 @@
 import { data, Link, redirect } from "react-router";
 import type { Route } from "./+types/edit";
-import { boxSchema, TRIGGER_QUANTITY_IDS } from "~/area/box-schema";
+import { boxFormValues } from "~/area/box-form-values";
+import { boxSchema } from "~/area/box-schema";
 import { saveBox } from "~/area/save-box.server";
 import { ConfirmButton } from "~/components/confirm-button";
 import { PageTitle } from "~/components/page-title";
 import { StudyBoxForm } from "~/components/study-box-form";
-import type { StudyBox } from "~/db/models/study-box.server";
 import { currentProject } from "~/projects/current-project.server";
 import { notFound } from "~/services/guard.server";
 import { readForm } from "~/services/read-form.server";
-import { toDisplay } from "~/units/format-quantity";
-import type { QuantityId } from "~/units/quantities";
-import type { UnitChoices } from "~/units/unit-choices";
-
-/** Twelve digits are all that a conversion there and back leaves sure. */
-function shown(value: number | null, id: QuantityId, units: UnitChoices): number | undefined {
-  return value === null ? undefined : Number(toDisplay(value, id, units).toPrecision(12));
-}
-
-function formValues(box: StudyBox, units: UnitChoices) {
-  return {
-    name: box.name,
-    waterDepth: shown(box.waterDepth, "depth", units),
-    shoreNormal: box.shoreNormal ?? undefined,
-    distanceToShore: shown(box.distanceToShore, "distance", units),
-    triggerLevels: box.triggerLevels.map((level) => ({
-      ...level,
-      value: shown(level.value, TRIGGER_QUANTITY_IDS[level.quantity], units) ?? 0,
-    })),
-  };
-}
 
 export async function loader({ context, params }: Route.LoaderArgs) {
   const { tenant, organisation, project } = await currentProject(context, params, "project.edit");
@@ -40,7 +19,7 @@ export async function loader({ context, params }: Route.LoaderArgs) {
     units: organisation.units,
     name: box.name,
     ring: box.polygon,
-    values: formValues(box, organisation.units),
+    values: boxFormValues(box, organisation.units),
     otherBoxes: boxes.filter(({ id }) => id !== box.id).map(({ name, polygon }) => ({ name, polygon })),
     estimates: await tenant.estimates.count({ studyBoxId: box.id }),
   };

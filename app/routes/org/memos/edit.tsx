@@ -54,9 +54,7 @@ export async function action({ request, context, params }: Route.ActionArgs) {
       await currentProject(context, params, "memo.issue");
       const issued = await issueMemo({ tenant, organisation, project, memo, actor, content });
       if ("refusal" in issued) return data({ refusal: issued.refusal, result: undefined }, { status: 400 });
-      return redirect(
-        `/o/${organisation.slug}/projects/${project.id}/memos/${memo.id}/revisions/${issued.revisionId}`,
-      );
+      return redirect(`/o/${organisation.slug}/projects/${project.id}/memos/${memo.id}/revisions/${issued.revisionId}`);
     }
     default: {
       await currentProject(context, params, "memo.write");
@@ -119,7 +117,7 @@ export default function EditMemo({ actionData, loaderData }: Route.ComponentProp
           />
         </div>
         <section aria-label="Preview" className="min-w-0">
-          <DocumentView document={document} />
+          <DocumentView document={document} titleLevel={2} />
         </section>
       </div>
       <p className="mt-6">

@@ -1,36 +1,14 @@
 import { Link } from "react-router";
 import type { Route } from "./+types/list";
 import { EmptyState, PageTitle } from "~/components/page-title";
-import { namesOfUsers } from "~/db/unscoped.server";
-import { memoNumber } from "~/memo/memo-number";
+import { listMemos } from "~/memo/list-memos.server";
 import { may } from "~/organisations/permissions";
 import { currentProject } from "~/projects/current-project.server";
-import { formatDate } from "~/units/format-time";
 
 export async function loader({ context, params }: Route.LoaderArgs) {
   const { tenant, organisation, project } = await currentProject(context, params, "project.view");
-  const memos = await tenant.memos.list({ where: { projectId: project.id }, order: [["number", "DESC"]] });
-  const revisions = await tenant.memoRevisions.list({
-    where: { memoId: memos.map(({ id }) => id) },
-    order: [["sequence", "DESC"]],
-    without: ["pdf", "document"],
-  });
-  const names = await namesOfUsers(memos.map(({ originatorId }) => originatorId));
   return {
-    memos: memos.map(({ id, number, title, originatorId }) => ({
-      id,
-      number: memoNumber(project.jobNumber, number),
-      title,
-      originator: names.get(originatorId) ?? "",
-      revisions: revisions
-        .filter(({ memoId }) => memoId === id)
-        .map(({ id: revision, label, purpose, issuedAt }) => ({
-          id: revision,
-          label,
-          purpose,
-          issued: formatDate(issuedAt, project.timeZone),
-        })),
-    })),
+    memos: await listMemos(tenant, project),
     timeZone: project.timeZone,
     mayWrite: may(organisation.role, "memo.write"),
     hasEstimates: (await tenant.estimates.count({ projectId: project.id })) > 0,

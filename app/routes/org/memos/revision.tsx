@@ -102,7 +102,9 @@ export default function Revision({ actionData, loaderData }: Route.ComponentProp
             </div>
           </Form>
           {links.length === 0 ? (
-            <p className="mt-3 text-slate">No link yet. A link opens this revision and nothing else, without an account.</p>
+            <p className="mt-3 text-slate">
+              No link yet. A link opens this revision and nothing else, without an account.
+            </p>
           ) : (
             <div className="mt-4 overflow-x-auto">
               <table className="rule-table">
@@ -151,7 +153,7 @@ export default function Revision({ actionData, loaderData }: Route.ComponentProp
           )}
         </section>
       )}
-      <DocumentView document={document} />
+      <DocumentView document={document} titleLevel={2} />
       <p className="mt-6 break-all text-small text-quiet">SHA-256 of the PDF: {revision.pdfSha256}</p>
       <p className="mt-3">
         <Link to="../.." relative="path">

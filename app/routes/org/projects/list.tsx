@@ -1,15 +1,13 @@
 import { Link } from "react-router";
 import type { Route } from "./+types/list";
 import { EmptyState, PageTitle } from "~/components/page-title";
-import { forOrganisation } from "~/db/scoped.server";
 import { may } from "~/organisations/permissions";
 import { allowed } from "~/services/guard.server";
 
 const PAGE_SIZE = 50;
 
 export async function loader({ context, request }: Route.LoaderArgs) {
-  const { organisation } = allowed(context, "project.view");
-  const tenant = forOrganisation(organisation.id);
+  const { organisation, tenant } = allowed(context, "project.view");
   const page = Math.max(1, Math.trunc(Number(new URL(request.url).searchParams.get("page"))) || 1);
   const [total, projects] = await Promise.all([
     tenant.projects.count(),

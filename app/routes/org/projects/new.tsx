@@ -7,7 +7,6 @@ import { FormErrors } from "~/components/field";
 import { PageTitle } from "~/components/page-title";
 import { ProjectFactsFields } from "~/components/project-facts-fields";
 import { SubmitButton } from "~/components/submit-button";
-import { forOrganisation } from "~/db/scoped.server";
 import { CAUTION } from "~/ocean/caution";
 import { newProjectSchema, TIME_ZONES } from "~/projects/project-schema";
 import { beginProject } from "~/projects/save-project.server";
@@ -20,10 +19,10 @@ export function loader({ context }: Route.LoaderArgs) {
 }
 
 export async function action({ request, context }: Route.ActionArgs) {
-  const { organisation, actor } = allowed(context, "project.edit");
+  const { organisation, actor, tenant } = allowed(context, "project.edit");
   const submission = await readForm(request, newProjectSchema);
   if (submission.status !== "success") return data(submission.reply(), { status: 400 });
-  const saved = await beginProject(forOrganisation(organisation.id), submission.value, actor.id);
+  const saved = await beginProject(tenant, submission.value, actor.id);
   if (saved.fieldErrors) return data(submission.reply({ fieldErrors: saved.fieldErrors }), { status: 400 });
   return redirect(`/o/${organisation.slug}/projects/${saved.id}`);
 }
