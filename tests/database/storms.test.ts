@@ -133,18 +133,18 @@ describe("answers", () => {
     expect(kept && (await readingSheet(organisation.tenant, storm, kept))?.reading.windHeight).toBe(4.1);
   });
 
-  it("leave the former ones where they would leave nothing to read, or are kept with a reading that says so", async () => {
-    const { record } = await begin("wind.csv", WIND);
-    const nothing = { columns: { 0: { role: "leftOut" as const } } };
-    const outcome = await changeAnswers(organisation.tenant, record, nothing).catch((error: Error) => error);
-    const kept = (await organisation.tenant.records.find(record.id))?.answers;
-    if (outcome instanceof Error) {
-      expect(outcome.message).toContain("nothing can be read");
-      expect(kept).toEqual({});
-    } else {
-      expect(outcome?.problems.some(({ severity }) => severity === "error")).toBe(true);
-      expect(kept).toEqual(nothing);
-    }
+  it("that leave no time axis are kept with a reading that says so and cannot be confirmed", async () => {
+    const { storm, record } = await begin("wind.csv", WIND);
+    const answers = { columns: { 0: { role: "leftOut" as const } } };
+    const reading = await changeAnswers(organisation.tenant, record, answers);
+    expect(reading?.problems).toContainEqual(
+      expect.objectContaining({ severity: "error", message: expect.stringContaining("time") }),
+    );
+    const kept = (await organisation.tenant.records.find(record.id))!;
+    expect(kept.answers).toEqual(answers);
+    await expect(confirmRecord(organisation.tenant, storm, kept, confirmation(DAY_START))).rejects.toThrow(
+      "Questions are open",
+    );
   });
 });
 
@@ -324,7 +324,9 @@ describe("names", () => {
     const { storm } = await begin("a.csv", WIND);
     const other = await begin("b.csv", OTHER_WIND);
     await renameStorm(organisation.tenant, storm, "November gale");
-    await expect(renameStorm(organisation.tenant, other.storm, "November gale")).rejects.toMatchObject({ field: "name" });
+    await expect(renameStorm(organisation.tenant, other.storm, "November gale")).rejects.toMatchObject({
+      field: "name",
+    });
     await expect(renameStorm(organisation.tenant, other.storm, "")).rejects.toMatchObject({ field: "name" });
     expect((await again(storm.id)).name).toBe("November gale");
   });

@@ -6,6 +6,8 @@ import { formatPeriod, formatTime } from "~/units/format-time";
 
 interface RecordCardProps {
   record: ShownRecord;
+  /** Address of the project. */
+  home: string;
   zone: string;
   mayEdit: boolean;
 }
@@ -13,7 +15,7 @@ interface RecordCardProps {
 const ORIGINS = { file: "file", pasted: "pasted rows", constant: "constant" } as const;
 
 /** One record of a storm: where it came from, how it was read, and what is in use from it. */
-export function RecordCard({ record, zone, mayEdit }: RecordCardProps) {
+export function RecordCard({ record, home, zone, mayEdit }: RecordCardProps) {
   const { id, name, origin, state, provenance, inUse, source } = record;
   return (
     <article className="min-w-0 border border-hairline p-4">
@@ -39,7 +41,7 @@ export function RecordCard({ record, zone, mayEdit }: RecordCardProps) {
           </Link>
         )}
         {source && (
-          <a href={`../files/${source.id}`} className="button" download>
+          <a href={`${home}/files/${source.id}`} className="button" download>
             Original
           </a>
         )}

@@ -29,7 +29,7 @@ import { readingDifference } from "~/storms/reading-difference";
 import { changeAnswers, readingSheet, sampleDirection } from "~/storms/reading-sheet.server";
 import { readRecord } from "~/storms/read-record.server";
 import { receiveForm } from "~/storms/receive-original.server";
-import { WHOLE_FORM, type FormErrorsByField } from "~/storms/refusal";
+import type { FormErrorsByField } from "~/storms/refusal";
 import { removeRecord } from "~/storms/remove-record.server";
 import { recordOf, stormOf } from "~/storms/stored-record.server";
 import { settledQuestions } from "~/storms/sheet-questions";
@@ -151,7 +151,8 @@ export default function ReadingSheet({ loaderData, actionData }: Route.Component
         key={JSON.stringify(record.answers)}
         className="mt-4"
       >
-        <FormErrors errors={errors[WHOLE_FORM]} />
+        {/* All of them: the field that one belongs to may be far down the sheet. */}
+        <FormErrors errors={Object.values(errors).flatMap((messages) => messages ?? [])} />
         <OpenQuestions loaderData={loaderData} errors={errors} />
         <ProblemList problems={reading.problems} dropped={reading.dropped} />
         <SectionHeading>What was understood</SectionHeading>

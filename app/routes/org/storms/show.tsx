@@ -45,6 +45,8 @@ export async function loader({ context, params }: Route.LoaderArgs) {
     );
   return {
     storm: { id: storm.id, name: storm.name },
+    // In full, since a file's link is not the router's: one that is relative would hang on a slash at the end.
+    home: `/o/${organisation.slug}/projects/${project.id}`,
     ...shown,
     window,
     extent: extentOf(series),
@@ -98,15 +100,16 @@ export async function action({ request, context, params }: Route.ActionArgs) {
 }
 
 export default function ShowStorm({ loaderData, actionData }: Route.ComponentProps) {
-  const { storm, figure, narrowFigure, records, window, mayEdit, estimates } = loaderData;
+  const { storm, home, figure, narrowFigure, records, window, mayEdit, estimates } = loaderData;
   const errors = actionData?.errors ?? {};
+  const csv = `${home}/storms/${storm.id}/series.csv`;
   return (
     <>
       <title>{`${storm.name} · Galeprint`}</title>
       <PageTitle
         actions={
           window && (
-            <a href={`${storm.id}/series.csv`} className="button" download>
+            <a href={csv} className="button" download>
               Series as CSV
             </a>
           )
@@ -118,7 +121,7 @@ export default function ShowStorm({ loaderData, actionData }: Route.ComponentPro
         <>
           <StormFacts {...loaderData} />
           <div className="mt-5">
-            <SeriesFigure figure={figure} narrow={narrowFigure} csvHref={`${storm.id}/series.csv`} />
+            <SeriesFigure figure={figure} narrow={narrowFigure} csvHref={csv} />
           </div>
         </>
       ) : (
@@ -132,7 +135,7 @@ export default function ShowStorm({ loaderData, actionData }: Route.ComponentPro
       {records.length === 0 && <p className="text-slate">None yet.</p>}
       <div className="grid gap-4 lg:grid-cols-2">
         {records.map((record) => (
-          <RecordCard key={record.id} record={record} zone={loaderData.zone} mayEdit={mayEdit} />
+          <RecordCard key={record.id} record={record} home={home} zone={loaderData.zone} mayEdit={mayEdit} />
         ))}
       </div>
       {mayEdit && (
