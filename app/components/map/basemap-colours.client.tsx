@@ -2,6 +2,7 @@ import { useEffect } from "react";
 import { useMap } from "react-map-gl/maplibre";
 import type { MapColours } from "./map-colours.client";
 import { BASEMAP_PAINTS } from "./map-style";
+import { whenStyled } from "./when-styled.client";
 
 /**
  * Repaints sea, land and coast when the page turns dark or light. In place, because a new style would sweep away what
@@ -16,11 +17,7 @@ export function BasemapColours({ colours }: { colours: MapColours }) {
         map.getMap().setPaintProperty(layer, property, colours[colour]);
       }
     };
-    if (map.getMap().getLayer("sea")) repaint();
-    else map.once("styledata", repaint);
-    return () => {
-      map.off("styledata", repaint);
-    };
+    return whenStyled(map, repaint);
   }, [map, colours]);
   return null;
 }

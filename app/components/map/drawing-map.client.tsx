@@ -4,6 +4,7 @@ import BaseMap from "./base-map.client";
 import { BoxDrawing } from "./box-drawing.client";
 import type { DrawingTool } from "./box-editor";
 import { BoxLayers } from "./box-layers.client";
+import { whenStyled } from "./when-styled.client";
 import { type MapColours, useMapColours } from "./map-colours.client";
 import type { DrawnRing } from "~/area/ring-history";
 import { viewOf } from "~/area/view-of";
@@ -70,10 +71,9 @@ function Drawing({
       drawing.current = new BoxDrawing(map.getMap(), Math.round(map.getCenter().lng), colours, events);
       start(drawing.current);
     };
-    if (map.isStyleLoaded()) begin();
-    else map.once("load", begin);
+    const stopWaiting = whenStyled(map, begin);
     return () => {
-      map.off("load", begin);
+      stopWaiting();
       drawing.current?.stop();
       drawing.current = null;
     };
