@@ -14,5 +14,6 @@ export function coriolis(latitude: number): number {
 
 /** Inertial period 2π/|f| in s for a Coriolis parameter in 1/s; null at the equator, where there is none. */
 export function inertialPeriod(f: number): number | null {
-  return f === 0 ? null : (2 * Math.PI) / Math.abs(f);
+  const period = (2 * Math.PI) / Math.abs(f);
+  return Number.isFinite(period) ? period : null;
 }

@@ -1,5 +1,6 @@
 import { inertialPeriod } from "../ekman/coriolis";
 import { ekmanDepth } from "../ekman/spiral";
+import { EQUATORIAL_LIMIT } from "../guards";
 import type { ModelRun } from "../models/run-model";
 import type { FitNote, FitSeverity } from "../response";
 import { potentialDensityOf } from "../seawater/density";
@@ -11,7 +12,7 @@ export interface FitContext extends ModelRun {
   duration: number;
   /** s; null at the equator */
   inertialPeriod: number | null;
-  /** m; null at the equator */
+  /** m; null within 2 degrees of the equator */
   ekmanDepth: number | null;
   /** m/s at 10 m */
   peakWind: number;
@@ -37,7 +38,7 @@ export function fitContext(run: ModelRun): FitContext {
     ...run,
     duration: forcing.seconds[forcing.seconds.length - 1],
     inertialPeriod: inertialPeriod(place.f),
-    ekmanDepth: place.f === 0 ? null : ekmanDepth(method.eddyViscosity, place.f),
+    ekmanDepth: Math.abs(place.latitude) < EQUATORIAL_LIMIT ? null : ekmanDepth(method.eddyViscosity, place.f),
     peakWind: peak(forcing.windU, forcing.windV),
     peakDrift: peak(motion.driftEast, motion.driftNorth),
     densityStep,

@@ -12,8 +12,9 @@ export function inertialShare(
   tauY: number,
   { f, dampingRate, mass }: { f: number; dampingRate: number; mass: number },
 ): number {
-  if (f === 0) return 0;
   const size = mass * (dampingRate * dampingRate + f * f);
+  // Where nothing turns or brakes there is no steady drift to take away; so near the equator the squares vanish.
+  if (f * f === 0 || size === 0) return 0;
   const steadyU = (tauX * dampingRate + tauY * f) / size;
   const steadyV = (tauY * dampingRate - tauX * f) / size;
   const steady = Math.hypot(steadyU, steadyV);

@@ -2,6 +2,9 @@ import { LONGEST_GAP } from "../constants";
 import type { ScenarioProblem, ScenarioStorm } from "../scenario";
 import { secondsOf } from "../time-stamps";
 
+/** Times that were added up may miss the limit by rounding, s. */
+const ROUNDING = 1e-3;
+
 /** What must hold between the storm's series: one length, times in order, no gap too long to bridge. */
 export function stormRules(storm: ScenarioStorm): ScenarioProblem[] {
   return [...lengthProblems(storm), ...timeProblems(storm)];
@@ -53,7 +56,7 @@ function timeProblems({ time }: ScenarioStorm): ScenarioProblem[] {
       const message = `${String(time[k])} is not later than the time before it; sort the times and drop repeats.`;
       problems.push({ path, code: "INVALID_INPUT", message });
     }
-    if (before !== null && seconds - before > LONGEST_GAP) {
+    if (before !== null && seconds - before > LONGEST_GAP + ROUNDING) {
       const hours = ((seconds - before) / 3600).toFixed(1);
       const message = `A gap of ${hours} h before ${String(time[k])}; gaps longer than ${LONGEST_GAP / 3600} h are not bridged. Fill it or shorten the storm.`;
       problems.push({ path, code: "GAP", message });
