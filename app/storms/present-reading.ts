@@ -6,14 +6,16 @@ export type PresentedReading = Omit<SeriesReading, "time" | "channels"> & {
 };
 
 export function presentReading(reading: SeriesReading): PresentedReading {
-  const { time: _time, channels, ...rest } = reading;
+  const { channels, ...facts } = reading;
   return {
-    ...rest,
+    ...without(facts, "time"),
     channels: CHANNEL_NAMES.flatMap((channel) => {
       const read = channels[channel];
-      if (!read) return [];
-      const { values: _values, ...facts } = read;
-      return [{ channel, ...facts }];
+      return read ? [{ channel, ...without(read, "values") }] : [];
     }),
   };
+}
+
+function without<T extends object, Key extends keyof T & string>(given: T, key: Key): Omit<T, Key> {
+  return Object.fromEntries(Object.entries(given).filter(([name]) => name !== key)) as Omit<T, Key>;
 }

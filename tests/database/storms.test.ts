@@ -4,9 +4,9 @@ import type { Project } from "~/db/models/project.server";
 import type { StormRecord } from "~/db/models/record.server";
 import type { Storm } from "~/db/models/storm.server";
 import type { TestOrganisation } from "../factories/project";
-import { useOwnDatabase } from "../setup/own-database";
+import { openOwnDatabase } from "../setup/own-database";
 
-const database = useOwnDatabase();
+const database = openOwnDatabase();
 const { makeOrganisation, makeProject } = await import("../factories/project");
 const { startRecord, startStorm } = await import("~/storms/start-record.server");
 const { changeAnswers, readingSheet } = await import("~/storms/reading-sheet.server");

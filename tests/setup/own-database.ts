@@ -7,7 +7,7 @@ import { inject } from "vitest";
  * Gives this test file a migrated database of its own. The database layer reads its file from the environment once, so call
  * this first and import what reaches the database afterwards, by `await import(…)`.
  */
-export function useOwnDatabase(): { remove(): Promise<void> } {
+export function openOwnDatabase(): { remove(): Promise<void> } {
   const folder = mkdtempSync(path.join(tmpdir(), "galeprint-database-"));
   process.env.DATABASE_FILE = path.join(folder, "galeprint.sqlite");
   process.env.DATA_DIRECTORY = folder;
