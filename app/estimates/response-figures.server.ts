@@ -1,9 +1,9 @@
 /** The figures of a response page, drawn once for each width and kept while they are asked for. */
+import { changing, forcingData, localOutline } from "./figure-data";
 import type { InputsRegister } from "./inputs-register";
 import { Recent } from "./recent";
 import type { StormForcing } from "./storm-forcing";
-import { windAtTenMetres } from "./wind-at-ten-metres";
-import { driftTrack, type LocalPosition } from "~/figures/drift-track";
+import { driftTrack } from "~/figures/drift-track";
 import type { Figure } from "~/figures/figure";
 import { FIGURE_WIDTHS, type FigureContext } from "~/figures/figure-context";
 import { forcingStack } from "~/figures/forcing-stack";
@@ -11,9 +11,7 @@ import { hodograph } from "~/figures/hodograph";
 import { layerStack } from "~/figures/layer-stack";
 import { serverPlotDocument } from "~/figures/plot-document.server";
 import { stressAndDrift } from "~/figures/stress-and-drift";
-import { measureBox } from "~/area/measure-box";
 import type { Response } from "~/ocean/response";
-import type { Position } from "~/ocean/scenario";
 import type { UnitChoices } from "~/units/unit-choices";
 import { epochSeconds } from "~/units/format-time";
 
@@ -43,37 +41,9 @@ export interface FigureRequest {
 
 const recent = new Recent<ResponseFigures>(32);
 
-const EARTH_RADIUS = 6_371_008.8;
-const RADIANS = Math.PI / 180;
 /** px: two thirds of the page, and one. */
 const MAIN_WIDTH = 780;
 const SIDE_WIDTH = 400;
-
-/** Corners in metres from the middle, on a tangent plane: within a thousandth at the size of a box. */
-function localOutline(polygon: Position[]): LocalPosition[] {
-  const [longitude, latitude] = measureBox(polygon).centroid;
-  return polygon.map(([lon, lat]) => {
-    const east = ((lon - longitude + 540) % 360) - 180;
-    return [
-      east * RADIANS * EARTH_RADIUS * Math.cos(latitude * RADIANS),
-      (lat - latitude) * RADIANS * EARTH_RADIUS,
-    ] as const;
-  });
-}
-
-function netHeat(forcing: StormForcing): number[] | undefined {
-  const { heat, time } = forcing;
-  if (!heat) return undefined;
-  const series = [heat.net, heat.shortwave, heat.longwave, heat.sensible, heat.latent].flatMap((part) =>
-    part ? [part] : [],
-  );
-  return time.map((_, index) => series.reduce((sum, part) => sum + part[index], 0));
-}
-
-/** Depth that never changes says nothing through time. */
-function changing(values: number[]): number[] | undefined {
-  return values.some((value) => value !== values[0]) ? values : undefined;
-}
 
 function draw({ response, register, forcing, ...shared }: FigureRequest): ResponseFigures {
   const { series, headline } = response;
@@ -84,13 +54,7 @@ function draw({ response, register, forcing, ...shared }: FigureRequest): Respon
     const narrow = at(FIGURE_WIDTHS.narrow);
     return { wide: at(width), narrow: { ...narrow, table: { columns: [], rows: [] } } };
   };
-  const drivenBy = forcing && {
-    time: forcing.time,
-    windSpeed10: windAtTenMetres(forcing, response.method),
-    windFrom: forcing.windFrom,
-    rainRate: forcing.rain,
-    netHeat: netHeat(forcing),
-  };
+  const drivenBy = forcing && forcingData(forcing, response.method);
   return {
     forcing: drivenBy && pair((context) => forcingStack(drivenBy, context)),
     stressAndDrift: pair((context) => stressAndDrift({ ...series, time, triggers }, context)),

@@ -9,10 +9,12 @@ import { formatDate } from "~/units/format-time";
 import { composeMemo } from "./compose";
 import { textOf, type MemoDocument } from "./document";
 import { hindrancesOf, pointedEstimates, type PointedEstimate } from "./memo-estimates.server";
+import { memoAttachments } from "./memo-attachments.server";
 import { memoFigures } from "./memo-figures.server";
 import type { MemoEstimate, MemoFacts, MemoInput } from "./memo-input";
 import { memoNumber } from "./memo-number";
 import { registerAssumptions, registerBoxes, registerSeries, registerWaters } from "./memo-register";
+import type { Attachment } from "./render-pdf.server";
 import { draftAnswer } from "./words";
 
 type Organisation = Pick<CurrentOrganisation, "name" | "units" | "paperSize">;
@@ -32,6 +34,8 @@ export interface ComposedDraft {
   /** Hash of all that the memo says, whoever signs it and when: what a checker puts their name to. */
   content: string;
   draftedFindings: string;
+  /** What the PDF carries. */
+  attachments: Attachment[];
   hindrances: string[];
   /** Where the signature in the row is for what the memo says now. */
   checkerName: string | null;
@@ -47,9 +51,9 @@ const LIMITS = [
 const UNCHECKED = "not checked";
 
 function memoEstimate(pointed: PointedEstimate, organisation: Organisation, zone: string): MemoEstimate[] {
-  const { response, gathered, code } = pointed;
+  const { response, register, code, forcing } = pointed;
   if (!response) return [];
-  const { box, storm, water, method } = gathered.register;
+  const { box, storm, water, method } = register;
   return [
     {
       code,
@@ -59,7 +63,7 @@ function memoEstimate(pointed: PointedEstimate, organisation: Organisation, zone
       methodSheetName: `${method.name}, version ${method.version}`,
       shore: box.shoreNormal !== null,
       response,
-      figures: memoFigures(response, gathered.scenario, { zone, units: organisation.units, estimateCode: code }),
+      figures: memoFigures({ response, register, forcing }, { zone, units: organisation.units, estimateCode: code }),
     },
   ];
 }
@@ -92,7 +96,8 @@ export async function composeDraft(
   const people = [memo.originatorId, memo.checkerId, ...revisions.flatMap((row) => [row.issuedBy, row.checkerId])];
   const names = await namesOfUsers(people.filter((id) => id !== null));
   const estimates = pointed.flatMap((entry) => memoEstimate(entry, organisation, zone));
-  const registers = pointed.map(({ gathered }) => gathered.register);
+  const registers = pointed.map(({ register }) => register);
+  const attachments = await memoAttachments(tenant, pointed);
 
   const facts = (issue: Issue): MemoFacts => ({
     number: memoNumber(project.jobNumber, memo.number),
@@ -115,17 +120,19 @@ export async function composeDraft(
     boxes: registerBoxes(registers),
     series: registerSeries(registers),
     waters: registerWaters(registers, organisation.units),
-    assumptions: registerAssumptions(pointed.flatMap(({ gathered }) => gathered.assumptions)),
+    assumptions: registerAssumptions(pointed.flatMap(({ assumptions }) => assumptions)),
     limits: LIMITS,
     independentCheck: null,
     revisions: revisionHistory(revisions, names, zone),
     distribution: [],
-    attachments: [],
+    attachments: attachments.map(({ name, description }) => ({ name, description })),
   };
   const compose = (issue: Issue) => composeMemo({ ...input, facts: facts(issue) });
 
   const bare = compose({ revision: "", issuedFor: memo.purpose, checker: "", date: "", stamp: "" });
-  const content = createHash("sha256").update(JSON.stringify(bare)).digest("hex");
+  const hash = createHash("sha256").update(JSON.stringify(bare));
+  for (const { bytes } of attachments) hash.update(bytes);
+  const content = hash.digest("hex");
   const isChecked = memo.checkerId !== null && memo.checkedContent === content;
   const checkerName = isChecked && memo.checkerId ? (names.get(memo.checkerId) ?? null) : null;
   const [lead] = estimates;
@@ -140,6 +147,7 @@ export async function composeDraft(
     }),
     content,
     draftedFindings: words ? textOf(draftAnswer(lead.response, words)) : "",
+    attachments,
     hindrances: hindrancesOf(pointed),
     checkerName,
     compose: (issue) => compose({ ...issue, checker: issue.checker || UNCHECKED }),

@@ -1,8 +1,8 @@
 import type { Project } from "~/db/models/project.server";
 import type { Tenant } from "~/db/scoped.server";
+import { estimateCode } from "~/estimates/estimate-code";
 import { stateSentence } from "~/estimates/estimate-state";
 import { loadLedger } from "~/estimates/load-ledger.server";
-import { estimateCode } from "./memo-estimates.server";
 
 /** The estimates that a memo of this project can point at. */
 export async function estimateChoices(tenant: Tenant, project: Project) {
@@ -12,7 +12,7 @@ export async function estimateChoices(tenant: Tenant, project: Project) {
     const storm = storms.find((entry) => entry.storm.id === estimate.stormId)?.storm.name ?? "";
     return {
       id: estimate.id,
-      code: estimateCode(project, estimate.number),
+      code: estimateCode(project.jobNumber, estimate.number),
       name: `${box}, ${storm}`,
       state: stateSentence(state),
     };

@@ -59,7 +59,7 @@ export async function issueMemo(signing: Signing): Promise<{ revisionId: string 
   };
   const stamp = stampOf(JSON.stringify([tenant.organisationId, memo.id, draft.compose({ ...issue, stamp: "" })]));
   const document = draft.compose({ ...issue, stamp });
-  const pdf = await renderPdf(document);
+  const pdf = await renderPdf(document, { attachments: draft.attachments });
   const pdfSha256 = createHash("sha256").update(pdf).digest("hex");
   return tenant.write(async (inside) => {
     if ((await inside.memoRevisions.max("sequence", { memoId: memo.id })) !== sequence - 1) {

@@ -7,15 +7,15 @@ import { actorContext, organisationContext } from "~/context";
 import { forOrganisation } from "~/db/scoped.server";
 import { findUser, membershipBySlug } from "~/db/unscoped.server";
 import { may, type Action } from "~/organisations/permissions";
-import { readSession } from "./session.server";
+import { signedInUserId } from "./session.server";
 import type { RouterContextProvider } from "react-router";
 
 type Middleware = MiddlewareFunction<Response>;
 
 /** Puts whoever is signed in, or nobody, into the context. */
 export const findActor: Middleware = async ({ request, context }) => {
-  const userId = (await readSession(request)).get("userId");
-  const user = userId === undefined ? null : await findUser(userId);
+  const userId = await signedInUserId(request);
+  const user = userId === null ? null : await findUser(userId);
   context.set(actorContext, user && { id: user.id, name: user.name, email: user.email });
 };
 

@@ -23,7 +23,7 @@ const TABLES = [
     UNIQUE (organisationId, userId), UNIQUE (organisationId, id)
   )`,
   `CREATE TABLE sessions (
-    id TEXT PRIMARY KEY, userId TEXT REFERENCES users (id) ON DELETE CASCADE, data JSON NOT NULL,
+    id TEXT PRIMARY KEY, userId TEXT NOT NULL REFERENCES users (id) ON DELETE CASCADE,
     lastSeenAt DATETIME NOT NULL, expiresAt DATETIME NOT NULL, createdAt DATETIME NOT NULL, updatedAt DATETIME NOT NULL
   )`,
   `CREATE TABLE projects (

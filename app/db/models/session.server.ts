@@ -4,8 +4,7 @@ import { sequelize } from "../connection.server";
 /** Keyed by the hash of the cookie's token. */
 export class Session extends Model<InferAttributes<Session>, InferCreationAttributes<Session>> {
   declare id: string;
-  declare userId: string | null;
-  declare data: { userId?: string; [key: string]: unknown };
+  declare userId: string;
   declare lastSeenAt: Date;
   declare expiresAt: Date;
   declare createdAt: CreationOptional<Date>;
@@ -15,8 +14,7 @@ export class Session extends Model<InferAttributes<Session>, InferCreationAttrib
 Session.init(
   {
     id: { type: DataTypes.TEXT, primaryKey: true },
-    userId: { type: DataTypes.TEXT, allowNull: true },
-    data: { type: DataTypes.JSON, allowNull: false },
+    userId: { type: DataTypes.TEXT, allowNull: false },
     lastSeenAt: { type: DataTypes.DATE, allowNull: false },
     expiresAt: { type: DataTypes.DATE, allowNull: false },
     createdAt: DataTypes.DATE,
