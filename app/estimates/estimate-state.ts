@@ -45,13 +45,19 @@ export function estimateState(run: LastRun | null, now: Now): EstimateState {
   if (!run) return { kind: "notRun" };
   if (run.state === "queued" || run.state === "running") return { kind: run.state };
   if (now.responseStored) return { kind: "current" };
-  const changed = run.parts && now.parts ? changedParts(run.parts, now.parts) : [];
+  const changed = changedSince(run.parts, now.parts);
   if (run.state === "failed") return { kind: "failed", problems: run.problems ?? [], changed };
   return {
     kind: "outOfDate",
-    changed: now.parts ? changed : ["storm"],
+    changed,
     newerEngine: run.engineVersion !== now.engineVersion,
   };
+}
+
+/** Only a storm's series can keep inputs from being gathered at all. */
+function changedSince(before: InputParts | null, now: InputParts | null): InputPart[] {
+  if (before && now) return changedParts(before, now);
+  return before === now ? [] : ["storm"];
 }
 
 export function isUnderWay(state: EstimateState): boolean {

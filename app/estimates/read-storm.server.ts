@@ -11,7 +11,7 @@ import type { ScenarioStorm } from "~/ocean/scenario";
 /** A storm's series as the engine will take them. */
 export interface StormReading extends ReadForcing {
   scenarioStorm: ScenarioStorm | null;
-  /** Hash of `scenarioStorm`. */
+  /** Hash of `scenarioStorm`, and of what stands in its way, which a longer window may bring without another sample. */
   hash: string | null;
   records: RegisteredRecord[];
 }
@@ -64,7 +64,11 @@ export async function readStorm(
   const channels = await channelsOf(tenant, storm.id);
   const read = readForcing({ channels, windHeight, startsAt, endsAt, heatInterpolation }, zone);
   const asked = read.forcing && scenarioStorm(read.forcing);
-  const series: Series = { ...read, scenarioStorm: asked, hash: asked && partHash(asked) };
+  const series: Series = {
+    ...read,
+    scenarioStorm: asked,
+    hash: asked && partHash(read.problems.length > 0 ? [asked, read.problems] : asked),
+  };
   recent.set(key, series);
   return { ...series, records };
 }
