@@ -10,6 +10,6 @@ export async function loader({ context, params }: Route.LoaderArgs) {
   const { tenant, organisation, project } = await currentProject(context, params, "project.view");
   const memo = await tenant.memos.find(params.memo, { where: { projectId: project.id } });
   if (!memo) notFound();
-  const { document } = await composeDraft(tenant, organisation, project, memo);
-  return fileResponse(await renderPdf(document), { name: pdfName(document.titleBlock), type: "application/pdf" });
+  const { document, attachments } = await composeDraft(tenant, organisation, project, memo);
+  return fileResponse(await renderPdf(document, { attachments }), { name: pdfName(document.titleBlock), type: "application/pdf" });
 }
