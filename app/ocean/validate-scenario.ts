@@ -47,7 +47,7 @@ function shapeProblems(schema: z.ZodType, part: unknown, name: string): Scenario
   if (part === undefined && !schema.safeParse(undefined).success) {
     return [{ path: name, code: "INVALID_INPUT", message: `The scenario needs "${name}".` }];
   }
-  const parsed = schema.safeParse(part);
+  const parsed = schema.safeParse(part, { error: plainMessage });
   if (parsed.success) return [];
   return parsed.error.issues.map((issue) => ({
     path: pathText(name, issue.path),
@@ -55,6 +55,13 @@ function shapeProblems(schema: z.ZodType, part: unknown, name: string): Scenario
     message:
       issue.code === "unrecognized_keys" ? `Unknown: ${issue.keys.join(", ")}. Check the spelling.` : issue.message,
   }));
+}
+
+const KINDS: Record<string, string> = { object: "an object", array: "a list", string: "text" };
+
+/** For the parts that say nothing more particular themselves. */
+function plainMessage(issue: z.core.$ZodRawIssue): string | undefined {
+  return issue.code === "invalid_type" ? `Must be ${KINDS[issue.expected] ?? issue.expected}.` : undefined;
 }
 
 function pathText(root: string, path: readonly PropertyKey[]): string {

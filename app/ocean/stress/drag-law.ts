@@ -76,7 +76,7 @@ function uncapped(id: DragLawId, options: DragOptions): DragLaw {
     // The implicit relation has no solution in a dead calm or far beyond any storm: held at the ends.
     return (wind10) => coare35Neutral(Math.min(60, Math.max(0.1, wind10)), options.viscosity, options.gravity).cd;
   }
-  const law = LAWS[id];
+  const law = Object.hasOwn(LAWS, id) ? LAWS[id] : undefined;
   if (!law)
     throw new OceanError("INVALID_INPUT", `Unknown drag law "${String(id)}"; known are ${DRAG_LAWS.join(", ")}.`);
   return law;
