@@ -16,7 +16,7 @@ import type { Scenario, ScenarioProblem } from "~/ocean/scenario";
 export interface GatheredScenario {
   /** Null where the storm's series leave nothing to compute with: `problems` says why. */
   scenario: Scenario | null;
-  /** The engine's hash of `scenario`. */
+  /** The engine's hash of `scenario`; null where a problem stands in the way of a run, so that no response answers to it. */
   hash: string | null;
   parts: InputParts | null;
   forcing: StormForcing | null;
@@ -56,7 +56,7 @@ export function gatherFrom({ box, storm, water, sheet }: EstimateRows, reading: 
   const { source, temperature, salinity, salinityScale, layerDepth, belowTemperature, belowSalinity } = water;
   return {
     scenario,
-    hash: scenario && parts && hashOf(scenario, parts),
+    hash: scenario && parts && problems.length === 0 ? hashOf(scenario, parts) : null,
     parts,
     forcing,
     problems,

@@ -157,6 +157,7 @@ describe("an estimate", () => {
     const { state } = await load(id);
     expect(state).toMatchObject({ kind: "failed", problems: [{ code: "GAP", path: "storm.windSpeed" }] });
     expect(use.needsRun(state)).toBe(false);
+    expect((await load(id)).response).toBeNull();
     await tenant.storms.update(storm.id, { endsAt: storm.endsAt });
     expect(await sentence(id)).toBe("failed; since then storm changed");
     expect(use.needsRun((await load(id)).state)).toBe(true);
@@ -175,6 +176,15 @@ describe("an estimate", () => {
     const id = await run({ waterColumnId: other.id });
     await run();
     expect((await load(id)).estimate.waterColumnId).toBe(other.id);
+  });
+});
+
+describe("a window beyond the wind record", () => {
+  it("takes currency from an estimate that was run before it was widened", async () => {
+    const id = await run();
+    await organisation.tenant.storms.update(storm.id, { endsAt: (storm.endsAt ?? 0) + 9 * 3600 });
+    expect(await sentence(id)).toBe("out of date: storm changed");
+    expect((await load(id)).response).not.toBeNull();
   });
 });
 
