@@ -15,7 +15,8 @@ export function Layout({ children }: { children: React.ReactNode }) {
         <meta charSet="utf-8" />
         <meta name="viewport" content="width=device-width, initial-scale=1" />
         <Meta />
-        <Links />
+        {/* Styles need no nonce, and the browser could not tell it again when the page comes alive. */}
+        <Links nonce="" />
       </head>
       <body>
         {children}

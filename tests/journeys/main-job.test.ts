@@ -124,7 +124,7 @@ async function bringStorm(page: Page, { file, windHeight }: Record): Promise<voi
   await page.getByLabel(/^Value, in the unit/).fill("3");
   await page.getByRole("button", { name: "Add the constant" }).click();
   await page
-    .getByText(/3 mm\/h/)
+    .getByText(/3(\.0)?\smm\/h/)
     .first()
     .waitFor();
   await expectNoSideways(page);

@@ -22,7 +22,7 @@ async function must(name: string, command: string, args: string[], env: Record<s
 
 /** The server is tested as it ships: from a current build, on a copy of one migrated database a test. */
 export default async function setup(project: TestProject): Promise<() => void> {
-  if (!buildIsCurrent()) await must("The build", "npm", ["run", "build"]);
+  if (!buildIsCurrent()) await must("The build", "npm", ["run", "build"], { NODE_ENV: "production" });
   const folder = mkdtempSync(path.join(tmpdir(), "galeprint-tests-"));
   const migrated = path.join(folder, "migrated.sqlite");
   const seeded = path.join(folder, "seeded.sqlite");
