@@ -78,17 +78,19 @@ export async function confirmRecord(
   await tenant.write(async (inner) => {
     const others = (await loadSeries(inner, storm.id)).filter(({ recordId }) => recordId !== record.id);
     const groups = new Set(others.map(({ channel }) => groupOf(channel)));
-    const wanted = channelsIn(reading).filter((series) => {
-      const group = groupOf(series.channel);
-      if (!groups.has(group)) return true;
-      const choice = confirmation.choices[group];
-      if (choice === undefined) {
-        throw new StormRefusal(
-          `The storm already has ${groupLabel(group)} from another record. Choose which of the two to use.`,
-          `choice-${group}`,
-        );
-      }
-      return choice === "replace";
+    const brought = channelsIn(reading);
+    const undecided = [...new Set(brought.map(({ channel }) => groupOf(channel)))].filter(
+      (group) => groups.has(group) && confirmation.choices[group] === undefined,
+    );
+    if (undecided.length > 0) {
+      throw new StormRefusal(
+        `The storm already has ${undecided.map(groupLabel).join(", ")} from another record. Choose for each which of the two to use.`,
+        `choice-${undecided[0]}`,
+      );
+    }
+    const wanted = brought.filter(({ channel }) => {
+      const group = groupOf(channel);
+      return !groups.has(group) || confirmation.choices[group] === "replace";
     });
     if (wanted.length === 0) {
       throw new StormRefusal("Nothing would be taken from this record: the storm keeps every channel it has.");

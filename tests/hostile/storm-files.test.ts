@@ -304,5 +304,12 @@ describe("the sample file on the empty page", () => {
     expect(Buffer.from(bytes).equals(made)).toBe(true);
     const sheet = location(await upload(`${storms}/new`, "invented-storm-buoy.txt", bytes));
     expect(await wordsOf(await client.get(sheet))).toContain("One question is open");
+
+    // The form posts every control; what stands as the reader put it is no answer, and the provenance keeps its source.
+    const answered = await client.post(sheet, { intent: "read", windHeight: "4", directionSense: "from", zone: "" });
+    const words = await wordsOf(answered);
+    expect(words).toContain("Nothing is open");
+    expect(words).toMatch(/Wind height 4 m answered/);
+    expect(words).toMatch(/Wind direction where the wind comes from by the format/);
   });
 });

@@ -1,11 +1,17 @@
 import { Field } from "~/components/field";
 import type { ReadingAnswers, ReadingQuestion } from "~/readers/reading";
+import type { PresentedReading } from "~/storms/present-reading";
 import type { FormErrorsByField } from "~/storms/refusal";
 import { WindSense } from "./wind-sense";
 
 interface QuestionFieldProps {
   question: ReadingQuestion;
-  sheet: { record: { answers: ReadingAnswers }; zones: readonly string[]; sampleDirection: number | null };
+  sheet: {
+    record: { answers: ReadingAnswers };
+    reading: Pick<PresentedReading, "windHeight" | "averagingMinutes">;
+    zones: readonly string[];
+    sampleDirection: number | null;
+  };
   errors: FormErrorsByField;
 }
 
@@ -21,6 +27,7 @@ export function QuestionField({ question, sheet, errors }: QuestionFieldProps) {
           name="windHeight"
           label="Height of the wind above the sea"
           unit="m"
+          known={sheet.reading.windHeight}
           errors={errors}
         />
       );
@@ -31,6 +38,7 @@ export function QuestionField({ question, sheet, errors }: QuestionFieldProps) {
           name="averagingMinutes"
           label="Averaging of the wind"
           unit="min"
+          known={sheet.reading.averagingMinutes}
           errors={errors}
         />
       );
@@ -63,11 +71,16 @@ export function QuestionField({ question, sheet, errors }: QuestionFieldProps) {
 const idOf = (question: ReadingQuestion) =>
   `answer-${question.key}${question.column === undefined ? "" : `-${question.column}`}`;
 
-function suggested(question: ReadingQuestion, unit = ""): string {
+/** Whether the reading stands on the reader's own choice, without an answer. */
+function isAsRead(question: ReadingQuestion): boolean {
+  return !question.needed && question.answer === undefined;
+}
+
+function suggestion(question: ReadingQuestion, asRead = isAsRead(question), unit = ""): string {
   if (question.suggestion === undefined) return "";
   const option = question.options?.find(({ value }) => value === question.suggestion)?.label;
   const label = `${option ?? question.suggestion} ${unit}`.trim();
-  return question.needed ? ` Suggested: ${label}.` : ` As read: ${label}.`;
+  return asRead ? ` As read: ${label}.` : ` Suggested: ${label}.`;
 }
 
 interface ControlProps {
@@ -86,7 +99,7 @@ function ZoneField({
     <Field
       id={idOf(question)}
       label="Time zone of the stamps"
-      hint={question.message + suggested(question)}
+      hint={question.message + suggestion(question)}
       errors={errors.zone}
     >
       {(described) => (
@@ -96,7 +109,7 @@ function ZoneField({
             name="zone"
             list="time-zones"
             defaultValue={question.answer ?? ""}
-            placeholder={question.needed ? undefined : question.suggestion}
+            placeholder={isAsRead(question) ? question.suggestion : undefined}
             autoComplete="off"
             className="input"
           />
@@ -111,14 +124,20 @@ function ZoneField({
   );
 }
 
-function NumberField({ question, name, label, unit, errors }: ControlProps & { unit: string }) {
+interface NumberFieldProps extends ControlProps {
+  unit: string;
+  /** What the reading goes by now; null where it is not known. */
+  known: number | null;
+}
+
+function NumberField({ question, name, label, unit, known, errors }: NumberFieldProps) {
   return (
     <Field
       id={idOf(question)}
       label={label}
       unit={unit}
       optional={!question.needed}
-      hint={question.message + suggested(question, unit)}
+      hint={question.message + suggestion(question, known !== null && isAsRead(question), unit)}
       errors={errors[name]}
     >
       {(described) => (
@@ -127,7 +146,7 @@ function NumberField({ question, name, label, unit, errors }: ControlProps & { u
           name={name}
           inputMode="decimal"
           defaultValue={question.answer ?? ""}
-          placeholder={question.needed ? undefined : question.suggestion}
+          placeholder={known !== null && isAsRead(question) ? String(known) : undefined}
           autoComplete="off"
           className="input max-w-40"
         />
@@ -138,7 +157,7 @@ function NumberField({ question, name, label, unit, errors }: ControlProps & { u
 
 function OptionField({ question, name, label, errors }: ControlProps) {
   return (
-    <Field id={idOf(question)} label={label} hint={question.message + suggested(question)} errors={errors[name]}>
+    <Field id={idOf(question)} label={label} hint={question.message + suggestion(question)} errors={errors[name]}>
       {(described) => (
         <select {...described} name={name} defaultValue={question.answer ?? ""} className="input">
           <option value="">{question.needed ? "choose…" : "as read"}</option>

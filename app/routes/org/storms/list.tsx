@@ -30,7 +30,12 @@ function present(storm: StormLine, units: UnitChoices, zone: string) {
       value: formatQuantity(peakWind.value, "windSpeed", units).text,
       at: formatTime(peakWind.at, zone),
     },
-    rainTotal: rainTotal === null ? "no rain record" : formatQuantity(rainTotal, "rainTotal", units).text,
+    rainTotal:
+      rainTotal === null
+        ? window
+          ? "no rain record"
+          : "none yet"
+        : formatQuantity(rainTotal, "rainTotal", units).text,
     records: records.length,
     waiting: waiting.map((record) => ({ id: record.id, name: record.name })),
     gaps,
@@ -93,8 +98,10 @@ function StormRow({ storm }: { storm: Route.ComponentProps["loaderData"]["storms
             {storm.peakWind.value}
             <span className="block text-small text-quiet">{storm.peakWind.at}</span>
           </>
-        ) : (
+        ) : storm.window ? (
           "no wind record"
+        ) : (
+          "none yet"
         )}
       </td>
       <td>{storm.rainTotal}</td>

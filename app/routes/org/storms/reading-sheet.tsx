@@ -82,7 +82,8 @@ export async function action({ request, context, params }: Route.ActionArgs) {
     return redirect(`${here}/${storm.id}`);
   }
   return answerRefusal(async () => {
-    const { answers, errors } = readAnswers(form, before);
+    const questions = [...before.questions, ...settledQuestions(before, record.answers)];
+    const { answers, errors } = readAnswers(form, { columns: before.columns, questions });
     if (Object.keys(errors).length > 0) {
       return data(
         { errors: Object.fromEntries(Object.entries(errors).map(([field, text]) => [field, [text]])) },
@@ -174,7 +175,7 @@ export default function ReadingSheet({ loaderData, actionData }: Route.Component
         <SectionHeading>First and last rows, as written and as read</SectionHeading>
         <RowsPreview reading={reading} />
         <div className="mt-5">
-          <button type="submit" name="intent" value="read" disabled={busy} className="button">
+          <button type="submit" name="intent" value="read" formNoValidate disabled={busy} className="button">
             Read again with these answers
           </button>
         </div>
@@ -262,7 +263,7 @@ function OpenQuestions({
         ))}
       </div>
       {open.questions.length > 0 && (
-        <button type="submit" name="intent" value="read" className="button button-primary mt-4">
+        <button type="submit" name="intent" value="read" formNoValidate className="button button-primary mt-4">
           Answer and read again
         </button>
       )}
