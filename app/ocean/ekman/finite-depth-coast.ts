@@ -13,6 +13,7 @@ import {
 import { requireFinite } from "../guards";
 import {
   ekmanWavenumber,
+  finiteDepthBedStress,
   finiteDepthCurrent,
   finiteDepthTransport,
   requireSetting,
@@ -29,6 +30,8 @@ export interface CoastalBalance {
   crossTransport: number;
   /** Transport along the shore, m²/s: positive to the left when looking onshore. */
   alongTransport: number;
+  /** What bed and shore hold against the wind, per ρ: bed stress less the push of the tilted surface on the whole depth, m²/s². */
+  resistance: Complex;
 }
 
 /**
@@ -58,16 +61,21 @@ export function coastalBalance(
     setupSlope: -acceleration / gravity,
     crossTransport: transport.re,
     alongTransport: transport.im,
+    resistance: add(
+      finiteDepthBedStress(T, setting),
+      multiply(push, subtract(pressure.bedStress, complex(setting.depth))),
+    ),
   };
 }
 
-/** Current and transport of a unit pressure acceleration: (1 - cosh λz/cosh λH)/(if) and (H - tanh(λH)/λ)/(if). */
+/** Of a unit pressure acceleration: current (1 - cosh λz/cosh λH)/(if), transport (H - tanh(λH)/λ)/(if), bed stress tanh(λH)/λ. */
 function pressureResponse(setting: FiniteDepthSetting) {
   const { f, depth, eddyViscosity } = setting;
   const lambda = ekmanWavenumber(setting);
   if (modulus(lambda) * depth < WEAK_ROTATION) {
     const lambdaH2 = multiply(scale(lambda, depth), scale(lambda, depth));
     return {
+      bedStress: scale(subtract(complex(1), scale(lambdaH2, 1 / 3)), depth),
       transport: scale(subtract(complex(1), scale(lambdaH2, 2 / 5)), depth ** 3 / (3 * eddyViscosity)),
       currentAt: (z: number) => complex((depth * depth - z * z) / (2 * eddyViscosity)),
     };
@@ -76,6 +84,7 @@ function pressureResponse(setting: FiniteDepthSetting) {
   const decay2H = exponential(scale(lambda, -2 * depth));
   const tanh = divide(subtract(complex(1), decay2H), add(complex(1), decay2H));
   return {
+    bedStress: divide(tanh, lambda),
     transport: divide(subtract(complex(depth), divide(tanh, lambda)), rotation),
     currentAt: (z: number) => {
       const below = exponential(scale(lambda, -(depth + z)));

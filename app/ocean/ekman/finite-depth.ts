@@ -65,6 +65,16 @@ export function finiteDepthTransport(T: Complex, setting: FiniteDepthSetting): C
   return multiply(scale(multiply(T, complex(0, -1)), 1 / f), subtract(complex(1), sech(scale(lambda, depth))));
 }
 
+/**
+ * Stress that the current of `finiteDepthCurrent` leaves on the bed: T sech λH.
+ * @returns m²/s²
+ * @throws OceanError NONPOSITIVE_DEPTH, INVALID_INPUT
+ */
+export function finiteDepthBedStress(T: Complex, setting: FiniteDepthSetting): Complex {
+  requireSetting(setting);
+  return multiply(T, sech(scale(ekmanWavenumber(setting), setting.depth)));
+}
+
 /** 1/cosh for an argument with a real part that is not negative. */
 export function sech(a: Complex): Complex {
   const decay = exponential(scale(a, -1));

@@ -6,6 +6,7 @@ import { coastDistance } from "./coast-distance";
 import { dragCoefficient } from "./drag-coefficient";
 import { duration } from "./duration";
 import { equatorial } from "./equatorial";
+import { windFetch } from "./wind-fetch";
 import { fitContext, type Indicator } from "./fit-context";
 import { freezing } from "./freezing";
 import { layerInWater } from "./layer-in-water";
@@ -23,6 +24,7 @@ const INDICATORS: readonly Indicator[] = [
   layerInWater,
   duration,
   windRange,
+  windFetch,
   dragCoefficient,
   layerRichardson,
   shortwaveAtBase,

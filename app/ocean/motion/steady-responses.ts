@@ -1,6 +1,11 @@
-import { complex, type Complex } from "../complex";
+import { complex, scale, type Complex } from "../complex";
 import { coastalBalance } from "../ekman/finite-depth-coast";
-import { finiteDepthCurrent, finiteDepthTransport, type FiniteDepthSetting } from "../ekman/finite-depth";
+import {
+  finiteDepthBedStress,
+  finiteDepthCurrent,
+  finiteDepthTransport,
+  type FiniteDepthSetting,
+} from "../ekman/finite-depth";
 import type { Matrix2, SteadyResponse } from "./steady-motion";
 
 /** Deep water: M = -i τ/(ρf), spread over the layer. */
@@ -21,6 +26,7 @@ export function finiteDepthResponse(
     return {
       drift: layerMean((z) => finiteDepthCurrent(T, setting, z), layerDepth),
       transport: finiteDepthTransport(T, setting),
+      resistance: scale(finiteDepthBedStress(T, setting), waterDensity),
     };
   };
   return assembled(perStress, setting.f, waterDensity);
@@ -43,6 +49,7 @@ export function coastalResponse(
     return {
       drift: layerMean(balance.currentAt, layerDepth),
       transport: complex(left.re * balance.alongTransport, left.im * balance.alongTransport),
+      resistance: scale(balance.resistance, waterDensity),
     };
   };
   return assembled(perStress, setting.f, waterDensity);
@@ -51,22 +58,20 @@ export function coastalResponse(
 interface Column {
   drift: Complex;
   transport: Complex;
+  resistance: Complex;
 }
 
 function assembled(perStress: (tau: Complex) => Column, f: number, waterDensity: number): SteadyResponse {
   const east = perStress(complex(1));
   const north = perStress(complex(0, 1));
   const matrix = (a: Complex, b: Complex): Matrix2 => ({ xx: a.re, xy: b.re, yx: a.im, yy: b.im });
-  const transport = matrix(east.transport, north.transport);
-  const turning = waterDensity * f;
-  // Whatever the rotating transport does not balance of the wind's stress is carried by the bed and the shore.
-  const resistance = {
-    xx: 1 + turning * transport.yx,
-    xy: turning * transport.yy,
-    yx: -turning * transport.xx,
-    yy: 1 - turning * transport.xy,
+  return {
+    drift: matrix(east.drift, north.drift),
+    transport: matrix(east.transport, north.transport),
+    resistance: matrix(east.resistance, north.resistance),
+    f,
+    waterDensity,
   };
-  return { drift: matrix(east.drift, north.drift), transport, resistance, f, waterDensity };
 }
 
 /** Nodes and weights of Gauss–Legendre quadrature of order 5 on -1…1. Abramowitz & Stegun, table 25.4. */
