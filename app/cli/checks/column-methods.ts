@@ -6,6 +6,7 @@ import { linearDensity } from "~/ocean/column/linear-density";
 import { complex } from "~/ocean/complex";
 import { waterClarity, type WaterTypeId } from "~/ocean/heat/shortwave";
 import { OceanError } from "~/ocean/errors";
+import { requirePositive } from "~/ocean/guards";
 import type { CaseInputs } from "./case-inputs";
 import type { CheckMethods } from "../check-methods";
 import { parseFormula } from "./expression";
@@ -17,6 +18,8 @@ interface ColumnRun {
   dt: number;
 }
 
+const MOST_CELLS = 100_000;
+
 /** A column as the case describes it, at rest: linear density, and profiles from numbers, formulas or N². */
 function columnOf(inputs: CaseInputs): ColumnRun {
   const density = linearDensity({
@@ -27,8 +30,11 @@ function columnOf(inputs: CaseInputs): ColumnRun {
     S0: inputs.number("S0", 35),
   });
   const cellSize = inputs.number("dz");
+  requirePositive({ dz: cellSize, dt: inputs.number("dt") });
   const cells = inputs.has("n") ? inputs.number("n") : Math.round(inputs.number("depth") / cellSize);
-  const centres = Array.from({ length: cells }, (_, k) => (k + 0.5) * cellSize);
+  if (!(cells >= 2 && cells <= MOST_CELLS))
+    throw new OceanError("INVALID_INPUT", `A column of ${cells} cells cannot be run.`);
+  const centres = Array.from({ length: Math.round(cells) }, (_, k) => (k + 0.5) * cellSize);
   const state = columnAtRest(temperatureOf(inputs, centres), salinityOf(inputs, centres), cellSize, density);
   const clarity = inputs.has("jerlov") ? waterClarity(inputs.text("jerlov") as WaterTypeId) : null;
   const model = new ColumnModel(state, {

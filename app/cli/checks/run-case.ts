@@ -45,7 +45,8 @@ function answered(work: () => CheckAnswer): { figures: CheckAnswer } | { error: 
     return { figures: work() };
   } catch (error) {
     if (error instanceof OceanError) return { error: error.code, message: error.message };
-    throw error;
+    // A fault of the engine is one failed case, not the end of the file.
+    return { error: "UNEXPECTED", message: error instanceof Error ? error.message : String(error) };
   }
 }
 
@@ -63,6 +64,7 @@ function soleFigure(figures: CheckAnswer): unknown {
 /** Only what was asked for, so that a failure's line stays short. */
 function named(figures: CheckAnswer, wanted: Record<string, unknown> | null): unknown {
   if (wanted === null) return soleFigure(figures);
+  if ("error" in wanted) return figures;
   return Object.fromEntries(Object.keys(wanted).map((key) => [key, figures[key]]));
 }
 

@@ -71,9 +71,11 @@ export class ColumnModel {
     this.work = gradientWork(state.cells);
   }
 
-  /** Moves on by `dt` seconds. @throws OceanError NOT_CONVERGED */
+  /** Moves on by `dt` seconds. @throws OceanError INVALID_INPUT, NOT_CONVERGED */
   step(dt: number, forcing: ColumnForcing): void {
     const { state, setting } = this;
+    const { tauX, tauY, nonSolarHeat, shortwave, freshWater } = forcing;
+    if (!Number.isFinite(dt + tauX + tauY + nonSolarHeat + shortwave + freshWater)) requireFinite({ dt, ...forcing });
     this.takeHeatAndSalt(dt, forcing);
     mixStatically(state);
     const layer = this.layerCells();

@@ -68,9 +68,10 @@ export class SlabIntegrator {
     this.state.set([u, v, x, y]);
   }
 
-  /** Moves on by `dt` seconds while the stress runs from (τ₀x, τ₀y) to (τ₁x, τ₁y), N/m². */
+  /** Moves on by `dt` seconds while the stress runs from (τ₀x, τ₀y) to (τ₁x, τ₁y), N/m². @throws OceanError INVALID_INPUT */
   step(dt: number, tau0x: number, tau0y: number, tau1x: number, tau1y: number): void {
     if (dt !== this.weightedStep) this.weigh(dt);
+    if (!Number.isFinite(tau0x + tau0y + tau1x + tau1y)) requireFinite({ tau0x, tau0y, tau1x, tau1y });
     const { state, weights: w } = this;
     const u = state[0];
     const v = state[1];
