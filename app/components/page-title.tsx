@@ -1,10 +1,18 @@
 import type { ReactNode } from "react";
 
-/** The heading of a page below the project's own, with its actions at the right. */
-export function PageTitle({ children, actions }: { children: ReactNode; actions?: ReactNode }) {
+interface PageTitleProps {
+  children: ReactNode;
+  actions?: ReactNode;
+  /** Where no project's heading stands above. */
+  first?: boolean;
+}
+
+/** The heading of a page, below the project's own where there is one, with its actions at the right. */
+export function PageTitle({ children, actions, first = false }: PageTitleProps) {
+  const Heading = first ? "h1" : "h2";
   return (
     <div className="mb-4 mt-7 flex flex-wrap items-center justify-between gap-3 border-b-2 border-ink pb-2">
-      <h2 className="text-large font-bold">{children}</h2>
+      <Heading className="text-large font-bold">{children}</Heading>
       {actions && <div className="flex flex-wrap gap-2">{actions}</div>}
     </div>
   );

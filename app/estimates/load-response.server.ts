@@ -27,12 +27,14 @@ export interface LoadedResponse {
 
 /**
  * An estimate of a project with its response.
+ * @param profiles false leaves the column's profiles in the database
  * @returns null where the project has no such estimate
  */
 export async function loadResponse(
   tenant: Tenant,
   project: Pick<Project, "id" | "timeZone">,
   estimateId: string,
+  { profiles = true } = {},
 ): Promise<LoadedResponse | null> {
   const estimate = await tenant.estimates.find(estimateId, { where: { projectId: project.id } });
   const now = estimate && (await gatherScenario(tenant, estimate, project.timeZone));
@@ -45,7 +47,7 @@ export async function loadResponse(
     { parts: now.parts, engineVersion: ENGINE_VERSION, responseStored },
   );
   let response: Response | null = null;
-  for (const key of resultsOf(estimate, now.hash)) response ??= await readResponse(tenant, key);
+  for (const key of resultsOf(estimate, now.hash)) response ??= await readResponse(tenant, key, { profiles });
   const stands = response && response.inputs !== now.hash && estimate.inputs ? estimate.inputs : now;
   const sameStorm = !response || response.inputs === now.hash || parts?.storm === now.parts?.storm;
   return {

@@ -1,5 +1,5 @@
 /** Responses are kept once for each organisation, input hash and engine version; their series as blobs beside them. */
-import { readColumn, readSeries, storedSeries } from "./stored-series";
+import { readColumn, readSeries, SERIES_NAMES, storedSeries } from "./stored-series";
 import type { Tenant } from "~/db/scoped.server";
 import { fromBlob, toBlob } from "~/db/typed-array.server";
 import type { Response } from "~/ocean/response";
@@ -48,11 +48,20 @@ export function resultKey({ inputHash, engineVersion }: ResultKey): string {
   return `${engineVersion} ${inputHash}`;
 }
 
-/** The whole response, as it was stored; null where there is none. */
-export async function readResponse(tenant: Tenant, { inputHash, engineVersion }: ResultKey): Promise<Response | null> {
+/**
+ * The whole response, as it was stored; null where there is none.
+ * @param profiles false leaves the column's profiles, by far its longest part, in the database
+ */
+export async function readResponse(
+  tenant: Tenant,
+  { inputHash, engineVersion }: ResultKey,
+  { profiles = true } = {},
+): Promise<Response | null> {
   const result = await tenant.results.first({ where: { inputHash, engineVersion } });
   if (!result) return null;
-  const rows = await tenant.resultSeries.list({ where: { resultId: result.id } });
+  const rows = await tenant.resultSeries.list({
+    where: { resultId: result.id, ...(!profiles && { name: SERIES_NAMES }) },
+  });
   const values = new Map(rows.map((row) => [row.name, [...fromBlob(row.values, row.length)]]));
   const column = readColumn(values);
   return {

@@ -21,7 +21,7 @@ export interface StoredSeries {
   values: number[];
 }
 
-const SERIES_NAMES = Object.keys(SERIES_UNITS) as SeriesName[];
+export const SERIES_NAMES = Object.keys(SERIES_UNITS) as SeriesName[];
 const PROFILE_NAMES = Object.keys(PROFILE_UNITS) as ProfileName[];
 
 export function storedSeries(series: ResponseSeries, column: ResponseColumn | undefined): StoredSeries[] {

@@ -32,7 +32,7 @@ import { formatTime } from "~/units/format-time";
 
 export async function loader({ context, params }: Route.LoaderArgs) {
   const { organisation, tenant, project } = await currentProject(context, params, "project.view");
-  const loaded = await loadResponse(tenant, project, params.estimate);
+  const loaded = await loadResponse(tenant, project, params.estimate, { profiles: false });
   if (!loaded) notFound();
   const { estimate, state, response, register, assumptions, forcing } = loaded;
   const { units } = organisation;

@@ -8,7 +8,7 @@ import { notFound } from "~/services/guard.server";
 
 export async function loader({ context, params }: Route.LoaderArgs) {
   const { tenant, project } = await currentProject(context, params, "project.view");
-  const loaded = await loadResponse(tenant, project, params.estimate);
+  const loaded = await loadResponse(tenant, project, params.estimate, { profiles: false });
   if (!loaded?.response) notFound();
   const name = `${estimateCode(project.jobNumber, loaded.estimate.number)}-series.csv`;
   return fileResponse(responseCsv(loaded.response), { name, type: "text/csv; charset=utf-8" });

@@ -46,7 +46,9 @@ export default function MethodSheetList({ loaderData }: Route.ComponentProps) {
   return (
     <>
       <title>Method sheets · Galeprint</title>
-      <PageTitle actions={create}>Method sheets</PageTitle>
+      <PageTitle first actions={create}>
+        Method sheets
+      </PageTitle>
       <p className="mb-4 max-w-prose text-slate">
         A method sheet is the choice of laws and parameters of an estimate. A version never changes: what was run can be
         traced to it for good, and a change is the next version.

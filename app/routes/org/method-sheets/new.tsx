@@ -82,7 +82,7 @@ export default function NewMethodSheet({ actionData, loaderData }: Route.Compone
   return (
     <>
       <title>New method sheet · Galeprint</title>
-      <PageTitle>{loaderData.next ? `Method sheet, version ${loaderData.next}` : "New method sheet"}</PageTitle>
+      <PageTitle first>{loaderData.next ? `Method sheet, version ${loaderData.next}` : "New method sheet"}</PageTitle>
       <Form method="post" {...getFormProps(form)} className="grid max-w-4xl gap-5">
         <FormErrors errors={form.errors} id={form.errorId} />
         <Field
