@@ -30,12 +30,15 @@ const PHI_AT_ZERO = [1, 1, 0.5] as const;
  * @see Pollard & Millard (1970), Deep-Sea Research 17:813-821
  */
 export class SlabIntegrator {
+  /** Velocity, m/s, and displacement, m, towards east and north. */
+  u = 0;
+  v = 0;
+  x = 0;
+  y = 0;
   private readonly setting: SlabSetting;
-  /** u, v, x, y. In one array, as are the weights: numbers kept as fields of an object are several times slower to change. */
-  private readonly state = new Float64Array(4);
+  private readonly mass: number;
   /** e⁻ˣ, φ₁, φ₂, φ₃: real and imaginary part of each. */
   private readonly weights = new Float64Array(8);
-  private readonly mass: number;
   private weightedStep = Number.NaN;
 
   /** @throws OceanError NONPOSITIVE_DEPTH or INVALID_INPUT */
@@ -48,42 +51,29 @@ export class SlabIntegrator {
     this.mass = setting.waterDensity * setting.layerDepth;
   }
 
-  /** Velocity, m/s, and displacement, m, towards east and north. */
-  get u(): number {
-    return this.state[0];
-  }
-  get v(): number {
-    return this.state[1];
-  }
-  get x(): number {
-    return this.state[2];
-  }
-  get y(): number {
-    return this.state[3];
-  }
-
   /** Starts from a velocity (m/s) and a displacement (m) other than rest. @throws OceanError INVALID_INPUT */
   startFrom(u: number, v: number, x: number, y: number): void {
     requireFinite({ u, v, x, y });
-    this.state.set([u, v, x, y]);
+    this.u = u;
+    this.v = v;
+    this.x = x;
+    this.y = y;
   }
 
   /** Moves on by `dt` seconds while the stress runs from (τ₀x, τ₀y) to (τ₁x, τ₁y), N/m². @throws OceanError INVALID_INPUT */
   step(dt: number, tau0x: number, tau0y: number, tau1x: number, tau1y: number): void {
     if (dt !== this.weightedStep) this.weigh(dt);
     if (!Number.isFinite(tau0x + tau0y + tau1x + tau1y)) requireFinite({ tau0x, tau0y, tau1x, tau1y });
-    const { state, weights: w } = this;
-    const u = state[0];
-    const v = state[1];
+    const { u, v, weights: w } = this;
     const perMass = dt / this.mass;
     const ax = tau0x * perMass;
     const ay = tau0y * perMass;
     const bx = (tau1x - tau0x) * perMass;
     const by = (tau1y - tau0y) * perMass;
-    state[2] += dt * (u * w[2] - v * w[3] + ax * w[4] - ay * w[5] + bx * w[6] - by * w[7]);
-    state[3] += dt * (u * w[3] + v * w[2] + ax * w[5] + ay * w[4] + bx * w[7] + by * w[6]);
-    state[0] = u * w[0] - v * w[1] + ax * w[2] - ay * w[3] + bx * w[4] - by * w[5];
-    state[1] = u * w[1] + v * w[0] + ax * w[3] + ay * w[2] + bx * w[5] + by * w[4];
+    this.x += dt * (u * w[2] - v * w[3] + ax * w[4] - ay * w[5] + bx * w[6] - by * w[7]);
+    this.y += dt * (u * w[3] + v * w[2] + ax * w[5] + ay * w[4] + bx * w[7] + by * w[6]);
+    this.u = u * w[0] - v * w[1] + ax * w[2] - ay * w[3] + bx * w[4] - by * w[5];
+    this.v = u * w[1] + v * w[0] + ax * w[3] + ay * w[2] + bx * w[5] + by * w[4];
   }
 
   private weigh(dt: number): void {
