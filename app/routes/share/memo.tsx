@@ -28,6 +28,8 @@ export default function SharedMemo({ loaderData }: Route.ComponentProps) {
   const { document, label, purpose, stamp, pdfSha256, supersededBy, pdf } = loaderData;
   return (
     <div className="mx-auto max-w-4xl px-4 py-6 sm:px-6">
+      <title>{`${document.title} · Galeprint`}</title>
+      <meta name="robots" content="noindex, nofollow" />
       <header data-chrome className="flex flex-wrap items-center gap-x-4 gap-y-2 border-b border-hairline pb-3">
         <span className="flex items-center gap-2 font-bold">
           <Mark size={20} /> galeprint
@@ -39,13 +41,15 @@ export default function SharedMemo({ loaderData }: Route.ComponentProps) {
           Download the PDF
         </a>
       </header>
-      {supersededBy && (
-        <p role="status" className="mt-4 border-l-4 border-wind py-1 pl-3">
-          Superseded: revision {supersededBy} of this memo has been issued. Ask for it before you rely on this one.
-        </p>
-      )}
-      <DocumentView document={document} />
-      <p className="mt-6 break-all text-small text-quiet">SHA-256 of the PDF: {pdfSha256}</p>
+      <main>
+        {supersededBy && (
+          <p role="status" className="mt-4 border-l-4 border-wind py-1 pl-3">
+            Superseded: revision {supersededBy} of this memo has been issued. Ask for it before you rely on this one.
+          </p>
+        )}
+        <DocumentView document={document} />
+        <p className="mt-6 break-all text-small text-quiet">SHA-256 of the PDF: {pdfSha256}</p>
+      </main>
     </div>
   );
 }

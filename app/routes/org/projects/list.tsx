@@ -37,7 +37,9 @@ export default function ProjectList({ loaderData }: Route.ComponentProps) {
   return (
     <>
       <title>Projects · Galeprint</title>
-      <PageTitle actions={begin}>Projects</PageTitle>
+      <PageTitle first actions={begin}>
+        Projects
+      </PageTitle>
       {projects.length === 0 ? (
         <EmptyState title="No project yet" action={begin}>
           A project holds one job for one client: its study boxes, its storms, the water, the estimates and the memos.

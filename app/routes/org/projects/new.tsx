@@ -38,7 +38,7 @@ export default function NewProject({ actionData, loaderData }: Route.ComponentPr
   return (
     <div className="max-w-xl">
       <title>New project · Galeprint</title>
-      <PageTitle>New project</PageTitle>
+      <PageTitle first>New project</PageTitle>
       <Form method="post" {...getFormProps(form)} className="grid gap-4">
         <FormErrors errors={form.errors} id={form.errorId} />
         <ProjectFactsFields fields={fields} timeZones={loaderData.timeZones} />
