@@ -36,7 +36,6 @@ interface TenantRow {
   id: string;
   organisationId: string;
 }
-type Row<M extends Model> = Attributes<M> & TenantRow;
 type Values<M extends Model> = Omit<CreationAttributes<M>, "id" | "organisationId">;
 /** Equal to a value, or to one of several. */
 type Filter<M extends Model> = {
@@ -107,8 +106,10 @@ export class TenantTable<M extends Model> {
 
   /** False where this organisation has no such row. */
   async update(id: string, values: Partial<Values<M>>): Promise<boolean> {
-    const { organisationId: _, id: __, ...changes } = values as Partial<Row<M>>;
-    const [count] = await this.model.update(changes as Partial<Attributes<M>>, {
+    const changes: Partial<TenantRow> & Record<string, unknown> = { ...values };
+    delete changes.id;
+    delete changes.organisationId;
+    const [count] = await this.model.update(changes as unknown as Partial<Attributes<M>>, {
       where: this.scope({ id }),
       transaction: this.transaction,
     });
