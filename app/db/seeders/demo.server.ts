@@ -67,7 +67,7 @@ async function confirm(
   record: { id: string; stormId: string },
   shape: (typeof DEMO_STORMS)[number],
   answers: ReadingAnswers,
-  userName: string,
+  userId: string,
 ): Promise<Storm> {
   await tenant.records.update(record.id, { answers });
   const storm = await must("storm", tenant.storms.find(record.stormId));
@@ -75,7 +75,7 @@ async function confirm(
   await confirmRecord(tenant, storm, await must("record", tenant.records.find(record.id)), {
     window: { startsAt: start + shape.window.fromHour * HOUR, endsAt: start + shape.window.toHour * HOUR },
     choices: {},
-    confirmedBy: userName,
+    confirmedBy: userId,
     confirmedAt: new Date().toISOString(),
     zone: project.timeZone,
   });
@@ -86,17 +86,17 @@ async function makeStorm(
   tenant: Tenant,
   project: Project,
   demo: (typeof DEMO_STORMS)[number],
-  user: { id: string; name: string },
+  user: { id: string },
 ): Promise<Storm> {
   const wind = original(`${demo.file}-buoy.txt`, buoyText(demo.shape));
   const record = await startStorm(tenant, project, demo.name, wind, user.id);
-  const storm = await confirm(tenant, project, record, demo, { windHeight: 4, averagingMinutes: 8 }, user.name);
+  const storm = await confirm(tenant, project, record, demo, { windHeight: 4, averagingMinutes: 8 }, user.id);
   for (const file of [
     original(`${demo.file}-gauge.csv`, gaugeCsv(demo.shape)),
     original(`${demo.file}-heat.csv`, heatCsv(demo.shape)),
   ]) {
     const added = await startRecord(tenant, storm, file, user.id);
-    await confirm(tenant, project, added, demo, { zone: "UTC" }, user.name);
+    await confirm(tenant, project, added, demo, { zone: "UTC" }, user.id);
   }
   return must("storm", tenant.storms.find(storm.id));
 }

@@ -11,5 +11,8 @@ export async function loader({ context, params }: Route.LoaderArgs) {
   const memo = await tenant.memos.find(params.memo, { where: { projectId: project.id } });
   if (!memo) notFound();
   const { document, attachments } = await composeDraft(tenant, organisation, project, memo);
-  return fileResponse(await renderPdf(document, { attachments }), { name: pdfName(document.titleBlock), type: "application/pdf" });
+  return fileResponse(await renderPdf(document, { attachments }), {
+    name: pdfName(document.titleBlock),
+    type: "application/pdf",
+  });
 }

@@ -1,6 +1,7 @@
 import { Link } from "react-router";
 import type { Route } from "./+types/list";
 import { EmptyState, PageTitle } from "~/components/page-title";
+import { WideTable } from "~/components/wide-table";
 import { listMemos } from "~/memo/list-memos.server";
 import { may } from "~/organisations/permissions";
 import { currentProject } from "~/projects/current-project.server";
@@ -32,43 +33,41 @@ export default function MemoList({ loaderData }: Route.ComponentProps) {
             : "A memo points at estimates. Run one from the ledger first."}
         </EmptyState>
       ) : (
-        <div className="overflow-x-auto">
-          <table className="rule-table">
-            <thead>
-              <tr>
-                <th scope="col">Memo</th>
-                <th scope="col">Title</th>
-                <th scope="col">Originator</th>
-                <th scope="col">Issued ({timeZone})</th>
+        <WideTable label="Memos">
+          <thead>
+            <tr>
+              <th scope="col">Memo</th>
+              <th scope="col">Title</th>
+              <th scope="col">Originator</th>
+              <th scope="col">Issued ({timeZone})</th>
+            </tr>
+          </thead>
+          <tbody>
+            {memos.map(({ id, number, title, originator, revisions }) => (
+              <tr key={id}>
+                <td className="whitespace-nowrap">{number}</td>
+                <td>
+                  <Link to={id} className="font-bold">
+                    {title}
+                  </Link>
+                </td>
+                <td>{originator}</td>
+                <td>
+                  {revisions.length === 0
+                    ? "draft"
+                    : revisions.map((revision) => (
+                        <p key={revision.id}>
+                          <Link to={`${id}/revisions/${revision.id}`}>Revision {revision.label}</Link>{" "}
+                          <span className="text-small text-quiet">
+                            {revision.issued}, for {revision.purpose}
+                          </span>
+                        </p>
+                      ))}
+                </td>
               </tr>
-            </thead>
-            <tbody>
-              {memos.map(({ id, number, title, originator, revisions }) => (
-                <tr key={id}>
-                  <td className="whitespace-nowrap">{number}</td>
-                  <td>
-                    <Link to={id} className="font-bold">
-                      {title}
-                    </Link>
-                  </td>
-                  <td>{originator}</td>
-                  <td>
-                    {revisions.length === 0
-                      ? "draft"
-                      : revisions.map((revision) => (
-                          <p key={revision.id}>
-                            <Link to={`${id}/revisions/${revision.id}`}>Revision {revision.label}</Link>{" "}
-                            <span className="text-small text-quiet">
-                              {revision.issued}, for {revision.purpose}
-                            </span>
-                          </p>
-                        ))}
-                  </td>
-                </tr>
-              ))}
-            </tbody>
-          </table>
-        </div>
+            ))}
+          </tbody>
+        </WideTable>
       )}
     </>
   );

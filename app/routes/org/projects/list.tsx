@@ -1,6 +1,7 @@
 import { Link } from "react-router";
 import type { Route } from "./+types/list";
 import { EmptyState, PageTitle } from "~/components/page-title";
+import { WideTable } from "~/components/wide-table";
 import { may } from "~/organisations/permissions";
 import { allowed } from "~/services/guard.server";
 
@@ -45,32 +46,30 @@ export default function ProjectList({ loaderData }: Route.ComponentProps) {
           A project holds one job for one client: its study boxes, its storms, the water, the estimates and the memos.
         </EmptyState>
       ) : (
-        <div className="overflow-x-auto">
-          <table className="rule-table">
-            <thead>
-              <tr>
-                <th scope="col">Project</th>
-                <th scope="col">Job</th>
-                <th scope="col">Client</th>
-                <th scope="col">Begun (UTC)</th>
+        <WideTable label="Projects">
+          <thead>
+            <tr>
+              <th scope="col">Project</th>
+              <th scope="col">Job</th>
+              <th scope="col">Client</th>
+              <th scope="col">Begun (UTC)</th>
+            </tr>
+          </thead>
+          <tbody>
+            {projects.map(({ id, name, jobNumber, client, created }) => (
+              <tr key={id}>
+                <td>
+                  <Link to={`projects/${id}`} className="font-bold">
+                    {name}
+                  </Link>
+                </td>
+                <td>{jobNumber}</td>
+                <td>{client}</td>
+                <td className="whitespace-nowrap">{created}</td>
               </tr>
-            </thead>
-            <tbody>
-              {projects.map(({ id, name, jobNumber, client, created }) => (
-                <tr key={id}>
-                  <td>
-                    <Link to={`projects/${id}`} className="font-bold">
-                      {name}
-                    </Link>
-                  </td>
-                  <td>{jobNumber}</td>
-                  <td>{client}</td>
-                  <td className="whitespace-nowrap">{created}</td>
-                </tr>
-              ))}
-            </tbody>
-          </table>
-        </div>
+            ))}
+          </tbody>
+        </WideTable>
       )}
       {pages > 1 && (
         <nav aria-label="Pages" className="mt-4 flex gap-3">
