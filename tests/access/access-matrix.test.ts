@@ -41,13 +41,15 @@ function client(who: Who): HttpClient {
   return found;
 }
 
-function addressOf({ path }: RouteEntry): string {
-  return path.replace(/\/\*$/, "/no-such-address").replace(/:(\w+)/g, (_, name: string) => {
+function filled(pattern: string): string {
+  return pattern.replace(/\/\*$/, "/no-such-address").replace(/:(\w+)/g, (_, name: string) => {
     const value = tenants.parameters[name];
     if (value === undefined) throw new Error(`The matrix has no value for :${name}.`);
     return value;
   });
 }
+
+const addressOf = ({ path }: RouteEntry) => filled(path);
 
 type Outcome = "signIn" | "notFound" | "forbidden" | "allowed";
 
@@ -67,6 +69,7 @@ async function outcome(response: Response): Promise<Outcome | string> {
   if (location.startsWith("/sign-in") || body.includes("/sign-in")) return "signIn";
   if (response.status === 404) return "notFound";
   if (response.status === 403) return "forbidden";
+  if (response.status === 405) return "no action here";
   if (response.status >= 500) return `status ${response.status}: ${(await response.text()).slice(0, 300)}`;
   return "allowed";
 }
@@ -102,7 +105,7 @@ describe.each(EVERYONE)("%s", (who) => {
 
   test.each(guarded)("posts to $path as its rule says", async (entry) => {
     const rule = RULES[entry.file];
-    const response = await client(who).post(addressOf(entry), { "nothing-known": "1" });
+    const response = await client(who).post(filled(entry.formPath), { "nothing-known": "1" });
     if (rule.post !== null) {
       expect(await outcome(response)).toBe(expected(rule.post, who));
       return;
@@ -120,7 +123,9 @@ describe("another tenant", () => {
       const address = addressOf(entry).replace(tenants.parameters.organisation, tenants.otherOrganisation);
       for (const response of [
         await client("otherTenant").get(address),
-        await client("otherTenant").post(address, { intent: "delete" }),
+        await client("otherTenant").post(address + (entry.formPath.endsWith("?index") ? "?index" : ""), {
+          intent: "delete",
+        }),
       ]) {
         expect([404, 405]).toContain(response.status);
       }

@@ -6,12 +6,16 @@ export interface RouteEntry {
   file: string;
   /** `/o/:organisation/projects/:project/area/:box` */
   path: string;
+  /** Where a form is sent to: an index shares its path with its layout and is told apart by a mark. */
+  formPath: string;
 }
 
 function walk(entries: RouteConfigEntry[], above: string): RouteEntry[] {
   return entries.flatMap((entry) => {
     const path = entry.path ? `${above}/${entry.path}` : above;
-    return [{ file: entry.file, path: path || "/" }, ...walk(entry.children ?? [], path)];
+    const own = path || "/";
+    const formPath = entry.index && own !== "/" ? `${own}?index` : own;
+    return [{ file: entry.file, path: own, formPath }, ...walk(entry.children ?? [], path)];
   });
 }
 

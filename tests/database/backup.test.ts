@@ -122,7 +122,7 @@ describe("verifyBackup", () => {
 
   it("finds rows whose parents are missing", async () => {
     await SqliteFile.using(database, "write", (file) =>
-      file.run("INSERT INTO sessions VALUES ('s', 'nobody', '{}', ?, ?, ?, ?)", NOW, NOW, NOW, NOW),
+      file.run("INSERT INTO sessions VALUES ('s', 'nobody', ?, ?, ?, ?)", NOW, NOW, NOW, NOW),
     );
     expect(await messageOf(verifyBackup(database))).toContain("1 rows refer to rows that are missing (in sessions)");
   });
