@@ -35,6 +35,8 @@ async function open(page: Page, home: string, part: string, link?: RegExp): Prom
     await page.locator("main").getByRole("link", { name: link }).first().click();
     await page.waitForURL((url) => url.pathname !== `${home}${part}`);
   }
+  // The address changes a moment before the page does.
+  await page.locator('body > div[aria-busy="false"]').waitFor();
   const map = page.locator(".maplibregl-map");
   if ((await map.count()) > 0) await page.locator('.maplibregl-map[aria-busy="false"]').first().waitFor();
 }
@@ -101,6 +103,7 @@ test("shows the ledger, a reading sheet, a response and a memo", async () => {
   await page.getByRole("heading", { name: /Reading sheet/ }).waitFor();
   await picture("reading-sheet");
   await open(page, home, "/estimates", /3108-01/);
+  await page.locator('.maplibregl-map[aria-busy="false"]').waitFor();
   await picture("response");
   await open(page, home, "/memos", /^Revision A$/);
   await page.getByRole("heading", { name: DEMO.project.name }).first().waitFor();

@@ -107,48 +107,50 @@ export default function Revision({ actionData, loaderData }: Route.ComponentProp
               No link yet. A link opens this revision and nothing else, without an account.
             </p>
           ) : (
-            <WideTable label="Share links of this revision">
-              <thead>
-                <tr>
-                  <th scope="col">For</th>
-                  <th scope="col">Made</th>
-                  <th scope="col">Open until</th>
-                  <th scope="col">State</th>
-                  <th scope="col" className="number">
-                    Opened
-                  </th>
-                  <th scope="col" className="number">
-                    Downloaded
-                  </th>
-                  <th scope="col">
-                    <span className="sr-only">Act</span>
-                  </th>
-                </tr>
-              </thead>
-              <tbody>
-                {links.map((link) => (
-                  <tr key={link.id}>
-                    <td>{link.recipient}</td>
-                    <td className="whitespace-nowrap">{link.created}</td>
-                    <td className="whitespace-nowrap">{link.expires}</td>
-                    <td>{link.state}</td>
-                    <td className="number">{link.opened}</td>
-                    <td className="number">{link.downloaded}</td>
-                    <td className="text-right">
-                      {link.state === "open" && (
-                        <ConfirmButton
-                          label="Revoke"
-                          title={`Revoke the link for ${link.recipient}?`}
-                          fields={{ intent: "revoke", link: link.id }}
-                        >
-                          It stops at once, also where it is open now. This cannot be taken back.
-                        </ConfirmButton>
-                      )}
-                    </td>
+            <div className="mt-4">
+              <WideTable label="Share links of this revision">
+                <thead>
+                  <tr>
+                    <th scope="col">For</th>
+                    <th scope="col">Made</th>
+                    <th scope="col">Open until</th>
+                    <th scope="col">State</th>
+                    <th scope="col" className="number">
+                      Opened
+                    </th>
+                    <th scope="col" className="number">
+                      Downloaded
+                    </th>
+                    <th scope="col">
+                      <span className="sr-only">Act</span>
+                    </th>
                   </tr>
-                ))}
-              </tbody>
-            </WideTable>
+                </thead>
+                <tbody>
+                  {links.map((link) => (
+                    <tr key={link.id}>
+                      <td>{link.recipient}</td>
+                      <td className="whitespace-nowrap">{link.created}</td>
+                      <td className="whitespace-nowrap">{link.expires}</td>
+                      <td>{link.state}</td>
+                      <td className="number">{link.opened}</td>
+                      <td className="number">{link.downloaded}</td>
+                      <td className="text-right">
+                        {link.state === "open" && (
+                          <ConfirmButton
+                            label="Revoke"
+                            title={`Revoke the link for ${link.recipient}?`}
+                            fields={{ intent: "revoke", link: link.id }}
+                          >
+                            It stops at once, also where it is open now. This cannot be taken back.
+                          </ConfirmButton>
+                        )}
+                      </td>
+                    </tr>
+                  ))}
+                </tbody>
+              </WideTable>
+            </div>
           )}
         </section>
       )}
