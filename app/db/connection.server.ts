@@ -34,10 +34,17 @@ export async function closeDatabase(): Promise<void> {
   await sequelize.close();
 }
 
+/** Settles when the last writing transaction that was asked for has ended. */
+let lastWriter: Promise<unknown> = Promise.resolve();
+
 /**
  * Every writing transaction takes the write lock at once: a deferred one that reads first and writes later
  * fails with a stale snapshot, whatever the busy timeout.
+ * Within the process they take turns here, not at the file: a writer that waits there holds one of the driver's few
+ * threads, and four of them would keep the one they wait for from ever finishing.
  */
 export function inWriteTransaction<T>(work: (transaction: Transaction) => Promise<T>): Promise<T> {
-  return sequelize.transaction({ type: Transaction.TYPES.IMMEDIATE }, work);
+  const turn = lastWriter.then(() => sequelize.transaction({ type: Transaction.TYPES.IMMEDIATE }, work));
+  lastWriter = turn.catch(() => undefined);
+  return turn;
 }

@@ -140,11 +140,12 @@ export interface Tenant {
   readonly memoRevisions: TenantTable<MemoRevision>;
   readonly shareLinks: TenantTable<ShareLink>;
   readonly shareVisits: TenantTable<ShareVisit>;
-  /** All or nothing: the same tables inside one writing transaction. */
+  /** All or nothing: the same tables inside one writing transaction, the one under way where there is one. */
   write<T>(work: (tenant: Tenant) => Promise<T>): Promise<T>;
 }
 
 export function forOrganisation(organisationId: string, transaction?: Transaction): Tenant {
+  const inside = (own: Transaction) => forOrganisation(organisationId, own);
   const table = <M extends Model>(model: ModelStatic<M>) => new TenantTable(model, organisationId, transaction);
   return {
     organisationId,
@@ -165,6 +166,6 @@ export function forOrganisation(organisationId: string, transaction?: Transactio
     memoRevisions: table(MemoRevision),
     shareLinks: table(ShareLink),
     shareVisits: table(ShareVisit),
-    write: (work) => inWriteTransaction((inner) => work(forOrganisation(organisationId, inner))),
+    write: (work) => (transaction ? work(inside(transaction)) : inWriteTransaction((own) => work(inside(own)))),
   };
 }

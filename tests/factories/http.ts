@@ -42,6 +42,10 @@ export class HttpClient {
     return this;
   }
 
+  setCookie(name: string, value: string): void {
+    this.cookies.set(name, value);
+  }
+
   cookie(name: string): string | undefined {
     return this.cookies.get(name);
   }
