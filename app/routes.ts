@@ -59,6 +59,7 @@ export default [
         route(":memo/revisions/:revision/memo.pdf", "routes/org/memos/revision-pdf.ts"),
       ]),
     ]),
+    route("settings", "routes/org/settings.tsx"),
     route("method-sheets", "routes/org/method-sheets/list.tsx"),
     route("method-sheets/new", "routes/org/method-sheets/new.tsx"),
   ]),

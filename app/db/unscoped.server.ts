@@ -34,6 +34,13 @@ export async function createOrganisation(
   return Organisation.create({ id: newId(), ...values }, { transaction });
 }
 
+export async function updateOrganisation(
+  id: string,
+  values: Pick<Organisation, "name" | "units" | "paperSize">,
+): Promise<void> {
+  await Organisation.update(values, { where: { id } });
+}
+
 export async function slugIsTaken(slug: string, transaction?: Transaction): Promise<boolean> {
   return (await Organisation.count({ where: { slug }, transaction })) > 0;
 }

@@ -51,6 +51,7 @@ export const RULES: Record<string, Rule> = {
   "routes/org/memos/draft-pdf.ts": { get: "project.view", post: null, resource: true },
   "routes/org/memos/revision.tsx": { get: "project.view", post: "memo.share" },
   "routes/org/memos/revision-pdf.ts": { get: "project.view", post: null, resource: true },
+  "routes/org/settings.tsx": { get: "organisation.manage", post: "organisation.manage" },
   "routes/org/method-sheets/list.tsx": { get: "project.view", post: null },
   "routes/org/method-sheets/new.tsx": { get: "project.edit", post: "project.edit" },
 };

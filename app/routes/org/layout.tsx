@@ -3,6 +3,7 @@ import type { Route } from "./+types/layout";
 import { ErrorPage } from "~/components/error-page";
 import { Mark } from "~/components/mark";
 import { actorContext, organisationContext } from "~/context";
+import { may } from "~/organisations/permissions";
 import { requireActor, requireMembership } from "~/services/guard.server";
 
 export const middleware: Route.MiddlewareFunction[] = [requireActor, requireMembership];
@@ -10,11 +11,12 @@ export const middleware: Route.MiddlewareFunction[] = [requireActor, requireMemb
 /** Beside the middleware, so that moving between pages asks the server. */
 export function loader({ context }: Route.LoaderArgs) {
   const { slug, name, role } = context.get(organisationContext);
-  return { organisation: { slug, name, role }, actorName: context.get(actorContext)?.name ?? "" };
+  const maySettle = may(role, "organisation.manage");
+  return { organisation: { slug, name, role }, maySettle, actorName: context.get(actorContext)?.name ?? "" };
 }
 
 export default function OrganisationLayout({ loaderData }: Route.ComponentProps) {
-  const { organisation, actorName } = loaderData;
+  const { organisation, actorName, maySettle } = loaderData;
   return (
     <>
       <a href="#content" className="sr-only focus:not-sr-only focus:absolute focus:left-2 focus:top-2 focus:bg-paper">
@@ -34,6 +36,14 @@ export default function OrganisationLayout({ loaderData }: Route.ComponentProps)
           >
             Method sheets
           </Link>
+          {maySettle && (
+            <Link
+              to={`/o/${organisation.slug}/settings`}
+              className="text-small text-slate no-underline hover:underline"
+            >
+              Settings
+            </Link>
+          )}
           <span className="grow" />
           <span className="text-small text-slate">
             {actorName} · {organisation.role}

@@ -1,0 +1,87 @@
+import { getFormProps, getInputProps, getSelectProps, useForm } from "@conform-to/react";
+import { parseWithZod } from "@conform-to/zod/v4";
+import { data, Form } from "react-router";
+import type { z } from "zod";
+import type { Route } from "./+types/settings";
+import { Field, FormErrors } from "~/components/field";
+import { PageTitle } from "~/components/page-title";
+import { SubmitButton } from "~/components/submit-button";
+import { saveSettings } from "~/organisations/save-settings.server";
+import { organisationSettingsSchema, PAPER_SIZES, type OrganisationSettings } from "~/organisations/settings-schema";
+import { allowed } from "~/services/guard.server";
+import { readForm } from "~/services/read-form.server";
+import { UNIT_OPTIONS } from "~/units/unit-choices";
+
+export function loader({ context }: Route.LoaderArgs) {
+  const { name, paperSize, units } = allowed(context, "organisation.manage").organisation;
+  const { speed, rain, length, distance, salinity } = units;
+  return { name, paperSize, speed, rain, length, distance, salinity };
+}
+
+export async function action({ request, context }: Route.ActionArgs) {
+  const { organisation } = allowed(context, "organisation.manage");
+  const submission = await readForm(request, organisationSettingsSchema);
+  if (submission.status !== "success") {
+    return data({ result: submission.reply(), saved: false }, { status: 400 });
+  }
+  await saveSettings(organisation.id, submission.value);
+  return data({ result: submission.reply(), saved: true });
+}
+
+export default function Settings({ loaderData, actionData }: Route.ComponentProps) {
+  const [form, fields] = useForm<z.input<typeof organisationSettingsSchema>, OrganisationSettings, string[]>({
+    lastResult: actionData?.result,
+    defaultValue: loaderData,
+    onValidate: ({ formData }) => parseWithZod(formData, { schema: organisationSettingsSchema }),
+    shouldRevalidate: "onInput",
+  });
+  const choices = [
+    { field: fields.speed, label: "Wind and drift speed", options: UNIT_OPTIONS.speed },
+    { field: fields.rain, label: "Rain", options: UNIT_OPTIONS.rain },
+    { field: fields.length, label: "Depths and heights", options: UNIT_OPTIONS.length },
+    { field: fields.distance, label: "Distances", options: UNIT_OPTIONS.distance },
+    { field: fields.salinity, label: "Salinity", options: UNIT_OPTIONS.salinity },
+    { field: fields.paperSize, label: "Paper of memos", options: PAPER_SIZES },
+  ];
+  return (
+    <div className="max-w-2xl">
+      <title>Settings · Galeprint</title>
+      <PageTitle first>Settings of the organisation</PageTitle>
+      {actionData?.saved && (
+        <p role="status" className="mb-4 border-l-4 border-ink py-1 pl-3">
+          Saved. Screens follow from now on; issued memos stay as they are.
+        </p>
+      )}
+      <Form method="post" {...getFormProps(form)} className="grid gap-4">
+        <FormErrors errors={form.errors} id={form.errorId} />
+        <Field id={fields.name.id} label="Name" hint="It heads every memo." errors={fields.name.errors}>
+          {(described) => (
+            <input
+              {...getInputProps(fields.name, { type: "text" })}
+              {...described}
+              key={fields.name.key}
+              className="input"
+              autoComplete="organization"
+            />
+          )}
+        </Field>
+        <div className="grid gap-4 sm:grid-cols-2">
+          {choices.map(({ field, label, options }) => (
+            <Field key={field.id} id={field.id} label={label} errors={field.errors}>
+              {(described) => (
+                <select {...getSelectProps(field)} {...described} key={field.key} className="input">
+                  {options.map((option) => (
+                    <option key={option}>{option}</option>
+                  ))}
+                </select>
+              )}
+            </Field>
+          ))}
+        </div>
+        <div>
+          <SubmitButton busy="Saving…">Save</SubmitButton>
+        </div>
+      </Form>
+    </div>
+  );
+}
