@@ -1,4 +1,5 @@
 /** Laws and parameters of a method sheet as a person reads and chooses them. */
+import { DRAG_LAW_NAMES } from "~/ocean/stress/drag-law-names";
 import type { MethodUsed } from "~/ocean/response";
 import type { MethodChoices } from "~/ocean/scenario";
 
@@ -29,24 +30,11 @@ export const MODEL_LABELS: Record<NonNullable<MethodChoices["model"]>, string> =
   coastal: "Coastal: balance at a straight shore",
 };
 
-export const DRAG_LAW_LABELS: Record<NonNullable<MethodChoices["dragLaw"]>, string> = {
-  largeYeager2009: "Large and Yeager (2009)",
-  largePond1981: "Large and Pond (1981)",
-  trenberth1990: "Trenberth et al. (1990)",
-  smith1980: "Smith (1980)",
-  garratt1977: "Garratt (1977)",
-  wu1982: "Wu (1982)",
-  wu1982floor: "Wu (1982), held below 7.5 m/s",
-  zijlema2012: "Zijlema et al. (2012)",
-  coare35: "COARE 3.5, neutral",
-  constant: "constant coefficient",
-};
-
 export const PARAMETERS: Record<MethodKey, Parameter> = {
   model: { kind: "choice", options: MODEL_LABELS, label: "Model", hint: "Default: slab." },
   dragLaw: {
     kind: "choice",
-    options: DRAG_LAW_LABELS,
+    options: DRAG_LAW_NAMES,
     label: "Drag law",
     hint: "Default: Large and Yeager (2009), bounded at high winds.",
   },

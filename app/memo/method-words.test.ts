@@ -15,7 +15,8 @@ describe("parameterValue", () => {
     [-7, "−7"],
     [true, "yes"],
     [false, "no"],
-    ["largePond1981", "largePond1981"],
+    ["largePond1981", "Large and Pond (1981)"],
+    ["linear", "linear"],
   ])("tells %j as %j", (value, text) => {
     expect(parameterValue(value)).toBe(text);
   });

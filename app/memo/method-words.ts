@@ -1,4 +1,5 @@
 /** Names of the engine's laws and parameters, as a memo prints them. */
+import { dragLawName } from "~/ocean/stress/drag-law-names";
 import type { MethodChoices } from "~/ocean/scenario";
 
 const PARAMETER_NAMES: Record<keyof Required<MethodChoices>, string> = {
@@ -38,7 +39,7 @@ export function parameterName(key: string): string {
  */
 export function parameterValue(value: number | string | boolean): string {
   if (typeof value === "boolean") return value ? "yes" : "no";
-  if (typeof value === "string") return value;
+  if (typeof value === "string") return dragLawName(value);
   const stated = significantDigits(value) > 15 ? Number(value.toPrecision(6)) : value;
   const small = stated !== 0 && (Math.abs(stated) < 1e-3 || Math.abs(stated) >= 1e7);
   const [digits = "", power] = (small ? stated.toExponential() : String(stated)).split("e");

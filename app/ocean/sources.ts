@@ -1,3 +1,4 @@
+import { dragLawName } from "./stress/drag-law-names";
 import type { MethodSource, MethodSymbol, Provenance } from "./method-source";
 import type { MethodUsed } from "./response";
 
@@ -19,7 +20,7 @@ function drag(
   return {
     id: `drag-${id}`,
     group: "stress",
-    title: `Drag coefficient, ${id}`,
+    title: `Drag coefficient, ${dragLawName(id)}`,
     citation,
     equation,
     symbols: DRAG_SYMBOLS,
