@@ -1,38 +1,35 @@
 import { estimate } from "~/ocean/estimate";
 import type { Scenario } from "~/ocean/scenario";
-import { specificVolumeSlopesInto } from "~/ocean/seawater/specific-volume";
+import { specificVolumeSlopes, specificVolumeSlopesInto } from "~/ocean/seawater/specific-volume";
 import { mulberry32 } from "~/ocean/statistics/mulberry32";
 import { quantile } from "~/ocean/statistics/quantile";
+import { slabPath } from "~/ocean/slab/slab-integrator";
 import { benchmarkKnots, runBenchmarkColumn, runBenchmarkSlab } from "./benchmark-storm";
+import { fastest, report, sideBySide, timed } from "./measure";
+import { compilePlainC } from "./plain-c";
 
-/** One JSON line a figure; a figure whose right value is known also says what it should be and by how much it is off. */
-function report(name: string, value: number, unit: string, n: number, expected?: number): void {
-  const beside =
-    expected === undefined ? {} : { expected, relativeError: Math.abs(value - expected) / Math.abs(expected) };
-  console.log(JSON.stringify({ name, value, unit, n, ...beside }));
-}
+/** Null without a C compiler: then the ratios are left out, and the notice on standard error says so. */
+const plainC = compilePlainC();
+if (!plainC) console.error("No C compiler was found: ratios to plain C are left out.");
 
-function timed<Result>(work: () => Result): { result: Result; nanoseconds: number } {
-  const start = process.hrtime.bigint();
-  const result = work();
-  return { result, nanoseconds: Number(process.hrtime.bigint() - start) };
-}
-
-/** Least time of several runs: the machine's other work only ever adds. */
-function fastest<Result>(runs: number, work: () => Result): { result: Result; nanoseconds: number } {
-  let best = timed(work);
-  for (let run = 1; run < runs; run++) {
-    const next = timed(work);
-    if (next.nanoseconds < best.nanoseconds) best = next;
-  }
-  return best;
+/** Time of one unit of work here and in plain C, and the ratio of the two. */
+function reportSpeed(name: string, nanoseconds: number, inC: number | null, n: number): void {
+  report(name, nanoseconds, "ns", n);
+  if (inC === null) return;
+  report(`${name} plainC`, inC, "ns", n);
+  report(`${name} ratio`, nanoseconds / inC, "1", n);
 }
 
 function benchColumn(levels: number, steps: number, expected: Record<string, number>): void {
-  const { result, nanoseconds } = fastest(3, () => runBenchmarkColumn(levels, steps));
   const name = `column ${levels} ${steps}`;
-  report(`${name} cellStep`, nanoseconds / (levels * steps), "ns", levels * steps);
-  report(`${name} exchange`, nanoseconds / result.exchanges, "ns", result.exchanges);
+  const { result, nanoseconds, otherNanoseconds } = sideBySide(
+    6,
+    () => runBenchmarkColumn(levels, steps),
+    plainC && (() => plainC.run("column", levels, steps).nanoseconds),
+  );
+  const per = (n: number) => (otherNanoseconds === null ? null : otherNanoseconds / n);
+  reportSpeed(`${name} cellStep`, nanoseconds / (levels * steps), per(levels * steps), levels * steps);
+  reportSpeed(`${name} exchange`, nanoseconds / result.exchanges, per(result.exchanges), result.exchanges);
   report(`${name} exchangesPerStep`, result.exchanges / steps, "1", steps);
   const figures: Record<string, [number, string]> = {
     sst: [result.sst, "°C"],
@@ -45,15 +42,36 @@ function benchColumn(levels: number, steps: number, expected: Record<string, num
     report(`${name} ${key}`, figures[key][0], figures[key][1], 1, value);
 }
 
+/** How far the process grew for its first column run, compiled code and all, and how often a run makes the collector work. */
+async function benchColumnMemory(): Promise<void> {
+  const before = process.resourceUsage().maxRSS;
+  runBenchmarkColumn(200, 960);
+  report("column 200 960 memory", (process.resourceUsage().maxRSS - before) / 1024, "MiB", 1);
+  let collections = 0;
+  const observer = new PerformanceObserver((list) => (collections += list.getEntries().length));
+  observer.observe({ entryTypes: ["gc"] });
+  const runs = 3;
+  for (let run = 0; run < runs; run++) runBenchmarkColumn(200, 960);
+  await new Promise((resolve) => setImmediate(resolve));
+  observer.disconnect();
+  report("column 200 960 collections", collections / runs, "1", runs);
+}
+
 function benchSlab(): void {
   const knots = benchmarkKnots(960);
-  const repeats = 200;
-  const { result, nanoseconds } = fastest(5, () => {
-    let last = runBenchmarkSlab(knots);
-    for (let repeat = 1; repeat < repeats; repeat++) last = runBenchmarkSlab(knots);
-    return last;
-  });
-  report("slab 960 step", nanoseconds / (repeats * 960), "ns", repeats * 960);
+  const path = slabPath(961);
+  const repeats = 1000;
+  const { result, nanoseconds, otherNanoseconds } = sideBySide(
+    6,
+    () => {
+      let last = runBenchmarkSlab(knots, path);
+      for (let repeat = 1; repeat < repeats; repeat++) last = runBenchmarkSlab(knots, path);
+      return last;
+    },
+    plainC && (() => plainC.run("slab", 960, repeats).nanoseconds),
+  );
+  const steps = repeats * 960;
+  reportSpeed("slab 960 step", nanoseconds / steps, otherNanoseconds === null ? null : otherNanoseconds / steps, steps);
   report("slab 960 u", result.u, "m/s", 1, -0.168169099617);
   report("slab 960 v", result.v, "m/s", 1, -0.105801850249);
   report("slab 960 x", result.x, "m", 1, 1914.0078647);
@@ -64,20 +82,34 @@ function benchSlab(): void {
 function benchDensity(): void {
   const n = 1_000_000;
   const random = mulberry32(1);
-  const points = Float64Array.from({ length: 3 * n }, () => random());
-  const slopes = new Float64Array(3);
-  const { result, nanoseconds } = fastest(5, () => {
-    const sums = { rho: 0, alpha: 0, beta: 0 };
-    for (let k = 0; k < 3 * n; k += 3) {
-      specificVolumeSlopesInto(slopes, 42 * points[k], -2 + 42 * points[k + 1], 8000 * points[k + 2]);
-      const rho = 1 / slopes[0];
-      sums.rho += rho;
-      sums.alpha += slopes[1] * rho;
-      sums.beta -= slopes[2] * rho;
-    }
-    return sums;
-  });
-  report("density 1000000 evaluation", nanoseconds / n, "ns", n);
+  const [SA, CT, p] = [new Float64Array(n), new Float64Array(n), new Float64Array(n)];
+  for (let k = 0; k < n; k++) {
+    SA[k] = 42 * random();
+    CT[k] = -2 + 42 * random();
+    p[k] = 8000 * random();
+  }
+  const slopes = specificVolumeSlopes(n);
+  const { result, nanoseconds, otherNanoseconds } = sideBySide(
+    6,
+    () => {
+      specificVolumeSlopesInto(slopes, SA, CT, p);
+      const sums = { rho: 0, alpha: 0, beta: 0 };
+      for (let k = 0; k < n; k++) {
+        const rho = 1 / slopes.v[k];
+        sums.rho += rho;
+        sums.alpha += slopes.dvdCT[k] * rho;
+        sums.beta -= slopes.dvdSA[k] * rho;
+      }
+      return sums;
+    },
+    plainC && (() => plainC.run("density", n).nanoseconds),
+  );
+  reportSpeed(
+    "density 1000000 evaluation",
+    nanoseconds / n,
+    otherNanoseconds === null ? null : otherNanoseconds / n,
+    n,
+  );
   report("density 1000000 meanRho", result.rho / n, "kg/m³", n, 1030.58095950942);
   report("density 1000000 meanAlpha", result.alpha / n, "1/K", n, 2.70788083398e-4);
   report("density 1000000 meanBeta", result.beta / n, "kg/g", n, 7.07294086404e-4);
@@ -129,9 +161,11 @@ function benchEstimates(): void {
   }
 }
 
+await benchColumnMemory();
 benchColumn(200, 960, { sst: 25.76100939, sss: 35.04259284, mld03: 108.5367842, u0: -0.1165087891, v0: -0.0021908655 });
 benchColumn(100, 960, { sst: 25.96362679, sss: 35.03025, mld03: 100 });
 benchSlab();
 benchDensity();
 benchEnsemble();
 benchEstimates();
+plainC?.remove();

@@ -3,8 +3,8 @@ import { ColumnModel } from "~/ocean/column/column-model";
 import { lightShares } from "~/ocean/column/light-shares";
 import { EARTH_ROTATION, GRAVITY, HEAT_CAPACITY, MM_PER_HOUR, REFERENCE_DENSITY } from "~/ocean/constants";
 import { waterClarity } from "~/ocean/heat/shortwave";
-import { potentialDensityOf } from "~/ocean/seawater/density";
-import { SlabIntegrator } from "~/ocean/slab/slab-integrator";
+import { potentialDensityInto } from "~/ocean/seawater/density";
+import { SlabIntegrator, type SlabPath, type StressKnots } from "~/ocean/slab/slab-integrator";
 import { mixedLayerDepth } from "~/ocean/water/layer-depth";
 
 /** The storm that the engine's hot loops are timed on; each run also gives figures whose right values are known. */
@@ -36,7 +36,7 @@ export function runBenchmarkColumn(levels: number, steps: number, windFactor = 1
     beneath.map((b) => Math.max(2, 28 - 0.05 * b)),
     beneath.map((b) => 35 + 0.002 * b),
     CELL_SIZE,
-    potentialDensityOf,
+    potentialDensityInto,
   );
   const model = new ColumnModel(state, {
     f: CORIOLIS,
@@ -82,9 +82,11 @@ export interface SlabFigures {
 }
 
 /** Stress at the knots of a slab run, made beforehand so that only the slab is timed. */
-export function benchmarkKnots(steps: number): { x: Float64Array; y: Float64Array } {
-  const knots = { x: new Float64Array(steps + 1), y: new Float64Array(steps + 1) };
+export function benchmarkKnots(steps: number): StressKnots {
+  const length = steps + 1;
+  const knots = { seconds: new Float64Array(length), x: new Float64Array(length), y: new Float64Array(length) };
   for (let step = 0; step <= steps; step++) {
+    knots.seconds[step] = step * TIME_STEP;
     const stress = stressAt((step * TIME_STEP) / 3600);
     knots.x[step] = stress.x;
     knots.y[step] = stress.y;
@@ -92,18 +94,15 @@ export function benchmarkKnots(steps: number): { x: Float64Array; y: Float64Arra
   return knots;
 }
 
-export function runBenchmarkSlab(knots: { x: Float64Array; y: Float64Array }): SlabFigures {
+export function runBenchmarkSlab(knots: StressKnots, path: SlabPath): SlabFigures {
   const slab = new SlabIntegrator({
     f: CORIOLIS,
     dampingRate: 1 / (4 * 86400),
     layerDepth: 30,
     waterDensity: REFERENCE_DENSITY,
   });
+  slab.follow(knots, path);
   let peakSquared = 0;
-  for (let step = 0; step + 1 < knots.x.length; step++) {
-    slab.step(TIME_STEP, knots.x[step], knots.y[step], knots.x[step + 1], knots.y[step + 1]);
-    const squared = slab.u * slab.u + slab.v * slab.v;
-    if (squared > peakSquared) peakSquared = squared;
-  }
+  for (let k = 0; k < path.u.length; k++) peakSquared = Math.max(peakSquared, path.u[k] ** 2 + path.v[k] ** 2);
   return { u: slab.u, v: slab.v, x: slab.x, y: slab.y, peakSpeed: Math.sqrt(peakSquared) };
 }

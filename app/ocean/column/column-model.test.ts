@@ -1,11 +1,11 @@
 import fc from "fast-check";
 import { describe, expect, it } from "vitest";
-import { columnAtRest } from "./column-state";
+import { columnAtRest, renewDensity } from "./column-state";
 import { ColumnModel, type ColumnForcing } from "./column-model";
 import { lightShares } from "./light-shares";
 import { mixStatically } from "./static-mixing";
 import { waterClarity } from "../heat/shortwave";
-import { potentialDensityOf } from "../seawater/density";
+import { potentialDensityInto } from "../seawater/density";
 
 const number = (min: number, max: number) => fc.double({ min, max, noNaN: true });
 const CELLS = 40;
@@ -14,7 +14,7 @@ const still: ColumnForcing = { tauX: 0, tauY: 0, nonSolarHeat: 0, shortwave: 0, 
 
 function column(T: (z: number) => number, S: (z: number) => number, change: { f?: number; bottomDrag?: number } = {}) {
   const centres = Array.from({ length: CELLS }, (_, k) => (k + 0.5) * CELL);
-  const state = columnAtRest(centres.map(T), centres.map(S), CELL, potentialDensityOf);
+  const state = columnAtRest(centres.map(T), centres.map(S), CELL, potentialDensityInto);
   return new ColumnModel(state, {
     f: change.f ?? 1e-4,
     waterDensity: 1025,
@@ -103,7 +103,7 @@ describe("column", () => {
     mixStatically(state);
     expect(state.T).toEqual(before);
     state.T[20] = 10;
-    state.rho[20] = potentialDensityOf(state.S[20], 10);
+    renewDensity(state, 20, 21);
     mixStatically(state);
     expect(state.T[0]).toBe(before[0]);
     expect(state.T[5]).toBe(before[5]);
@@ -162,8 +162,8 @@ describe("column", () => {
   });
 
   it("refuses columns that are none", () => {
-    expect(() => columnAtRest([1], [1], 1, potentialDensityOf)).toThrow(/at least two cells/);
-    expect(() => columnAtRest([1, 2], [1], 1, potentialDensityOf)).toThrow(/at least two cells/);
-    expect(() => columnAtRest([1, Number.NaN], [1, 1], 1, potentialDensityOf)).toThrow(/no density/);
+    expect(() => columnAtRest([1], [1], 1, potentialDensityInto)).toThrow(/at least two cells/);
+    expect(() => columnAtRest([1, 2], [1], 1, potentialDensityInto)).toThrow(/at least two cells/);
+    expect(() => columnAtRest([1, Number.NaN], [1, 1], 1, potentialDensityInto)).toThrow(/no density/);
   });
 });

@@ -1,7 +1,8 @@
 import { requireFinite, requireNotNegative, requirePositive } from "../guards";
 import { mixInBulk } from "./bulk-mixing";
 import { renewDensity, type ColumnState } from "./column-state";
-import { gradientWork, mixAtGradients, type GradientWork } from "./gradient-mixing";
+import { mixAtGradients } from "./gradient-mixing";
+import { LeastInterface } from "./least-interface";
 import { mixStatically } from "./static-mixing";
 
 export interface ColumnSetting {
@@ -57,7 +58,7 @@ export class ColumnModel {
   /** Exchanges of gradient mixing so far. */
   exchanges = 0;
   private readonly setting: ColumnSetting;
-  private readonly work: GradientWork;
+  private readonly search: LeastInterface;
 
   /** @throws OceanError INVALID_INPUT */
   constructor(state: ColumnState, setting: ColumnSetting) {
@@ -68,7 +69,7 @@ export class ColumnModel {
     requireNotNegative({ dampingRate, bottomDrag });
     this.state = state;
     this.setting = setting;
-    this.work = gradientWork(state.cells);
+    this.search = new LeastInterface(state.cells - 1);
   }
 
   /** Moves on by `dt` seconds. @throws OceanError INVALID_INPUT, NOT_CONVERGED */
@@ -83,7 +84,7 @@ export class ColumnModel {
     mixInBulk(state, layer, setting.bulkRichardson, setting.gravity / setting.waterDensity);
     if (setting.gradientMixing) {
       const scaled = (setting.gravity * state.cellSize) / setting.waterDensity;
-      this.exchanges += mixAtGradients(state, this.work, setting.gradientRichardson, scaled);
+      this.exchanges += mixAtGradients(state, this.search, setting.gradientRichardson, scaled);
     }
     mixStatically(state);
   }
@@ -113,7 +114,8 @@ export class ColumnModel {
     const { state, setting } = this;
     const { u, v, cells, cellSize } = state;
     const angle = (setting.f * dt) / 2;
-    const [cos, sin] = [Math.cos(angle), Math.sin(angle)];
+    const cos = Math.cos(angle);
+    const sin = Math.sin(angle);
     const perStress = dt / (setting.waterDensity * layer * cellSize);
     rotate(u, v, cells, cos, sin);
     for (let k = 0; k < layer; k++) {
@@ -133,7 +135,8 @@ export class ColumnModel {
   /** Slows cells from…to - 1 to a share of their speed; what is taken is kept, turned on to the end of the step. */
   private brake(from: number, to: number, share: number, cos: number, sin: number): void {
     const { u, v, cellSize } = this.state;
-    let [sumU, sumV] = [0, 0];
+    let sumU = 0;
+    let sumV = 0;
     for (let k = from; k < to; k++) {
       sumU += u[k];
       sumV += v[k];

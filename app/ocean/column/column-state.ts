@@ -1,8 +1,11 @@
 import { OceanError } from "../errors";
 import { requirePositive } from "../guards";
 
-/** Density from salinity (g/kg) and temperature (°C), kg/m³: what stability is judged by. */
-export type ColumnDensity = (SA: number, CT: number) => number;
+/**
+ * What stability is judged by: writes the density (kg/m³) of cells from…to - 1 from their salinity (g/kg) and
+ * temperature (°C). Arrays, because numbers that are handed over one by one would be boxed in every exchange.
+ */
+export type ColumnDensity = (rho: Float64Array, SA: Float64Array, CT: Float64Array, from: number, to: number) => void;
 
 /** n equal cells from the surface down to the bed; cell k has its centre at (k + ½) cellSize. */
 export interface ColumnState {
@@ -61,27 +64,14 @@ export function columnAtRest(
 
 /** Brings density up to date in cells from…to - 1. */
 export function renewDensity({ T, S, rho, density }: ColumnState, from: number, to: number): void {
-  for (let k = from; k < to; k++) rho[k] = density(S[k], T[k]);
+  density(rho, S, T, from, to);
 }
 
-/** Mixes cells from…to - 1 to one value of everything; heat, salt and momentum are kept. */
-export function homogenise(state: ColumnState, from: number, to: number): void {
-  const { T, S, u, v, rho } = state;
-  const count = to - from;
-  let [sumT, sumS, sumU, sumV] = [0, 0, 0, 0];
-  for (let k = from; k < to; k++) {
-    sumT += T[k];
-    sumS += S[k];
-    sumU += u[k];
-    sumV += v[k];
-  }
-  const [meanT, meanS, meanU, meanV] = [sumT / count, sumS / count, sumU / count, sumV / count];
-  const meanRho = state.density(meanS, meanT);
-  for (let k = from; k < to; k++) {
-    T[k] = meanT;
-    S[k] = meanS;
-    u[k] = meanU;
-    v[k] = meanV;
-    rho[k] = meanRho;
-  }
+/** Gives cells from…to - 1 everything that cell `model` has. */
+export function copyCell({ T, S, u, v, rho }: ColumnState, model: number, from: number, to: number): void {
+  T.fill(T[model], from, to);
+  S.fill(S[model], from, to);
+  u.fill(u[model], from, to);
+  v.fill(v[model], from, to);
+  rho.fill(rho[model], from, to);
 }

@@ -17,5 +17,7 @@ export function linearDensity({
   T0: number;
   S0: number;
 }): ColumnDensity {
-  return (S, T) => rho0 * (1 - alpha * (T - T0) + beta * (S - S0));
+  return (rho, S, T, from, to) => {
+    for (let k = from; k < to; k++) rho[k] = rho0 * (1 - alpha * (T[k] - T0) + beta * (S[k] - S0));
+  };
 }

@@ -1,4 +1,4 @@
-import type { ColumnState } from "./column-state";
+import { copyCell, renewDensity, type ColumnState } from "./column-state";
 
 /** A step upwards in density smaller than this is rounding, kg/m³. */
 const TOLERANCE = 1e-10;
@@ -16,33 +16,31 @@ export function mixStatically(state: ColumnState): void {
 }
 
 /** Pools around the unstable pair k, k + 1. @returns the first cell below the block */
-function pool({ T, S, u, v, rho, density, cells }: ColumnState, k: number): number {
+function pool(state: ColumnState, k: number): number {
+  const { T, S, u, v, rho, cells } = state;
   let top = k;
   let bottom = k + 1;
   let sumT = T[k] + T[k + 1];
   let sumS = S[k] + S[k + 1];
   let sumU = u[k] + u[k + 1];
   let sumV = v[k] + v[k + 1];
-  let count = 2;
-  let mean = density(sumS / count, sumT / count);
+  // The block's own values are kept in the cell that it took last.
+  let block = k + 1;
   for (;;) {
-    let joining: number;
-    if (bottom + 1 < cells && rho[bottom + 1] < mean - TOLERANCE) joining = ++bottom;
-    else if (top > 0 && mean < rho[top - 1] - TOLERANCE) joining = --top;
+    const count = bottom - top + 1;
+    T[block] = sumT / count;
+    S[block] = sumS / count;
+    u[block] = sumU / count;
+    v[block] = sumV / count;
+    renewDensity(state, block, block + 1);
+    if (bottom + 1 < cells && rho[bottom + 1] < rho[block] - TOLERANCE) block = ++bottom;
+    else if (top > 0 && rho[block] < rho[top - 1] - TOLERANCE) block = --top;
     else break;
-    sumT += T[joining];
-    sumS += S[joining];
-    sumU += u[joining];
-    sumV += v[joining];
-    count++;
-    mean = density(sumS / count, sumT / count);
+    sumT += T[block];
+    sumS += S[block];
+    sumU += u[block];
+    sumV += v[block];
   }
-  for (let cell = top; cell <= bottom; cell++) {
-    T[cell] = sumT / count;
-    S[cell] = sumS / count;
-    u[cell] = sumU / count;
-    v[cell] = sumV / count;
-    rho[cell] = mean;
-  }
+  copyCell(state, block, top, bottom + 1);
   return bottom + 1;
 }

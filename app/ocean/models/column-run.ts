@@ -1,4 +1,4 @@
-import { columnAtRest, type ColumnState } from "../column/column-state";
+import { columnAtRest, renewDensity, type ColumnState } from "../column/column-state";
 import { ColumnModel, type ColumnForcing } from "../column/column-model";
 import { lightShares } from "../column/light-shares";
 import type { Place } from "../box/place";
@@ -10,7 +10,7 @@ import { latentHeatOfVaporisation } from "../heat/evaporation";
 import { waterClarity } from "../heat/shortwave";
 import type { ResolvedMethod } from "../method/resolve-method";
 import { emptyMotion, vectorBudget, type Motion } from "../motion/motion";
-import { potentialDensityOf } from "../seawater/density";
+import { potentialDensityInto } from "../seawater/density";
 import { freezingTemperature } from "../seawater/freezing";
 import { inertialShare } from "../slab/inertial-share";
 import type { DragLaw } from "../stress/drag-law";
@@ -178,7 +178,7 @@ export function runColumn({ place, method, law, forcing, water }: ColumnCase): {
       if (state.T[cell] >= freezing) break;
       kept += freezing - state.T[cell];
       state.T[cell] = freezing;
-      state.rho[cell] = state.density(state.S[cell], freezing);
+      renewDensity(state, cell, cell + 1);
     }
     const heat = kept * method.waterDensity * method.heatCapacity * state.cellSize;
     totals.heatIn += heat;
@@ -232,7 +232,7 @@ function initialColumn(
   const centres = Array.from({ length: cells }, (_, k) => (k + 0.5) * cellSize);
   const T = centres.map((z) => valueAt(profile.depth, profile.CT, z));
   const S = centres.map((z) => valueAt(profile.depth, profile.SA, z));
-  return { state: columnAtRest(T, S, cellSize, potentialDensityOf), reachesBed };
+  return { state: columnAtRest(T, S, cellSize, potentialDensityInto), reachesBed };
 }
 
 function sum(values: Float64Array): number {

@@ -1,5 +1,5 @@
 import { inertialShare } from "../slab/inertial-share";
-import { SlabIntegrator, type SlabSetting } from "../slab/slab-integrator";
+import { SlabIntegrator, slabPath, type SlabSetting } from "../slab/slab-integrator";
 import type { StressRecord } from "../stress/stress-record";
 import { emptyMotion, vectorBudget, type Motion } from "./motion";
 
@@ -10,21 +10,23 @@ export function slabMotion(stress: StressRecord, setting: SlabSetting): Motion {
   const mass = setting.waterDensity * layerDepth;
   const motion = emptyMotion(sample.length);
   const slab = new SlabIntegrator(setting);
-  const impulse = { x: 0, y: 0 };
+  const path = slabPath(seconds.length);
+  slab.follow(stress, path);
   for (let k = 0; k < sample.length; k++) {
-    for (let step = k === 0 ? 0 : sample[k - 1]; step < sample[k]; step++) {
-      const dt = seconds[step + 1] - seconds[step];
-      slab.step(dt, x[step], y[step], x[step + 1], y[step + 1]);
-      impulse.x += ((x[step] + x[step + 1]) / 2) * dt;
-      impulse.y += ((y[step] + y[step + 1]) / 2) * dt;
-    }
-    motion.driftEast[k] = slab.u;
-    motion.driftNorth[k] = slab.v;
-    motion.displacementEast[k] = slab.x;
-    motion.displacementNorth[k] = slab.y;
-    motion.transportEast[k] = slab.u * layerDepth;
-    motion.transportNorth[k] = slab.v * layerDepth;
-    motion.inertialShare[k] = inertialShare(slab.u, slab.v, x[sample[k]], y[sample[k]], { f, dampingRate, mass });
+    const knot = sample[k];
+    motion.driftEast[k] = path.u[knot];
+    motion.driftNorth[k] = path.v[knot];
+    motion.displacementEast[k] = path.x[knot];
+    motion.displacementNorth[k] = path.y[knot];
+    motion.transportEast[k] = path.u[knot] * layerDepth;
+    motion.transportNorth[k] = path.v[knot] * layerDepth;
+    motion.inertialShare[k] = inertialShare(path.u[knot], path.v[knot], x[knot], y[knot], { f, dampingRate, mass });
+  }
+  const impulse = { x: 0, y: 0 };
+  for (let k = 0; k + 1 < seconds.length; k++) {
+    const dt = seconds[k + 1] - seconds[k];
+    impulse.x += ((x[k] + x[k + 1]) / 2) * dt;
+    impulse.y += ((y[k] + y[k + 1]) / 2) * dt;
   }
   motion.volumeEast = slab.x * layerDepth;
   motion.volumeNorth = slab.y * layerDepth;

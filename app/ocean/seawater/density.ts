@@ -1,6 +1,6 @@
 import { OceanError, type RangeWarning } from "../errors";
 import { requireSeawater } from "../guards";
-import { specificVolume, specificVolumeSlopesInto, surfaceSpecificVolume } from "./specific-volume";
+import { specificVolumeAt, surfaceSpecificVolume } from "./specific-volume";
 
 export interface SeawaterDensity {
   /** In-situ density, kg/m³. */
@@ -24,9 +24,7 @@ export interface SeawaterDensity {
  */
 export function seawaterDensity(SA: number, CT: number, p: number): SeawaterDensity {
   requireSeawater(SA, CT, p);
-  const slopes = new Float64Array(3);
-  specificVolumeSlopesInto(slopes, SA, CT, p);
-  const [v, dvdCT, dvdSA] = slopes;
+  const { v, dvdCT, dvdSA } = specificVolumeAt(SA, CT, p);
   if (!(v > 0)) {
     throw new OceanError(
       "INVALID_INPUT",
@@ -44,12 +42,26 @@ export function seawaterDensity(SA: number, CT: number, p: number): SeawaterDens
 
 /** In-situ density, kg/m³. Arguments as `seawaterDensity`, unchecked: for loops over values already checked. */
 export function densityOf(SA: number, CT: number, p: number): number {
-  return 1 / specificVolume(SA, CT, p);
+  return 1 / specificVolumeAt(SA, CT, p).v;
 }
 
 /** Potential density referred to the surface, kg/m³. Arguments as `seawaterDensity`, unchecked. */
 export function potentialDensityOf(SA: number, CT: number): number {
   return 1 / surfaceSpecificVolume(SA, CT);
+}
+
+/**
+ * Potential density referred to the surface, kg/m³, of levels from…to - 1, written into `rho`: for loops.
+ * @param SA g/kg @param CT °C, one value a level, unchecked
+ */
+export function potentialDensityInto(
+  rho: Float64Array,
+  SA: Float64Array,
+  CT: Float64Array,
+  from: number,
+  to: number,
+): void {
+  for (let k = from; k < to; k++) rho[k] = 1 / surfaceSpecificVolume(SA[k], CT[k]);
 }
 
 function densityWarnings(SA: number, CT: number, p: number): RangeWarning[] {

@@ -2,7 +2,6 @@ import { GRAVITY, PASCAL_PER_DBAR } from "../constants";
 import { OceanError } from "../errors";
 import { requirePositive, requireSeawater } from "../guards";
 import { seawaterDensity } from "./density";
-import { specificVolume } from "./specific-volume";
 
 export interface WaterSample {
   /** Absolute Salinity, g/kg. */
@@ -51,6 +50,6 @@ function between(upper: WaterSample, lower: WaterSample) {
   const SA = (upper.SA + lower.SA) / 2;
   const CT = (upper.CT + lower.CT) / 2;
   const p = (upper.p + lower.p) / 2;
-  const { alpha, beta } = seawaterDensity(SA, CT, p);
-  return { alpha, beta, v: specificVolume(SA, CT, p), dSA: lower.SA - upper.SA, dCT: lower.CT - upper.CT, dp };
+  const { rho, alpha, beta } = seawaterDensity(SA, CT, p);
+  return { alpha, beta, v: 1 / rho, dSA: lower.SA - upper.SA, dCT: lower.CT - upper.CT, dp };
 }

@@ -11,6 +11,26 @@ export interface SlabSetting {
   waterDensity: number;
 }
 
+/** Stress at n times, N/m², east and north; times in s, increasing. */
+export interface StressKnots {
+  seconds: Float64Array;
+  x: Float64Array;
+  y: Float64Array;
+}
+
+/** Velocity, m/s, and displacement, m, towards east and north, at n times. */
+export interface SlabPath {
+  u: Float64Array;
+  v: Float64Array;
+  x: Float64Array;
+  y: Float64Array;
+}
+
+/** Room for a slab's path through n knots. */
+export function slabPath(n: number): SlabPath {
+  return { u: new Float64Array(n), v: new Float64Array(n), x: new Float64Array(n), y: new Float64Array(n) };
+}
+
 /** Below this size of (r + if)Δt the weights are summed as series: the closed forms lose digits. */
 const SMALL = 1e-2;
 const SERIES_TERMS = 9;
@@ -62,18 +82,65 @@ export class SlabIntegrator {
 
   /** Moves on by `dt` seconds while the stress runs from (τ₀x, τ₀y) to (τ₁x, τ₁y), N/m². @throws OceanError INVALID_INPUT */
   step(dt: number, tau0x: number, tau0y: number, tau1x: number, tau1y: number): void {
-    if (dt !== this.weightedStep) this.weigh(dt);
-    if (!Number.isFinite(tau0x + tau0y + tau1x + tau1y)) requireFinite({ tau0x, tau0y, tau1x, tau1y });
-    const { u, v, weights: w } = this;
-    const perMass = dt / this.mass;
-    const ax = tau0x * perMass;
-    const ay = tau0y * perMass;
-    const bx = (tau1x - tau0x) * perMass;
-    const by = (tau1y - tau0y) * perMass;
-    this.x += dt * (u * w[2] - v * w[3] + ax * w[4] - ay * w[5] + bx * w[6] - by * w[7]);
-    this.y += dt * (u * w[3] + v * w[2] + ax * w[5] + ay * w[4] + bx * w[7] + by * w[6]);
-    this.u = u * w[0] - v * w[1] + ax * w[2] - ay * w[3] + bx * w[4] - by * w[5];
-    this.v = u * w[1] + v * w[0] + ax * w[3] + ay * w[2] + bx * w[5] + by * w[4];
+    requirePositive({ dt });
+    requireFinite({ tau0x, tau0y, tau1x, tau1y });
+    const knots = {
+      seconds: Float64Array.of(0, dt),
+      x: Float64Array.of(tau0x, tau1x),
+      y: Float64Array.of(tau0y, tau1y),
+    };
+    this.follow(knots, slabPath(2));
+  }
+
+  /**
+   * Moves on through a stress that runs linearly between its knots, unchecked but for its intervals, and writes where it
+   * is at each knot into `path`: no allocation, for long records and ensembles.
+   * @throws OceanError INVALID_INPUT where times do not increase
+   */
+  follow({ seconds, x: tauX, y: tauY }: StressKnots, path: SlabPath): void {
+    const { weights: w, mass } = this;
+    let { u, v, x, y } = this;
+    const { u: pathU, v: pathV, x: pathX, y: pathY } = path;
+    pathU[0] = u;
+    pathV[0] = v;
+    pathX[0] = x;
+    pathY[0] = y;
+    for (let from = 0; from + 1 < seconds.length;) {
+      // All steps of one length in a row, so that their weights are read once: e⁻ˣ, φ₁, φ₂, φ₃ and Δt/ρH.
+      const dt = seconds[from + 1] - seconds[from];
+      let to = from + 1;
+      while (to + 1 < seconds.length && seconds[to + 1] - seconds[to] === dt) to++;
+      if (dt !== this.weightedStep) this.weigh(dt);
+      const er = w[0];
+      const ei = w[1];
+      const ar = w[2];
+      const ai = w[3];
+      const br = w[4];
+      const bi = w[5];
+      const cr = w[6];
+      const ci = w[7];
+      const perMass = dt / mass;
+      for (let k = from + 1; k <= to; k++) {
+        const startX = tauX[k - 1] * perMass;
+        const startY = tauY[k - 1] * perMass;
+        const changeX = tauX[k] * perMass - startX;
+        const changeY = tauY[k] * perMass - startY;
+        x += dt * (u * ar - v * ai + startX * br - startY * bi + changeX * cr - changeY * ci);
+        y += dt * (u * ai + v * ar + startX * bi + startY * br + changeX * ci + changeY * cr);
+        const east = u;
+        u = east * er - v * ei + startX * ar - startY * ai + changeX * br - changeY * bi;
+        v = east * ei + v * er + startX * ai + startY * ar + changeX * bi + changeY * br;
+        pathU[k] = u;
+        pathV[k] = v;
+        pathX[k] = x;
+        pathY[k] = y;
+      }
+      from = to;
+    }
+    this.u = u;
+    this.v = v;
+    this.x = x;
+    this.y = y;
   }
 
   private weigh(dt: number): void {
@@ -86,33 +153,35 @@ export class SlabIntegrator {
     weights[1] = -decay * Math.sin(xi);
     const small = Math.hypot(xr, xi) < SMALL;
     for (let n = 1; n <= 3; n++) {
-      const phi = weights.subarray(2 * n, 2 * n + 2);
-      if (small) seriesInto(phi, xr, xi, n);
-      else quotientInto(phi, PHI_AT_ZERO[n - 1] - weights[2 * n - 2], -weights[2 * n - 1], xr, xi);
+      if (small) seriesInto(weights, n, xr, xi);
+      else quotientInto(weights, n, PHI_AT_ZERO[n - 1] - weights[2 * n - 2], -weights[2 * n - 1], xr, xi);
     }
     this.weightedStep = dt;
   }
 }
 
-/** φ_n(x) = Σ (-x)^k/(k+n)! for a small complex x. */
-function seriesInto(out: Float64Array, xr: number, xi: number, n: number): void {
+/** Weight n of the series φ_n(x) = Σ (-x)^k/(k+n)! for a small complex x. */
+function seriesInto(weights: Float64Array, n: number, xr: number, xi: number): void {
   let factorial = 1;
   for (let k = 2; k <= n; k++) factorial *= k;
   let re = 1 / factorial;
   let im = 0;
-  out[0] = re;
-  out[1] = im;
+  let sumRe = re;
+  let sumIm = 0;
   for (let k = 1; k <= SERIES_TERMS; k++) {
     const nextRe = -(re * xr - im * xi) / (k + n);
     im = -(re * xi + im * xr) / (k + n);
     re = nextRe;
-    out[0] += re;
-    out[1] += im;
+    sumRe += re;
+    sumIm += im;
   }
+  weights[2 * n] = sumRe;
+  weights[2 * n + 1] = sumIm;
 }
 
-function quotientInto(out: Float64Array, ar: number, ai: number, br: number, bi: number): void {
+/** Weight n as the complex quotient a/b. */
+function quotientInto(weights: Float64Array, n: number, ar: number, ai: number, br: number, bi: number): void {
   const size = br * br + bi * bi;
-  out[0] = (ar * br + ai * bi) / size;
-  out[1] = (ai * br - ar * bi) / size;
+  weights[2 * n] = (ar * br + ai * bi) / size;
+  weights[2 * n + 1] = (ai * br - ar * bi) / size;
 }
