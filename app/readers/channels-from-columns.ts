@@ -1,6 +1,7 @@
 import type { RowChannel } from "./assemble-series";
 import type { ConvertedColumn } from "./convert-column";
-import { conversionLabel } from "./file-units";
+import { conversionLabel, isPerInterval, type FileUnit } from "./file-units";
+import { isSpread, type RowTimes } from "./rain-amounts";
 import { CHANNEL_UNITS, type ChannelName, type ReadingAnswers, type ReadingStep, type Understood } from "./reading";
 import { channelOfRole, type SettledColumn } from "./settle-columns";
 import { normalDegrees, windFromComponents } from "./wind-vectors";
@@ -15,14 +16,14 @@ export function channelsFromColumns(
   settled: readonly SettledColumn[],
   converted: ReadonlyMap<SettledColumn, ConvertedColumn>,
   answers: ReadingAnswers,
-  stepSeconds: number | null,
+  times: RowTimes,
   said: Said,
 ): Map<ChannelName, RowChannel> {
   const channels = new Map<ChannelName, RowChannel>();
   const values = (column: SettledColumn): Float64Array => converted.get(column)?.values ?? new Float64Array();
   for (const column of settled) {
     const channel = channelOfRole(column.role);
-    sayConversion(column, channel, stepSeconds, said);
+    sayConversion(column, channel, times, said);
     if (column.role === "windU" || column.role === "windV") continue;
     const fromColumns = [column.column.name];
     if (column.role === "windFrom" || column.role === "windTowards") {
@@ -68,22 +69,30 @@ function countOf(values: Float64Array): number {
   return values.reduce((count, value) => (Number.isNaN(value) ? count : count + 1), 0);
 }
 
-function sayConversion(column: SettledColumn, channel: ChannelName, stepSeconds: number | null, said: Said): void {
+/** Over which time an amount was added up, for the list of steps and for the reading sheet. */
+function intervalWords(unit: FileUnit, times: RowTimes): { by: string; taken: string | null } {
+  if (isSpread(unit, times)) {
+    return {
+      by: "; the interval is the time since the line before, and the rate stands where it began",
+      taken: "an amount that fell since the line before; lines do not stand at equal steps",
+    };
+  }
+  const { stepSeconds } = times;
+  if (stepSeconds === null) return { by: "", taken: null };
+  return {
+    by: `; the interval is ${stepSeconds} s, the file's median step`,
+    taken: `an amount over the ${stepSeconds} s up to each stamp`,
+  };
+}
+
+function sayConversion(column: SettledColumn, channel: ChannelName, times: RowTimes, said: Said): void {
   const { scan, unit } = column;
   const name = column.column.name;
   const label = conversionLabel(unit, CHANNEL_UNITS[channel]);
   if (label !== "") {
-    const interval =
-      /interval/.test(label) && stepSeconds !== null
-        ? `; the interval is ${stepSeconds} s, the file's median step`
-        : "";
-    said.steps.push({ id: `unit:${unit.id}`, label: `${label}${interval}`, channel, count: countOf(scan.values) });
-    if (interval !== "")
-      said.understood.push({
-        what: `“${name}”`,
-        taken: `an amount over the ${stepSeconds} s up to each stamp`,
-        confidence: "assumed",
-      });
+    const { by, taken } = isPerInterval(unit) ? intervalWords(unit, times) : { by: "", taken: null };
+    said.steps.push({ id: `unit:${unit.id}`, label: `${label}${by}`, channel, count: countOf(scan.values) });
+    if (taken !== null) said.understood.push({ what: `“${name}”`, taken, confidence: "assumed" });
   }
   if (scan.trace > 0) {
     said.steps.push({ id: "trace", label: "trace of rain (T) read as 0", channel, count: scan.trace });

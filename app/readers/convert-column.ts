@@ -1,5 +1,7 @@
 import { CHANNEL_LIMITS } from "./channel-limits";
+import { isWaterAmount, type FileUnit } from "./file-units";
 import type { ProblemList } from "./problem-list";
+import { counterIncrements, incrementsSinceReset, isSpread, ratesSinceRowBefore, type RowTimes } from "./rain-amounts";
 import { channelOfRole, type SettledColumn } from "./settle-columns";
 
 export interface ConvertedColumn {
@@ -12,33 +14,25 @@ export interface ConvertedColumn {
 }
 
 /**
- * Turns a column's values into the channel's unit. Amounts per interval are divided by the file's median step; counters
- * are differenced in time order, crediting only increases and starting again where the counter drops.
- * @param order unique rows in time order
- * @param stepSeconds median step; amounts stay NaN without one
+ * Turns a column's values into the channel's unit. Amounts per interval are divided by the file's median step, or where
+ * steps vary by the time since the row before; counters are differenced in time order, crediting only increases and
+ * starting again where the counter drops.
+ * @param times unique rows in time order; amounts stay NaN without a step
  */
 export function convertColumn(
   settled: SettledColumn,
-  order: readonly number[],
-  stepSeconds: number | null,
+  times: RowTimes,
   lines: readonly number[],
   problems: ProblemList,
 ): ConvertedColumn {
   const { unit, scan, column } = settled;
-  const raw =
-    unit.quantity === "waterCounter" ? counterIncrements(scan.values, order, settled, lines, problems) : scan.values;
-  const perInterval =
-    unit.quantity === "waterAmount" || unit.quantity === "waterCounter" || unit.quantity === "energyPerInterval";
-  const seconds = stepSeconds ?? NaN;
-  const divisor = !perInterval ? 1 : unit.quantity === "energyPerInterval" ? seconds : seconds / 3600;
-  const values = new Float64Array(raw.length);
-  const amounts =
-    unit.quantity === "waterAmount" || unit.quantity === "waterCounter" ? new Float64Array(raw.length) : null;
-  for (let row = 0; row < raw.length; row += 1) {
-    const converted = ((raw[row] ?? NaN) - unit.zero) * unit.factor;
-    if (amounts !== null) amounts[row] = converted;
-    values[row] = converted / divisor;
-  }
+  const raw = perRow(settled, times, lines, problems);
+  const converted = raw.map((value) => (value - unit.zero) * unit.factor);
+  const amounts = isWaterAmount(unit) ? converted : null;
+  const values =
+    amounts !== null && isSpread(unit, times)
+      ? ratesSinceRowBefore(amounts, times)
+      : converted.map((value) => value / divisorOf(unit, times.stepSeconds));
   const bad = checkLimits(settled, values, lines, problems);
   for (const { row, text } of scan.unreadable) {
     problems.add(
@@ -57,6 +51,24 @@ export function convertColumn(
     if (amounts !== null) amounts[row] = NaN;
   }
   return { values, amounts, bad: [...bad, ...scan.unreadable.map(({ row }) => row)] };
+}
+
+/** What each row of the file adds. */
+function perRow(
+  settled: SettledColumn,
+  times: RowTimes,
+  lines: readonly number[],
+  problems: ProblemList,
+): Float64Array {
+  const { values } = settled.scan;
+  if (settled.unit.quantity === "waterCounter") return counterIncrements(values, times.order, settled, lines, problems);
+  return settled.unit.quantity === "waterSinceReset" ? incrementsSinceReset(values, times) : values;
+}
+
+function divisorOf(unit: FileUnit, stepSeconds: number | null): number {
+  const seconds = stepSeconds ?? NaN;
+  if (unit.quantity === "energyPerInterval") return seconds;
+  return isWaterAmount(unit) ? seconds / 3600 : 1;
 }
 
 /** Rounded so that a factor's last bit does not make 360 ° or 0 mm/h fall outside. */
@@ -89,37 +101,6 @@ function checkLimits(
     if (limits.beyond === "error") bad.push(row);
   }
   return bad;
-}
-
-/** Increments credited at the later of two readings; the first reading has none. */
-function counterIncrements(
-  values: Float64Array,
-  order: readonly number[],
-  settled: SettledColumn,
-  lines: readonly number[],
-  problems: ProblemList,
-): Float64Array {
-  const increments = new Float64Array(values.length).fill(NaN);
-  let previous = NaN;
-  for (const row of order) {
-    const value = values[row] ?? NaN;
-    if (Number.isNaN(value)) continue;
-    if (value < previous) {
-      increments[row] = 0;
-      problems.add(
-        "warning",
-        "counterReset",
-        "the counter drops; no rain is credited for the step",
-        "Check whether it was emptied or reset.",
-        {
-          row: lines[row] ?? 0,
-          column: settled.column.name,
-        },
-      );
-    } else if (!Number.isNaN(previous)) increments[row] = value - previous;
-    previous = value;
-  }
-  return increments;
 }
 
 const COUNTER_MINIMUM = 24;

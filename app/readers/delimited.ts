@@ -1,5 +1,5 @@
 import { findDelimiter, type Delimiter } from "./delimiter";
-import { decimalSignOf, tidyCell } from "./number-text";
+import { decimalSignOf, tidyCell, type DecimalSign } from "./number-text";
 import type { ProblemList } from "./problem-list";
 import { UnreadableFile, type ReadingAnswers, type SeriesReading, type Understood } from "./reading";
 import { seriesFromTable } from "./series-from-table";
@@ -21,9 +21,37 @@ const MAX_COLUMNS = 1000;
 
 /** Reads delimited text of any kind: finds delimiter, decimal sign, names, units, records and notes. */
 export function readDelimited(source: SourceFile, answers: ReadingAnswers, problems: ProblemList): SeriesReading {
+  return readDelimitedAs((delimiter, decimal) => knowledgeOf(source, delimiter, decimal), source, answers, problems);
+}
+
+/** Reads delimited text of which more is known than its fields: `know` says what, once these have been found. */
+export function readDelimitedAs(
+  know: (delimiter: Delimiter, decimal: DecimalSign) => FormatKnowledge,
+  source: SourceFile,
+  answers: ReadingAnswers,
+  problems: ProblemList,
+): SeriesReading {
   const delimiter = findDelimiter(source.lines);
-  const split = delimiter === null ? null : splitRows(source, delimiter, problems);
-  const widest = split?.rows.reduce((width, cells) => Math.max(width, cells.length), 0) ?? 0;
+  if (delimiter === null) {
+    refuse(source.lines, problems);
+    throw new UnreadableFile(problems.toArray());
+  }
+  const split = splitRows(source, delimiter, problems);
+  return seriesFromRows(split, (decimal) => know(delimiter, decimal), source.fileName, answers, problems);
+}
+
+/**
+ * From rows of cells, wherever they come from, to a series: finds the layout of the table, its names, units and notes.
+ * @throws UnreadableFile where the rows hold no table of times and numbers
+ */
+export function seriesFromRows(
+  split: SplitRows,
+  know: (decimal: DecimalSign) => FormatKnowledge,
+  fileName: string,
+  answers: ReadingAnswers,
+  problems: ProblemList,
+): SeriesReading {
+  const widest = split.rows.reduce((width, cells) => Math.max(width, cells.length), 0);
   if (widest > MAX_COLUMNS) {
     problems.add(
       "error",
@@ -33,9 +61,12 @@ export function readDelimited(source: SourceFile, answers: ReadingAnswers, probl
     );
     throw new UnreadableFile(problems.toArray());
   }
-  const layout = split === null ? null : findLayout(split);
-  if (delimiter === null || split === null || layout === null) {
-    refuse(source, problems);
+  const layout = findLayout(split);
+  if (layout === null) {
+    refuse(
+      split.rows.map((cells) => cells.join(" ")),
+      problems,
+    );
     throw new UnreadableFile(problems.toArray());
   }
   const records = recordsOf(split, layout, problems);
@@ -62,14 +93,14 @@ export function readDelimited(source: SourceFile, answers: ReadingAnswers, probl
       row: records.lines[0] ?? 1,
     });
   }
-  return seriesFromTable(table, knowledgeOf(source, delimiter, decimal.sign), source.fileName, answers, problems);
+  return seriesFromTable(table, know(decimal.sign), fileName, answers, problems);
 }
 
-function refuse(source: SourceFile, problems: ProblemList): void {
-  const first = source.lines.findIndex((line) => line.trim() !== "");
-  const filled = source.lines.filter((line) => line.trim() !== "");
+function refuse(textLines: readonly string[], problems: ProblemList): void {
+  const first = textLines.findIndex((line) => line.trim() !== "");
+  const filled = textLines.filter((line) => line.trim() !== "");
   const digits = filled.slice(1).some((line) => /\d/.test(line));
-  const shown = (source.lines[first] ?? "").trim().slice(0, 120);
+  const shown = (textLines[first] ?? "").trim().slice(0, 120);
   if (!digits) {
     problems.add(
       "error",

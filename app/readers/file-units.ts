@@ -9,12 +9,14 @@ export type UnitQuantity =
   | "waterRate"
   | "waterAmount"
   | "waterCounter"
+  | "waterSinceReset"
   | "heatFlux"
   | "energyPerInterval";
 
 /**
  * A unit as met in files. Value in the channel's unit = (value − zero) × factor, and for amounts per interval, divided
- * by the interval: hours for water (→ mm/h), seconds for energy (→ W/m²). A counter is differenced first.
+ * by the interval: hours for water (→ mm/h), seconds for energy (→ W/m²). A counter is differenced first, an amount since
+ * the hour's reset within its hour.
  */
 export interface FileUnit {
   id: string;
@@ -362,6 +364,42 @@ export const FILE_UNITS: readonly FileUnit[] = [
     written: [],
     source: NIST,
   },
+  {
+    id: "mm since reset",
+    label: "mm since the hour's reset",
+    quantity: "waterSinceReset",
+    factor: 1,
+    zero: 0,
+    written: [],
+    source: SI,
+  },
+  {
+    id: "in since reset",
+    label: "in since the hour's reset",
+    quantity: "waterSinceReset",
+    factor: 25.4,
+    zero: 0,
+    written: [],
+    source: NIST,
+  },
+  {
+    id: "0.1 °C",
+    label: "tenths of °C",
+    quantity: "temperature",
+    factor: 0.1,
+    zero: 0,
+    written: [],
+    source: SI,
+  },
+  {
+    id: "0.1 hPa",
+    label: "tenths of hPa",
+    quantity: "pressure",
+    factor: 0.1,
+    zero: 0,
+    written: [],
+    source: SI,
+  },
 
   {
     id: "W/m²",
@@ -475,7 +513,7 @@ export const CHANNEL_QUANTITIES: Readonly<
   windV: ["speed"],
   windFrom: ["angle"],
   windTowards: ["angle"],
-  rain: ["waterRate", "waterAmount", "waterCounter"],
+  rain: ["waterRate", "waterAmount", "waterCounter", "waterSinceReset"],
   evaporation: ["waterRate", "waterAmount"],
   airTemperature: ["temperature"],
   dewPoint: ["temperature"],
@@ -536,14 +574,24 @@ export function unitsFor(role: keyof typeof CHANNEL_QUANTITIES): FileUnit[] {
   return FILE_UNITS.filter((unit) => CHANNEL_QUANTITIES[role].includes(unit.quantity));
 }
 
+/** Whether a unit tells an amount of water since some moment, not its rate. */
+export function isWaterAmount({ quantity }: FileUnit): boolean {
+  return quantity === "waterAmount" || quantity === "waterCounter" || quantity === "waterSinceReset";
+}
+
+/** Whether values of a unit have to be divided by the time over which they were added up. */
+export function isPerInterval(unit: FileUnit): boolean {
+  return isWaterAmount(unit) || unit.quantity === "energyPerInterval";
+}
+
 /** How a conversion reads in the list of steps: `knots to m/s (× 0.514444)`. Empty where nothing changes. */
 export function conversionLabel(unit: FileUnit, target: string): string {
-  const perInterval =
-    unit.quantity === "waterAmount" || unit.quantity === "energyPerInterval" || unit.quantity === "waterCounter";
   const parts: string[] = [];
   if (unit.quantity === "waterCounter") parts.push("increments of the counter");
+  if (unit.quantity === "waterSinceReset") parts.push("increments within each hour, put where they fell");
   if (unit.zero !== 0) parts.push(`− ${unit.zero}`);
   if (unit.factor !== 1) parts.push(`× ${Number(unit.factor.toPrecision(6))}`);
-  if (perInterval) parts.push(unit.quantity === "energyPerInterval" ? "÷ interval in seconds" : "÷ interval in hours");
+  if (isPerInterval(unit))
+    parts.push(unit.quantity === "energyPerInterval" ? "÷ interval in seconds" : "÷ interval in hours");
   return parts.length === 0 ? "" : `${unit.label} to ${target} (${parts.join(", ")})`;
 }

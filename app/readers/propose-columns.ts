@@ -15,6 +15,8 @@ export interface ColumnProposal {
   unit: FileUnit | null;
   /** Codes fixed by the format or an answer; null where the values must tell. */
   missingCodes: string[] | null;
+  /** Codes for rain too little to measure that the format fixes. */
+  traceCodes: string[];
   confidence: Understood["confidence"];
   note: string | null;
   height: number | null;
@@ -40,6 +42,7 @@ export function proposeColumns(
       name: parts.bare === "" ? `column ${index + 1}` : parts.bare,
       statedUnit: unitText,
       missingCodes: answers.missingCodes?.[String(index)] ?? null,
+      traceCodes: knowledge.columnByName(name)?.traceCodes ?? [],
       note: null,
       height: parts.height ?? (/^[uv]10/i.test(parts.bare) ? 10 : null),
     };

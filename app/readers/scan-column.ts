@@ -21,16 +21,19 @@ export interface ColumnScan {
 /**
  * Reads a column's cells.
  * @param codes the column's own missing codes
+ * @param traceCodes its own codes for rain too little to measure
  */
 export function scanColumn(
   table: TextTable,
   column: number,
   role: ColumnReading["role"],
   codes: readonly string[],
+  traceCodes: readonly string[] = [],
 ): ColumnScan {
   const values = new Float64Array(table.rows.length).fill(NaN);
   const scan: ColumnScan = { values, unreadable: [], trace: 0, variable: 0, missing: 0 };
   const isCode = codeTest(codes, table.decimal);
+  const isTrace = codeTest(traceCodes, table.decimal);
   const direction = role === "windFrom" || role === "windTowards";
   const water = role === "rain" || role === "evaporation";
   const o = direction ? meaningOfO(table.rows.map((row) => (row[column] ?? "").trim())) : null;
@@ -39,6 +42,9 @@ export function scanColumn(
     const value = numberFromText(text, table.decimal);
     if (isCode(text, value) || (value === null && isMissingWord(text))) {
       scan.missing += 1;
+    } else if (isTrace(text, value)) {
+      values[row] = 0;
+      scan.trace += 1;
     } else if (value !== null) {
       values[row] = value;
     } else if (water && /^(?:t|tr|trace)$/i.test(text)) {

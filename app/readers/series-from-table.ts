@@ -51,7 +51,10 @@ export function seriesFromTable(
   const proposals = proposeColumns(table, plan === null ? [] : columnsOfPlan(plan), knowledge, answers);
   for (const column of proposals) {
     if (isValueRole(column.role))
-      scans.set(column.index, scanColumn(table, column.index, column.role, column.missingCodes ?? []));
+      scans.set(
+        column.index,
+        scanColumn(table, column.index, column.role, column.missingCodes ?? [], column.traceCodes),
+      );
   }
   const hasValues = (index: number): boolean => scans.get(index)?.values.some((value) => !Number.isNaN(value)) ?? false;
   const chosen = chooseCandidates(proposals, hasValues, answers);
@@ -62,9 +65,10 @@ export function seriesFromTable(
   const rough = timeAxis(stamps.utc, timed, () => true);
   const state = { answers, problems, lines: table.lines, understood, questions };
   const settled = settleAll(chosen.columns, scans, rough.unique, state);
+  const times = { order: rough.unique, utc: stamps.utc, stepSeconds: rough.medianStepSeconds };
   const converted = new Map<SettledColumn, ConvertedColumn>();
   for (const column of settled) {
-    const result = convertColumn(column, rough.unique, rough.medianStepSeconds, table.lines, problems);
+    const result = convertColumn(column, times, table.lines, problems);
     converted.set(column, result);
     if (column.unit.quantity === "waterAmount" && repeatsDailyTotal(column.scan.values, stamps.utc, rough.unique)) {
       problems.add(
@@ -81,13 +85,10 @@ export function seriesFromTable(
   understood.push(...wind.understood);
   questions.push(...wind.questions);
   const steps: ReadingStep[] = [];
-  const channels: Map<ChannelName, RowChannel> = channelsFromColumns(
-    settled,
-    converted,
-    answers,
-    rough.medianStepSeconds,
-    { steps, understood },
-  );
+  const channels: Map<ChannelName, RowChannel> = channelsFromColumns(settled, converted, answers, times, {
+    steps,
+    understood,
+  });
   sayWhatIsMissing(table, channels, problems);
   const columns = describeColumns(chosen.columns, settled, table);
   return assembleSeries({

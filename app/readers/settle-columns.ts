@@ -1,5 +1,5 @@
 import { CHANNEL_LIMITS } from "./channel-limits";
-import { CHANNEL_QUANTITIES, unitById, unitsFor, type FileUnit } from "./file-units";
+import { CHANNEL_QUANTITIES, isPerInterval, unitById, unitsFor, type FileUnit } from "./file-units";
 import { SENTINELS } from "./missing-codes";
 import { hasHeatSense, isValueRole, statesHeatSense, type ColumnProposal, type ValueRole } from "./propose-columns";
 import type { ProblemList } from "./problem-list";
@@ -141,8 +141,7 @@ function sentinelsOf(
   const limits = CHANNEL_LIMITS[channelOfRole(role)];
   const component = role === "windU" || role === "windV";
   const low = component ? -limits.high : limits.low;
-  const perInterval =
-    unit.quantity === "waterAmount" || unit.quantity === "energyPerInterval" || unit.quantity === "waterCounter";
+  const perInterval = isPerInterval(unit);
   const found = new Map<number, number>();
   let next = 0;
   for (const value of scan.values) {

@@ -22,6 +22,8 @@ export interface KnownColumn {
   role: ColumnReading["role"];
   unit: string | null;
   missingCodes: string[];
+  /** Codes for rain too little to measure. */
+  traceCodes?: string[];
   note?: string;
 }
 
