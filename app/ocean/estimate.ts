@@ -1,6 +1,7 @@
 import { CAUTION } from "./caution";
 import { withBands } from "./ensemble/run-ensemble";
 import { OceanError } from "./errors";
+import { fitContext } from "./fit/fit-context";
 import { fitNotes } from "./fit/fit-notes";
 import { recommendModel } from "./fit/recommend-model";
 import { headlineOf } from "./headline/headline";
@@ -34,13 +35,15 @@ export function estimate(scenario: Scenario): Response {
   if (problems.length > 0) throw new ScenarioInvalid(problems);
   const run = refusing(() => runModel(scenario));
   const series = responseSeries(scenario, run);
-  const notes = fitNotes(run);
+  const fit = fitContext(scenario, run);
+  const { model: recommendedModel, reason: recommendation } = recommendModel(fit);
   return {
     headline: refusing(() => withBands(scenario, headlineOf(scenario, run, series))),
     series,
     ...(run.column && { column: responseColumn(scenario, run.column) }),
-    fitNotes: notes,
-    ...recommendModel(run),
+    fitNotes: fitNotes(fit),
+    recommendedModel,
+    recommendation,
     method: describeMethod(run.method, scenario.method ?? {}),
     budgets: { heat: run.layer.heat, salt: run.layer.salt, momentum: run.motion.momentum },
     inputs: inputHash(scenario),

@@ -61,6 +61,14 @@ export interface HeatSeries {
   latent?: number[];
 }
 
+/** Of a tropical cyclone that passes; the fit notes look at it, no number of the response does. */
+export interface ScenarioCyclone {
+  /** Distance from the centre to the strongest wind, m. */
+  radiusOfMaximumWind: number;
+  /** Speed at which the centre moves over the sea, m/s. */
+  translationSpeed: number;
+}
+
 export interface ScenarioStorm {
   /** ISO 8601 UTC strings, or seconds from any origin; strictly increasing, steps may differ. */
   time: (string | number)[];
@@ -75,6 +83,8 @@ export interface ScenarioStorm {
   /** mm/h */
   evaporation?: number[];
   heat?: HeatSeries;
+  /** Where the storm is a tropical cyclone. */
+  cyclone?: ScenarioCyclone;
 }
 
 export type ModelId = "budget" | "slab" | "column" | "coastal";

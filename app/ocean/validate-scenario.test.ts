@@ -87,6 +87,21 @@ describe("validateScenario", () => {
       withStorm({ heat: { net: [0, 0, 0, 0, 0, 0, 0], latent: [0, 0, 0, 0, 0, 0, 0] } }),
       "storm.heat INVALID_INPUT",
     ],
+    [
+      "a cyclone without its speed",
+      withStorm({ cyclone: { radiusOfMaximumWind: 40_000 } }),
+      "storm.cyclone.translationSpeed INVALID_INPUT",
+    ],
+    [
+      "a cyclone measured in kilometres",
+      withStorm({ cyclone: { radiusOfMaximumWind: 40, translationSpeed: 5 } }),
+      "storm.cyclone.radiusOfMaximumWind INVALID_INPUT",
+    ],
+    [
+      "a misspelt cyclone",
+      withStorm({ cyclone: { radiusOfMaximumWind: 40_000, translationSpeed: 5, speed: 5 } }),
+      "storm.cyclone INVALID_INPUT",
+    ],
     ["a misspelt heat", withStorm({ heat: { shortwav: [0] } }), "storm.heat INVALID_INPUT"],
     ["no layer depth", { ...plain, water: { temperature: 18, salinity: 35 } }, "water.layerDepth INVALID_INPUT"],
     [

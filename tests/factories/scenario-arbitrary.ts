@@ -47,6 +47,9 @@ export function scenarioArbitrary(models: readonly ModelId[]): fc.Arbitrary<Scen
           windFrom: series(0, 360),
           windHeight: number(2, 60),
           rain: fc.option(series(0, 100), { nil: undefined }),
+          cyclone: fc.option(fc.record({ radiusOfMaximumWind: number(1000, 1e6), translationSpeed: number(0, 50) }), {
+            nil: undefined,
+          }),
           heat: fc.option(
             fc.oneof(
               fc.record({ net: series(-800, 800) }),
@@ -57,10 +60,10 @@ export function scenarioArbitrary(models: readonly ModelId[]): fc.Arbitrary<Scen
             },
           ),
         })
-        .map(({ steps, rain, heat, ...storm }) => {
+        .map(({ steps, rain, heat, cyclone, ...storm }) => {
           let seconds = 0;
           const time = [0, ...steps.map((step) => (seconds += step))];
-          return { time, ...storm, ...(rain && { rain }), ...(heat && { heat }) };
+          return { time, ...storm, ...(rain && { rain }), ...(heat && { heat }), ...(cyclone && { cyclone }) };
         }),
       method: fc.record({
         model: fc.constantFrom(...models),

@@ -1,5 +1,7 @@
 import { bulkRichardson } from "~/ocean/fit/bulk-richardson";
-import { rossbyNumber, rossbyRadius, stormSpeedNumber } from "~/ocean/fit/regime-numbers";
+import { rossbyNumber } from "~/ocean/fit/rossby-number";
+import { rossbyRadius } from "~/ocean/fit/rossby-radius";
+import { stormSpeedNumber } from "~/ocean/fit/storm-speed-number";
 import { internalWaveSpeed } from "~/ocean/fit/two-layer-speed";
 import { latinHypercube } from "~/ocean/statistics/latin-hypercube";
 import { morrisEffects } from "~/ocean/statistics/morris";

@@ -1,7 +1,7 @@
 import type { Position } from "../scenario";
 
 /** Metres in a degree of latitude, mean Earth radius 6371008.8 m (IUGG). */
-const METRES_PER_DEGREE = (Math.PI / 180) * 6371008.8;
+export const METRES_PER_DEGREE = (Math.PI / 180) * 6371008.8;
 
 /** The ring with longitudes that never jump, so that a box across the antimeridian stays in one piece. */
 function unwrapped(ring: readonly Position[]): Position[] {

@@ -1,26 +1,28 @@
 import { EQUATORIAL_LIMIT } from "../guards";
-import { atMost, CONVENTION, type Indicator } from "./fit-context";
+import { CONVENTION, hours, kilometres, type Indicator } from "./fit-context";
+import { rossbyNumber } from "./rossby-number";
 
 const SMALL = 0.1;
 const LARGE = 0.5;
 
-/** Where the drift crosses the box quickly, water from outside matters. */
+/**
+ * Where the drift crosses the box quickly, water from outside matters. The estimate is that of the water, not of the
+ * place, so a small box asks for care but does not forbid it.
+ */
 export const boxRossby: Indicator = ({ place, peakDrift }) => {
   if (place.size === null || Math.abs(place.latitude) < EQUATORIAL_LIMIT) return null;
-  const value = peakDrift / (Math.abs(place.f) * place.size);
-  const severity = atMost(value, SMALL, LARGE);
-  const numbers = `Drift of ${peakDrift.toFixed(2)} m/s in a box ${(place.size / 1000).toFixed(1)} km wide gives a Rossby number of ${value.toFixed(2)}`;
-  const message =
-    severity === "ok"
-      ? `${numbers}: exchange with outside is small.`
-      : `${numbers}: water from outside the box matters to what is found in it.`;
-  return {
-    code: "BOX_ROSSBY_NUMBER",
-    // The estimate is that of the water, not of the place, so a small box asks for care but does not forbid it.
-    severity: severity === "doNotUse" ? "caution" : severity,
-    message,
-    value,
-    threshold: severity === "doNotUse" ? LARGE : SMALL,
-    source: CONVENTION,
-  };
+  const value = rossbyNumber(peakDrift, place.size, place.latitude);
+  const note = { code: "BOX_ROSSBY_NUMBER", value, source: CONVENTION };
+  const numbers = `Rossby number ${value.toFixed(2)}`;
+  if (value <= SMALL) {
+    const message = `The drift is slow for a box of ${kilometres(place.size)} (${numbers}): little water comes from outside.`;
+    return { ...note, severity: "ok", message, threshold: SMALL };
+  }
+  const crossing = `At its fastest the drift crosses the box of ${kilometres(place.size)} in ${hours(place.size / peakDrift)} (${numbers})`;
+  if (value <= LARGE) {
+    const message = `${crossing}, so some of the water found there comes from outside. Read the response as that of the drifting water.`;
+    return { ...note, severity: "caution", message, threshold: SMALL };
+  }
+  const message = `${crossing}, so water from outside decides what is found there. Draw a box as wide as the drift goes, or read the response as that of the drifting water.`;
+  return { ...note, severity: "caution", message, threshold: LARGE };
 };

@@ -1,5 +1,6 @@
 import { EQUATORIAL_LIMIT } from "../guards";
-import { CONVENTION, type Indicator } from "./fit-context";
+import { CONVENTION, kilometres, type Indicator } from "./fit-context";
+import { rossbyRadius } from "./rossby-radius";
 
 const OPEN = 3;
 const COASTAL = 1;
@@ -9,28 +10,28 @@ const USUAL_SPEED = 1;
 /** Within an internal Rossby radius of the shore water wells up or sinks, and an open-sea drift does not hold. */
 export const coastDistance: Indicator = ({ place, internalSpeed, method }) => {
   if (place.distanceToShore === null || Math.abs(place.latitude) < EQUATORIAL_LIMIT) return null;
-  const radius = (internalSpeed ?? USUAL_SPEED) / Math.abs(place.f);
+  const radius = rossbyRadius(internalSpeed ?? USUAL_SPEED, place.latitude);
   const value = place.distanceToShore / radius;
-  const reckoned = internalSpeed === null ? " (reckoned with 1 m/s, as the water beneath is not known)" : "";
-  const distances = `The shore is ${(place.distanceToShore / 1000).toFixed(1)} km away, the internal Rossby radius ${(radius / 1000).toFixed(1)} km${reckoned}`;
+  const reckoned = internalSpeed === null ? ", reckoned with internal waves of 1 m/s" : "";
+  const distance = `The shore is ${kilometres(place.distanceToShore)} away`;
+  const radii = `internal Rossby radius (${kilometres(radius)}${reckoned})`;
   const note = {
     code: "COAST_DISTANCE",
     value,
     source: `internal Rossby radius (common practice); thresholds ${CONVENTION}`,
   };
-  if (value > OPEN) return { ...note, severity: "ok", message: `${distances}: open water.`, threshold: OPEN };
+  if (value > OPEN) {
+    const message = `${distance}, more than three times the ${radii}: open water for the drift.`;
+    return { ...note, severity: "ok", message, threshold: OPEN };
+  }
   if (value >= COASTAL) {
-    return {
-      ...note,
-      severity: "caution",
-      message: `${distances}: the shore begins to steer the drift.`,
-      threshold: OPEN,
-    };
+    const message = `${distance}, less than three times the ${radii}, so it begins to steer the drift. Read the transport towards and away from the shore with care.`;
+    return { ...note, severity: "caution", message, threshold: OPEN };
   }
   if (method.model === "coastal") {
-    const message = `${distances}: coastal water, and this model lets nothing through the shore; upwelling beneath is not modelled.`;
+    const message = `${distance}, within one ${radii}: model coastal lets nothing through the shore but leaves out water that wells up or sinks beside it. Expect other temperatures and salinities close to the shore.`;
     return { ...note, severity: "caution", message, threshold: COASTAL };
   }
-  const message = `${distances}: upwelling or sinking at the shore and alongshore pressure rule here; use model coastal.`;
+  const message = `${distance}, within one ${radii}, where the shore steers the drift and water wells up or sinks beside it. Use model coastal; it needs the water depth and the shore normal.`;
   return { ...note, severity: "doNotUse", message, threshold: COASTAL };
 };

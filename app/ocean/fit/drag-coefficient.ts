@@ -7,14 +7,13 @@ const HIGH = 2.5e-3;
 export const dragCoefficient: Indicator = ({ method }) => {
   if (method.dragLaw !== "constant") return null;
   const value = method.dragCoefficient;
-  const severity = value > HIGH ? "caution" : "ok";
-  const message =
-    severity === "ok"
-      ? `A constant drag coefficient of ${value}: good for an order of magnitude.`
-      : `A constant drag coefficient of ${value} is high; textbooks use up to 3e-3 for orders of magnitude only.`;
+  const high = value > HIGH;
+  const message = high
+    ? `A constant drag coefficient of ${value} is high and suits an order of magnitude only. Choose a drag law that follows the wind for anything finer.`
+    : `A constant drag coefficient of ${value} suits an order of magnitude.`;
   return {
     code: "DRAG_COEFFICIENT",
-    severity,
+    severity: high ? "caution" : "ok",
     message,
     value,
     threshold: HIGH,

@@ -1,4 +1,4 @@
-import { CONVENTION, type Indicator } from "./fit-context";
+import { CONVENTION, hours, type Indicator } from "./fit-context";
 
 const STEADY = 2;
 const IMPULSIVE = 0.25;
@@ -8,16 +8,19 @@ export const duration: Indicator = ({ duration: seconds, inertialPeriod, method 
   if (inertialPeriod === null) return null;
   const value = seconds / inertialPeriod;
   const steady = method.model === "budget" || method.model === "coastal";
-  const lengths = `The storm lasts ${(seconds / 3600).toFixed(1)} h, ${value.toFixed(2)} inertial periods of ${(inertialPeriod / 3600).toFixed(1)} h`;
+  const lengths = `The storm lasts ${hours(seconds)}, ${value.toFixed(2)} inertial periods of ${hours(inertialPeriod)}`;
   const note = { code: "DURATION", value, source: CONVENTION };
-  if (value >= STEADY)
+  if (value >= STEADY) {
     return { ...note, severity: "ok", message: `${lengths}: long enough for the drift to settle.`, threshold: STEADY };
+  }
   if (value >= IMPULSIVE) {
     const message = steady
-      ? `${lengths}: too short for a steady drift; model slab follows the inertial motion.`
-      : `${lengths}: inertial motion carries much of the drift, and this model follows it.`;
+      ? `${lengths}, too short for the steady drift that this model takes. Use model slab or column, which follow the motion from rest.`
+      : `${lengths}: too short for a steady drift, but this model follows the motion from rest.`;
     return { ...note, severity: steady ? "caution" : "ok", message, threshold: STEADY };
   }
-  const message = `${lengths}: an impulse; the current grows with the stress and has hardly begun to turn.`;
+  const message = steady
+    ? `${lengths}, so it gives the water only a push and no steady drift can form. Use model slab or column, which follow the motion from rest.`
+    : `${lengths}, so it gives the water only a push and most of the motion comes after it. Extend the record beyond the storm to see how far the water goes.`;
   return { ...note, severity: steady ? "doNotUse" : "caution", message, threshold: IMPULSIVE };
 };

@@ -1,23 +1,21 @@
 import { EQUATORIAL_LIMIT, EQUATORIAL_MARGIN } from "../guards";
-import { atLeast, CONVENTION, type Indicator } from "./fit-context";
+import { CONVENTION, type Indicator } from "./fit-context";
 
-/** Near the equator f goes to zero, and with it every balance that divides by it. */
-export const equatorial: Indicator = ({ place, method }) => {
+/**
+ * Near the equator f goes to zero, and with it every balance that divides by it. The steady balance of deep water is
+ * refused there by validation; what is left computes, but turns hardly at all.
+ */
+export const equatorial: Indicator = ({ place }) => {
   const value = Math.abs(place.latitude);
-  const steady = method.model === "budget" && method.ekman === "deep";
-  const judged = atLeast(value, EQUATORIAL_MARGIN, EQUATORIAL_LIMIT);
-  const severity = judged === "doNotUse" && !steady ? "caution" : judged;
-  const distance = `The box lies ${value.toFixed(1)}° from the equator`;
-  const message =
-    severity === "ok"
-      ? `${distance}: the Earth's rotation is strong enough for every balance used.`
-      : `${distance}: within ${EQUATORIAL_MARGIN}° drift turns slowly and directions are less certain; within ${EQUATORIAL_LIMIT}° there is no steady Ekman drift.`;
-  return {
-    code: severity === "ok" ? "LATITUDE" : "EQUATORIAL_MARGINAL",
-    severity,
-    message,
-    value,
-    threshold: EQUATORIAL_MARGIN,
-    source: CONVENTION,
-  };
+  const note = { value, source: CONVENTION };
+  if (value >= EQUATORIAL_MARGIN) {
+    const message = `The box lies ${value.toFixed(1)}° from the equator, where the Earth's rotation is strong enough for every balance used here.`;
+    return { ...note, code: "LATITUDE", severity: "ok", message, threshold: EQUATORIAL_MARGIN };
+  }
+  if (value >= EQUATORIAL_LIMIT) {
+    const message = `The box lies ${value.toFixed(1)}° from the equator, where drift turns slowly and its direction is uncertain. Take directions and net displacement as indications.`;
+    return { ...note, code: "EQUATORIAL_MARGINAL", severity: "caution", message, threshold: EQUATORIAL_MARGIN };
+  }
+  const message = `The box lies ${value.toFixed(1)}° from the equator, where there is no steady Ekman drift and water hardly turns from the wind. Use the speed of the drift, not its direction or its transport.`;
+  return { ...note, code: "EQUATORIAL", severity: "caution", message, threshold: EQUATORIAL_LIMIT };
 };

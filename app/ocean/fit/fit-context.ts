@@ -3,11 +3,13 @@ import { ekmanDepth } from "../ekman/spiral";
 import { EQUATORIAL_LIMIT } from "../guards";
 import type { ModelRun } from "../models/run-model";
 import type { FitNote, FitSeverity } from "../response";
+import type { Scenario } from "../scenario";
 import { potentialDensityOf } from "../seawater/density";
 import { internalWaveSpeed } from "./two-layer-speed";
 
 /** What the indicators look at. */
 export interface FitContext extends ModelRun {
+  scenario: Scenario;
   /** s */
   duration: number;
   /** s; null at the equator */
@@ -27,7 +29,7 @@ export interface FitContext extends ModelRun {
 /** One test of whether the method fits; null where it does not apply or cannot be judged. */
 export type Indicator = (context: FitContext) => FitNote | null;
 
-export function fitContext(run: ModelRun): FitContext {
+export function fitContext(scenario: Scenario, run: ModelRun): FitContext {
   const { place, forcing, motion, water, method } = run;
   const densityStep =
     water.below && potentialDensityOf(water.below.SA, water.below.CT) - potentialDensityOf(water.SA, water.CT);
@@ -36,6 +38,7 @@ export function fitContext(run: ModelRun): FitContext {
   const under = place.waterDepth === null ? Number.POSITIVE_INFINITY : place.waterDepth - water.layerDepth;
   return {
     ...run,
+    scenario,
     duration: forcing.seconds[forcing.seconds.length - 1],
     inertialPeriod: inertialPeriod(place.f),
     ekmanDepth: Math.abs(place.latitude) < EQUATORIAL_LIMIT ? null : ekmanDepth(method.eddyViscosity, place.f),
@@ -62,3 +65,13 @@ export function atMost(value: number, good: number, bad: number): FitSeverity {
 }
 
 export const CONVENTION = "convention of this engine";
+
+/** Metres as kilometres for a message. */
+export function kilometres(metres: number): string {
+  return `${(metres / 1000).toFixed(1)} km`;
+}
+
+/** Seconds as hours for a message. */
+export function hours(seconds: number): string {
+  return `${(seconds / 3600).toFixed(1)} h`;
+}

@@ -12,11 +12,11 @@ export const layerRichardson: Indicator = ({ densityStep, water, peakDrift, meth
   if (densityStep === null || densityStep <= 0 || peakDrift < STILL || method.model === "column") return null;
   const value = bulkRichardson(densityStep, water.layerDepth, peakDrift, method.waterDensity, method.gravity);
   const severity = atLeast(value, STABLE, MIXING);
-  const numbers = `A density step of ${densityStep.toFixed(2)} kg/m³ under ${water.layerDepth.toFixed(0)} m moving at ${peakDrift.toFixed(2)} m/s gives a bulk Richardson number of ${value.toFixed(2)}`;
+  const layer = `The layer of ${water.layerDepth.toFixed(0)} m moves at ${peakDrift.toFixed(2)} m/s over water ${densityStep.toFixed(2)} kg/m³ denser (bulk Richardson number ${value.toFixed(2)})`;
   const message =
     severity === "ok"
-      ? `${numbers}: the layer keeps its depth.`
-      : `${numbers}: the layer ${severity === "caution" ? "entrains" : "mixes strongly with"} the water beneath, which a fixed layer leaves out; use model column.`;
+      ? `${layer}: it keeps its depth.`
+      : `${layer}, so it ${severity === "caution" ? "takes up" : "mixes strongly with"} water from beneath, which a layer of fixed depth leaves out. Use model column.`;
   return {
     code: "LAYER_RICHARDSON",
     severity,

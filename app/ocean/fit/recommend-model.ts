@@ -1,61 +1,91 @@
 import { EQUATORIAL_LIMIT } from "../guards";
-import type { ModelRun } from "../models/run-model";
+import type { FitNote } from "../response";
 import type { ModelId } from "../scenario";
-import { fitContext, type FitContext } from "./fit-context";
-import { layerRichardson } from "./layer-richardson";
 import { coastDistance } from "./coast-distance";
+import { CONVENTION, type FitContext } from "./fit-context";
+import { layerRichardson } from "./layer-richardson";
+import { layerStability } from "./layer-stability";
+import { stressSteadiness } from "./stress-steadiness";
+import { waterDepth } from "./water-depth";
 
 /** Share of the stress's size that must survive in its vector mean for the wind to count as steady. Convention of this engine. */
 const STEADY_SHARE = 0.9;
+/** Inertial periods in which a drift settles. Convention of this engine. */
+const SETTLED = 2;
 
-/** The model that suits the case best, and why, in a sentence. */
-export function recommendModel(run: ModelRun): { recommendedModel: ModelId; recommendation: string } {
-  const context = fitContext(run);
-  const coast = coastDistance({ ...context, method: { ...context.method, model: "slab" } });
-  if (coast?.severity === "doNotUse" && context.place.waterDepth !== null && context.place.shoreNormal !== null) {
-    return because(
-      "coastal",
-      "The box lies within an internal Rossby radius of the shore, where nothing can pass through the coast.",
-    );
+type Decided = Pick<FitNote, "value" | "threshold" | "source">;
+
+/** A model, why in a sentence, and the number that decided. */
+export interface ModelAdvice extends Decided {
+  model: ModelId;
+  reason: string;
+  /** Models that follow all that this one follows, and more. */
+  alsoFit: readonly ModelId[];
+}
+
+/** The model that suits the case best, whichever was chosen. */
+export function recommendModel(context: FitContext): ModelAdvice {
+  return coastalAdvice(context) ?? columnAdvice(context) ?? fixedLayerAdvice(context);
+}
+
+/** A fixed layer in the open: the model that leaves most out, and so meets every objection there is. */
+function asSlab(context: FitContext): FitContext {
+  return { ...context, method: { ...context.method, model: "slab" } };
+}
+
+function coastalAdvice(context: FitContext): ModelAdvice | null {
+  const note = coastDistance(asSlab(context));
+  if (note?.severity !== "doNotUse" || context.place.waterDepth === null || context.place.shoreNormal === null) {
+    return null;
   }
-  const entrainment = layerRichardson({ ...context, method: { ...context.method, model: "slab" } });
-  if (context.water.profile && entrainment && entrainment.severity !== "ok") {
-    return because(
+  const reason =
+    "The box lies within an internal Rossby radius of the shore, where nothing can pass through the coast.";
+  return advice("coastal", reason, note);
+}
+
+function columnAdvice(context: FitContext): ModelAdvice | null {
+  if (!context.water.profile) return null;
+  const slab = asSlab(context);
+  const unstable = layerStability(slab);
+  if (unstable) {
+    return advice(
       "column",
-      "The layer moves fast enough to mix with the water beneath, which only the column model follows.",
+      "The layer is no lighter than the water beneath, and only the column lets it sink.",
+      unstable,
     );
   }
-  if (Math.abs(context.place.latitude) < EQUATORIAL_LIMIT) {
-    return because("slab", "Near the equator there is no steady Ekman drift; the slab needs none.");
-  }
-  if (
-    context.inertialPeriod !== null &&
-    context.duration >= 2 * context.inertialPeriod &&
-    steadiness(context) >= STEADY_SHARE
-  ) {
-    return because(
-      "budget",
-      "The wind stays steady for more than two inertial periods, so the drift settles to the Ekman balance.",
-    );
-  }
-  return because(
-    "slab",
-    "The wind changes within a few inertial periods, so inertial motion carries a good share of the drift.",
-  );
+  const entraining = layerRichardson(slab);
+  if (!entraining || entraining.severity === "ok") return null;
+  const reason = "The layer moves fast enough to mix with the water beneath, which only the column follows.";
+  return advice("column", reason, entraining);
 }
 
-function because(recommendedModel: ModelId, recommendation: string) {
-  return { recommendedModel, recommendation };
+function fixedLayerAdvice(context: FitContext): ModelAdvice {
+  const { place, duration, inertialPeriod, stress } = context;
+  if (inertialPeriod === null || Math.abs(place.latitude) < EQUATORIAL_LIMIT) {
+    const decided = { value: Math.abs(place.latitude), threshold: EQUATORIAL_LIMIT, source: CONVENTION };
+    const reason = "Near the equator there is no steady Ekman drift; the slab needs none.";
+    return advice("slab", reason, decided, ["column"]);
+  }
+  const periods = duration / inertialPeriod;
+  const length = { value: periods, threshold: SETTLED, source: CONVENTION };
+  if (periods < SETTLED) {
+    const reason = `The storm lasts only ${periods.toFixed(1)} inertial periods, so inertial motion carries a good share of the drift.`;
+    return advice("slab", reason, length, ["column"]);
+  }
+  const share = stressSteadiness(stress);
+  if (share < STEADY_SHARE) {
+    const decided = { value: share, threshold: STEADY_SHARE, source: CONVENTION };
+    const reason = "The wind changes as it blows, so inertial motion carries a good share of the drift.";
+    return advice("slab", reason, decided, ["column"]);
+  }
+  const steady = `The wind holds steady for ${periods.toFixed(1)} inertial periods, so the drift settles to the Ekman balance`;
+  const shallow = waterDepth(asSlab(context))?.severity;
+  if (shallow === undefined || shallow === "ok") return advice("budget", `${steady}.`, length, ["slab", "column"]);
+  return advice("budget", `${steady}, here that of finite depth, as the bed is felt.`, length, ["column"]);
 }
 
-/** Size of the mean stress over the mean of its sizes, 0…1; 0 in calm. */
-function steadiness({ stress }: FitContext): number {
-  let [x, y, size] = [0, 0, 0];
-  for (let step = 0; step + 1 < stress.seconds.length; step++) {
-    const dt = stress.seconds[step + 1] - stress.seconds[step];
-    x += stress.x[step] * dt;
-    y += stress.y[step] * dt;
-    size += Math.hypot(stress.x[step], stress.y[step]) * dt;
-  }
-  return size === 0 ? 0 : Math.hypot(x, y) / size;
+function advice(model: ModelId, reason: string, decided: Decided, alsoFit: readonly ModelId[] = []): ModelAdvice {
+  const { value, threshold, source } = decided;
+  return { model, reason, value, threshold, source, alsoFit };
 }

@@ -1,5 +1,5 @@
 import { LONGEST_GAP } from "../constants";
-import { CONVENTION, type Indicator } from "./fit-context";
+import { CONVENTION, hours, type Indicator } from "./fit-context";
 
 const CLOSE = 3600;
 
@@ -8,11 +8,10 @@ export const samplingGap: Indicator = ({ forcing }) => {
   let longest = 0;
   for (let k = 1; k < forcing.seconds.length; k++)
     longest = Math.max(longest, forcing.seconds[k] - forcing.seconds[k - 1]);
-  const value = longest / 3600;
-  const severity = longest <= CLOSE ? "ok" : "caution";
-  const message =
-    severity === "ok"
-      ? `Samples are at most ${value.toFixed(2)} h apart.`
-      : `Samples are up to ${value.toFixed(1)} h apart; a peak between them is missed, and gaps over ${LONGEST_GAP / 3600} h are refused.`;
-  return { code: "SAMPLING", severity, message, value, threshold: CLOSE / 3600, source: CONVENTION };
+  const note = { code: "SAMPLING", value: longest / 3600, threshold: CLOSE / 3600, source: CONVENTION };
+  if (longest <= CLOSE) {
+    return { ...note, severity: "ok", message: `Samples are at most ${(longest / 3600).toFixed(2)} h apart.` };
+  }
+  const message = `Samples are up to ${hours(longest)} apart, so a peak between them is missed. Use a record sampled at least every hour if there is one; gaps over ${LONGEST_GAP / 3600} h are refused.`;
+  return { ...note, severity: "caution", message };
 };

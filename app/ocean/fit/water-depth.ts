@@ -7,25 +7,23 @@ const FRICTIONAL = 0.5;
 export const waterDepth: Indicator = ({ place, ekmanDepth, method }) => {
   if (place.waterDepth === null || ekmanDepth === null) return null;
   const value = place.waterDepth / ekmanDepth;
-  const aware = method.model === "coastal" || method.model === "column" || method.ekman === "finiteDepth";
-  const depths = `Water depth ${place.waterDepth.toFixed(0)} m against an Ekman depth of ${ekmanDepth.toFixed(0)} m`;
-  const source = "Ekman (1905), finite depth; computed here";
+  const { model, ekman } = method;
+  const aware = model === "coastal" || model === "column" || (model === "budget" && ekman === "finiteDepth");
+  const depths = `The water is ${place.waterDepth.toFixed(0)} m deep, ${value.toFixed(2)} times the Ekman depth of ${ekmanDepth.toFixed(0)} m`;
+  const note = { code: "WATER_DEPTH", value, source: "Ekman (1905), finite depth; computed here" };
   if (value >= DEEP) {
-    return {
-      code: "WATER_DEPTH",
-      severity: "ok",
-      message: `${depths}: deep water for the drift.`,
-      value,
-      threshold: DEEP,
-      source,
-    };
+    const message = `${depths}: deep enough that the bed does not slow the drift.`;
+    return { ...note, severity: "ok", message, threshold: DEEP };
   }
-  if (value >= FRICTIONAL || aware) {
-    const message = aware
-      ? `${depths}: the bed is felt, and this method reckons with it.`
-      : `${depths}: the bed is felt; a finite-depth drift would turn and carry differently.`;
-    return { code: "WATER_DEPTH", severity: aware ? "ok" : "caution", message, value, threshold: DEEP, source };
+  if (aware) {
+    const message = `${depths}, so the bed slows and turns the drift; the chosen method reckons with it.`;
+    return { ...note, severity: "ok", message, threshold: value < FRICTIONAL ? FRICTIONAL : DEEP };
   }
-  const message = `${depths}: bed friction rules and the drift follows the wind; use a finite-depth or coastal method.`;
-  return { code: "WATER_DEPTH", severity: "doNotUse", message, value, threshold: FRICTIONAL, source };
+  const remedy = "Use model budget with the Ekman balance of finite depth, or model coastal.";
+  if (value >= FRICTIONAL) {
+    const message = `${depths}, so the bed slows and turns the drift, which the chosen method leaves out. ${remedy}`;
+    return { ...note, severity: "caution", message, threshold: DEEP };
+  }
+  const message = `${depths}, so friction on the bed rules and the drift runs nearly along the wind, which the chosen method leaves out. ${remedy}`;
+  return { ...note, severity: "doNotUse", message, threshold: FRICTIONAL };
 };

@@ -59,6 +59,12 @@ export const stormSchema = z.object({
   heat: z
     .strictObject({ net: heatFlux, shortwave: heatFlux, longwave: heatFlux, sensible: heatFlux, latent: heatFlux })
     .optional(),
+  cyclone: z
+    .strictObject({
+      radiusOfMaximumWind: numberWithin(1000, 1_000_000, "m"),
+      translationSpeed: numberWithin(0, 50, "m/s"),
+    })
+    .optional(),
 });
 
 /** Strict: a misspelt key would otherwise fall back on a default without a word. */
