@@ -1,6 +1,7 @@
 import { requireFinite, requireLatitude, requireNotNegative, requirePositive } from "../guards";
 import { latentHeatOfVaporisation } from "../heat/evaporation";
 import { rainHeatLoss } from "../heat/rain-heat";
+import { power } from "../power";
 import { charnock } from "../stress/laws/coare35";
 import { saturationVapourPressure, seaSurfaceHumidity } from "./humidity";
 
@@ -87,15 +88,15 @@ export function coare35Fluxes(input: Coare35Input): Coare35Fluxes {
   const q = (0.62197 * e) / (p - 0.378 * e);
   const Lv = latentHeatOfVaporisation(ts);
   const rhoAir = (p * 100) / (GAS * kelvin * (1 + 0.61 * q));
-  const viscosity = 1.326e-5 * (1 + 6.542e-3 * ta + 8.301e-6 * ta * ta - 4.84e-9 * ta ** 3);
+  const viscosity = 1.326e-5 * (1 + 6.542e-3 * ta + 8.301e-6 * ta * ta - 4.84e-9 * power(ta, 3));
   const g = localGravity(input.latitude);
 
-  const expansion = 2.1e-5 * Math.max(0, ts + 3.2) ** 0.79;
+  const expansion = 2.1e-5 * power(Math.max(0, ts + 3.2), 0.79);
   const skinScale =
-    (16 * g * WATER_HEAT * (WATER_DENSITY * WATER_VISCOSITY) ** 3) / (WATER_CONDUCTIVITY ** 2 * rhoAir ** 2);
+    (16 * g * WATER_HEAT * power(WATER_DENSITY * WATER_VISCOSITY, 3)) / (WATER_CONDUCTIVITY ** 2 * rhoAir ** 2);
   const wet = (0.622 * Lv * qs) / (GAS * (ts + KELVIN) ** 2);
   const netShortwave = ABSORBED * input.shortwaveDown;
-  const netLongwaveLoss = (skin: number) => EMISSIVITY * (SIGMA * (ts - skin + KELVIN) ** 4 - input.longwaveDown);
+  const netLongwaveLoss = (skin: number) => EMISSIVITY * (SIGMA * power(ts - skin + KELVIN, 4) - input.longwaveDown);
 
   let skin = withSkin ? 0.3 : 0;
   let longwaveLoss = netLongwaveLoss(0.3);
@@ -110,7 +111,7 @@ export function coare35Fluxes(input: Coare35Input): Coare35Fluxes {
   const cd = (KAPPA / Math.log(z / zo10)) ** 2;
   const ct = KAPPA / Math.log(z / zot10);
   const CC = (KAPPA * ct) / cd;
-  const ribCritical = -z / (zi * 0.004 * BETA ** 3);
+  const ribCritical = -z / (zi * 0.004 * power(BETA, 3));
   const rib = ((-g * z) / kelvin) * ((dt - skin + 0.61 * kelvin * dq) / gusty ** 2);
   const zetaFirst = rib >= 0 ? CC * rib * (1 + ((27 / 9) * rib) / CC) : (CC * rib) / (1 + rib / ribCritical);
   let L = z / zetaFirst;
@@ -127,12 +128,12 @@ export function coare35Fluxes(input: Coare35Input): Coare35Fluxes {
     L = z / zet;
     const zo = (charn * ustar * ustar) / g + (0.11 * viscosity) / ustar;
     const roughnessNumber = (zo * ustar) / viscosity;
-    const zoq = Math.min(1.6e-4, 5.8e-5 / roughnessNumber ** 0.72);
+    const zoq = Math.min(1.6e-4, 5.8e-5 / power(roughnessNumber, 0.72));
     ustar = (gusty * KAPPA) / (Math.log(z / zo) - psiMomentum26(zet));
     qstar = (-(dq - wet * skin) * KAPPA) / (Math.log(z / zoq) - psiHeat(zet));
     tstar = (-(dt - skin) * KAPPA) / (Math.log(z / zoq) - psiHeat(zet));
     const buoyancy = (-g / kelvin) * ustar * (tstar + 0.61 * kelvin * qstar);
-    const gust = buoyancy > 0 ? BETA * (buoyancy * zi) ** THIRD_3 : 0.2;
+    const gust = buoyancy > 0 ? BETA * power(buoyancy * zi, THIRD_3) : 0.2;
     gusty = Math.sqrt(u * u + gust * gust);
     gustFactor = gusty / u;
     sensible = -rhoAir * AIR_HEAT * ustar * tstar;
@@ -145,7 +146,8 @@ export function coare35Fluxes(input: Coare35Input): Coare35Fluxes {
       const buoyantCooling = expansion * cooling + (SALT_EXPANSION * latent * WATER_HEAT) / Lv;
       const depthScale = WATER_VISCOSITY / (Math.sqrt(rhoAir / WATER_DENSITY) * ustar);
       if (buoyantCooling > 0) {
-        const xl = 6 / (1 + ((skinScale * buoyantCooling) / ustar ** 4) ** 0.75) ** THIRD_3;
+        const stirred = power((skinScale * buoyantCooling) / power(ustar, 4), 0.75);
+        const xl = 6 / power(1 + stirred, THIRD_3);
         thickness = xl * depthScale;
       } else {
         thickness = Math.min(0.01, 6 * depthScale);
@@ -189,7 +191,8 @@ function requireInput(input: Coare35Input): void {
 function localGravity(latitude: number): number {
   const s2 = Math.sin((latitude * Math.PI) / 180) ** 2;
   return (
-    9.7803267715 * (1 + 0.0052790414 * s2 + 0.0000232718 * s2 ** 2 + 0.0000001262 * s2 ** 3 + 0.0000000007 * s2 ** 4)
+    9.7803267715 *
+    (1 + 0.0052790414 * s2 + 0.0000232718 * s2 ** 2 + 0.0000001262 * power(s2, 3) + 0.0000000007 * power(s2, 4))
   );
 }
 
@@ -207,15 +210,15 @@ function blended(kansas: number, freeConvection: number, zeta: number): number {
 /** Stability function of momentum; first-guess constants. */
 function psiMomentum40(zeta: number): number {
   if (zeta >= 0) return stableMomentum(zeta, 1);
-  const x = (1 - 18 * zeta) ** 0.25;
-  return blended(kansasMomentum(x), convective((1 - 10 * zeta) ** THIRD_4), zeta);
+  const x = power(1 - 18 * zeta, 0.25);
+  return blended(kansasMomentum(x), convective(power(1 - 10 * zeta, THIRD_4)), zeta);
 }
 
 /** Stability function of momentum. */
 function psiMomentum26(zeta: number): number {
   if (zeta >= 0) return stableMomentum(zeta, 0.7);
-  const x = (1 - 15 * zeta) ** 0.25;
-  return blended(kansasMomentum(x), convective((1 - 10.15 * zeta) ** THIRD_4), zeta);
+  const x = power(1 - 15 * zeta, 0.25);
+  return blended(kansasMomentum(x), convective(power(1 - 10.15 * zeta, THIRD_4)), zeta);
 }
 
 function stableMomentum(zeta: number, a: number): number {
@@ -231,8 +234,8 @@ function kansasMomentum(x: number): number {
 function psiHeat(zeta: number): number {
   if (zeta >= 0) {
     const decay = Math.exp(-Math.min(50, 0.35 * zeta));
-    return -((1 + 0.6667 * zeta) ** 1.5 + 0.6667 * (zeta - 14.28) * decay + 8.525);
+    return -(power(1 + 0.6667 * zeta, 1.5) + 0.6667 * (zeta - 14.28) * decay + 8.525);
   }
-  const x = (1 - 15 * zeta) ** 0.5;
-  return blended(2 * Math.log((1 + x) / 2), convective((1 - 34.15 * zeta) ** THIRD_4), zeta);
+  const x = Math.sqrt(1 - 15 * zeta);
+  return blended(2 * Math.log((1 + x) / 2), convective(power(1 - 34.15 * zeta, THIRD_4)), zeta);
 }

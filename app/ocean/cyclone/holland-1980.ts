@@ -1,5 +1,6 @@
 import { requireFinite, requireNotNegative, requirePositive } from "../guards";
 import { coriolis } from "../ekman/coriolis";
+import { power } from "../power";
 
 /** A parametric cyclone. */
 export interface Cyclone {
@@ -35,7 +36,7 @@ export function holland1980(cyclone: Cyclone, r: number): { v: number; p: number
   const { centralPressure, ambientPressure, radiusOfMaximumWind, B, airDensity, latitude } = cyclone;
   if (r === 0) return { v: 0, p: centralPressure };
   const deficit = ambientPressure - centralPressure;
-  const shape = (radiusOfMaximumWind / r) ** B;
+  const shape = power(radiusOfMaximumWind / r, B);
   const decay = Math.exp(-shape);
   const turning = (r * Math.abs(coriolis(latitude))) / 2;
   // Deep in the eye the shape overflows before its decay vanishes; the product is zero there.

@@ -1,4 +1,5 @@
 import { requireFinite, requireLatitude, requireNotNegative, requirePositive } from "../guards";
+import { power } from "../power";
 
 export interface Holland2008Input {
   /** hPa */
@@ -31,7 +32,7 @@ export function holland2008(input: Holland2008Input): { bs: number; vms: number 
     0.01 * dp +
     0.03 * deepeningHpaPerHour -
     0.014 * Math.abs(latitude) +
-    0.15 * translationSpeed ** x +
+    0.15 * power(translationSpeed, x) +
     1;
   const bs = Math.min(2.5, Math.max(0.5, raw));
   return { bs, vms: Math.sqrt((bs * dp * 100) / (airDensity * Math.E)) };

@@ -1,4 +1,5 @@
 import { requireFinite, requireNotNegative, requirePositive } from "../guards";
+import { power } from "../power";
 
 export interface Holland2010Profile {
   /** Greatest surface wind, m/s. */
@@ -27,7 +28,7 @@ export function holland2010({ vms, radiusOfMaximumWind: Rm, bs, xn, rn }: Hollan
   }
   if (r === 0) return 0;
   const x = r <= Rm || rn === null ? 0.5 : 0.5 + ((r - Rm) * (xn - 0.5)) / (rn - Rm);
-  const shape = (Rm / r) ** bs;
+  const shape = power(Rm / r, bs);
   const profile = shape === Number.POSITIVE_INFINITY ? 0 : shape * Math.exp(1 - shape);
-  return vms * profile ** Math.max(0, x);
+  return vms * power(profile, Math.max(0, x));
 }

@@ -11,6 +11,7 @@ import {
   type Complex,
 } from "../complex";
 import { requireFinite } from "../guards";
+import { power } from "../power";
 import {
   ekmanWavenumber,
   finiteDepthBedStress,
@@ -76,7 +77,7 @@ function pressureResponse(setting: FiniteDepthSetting) {
     const lambdaH2 = multiply(scale(lambda, depth), scale(lambda, depth));
     return {
       bedStress: scale(subtract(complex(1), scale(lambdaH2, 1 / 3)), depth),
-      transport: scale(subtract(complex(1), scale(lambdaH2, 2 / 5)), depth ** 3 / (3 * eddyViscosity)),
+      transport: scale(subtract(complex(1), scale(lambdaH2, 2 / 5)), power(depth, 3) / (3 * eddyViscosity)),
       currentAt: (z: number) => complex((depth * depth - z * z) / (2 * eddyViscosity)),
     };
   }

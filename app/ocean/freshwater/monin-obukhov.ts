@@ -1,5 +1,6 @@
 import { VON_KARMAN } from "../constants";
 import { requireFinite, requireNotNegative } from "../guards";
+import { power } from "../power";
 
 /**
  * Monin–Obukhov length in the sea: L = u*³/(κB).
@@ -11,5 +12,5 @@ import { requireFinite, requireNotNegative } from "../guards";
 export function moninObukhovLength(ustar: number, buoyancy: number): number | null {
   requireNotNegative({ ustar });
   requireFinite({ buoyancy });
-  return buoyancy === 0 ? null : ustar ** 3 / (VON_KARMAN * buoyancy);
+  return buoyancy === 0 ? null : power(ustar, 3) / (VON_KARMAN * buoyancy);
 }

@@ -25,7 +25,7 @@ export function stableLayerWindLimit(
   if (buoyancy <= 0) {
     throw new OceanError("INVALID_INPUT", "A wind limit needs a buoyancy flux that stabilises the surface (positive).");
   }
-  const limit = (VON_KARMAN * buoyancy * depth) ** (1 / 3);
+  const limit = Math.cbrt(VON_KARMAN * buoyancy * depth);
   const ustar = (wind: number) => Math.sqrt((airDensity * law(wind)) / waterDensity) * wind;
   let low = 0;
   let high = 80;

@@ -1,6 +1,7 @@
 import { CELSIUS_ZERO, STEFAN_BOLTZMANN } from "../constants";
 import { OceanError } from "../errors";
 import { requireFinite, requireNotNegative } from "../guards";
+import { power } from "../power";
 
 export const LONGWAVE_KINDS = ["berliand", "brunt", "clark"] as const;
 export type LongwaveKind = (typeof LONGWAVE_KINDS)[number];
@@ -35,15 +36,17 @@ export function netLongwaveLoss(input: LongwaveInput): number {
   const sea = seaTemperature + CELSIUS_ZERO;
   const air = airTemperature + CELSIUS_ZERO;
   const clearSky = 0.39 - 0.05 * Math.sqrt(vapourPressure);
-  const F = 1 - cloudCoefficient * cloud ** cloudExponent;
+  const F = 1 - cloudCoefficient * power(cloud, cloudExponent);
   const radiation = emissivity * STEFAN_BOLTZMANN;
   switch (kind) {
     case "berliand":
-      return radiation * air ** 4 * clearSky * F + 4 * radiation * air ** 3 * (sea - air);
+      return radiation * power(air, 4) * clearSky * F + 4 * radiation * power(air, 3) * (sea - air);
     case "brunt":
-      return radiation * sea ** 4 * clearSky * F;
+      return radiation * power(sea, 4) * clearSky * F;
     case "clark":
-      return radiation * sea ** 4 * clearSky * (1 - 0.51 * cloud * cloud) + 4 * radiation * sea ** 3 * (sea - air);
+      return (
+        radiation * power(sea, 4) * clearSky * (1 - 0.51 * cloud * cloud) + 4 * radiation * power(sea, 3) * (sea - air)
+      );
     default:
       throw new OceanError(
         "INVALID_INPUT",

@@ -1,5 +1,6 @@
 import { requireFinite, requireNotNegative, requirePositive } from "../guards";
 import { latentHeatOfVaporisation } from "./evaporation";
+import { power } from "../power";
 
 export interface RainHeatInput {
   /** mm/h */
@@ -46,7 +47,7 @@ export function rainHeatLoss(input: RainHeatInput): number {
   requirePositive({ airDensity });
   const Lv = latentHeatOfVaporisation(ts);
   const kelvin = ta + KELVIN;
-  const vapourDiffusivity = 2.11e-5 * (kelvin / KELVIN) ** 1.94;
+  const vapourDiffusivity = 2.11e-5 * power(kelvin / KELVIN, 1.94);
   const heatDiffusivity = ((1 + 3.309e-3 * ta - 1.44e-6 * ta * ta) * 0.02411) / (airDensity * AIR_HEAT);
   const saturationSlope = (q * Lv) / (GAS * kelvin * kelvin);
   const wetBulbFactor = 1 / (1 + (0.622 * saturationSlope * Lv * vapourDiffusivity) / (AIR_HEAT * heatDiffusivity));

@@ -1,4 +1,5 @@
 import { OceanError } from "../errors";
+import { power } from "../power";
 import { mulberry32 } from "./mulberry32";
 
 export interface SobolIndices {
@@ -49,5 +50,5 @@ export function sobolIndices(
 /** The Ishigami function on 0…1 stretched to -π…π, the usual test of sensitivity methods: sin x1 + a sin² x2 + b x3⁴ sin x1. */
 export function ishigami(x: readonly number[], a: number, b: number): number {
   const [x1, x2, x3] = x.map((u) => Math.PI * (2 * u - 1));
-  return Math.sin(x1) + a * Math.sin(x2) ** 2 + b * x3 ** 4 * Math.sin(x1);
+  return Math.sin(x1) + a * Math.sin(x2) ** 2 + b * power(x3, 4) * Math.sin(x1);
 }

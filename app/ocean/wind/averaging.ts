@@ -12,7 +12,7 @@ export function averagingFactor(seconds: number): number {
   if (seconds < 1 || seconds > 36000) {
     throw new OceanError("INVALID_INPUT", `An averaging period must lie between 1 s and 10 h; it is ${seconds} s.`);
   }
-  if (seconds <= 3600) return 1.277 + 0.296 * Math.tanh(0.9 * Math.log10(45 / seconds));
+  if (seconds <= 3600) return 1.277 + 0.296 * tanh(0.9 * Math.log10(45 / seconds));
   return -0.15 * Math.log10(seconds) + 1.5334;
 }
 
@@ -25,4 +25,9 @@ export function averagingFactor(seconds: number): number {
 export function convertAveraging(speed: number, fromSeconds: number, toSeconds: number): number {
   requireNotNegative({ speed });
   return (speed * averagingFactor(toSeconds)) / averagingFactor(fromSeconds);
+}
+
+/** By exp, on whose bits JavaScript engines agree; on those of Math.tanh they do not. */
+function tanh(x: number): number {
+  return 1 - 2 / (Math.exp(2 * x) + 1);
 }

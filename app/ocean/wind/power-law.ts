@@ -1,5 +1,6 @@
 import { OceanError, type RangeWarning } from "../errors";
 import { requireNotNegative, requirePositive } from "../guards";
+import { power } from "../power";
 
 /**
  * Wind at 10 m by the one-seventh power law; near-neutral air.
@@ -13,7 +14,7 @@ export function powerLawWind10(speed: number, height: number): number {
   requirePositive({ height });
   if (height > 1000)
     throw new OceanError("INVALID_INPUT", `A wind height of ${height} m lies above the surface layer.`);
-  return speed * (10 / height) ** (1 / 7);
+  return speed * power(10 / height, 1 / 7);
 }
 
 /** A warning where the height lies outside the 8…12 m that the power law is stated for. */

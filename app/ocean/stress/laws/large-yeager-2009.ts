@@ -5,5 +5,6 @@
 export function largeYeager2009(wind10: number): number {
   if (wind10 > 33) return 2.34e-3;
   const U = Math.max(0.5, wind10);
-  return (2.7 / U + 0.142 + 0.0764 * U - 3.14807e-10 * U ** 6) * 1e-3;
+  const U2 = U * U;
+  return (2.7 / U + 0.142 + 0.0764 * U - 3.14807e-10 * U2 * U2 * U2) * 1e-3;
 }
