@@ -181,4 +181,4 @@ export type StampPart = keyof typeof STAMP_NAMES;
 
 /** Words that tell of a date, a time or both. */
 export const STAMP_WORDS =
-  /(?:date|time|stamp|\bdata\b|\bhora|fecha|heure|datum|\bzeit|uhrzeit|zeitpunkt|\bvalid\b|\bepoch\b|\bunix\b|\butc\b|\bgmt\b|tiempo|tempo|momento|\bserial\b|\bdt\b|\btm\b|\bhh mm\b|\bhhmm\b)/;
+  /(?:date|time|stamp|\bdata\b|\bhora|\bhours?\b|fecha|heure|datum|\bzeit|uhrzeit|zeitpunkt|\bvalid\b|\bepoch\b|\bunix\b|\butc\b|\bgmt\b|tiempo|tempo|momento|\bserial\b|\bdt\b|\btm\b|\bhh mm\b|\bhhmm\b)/;

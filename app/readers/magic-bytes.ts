@@ -39,7 +39,6 @@ const SIGNATURES: readonly Signature[] = [
   { bytes: [0xfd, 0x37, 0x7a, 0x58, 0x5a], what: "an xz archive", toDo: "Unpack it and give the file inside." },
   { bytes: [0x37, 0x7a, 0xbc, 0xaf], what: "a 7-Zip archive", toDo: "Unpack it and give the file inside." },
   { bytes: [0x52, 0x61, 0x72, 0x21], what: "a RAR archive", toDo: "Unpack it and give the file inside." },
-  { bytes: [0xd0, 0xcf, 0x11, 0xe0], what: "an old Office document (perhaps an .xls workbook)", toDo: EXPORT_TEXT },
   { bytes: [0x89, 0x48, 0x44, 0x46], what: "an HDF5 or NetCDF-4 file", toDo: EXPORT_TEXT },
   { bytes: [0x43, 0x44, 0x46, 0x01], what: "a NetCDF file", toDo: EXPORT_TEXT },
   { bytes: [0x43, 0x44, 0x46, 0x02], what: "a NetCDF file", toDo: EXPORT_TEXT },
@@ -62,18 +61,21 @@ const ZIP = [0x50, 0x4b];
  * @returns what it is and what to do, or null where the bytes are of no known binary kind
  */
 export function binaryKind(bytes: Uint8Array): { what: string; toDo: string } | null {
-  if (startsWith(bytes, ZIP) && (bytes[2] === 3 || bytes[2] === 5 || bytes[2] === 7)) return zipKind(bytes);
+  if (startsWith(bytes, ZIP) && (bytes[2] === 3 || bytes[2] === 5 || bytes[2] === 7))
+    return { what: "a zip archive", toDo: "Unpack it and give the file inside." };
   const found = SIGNATURES.find((signature) => startsWith(bytes, signature.bytes));
   return found === undefined ? null : { what: found.what, toDo: found.toDo };
 }
 
-/** A workbook names its parts near the start of the archive; any other zip does not. */
-function zipKind(bytes: Uint8Array): { what: string; toDo: string } {
+const OLE = [0xd0, 0xcf, 0x11, 0xe0];
+
+/** Whether bytes are an Excel workbook: zipped (`.xlsx`) or of the older binary kind (`.xls`). */
+export function isWorkbook(bytes: Uint8Array): "zipped" | "binary" | null {
+  if (startsWith(bytes, OLE)) return "binary";
+  if (!startsWith(bytes, ZIP)) return null;
+  // A workbook names its parts near the start of the archive; any other zip does not.
   const head = String.fromCharCode(...bytes.subarray(0, 4096));
-  if (head.includes("xl/") || head.includes("[Content_Types].xml")) {
-    return { what: "an Excel workbook (.xlsx)", toDo: EXPORT_TEXT };
-  }
-  return { what: "a zip archive", toDo: "Unpack it and give the file inside." };
+  return head.includes("xl/") || head.includes("[Content_Types].xml") ? "zipped" : null;
 }
 
 function startsWith(bytes: Uint8Array, signature: readonly number[]): boolean {

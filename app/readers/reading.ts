@@ -43,6 +43,7 @@ export interface ReadingProblem {
 export interface ReadingQuestion {
   /** The key of `ReadingAnswers` that settles it. */
   key:
+    | "sheet"
     | "zone"
     | "dateOrder"
     | "serialEpoch"
@@ -122,6 +123,8 @@ export interface ChannelReading {
 
 /** Answers a person gave on the reading sheet. All optional; JSON. */
 export interface ReadingAnswers {
+  /** Name of a workbook's sheet. */
+  sheet?: string;
   /** IANA zone, or `UTC`, or a fixed offset as `+05:30`. */
   zone?: string;
   dateOrder?: "ymd" | "dmy" | "mdy";

@@ -21,16 +21,7 @@ export const MAX_SERIES_FILE_LINES = 2_000_000;
  * @returns null where it is none; `problems` then says why and what to do
  */
 export function openText(bytes: Uint8Array, fileName: string, problems: ProblemList): SourceFile | null {
-  if (bytes.length > MAX_SERIES_FILE_BYTES) {
-    const size = Math.ceil(bytes.length / (1024 * 1024));
-    problems.add(
-      "error",
-      "tooLarge",
-      `“${fileName}” has ${size} MB; the limit is ${MAX_SERIES_FILE_BYTES / (1024 * 1024)} MB`,
-      "Cut it to the days around the storm.",
-    );
-    return null;
-  }
+  if (!isSizeAllowed(bytes, fileName, problems)) return null;
   if (bytes.length === 0) {
     problems.add(
       "error",
@@ -75,6 +66,19 @@ export function openText(bytes: Uint8Array, fileName: string, problems: ProblemL
     return null;
   }
   return { fileName, decoded, lines };
+}
+
+/** Whether a file is small enough to be read; else `problems` says so. */
+export function isSizeAllowed(bytes: Uint8Array, fileName: string, problems: ProblemList): boolean {
+  if (bytes.length <= MAX_SERIES_FILE_BYTES) return true;
+  const size = Math.ceil(bytes.length / (1024 * 1024));
+  problems.add(
+    "error",
+    "tooLarge",
+    `“${fileName}” has ${size} MB; the limit is ${MAX_SERIES_FILE_BYTES / (1024 * 1024)} MB`,
+    "Cut it to the days around the storm.",
+  );
+  return false;
 }
 
 function countLines(text: string): number {

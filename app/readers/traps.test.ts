@@ -1,5 +1,4 @@
 import { describe, expect, it } from "vitest";
-import { isReadyToImport } from "./ready-to-import";
 import { readSeries } from "./read-series";
 import { UnreadableFile, type ReadingAnswers, type SeriesReading } from "./reading";
 
@@ -9,6 +8,8 @@ const utf8 = (text: string): Uint8Array => new TextEncoder().encode(text);
 const read = (text: string, answers: ReadingAnswers = {}): SeriesReading =>
   readSeries({ bytes: utf8(text), fileName: "station.csv", answers });
 const codes = (reading: SeriesReading): string[] => reading.problems.map(({ code }) => code);
+const isSettled = ({ problems, questions }: SeriesReading): boolean =>
+  !problems.some(({ severity }) => severity === "error") && !questions.some(({ needed }) => needed);
 const values = (reading: SeriesReading, channel: keyof SeriesReading["channels"]): number[] => [
   ...(reading.channels[channel]?.values ?? []),
 ];
@@ -142,10 +143,10 @@ describe("time", () => {
   it("trap 13: an unstated zone is a question that must be answered", () => {
     const reading = read(naive, { windHeight: 10 });
     expect(reading.questions).toContainEqual(expect.objectContaining({ key: "zone", needed: true, suggestion: "UTC" }));
-    expect(isReadyToImport(reading)).toBe(false);
+    expect(isSettled(reading)).toBe(false);
     const answered = read(naive, { windHeight: 10, zone: "Europe/Lisbon" });
     expect(answered.first).toBe("2024-06-30T23:00:00Z");
-    expect(isReadyToImport(answered)).toBe(true);
+    expect(isSettled(answered)).toBe(true);
   });
 
   it("trap 13: the zone is taken from the header or the stamps where they state it", () => {
@@ -163,7 +164,7 @@ describe("time", () => {
       expect.objectContaining({ severity: "error", code: "repeatedHour", row: 3 }),
     );
     expect(reading.time.length).toBe(2);
-    expect(isReadyToImport(reading)).toBe(false);
+    expect(isSettled(reading)).toBe(false);
   });
 
   it("trap 14: both passes of the repeated hour are told apart by their order, and it is said (05:30 and 06:30 UTC)", () => {
@@ -562,7 +563,7 @@ describe("bad input", () => {
     ["only a buoy header", utf8("#YY  MM DD hh mm WDIR WSPD GST\n"), "onlyHeader", "no records"],
     ["a picture", Uint8Array.of(0x89, 0x50, 0x4e, 0x47, 0x0d, 0x0a, 0x1a, 0x0a, 0, 0), "notText", "PNG image"],
     ["a zip", Uint8Array.of(0x50, 0x4b, 3, 4, 20, 0), "notText", "zip archive"],
-    ["a workbook", utf8("PK\u0003\u0004 [Content_Types].xml xl/workbook.xml"), "notText", "Excel workbook"],
+    ["a torn workbook", utf8("PK\u0003\u0004 [Content_Types].xml xl/workbook.xml"), "tooLarge", "unpack"],
     ["a PDF", utf8("%PDF-1.7\n"), "notText", "PDF document"],
     ["noise", Uint8Array.of(1, 0, 0, 7, 200, 0, 3, 0, 9), "notText", "binary"],
     ["prose", utf8("Dear colleague,\nplease find 3 records below.\nYours\n"), "noTable", "no table"],
@@ -601,7 +602,7 @@ describe("bad input", () => {
     const reading = read("alpha,beta\n1,2\n3,4\n");
     expect(reading.problems.find(({ code }) => code === "noTimeColumn")?.message).toContain("“alpha”, “beta”");
     expect(codes(reading)).toContain("noChannel");
-    expect(isReadyToImport(reading)).toBe(false);
+    expect(isSettled(reading)).toBe(false);
   });
 
   it("lists winds beyond any measured, directions beyond 360 and unreadable times, and leaves them out when told", () => {
@@ -617,9 +618,9 @@ describe("bad input", () => {
         ["outOfRange", 4],
       ],
     );
-    expect(isReadyToImport(reading)).toBe(false);
+    expect(isSettled(reading)).toBe(false);
     const left = read(text, { windHeight: 10, zone: "UTC", leaveOutBadRows: true });
-    expect(isReadyToImport(left)).toBe(true);
+    expect(isSettled(left)).toBe(true);
     expect(values(left, "windSpeed")).toEqual([5]);
     expect(left.rows).toBe(4);
     expect(left.dropped.reduce((sum, { count }) => sum + count, 0)).toBe(3);

@@ -53,6 +53,9 @@ export function readAnswers(form: FormData, shown: Pick<SeriesReading, "columns"
   };
   const answers: ReadingAnswers = {};
 
+  const sheet = text("sheet");
+  if (shown.questions.some(({ key, options }) => key === "sheet" && options?.some(({ value }) => value === sheet)))
+    answers.sheet = sheet;
   const zone = text("zone");
   if (zone !== "" && isZone(zone)) answers.zone = zone;
   else if (zone !== "")

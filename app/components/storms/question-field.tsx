@@ -18,6 +18,8 @@ interface QuestionFieldProps {
 /** One question of a reading sheet with the control that answers it. An empty field stands for "as read". */
 export function QuestionField({ question, sheet, errors }: QuestionFieldProps) {
   switch (question.key) {
+    case "sheet":
+      return <OptionField question={question} name="sheet" label="Sheet of the workbook" errors={errors} />;
     case "zone":
       return <ZoneField question={question} zones={sheet.zones} errors={errors} />;
     case "windHeight":
