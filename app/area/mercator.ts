@@ -20,13 +20,3 @@ export function mercatorY(latitude: number): number {
   const sine = Math.sin((held * Math.PI) / 180);
   return 0.5 - (0.25 * Math.log((1 + sine) / (1 - sine))) / Math.PI;
 }
-
-/** @returns longitude in degrees of an x across the world square. */
-export function longitudeOfMercator(x: number): number {
-  return (x - 0.5) * 360;
-}
-
-/** @returns latitude in degrees of a y down the world square. */
-export function latitudeOfMercator(y: number): number {
-  return (Math.atan(Math.sinh(Math.PI * (1 - 2 * y))) * 180) / Math.PI;
-}

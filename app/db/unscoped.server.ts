@@ -45,10 +45,6 @@ export async function slugIsTaken(slug: string, transaction?: Transaction): Prom
   return (await Organisation.count({ where: { slug }, transaction })) > 0;
 }
 
-export async function findOrganisation(id: string): Promise<Organisation | null> {
-  return Organisation.findByPk(id);
-}
-
 export interface OrganisationOfUser {
   organisation: Organisation;
   role: Role;

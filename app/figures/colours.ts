@@ -21,7 +21,6 @@ export const PRINT_COLOURS = {
 export type FigureToken = keyof typeof PRINT_COLOURS;
 
 export const INK = "var(--ink)";
-export const QUIET = "var(--slate)";
 export const PAPER = "var(--paper)";
 export const HAIRLINE = "var(--hairline)";
 export const MIST = "var(--mist)";

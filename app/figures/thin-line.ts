@@ -2,8 +2,8 @@
 export const MAX_POINTS = 1500;
 
 /**
- * Which samples to draw: at most `limit`, among them the lowest and the highest of every stretch, one missing sample
- * for each stretch that has any (so that gaps stay open), and the two ends.
+ * Which samples to draw: at most `limit`. Kept are the two ends and, of every stretch, the lowest and the highest value,
+ * and one missing sample where the stretch has a gap, so that the gap stays open.
  * @param values one a sample, NaN where missing
  * @returns ascending indices; all of them where there are few enough
  */

@@ -1,6 +1,6 @@
 /**
  * A memo as data: what the page, the client's link and the PDF all show. It is composed once, holds no reference to
- * anything that can change, survives JSON, and is frozen when the memo is issued.
+ * anything that can change, survives JSON, and is stored as it stands when the memo is issued.
  */
 import type { FitSeverity } from "~/ocean/response";
 import type { Figure } from "~/figures/figure";
@@ -125,15 +125,4 @@ export function plain(text: string): Run {
 /** Text of runs without their styles. */
 export function textOf(runs: readonly Run[]): string {
   return runs.map((run) => run.text).join("");
-}
-
-/** The same document, deeply frozen: nothing that holds an issued memo can alter it. */
-export function freezeMemo(document: MemoDocument): Readonly<MemoDocument> {
-  return deepFreeze(document);
-}
-
-function deepFreeze<T>(value: T): Readonly<T> {
-  if (typeof value !== "object" || value === null || Object.isFrozen(value)) return value;
-  for (const part of Object.values(value)) deepFreeze(part);
-  return Object.freeze(value);
 }

@@ -42,9 +42,6 @@ export const SECONDS_PER_DAY = 86400;
 /** 1 mm/h of rain in m/s. Exact. */
 export const MM_PER_HOUR = 1e-3 / SECONDS_PER_HOUR;
 
-/** 1 knot in m/s. Exact (international nautical mile). */
-export const KNOT = 1852 / 3600;
-
 /** Damping of slab currents: an e-folding time of four days, 1/s. Pollard & Millard (1970), supported by a later study's abstract. */
 export const DAMPING_RATE = 1 / (4 * SECONDS_PER_DAY);
 

@@ -3,7 +3,7 @@ import { describe, expect, it } from "vitest";
 import { readPastedGrid } from "./paste-grid";
 import { readSeries } from "./read-series";
 import { UnreadableFile, type SeriesReading } from "./reading";
-import { sampleStormFile } from "./sample-files";
+import { sampleStormFile } from "../../tests/factories/sample-storm";
 
 const read = (bytes: Uint8Array): SeriesReading | UnreadableFile => {
   try {

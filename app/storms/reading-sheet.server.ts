@@ -3,7 +3,7 @@ import type { Storm } from "~/db/models/storm.server";
 import type { Tenant } from "~/db/scoped.server";
 import { UnreadableFile, type ReadingAnswers, type SeriesReading } from "~/readers/reading";
 import type { ChannelSeries } from "./channel-series";
-import { CHANNELS, groupLabel, groupOf, type ChannelGroup } from "./channels";
+import { groupLabel, groupOf, type ChannelGroup } from "./channels";
 import { channelsIn } from "./confirm-record.server";
 import { loadSeries } from "./load-series.server";
 import { readRecord } from "./read-record.server";
@@ -111,9 +111,4 @@ export function sampleDirection(reading: SeriesReading): number | null {
   if (strongest < 0) return null;
   const turned = reading.columns.some(({ role }) => role === "windTowards");
   return turned ? (from[strongest] + 180) % 360 : from[strongest];
-}
-
-/** `wind speed, rain rate` */
-export function channelNames(series: readonly ChannelSeries[]): string {
-  return series.map(({ channel }) => CHANNELS[channel].label).join(", ");
 }

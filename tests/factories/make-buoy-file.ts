@@ -4,7 +4,7 @@
  */
 import { writeFileSync } from "node:fs";
 import { fileURLToPath } from "node:url";
-import { sampleStormHours, type SampleHour } from "../../app/readers/sample-files";
+import { sampleStormHours, type SampleHour } from "./sample-storm";
 
 const HEADER = [
   "#YY  MM DD hh mm WDIR WSPD GST  WVHT   DPD   APD MWD   PRES  ATMP  WTMP  DEWP  VIS  TIDE",

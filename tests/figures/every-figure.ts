@@ -6,7 +6,6 @@ import { hodograph } from "~/figures/hodograph";
 import { layerStack } from "~/figures/layer-stack";
 import { seriesLine } from "~/figures/series-line";
 import { stressAndDrift } from "~/figures/stress-and-drift";
-import { windPreview } from "~/figures/wind-preview";
 import type { TriggerLevel } from "~/ocean/scenario";
 import type { LocalPosition } from "~/figures/drift-track";
 
@@ -36,19 +35,8 @@ export interface EverySeries {
 /** Every figure there is, of one set of series. */
 export function everyFigure(series: EverySeries, context: FigureContext): Figure[] {
   const { time, triggerLevels: triggers } = series;
-  const middle = Math.floor(time.length / 2);
   return [
     forcingStack(series, context),
-    windPreview(
-      {
-        time,
-        windSpeed: series.windSpeed10,
-        windFrom: series.windFrom,
-        windHeight: 4,
-        stormWindow: { start: time[Math.floor(middle / 2)] ?? 0, end: (time[middle] ?? 0) + 3600 },
-      },
-      context,
-    ),
     seriesLine("stress", { time, values: series.stressX }, context),
     seriesLine("driftSpeed", { time, values: series.driftEast }, context),
     seriesLine("temperature", { time, values: series.temperature, triggers }, context),

@@ -8,7 +8,6 @@ import { levelText } from "~/figures/levels";
 import { seriesLine } from "~/figures/series-line";
 import { bandMark, driftArrow, spark } from "~/figures/small-marks";
 import { stressAndDrift } from "~/figures/stress-and-drift";
-import { windPreview } from "~/figures/wind-preview";
 import { DEFAULT_UNITS } from "~/units/unit-choices";
 import * as storm from "./invented-storm";
 
@@ -76,29 +75,6 @@ describe("forcing stack", () => {
     expect(heldTotal([0, 3600, 5400], [2, 4, 100])).toBe(4);
     expect(heldTotal([0, 3600, 7200], [Number.NaN, 3, 0])).toBe(3);
     expect(heldTotal([0], [9])).toBe(0);
-  });
-});
-
-describe("wind preview", () => {
-  it("names the station's height and the shaded window", () => {
-    const figure = windPreview(
-      {
-        time,
-        windSpeed: [3, 4, 5, 4],
-        windFrom: [0, 0, 0, 0],
-        windHeight: 4.1,
-        stormWindow: { start: time[1] ?? 0, end: 2e9 },
-      },
-      context,
-    );
-    expect(plain(figure.alt)).toContain("Wind speed at 4.1 m 3.0 to 5.0 m/s");
-    expect(figure.caption).toContain("The storm's window is shaded: 2026-11-04 21:00 to 2033-05-18 03:33 UTC.");
-    expect(figure.svg).toContain('fill="var(--mist)"');
-  });
-  it("does not guess an unknown height", () => {
-    const figure = windPreview({ time, windSpeed: [3, 4, 5, 4], windFrom: [0, 0, 0, 0], windHeight: null }, context);
-    expect(figure.svg).toContain("wind as recorded (m/s)");
-    expect(figure.caption).toContain("at the station's height");
   });
 });
 

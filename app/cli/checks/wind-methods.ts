@@ -28,7 +28,7 @@ export function dragOptionsOf(inputs: CaseInputs): DragOptions {
 export const windMethods: CheckMethods = {
   "wind.components": (inputs) => windComponents(inputs.number("speed"), inputs.number("dirFrom")),
   "current.directionTo": (inputs) => ({ dirTo: directionTowards(inputs.number("u"), inputs.number("v")) }),
-  "wind.powerLaw10m": (inputs) => ({ U10: powerLawWind10(inputs.number("U"), inputs.number("z")) }),
+  "wind.powerLaw10m": (inputs) => ({ U10: powerLawWind10(inputs.number("U"), inputs.number("z")).wind10 }),
   "wind.logLaw10m": (inputs) => ({
     U10: logLawWind10(inputs.number("U"), inputs.number("z"), dragLaw(lawOf(inputs), dragOptionsOf(inputs))),
   }),

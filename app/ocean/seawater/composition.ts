@@ -34,9 +34,3 @@ export function seawaterComposition(SA: number): Record<Salt, number> {
   const grams = Object.entries(SALT_FRACTIONS).map(([salt, fraction]) => [salt, fraction * SA]);
   return Object.fromEntries(grams) as Record<Salt, number>;
 }
-
-/** Concentration in mg/L of a salt that makes up `gramsPerKg` of water of density `rho` (kg/m³). */
-export function milligramsPerLitre(gramsPerKg: number, rho: number): number {
-  requireNotNegative({ gramsPerKg, rho });
-  return gramsPerKg * rho;
-}

@@ -5,7 +5,7 @@ import { averagingFactor, convertAveraging } from "./averaging";
 import { windComponents } from "./components";
 import { directionTowards } from "./direction-to";
 import { logLawWind10 } from "./log-law";
-import { powerLawWarning, powerLawWind10 } from "./power-law";
+import { powerLawWind10 } from "./power-law";
 
 const number = (min: number, max: number) => fc.double({ min, max, noNaN: true });
 
@@ -35,8 +35,10 @@ describe("wind", () => {
       }),
     );
     expect(logLawWind10(17, 10, dragLaw("smith1980"))).toBe(17);
-    expect(powerLawWind10(17, 10)).toBe(17);
-    expect(powerLawWarning(3)).toMatchObject({ threshold: 8 });
+    expect(powerLawWind10(17, 10)).toEqual({ wind10: 17, warnings: [] });
+    expect(powerLawWind10(17, 8).warnings).toEqual([]);
+    expect(powerLawWind10(17, 3).warnings).toMatchObject([{ code: "OUT_OF_RANGE", threshold: 8 }]);
+    expect(powerLawWind10(17, 12.5).warnings).toMatchObject([{ code: "OUT_OF_RANGE", threshold: 12 }]);
   });
 
   it("settles where a drag law jumps", () => {

@@ -1,5 +1,5 @@
-import { isoFromSeconds } from "./stamp-text";
-import { normalDegrees } from "./wind-vectors";
+import { isoFromSeconds } from "~/readers/stamp-text";
+import { normalDegrees } from "~/readers/wind-vectors";
 
 /** One hour of an invented storm at an invented station. */
 export interface SampleHour {
@@ -93,7 +93,7 @@ export interface SampleFile {
   text: string;
 }
 
-/** The sample that an empty page offers: the invented storm as CSV with units in the header and times in UTC. */
+/** The invented storm as CSV with units in the header and times in UTC. */
 export function sampleStormFile(): SampleFile {
   const header =
     "time (UTC),wind speed at 10 m (m/s),wind gust at 10 m (m/s),wind from (deg true),rain (mm),air pressure (hPa),air temperature (°C),dew point (°C),sea temperature (°C),shortwave (W/m²)";

@@ -3,7 +3,7 @@ import { fileURLToPath } from "node:url";
 import { describe, expect, it } from "vitest";
 import { readSeries } from "./read-series";
 import { summaryOfReading } from "./read-summary";
-import { SAMPLE_HOURS, sampleStormFile, sampleStormHours } from "./sample-files";
+import { SAMPLE_HOURS, sampleStormFile, sampleStormHours } from "../../tests/factories/sample-storm";
 
 describe("sampleStormFile", () => {
   it("is read without a problem, and back to the hours it was made from", () => {
