@@ -1,7 +1,8 @@
+import { booleanPointOnLine, kinks, lineString, multiLineString } from "@turf/turf";
 import type { Position } from "~/ocean/scenario";
 import { measureBox } from "./measure-box";
 import { normaliseRing } from "./normalise-ring";
-import { openRing, ringExtent, shortestTurn, unwrapRing } from "./ring";
+import { openRing, ringExtent, unwrapRing } from "./ring";
 
 export type BoxProblemCode =
   | "notARing"
@@ -133,11 +134,13 @@ function warningsOf(ring: Position[]): BoxProblem[] {
   return [{ field: "polygon", code: "equator", message }];
 }
 
+type Side = [from: Position, to: Position];
+
 /** The first pair of sides that cross, touch or run over each other, told by the numbers of their corners. */
 function findCrossing(ring: Position[]): BoxProblem | null {
   const corners = unwrapRing(openRing(ring));
   const count = corners.length;
-  const side = (i: number): [Position, Position] => [corners[i], corners[(i + 1) % count]];
+  const side = (i: number): Side => [corners[i], corners[(i + 1) % count]];
   for (let i = 0; i < count; i++) {
     for (let j = i + 1; j < count; j++) {
       const adjacent = j === i + 1 || (i === 0 && j === count - 1);
@@ -158,38 +161,19 @@ function crossingProblem(i: number, j: number, count: number): BoxProblem {
 }
 
 function onOneLine(corners: Position[]): boolean {
-  return corners.every((corner) => turn(corners[0], corners[1], corner) === 0);
+  const [[x, y], [nextX, nextY]] = corners;
+  return corners.every((corner) => (nextX - x) * (corner[1] - y) === (nextY - y) * (corner[0] - x));
 }
 
-/** Which side of the line a→b the point lies on: positive left, 0 on it. */
-function turn(a: Position, b: Position, point: Position): number {
-  return (b[0] - a[0]) * (point[1] - a[1]) - (b[1] - a[1]) * (point[0] - a[0]);
+function sidesMeet(one: Side, other: Side): boolean {
+  return kinks(multiLineString([one, other])).features.length > 0;
 }
 
-function sidesMeet([a, b]: [Position, Position], [c, d]: [Position, Position]): boolean {
-  const [c1, d1, a1, b1] = [turn(a, b, c), turn(a, b, d), turn(c, d, a), turn(c, d, b)];
-  if (c1 * d1 < 0 && a1 * b1 < 0) return true;
-  return (
-    (c1 === 0 && between(a, b, c)) ||
-    (d1 === 0 && between(a, b, d)) ||
-    (a1 === 0 && between(c, d, a)) ||
-    (b1 === 0 && between(c, d, b))
-  );
-}
-
-/** Whether a point that lies on the line through a and b lies between them. */
-function between(a: Position, b: Position, point: Position): boolean {
-  return [0, 1].every((k) => point[k] >= Math.min(a[k], b[k]) && point[k] <= Math.max(a[k], b[k]));
-}
-
-/** Neighbouring sides share a corner; they only collide when the second runs back over the first. */
-function foldsBack(first: [Position, Position], second: [Position, Position], inOrder: boolean): boolean {
+/** Neighbouring sides share a corner; they only collide when one runs back over the other. */
+function foldsBack(first: Side, second: Side, inOrder: boolean): boolean {
   const [before, corner] = inOrder ? first : second;
   const after = inOrder ? second[1] : first[1];
-  const onLine = turn(before, corner, after) === 0;
-  const back =
-    shortestTurn(corner[0] - before[0]) * shortestTurn(after[0] - corner[0]) +
-      (corner[1] - before[1]) * (after[1] - corner[1]) <
-    0;
-  return onLine && back;
+  return (
+    booleanPointOnLine(after, lineString([before, corner])) || booleanPointOnLine(before, lineString([corner, after]))
+  );
 }

@@ -1,7 +1,8 @@
+import { centerOfMass, polygon } from "@turf/turf";
 import geographiclib from "geographiclib-geodesic";
 import { coriolis, inertialPeriod } from "~/ocean/ekman/coriolis";
 import type { Position } from "~/ocean/scenario";
-import { openRing, planarArea, ringExtent, unwrapRing, wrapLongitude } from "./ring";
+import { openRing, ringExtent, unwrapRing, wrapLongitude } from "./ring";
 
 export interface BoxMeasures {
   /** km² on the WGS 84 ellipsoid, always positive. */
@@ -35,9 +36,9 @@ const SECONDS_PER_HOUR = 3600;
 export function measureBox(ring: readonly Position[]): BoxMeasures {
   const corners = openRing(ring);
   if (corners.length < 3) throw new RangeError(`A box needs at least 3 corners, not ${corners.length}.`);
-  const polygon = WGS84.Polygon(false);
-  for (const [longitude, latitude] of corners) polygon.AddPoint(latitude, longitude);
-  const { area = 0, perimeter } = polygon.Compute(false, true);
+  const geodesics = WGS84.Polygon(false);
+  for (const [longitude, latitude] of corners) geodesics.AddPoint(latitude, longitude);
+  const { area = 0, perimeter } = geodesics.Compute(false, true);
   const centroid = centroidOf(corners);
   const { west, east, south, north } = ringExtent(corners);
   const f = coriolis(centroid[1]);
@@ -67,26 +68,7 @@ function centroidOf(corners: readonly Position[]): Position {
     (longitude - originLongitude) * Math.cos((latitude * Math.PI) / 180),
     latitude - originLatitude,
   ]);
-  const area = planarArea(plane);
-  const [x, y] = area === 0 ? meanOf(plane) : planeCentroid(plane, area);
+  const [x, y] = centerOfMass(polygon([[...plane, plane[0]]])).geometry.coordinates;
   const latitude = originLatitude + y;
   return [wrapLongitude(originLongitude + x / Math.cos((latitude * Math.PI) / 180)), latitude];
-}
-
-function planeCentroid(plane: readonly Position[], area: number): Position {
-  let x = 0;
-  let y = 0;
-  for (let i = 0; i < plane.length; i++) {
-    const [ax, ay] = plane[i];
-    const [bx, by] = plane[(i + 1) % plane.length];
-    const cross = ax * by - bx * ay;
-    x += (ax + bx) * cross;
-    y += (ay + by) * cross;
-  }
-  return [x / (6 * area), y / (6 * area)];
-}
-
-function meanOf(plane: readonly Position[]): Position {
-  const sum = plane.reduce<Position>(([x, y], [px, py]) => [x + px, y + py], [0, 0]);
-  return [sum[0] / plane.length, sum[1] / plane.length];
 }

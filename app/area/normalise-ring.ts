@@ -1,5 +1,6 @@
+import { booleanClockwise, lineString } from "@turf/turf";
 import type { Position } from "~/ocean/scenario";
-import { openRing, planarArea, samePlace, unwrapRing, wrapLongitude } from "./ring";
+import { openRing, samePlace, unwrapRing, wrapLongitude } from "./ring";
 
 /**
  * The one form in which a box is kept (RFC 7946): closed, counter-clockwise, without repeated corners, longitudes in
@@ -15,8 +16,9 @@ export function normaliseRing(ring: readonly Position[]): Position[] {
   ]);
   if (corners.length === 0) return [];
   const [first, ...others] = corners;
-  const turned = planarArea(unwrapRing(corners)) < 0 ? [first, ...others.reverse()] : corners;
-  return [...turned, [first[0], first[1]]];
+  const closed = [...corners, first];
+  const turned = booleanClockwise(lineString(unwrapRing(closed))) ? [first, ...others.reverse(), first] : closed;
+  return turned.map(([longitude, latitude]) => [longitude, latitude]);
 }
 
 function withoutRepeats(corners: Position[]): Position[] {

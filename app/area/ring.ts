@@ -1,3 +1,4 @@
+import { bbox, multiPoint } from "@turf/turf";
 import type { Position } from "~/ocean/scenario";
 
 /** Corners of a polygon in order, without the first one repeated at the end. */
@@ -40,18 +41,6 @@ export function wrapLongitude(longitude: number): number {
   return shortestTurn(longitude);
 }
 
-/** Signed area by the shoelace formula in squared degrees, positive when counter-clockwise. Ring open, unwrapped. */
-export function planarArea(corners: readonly Position[]): number {
-  let twice = 0;
-  for (let i = 0; i < corners.length; i++) {
-    const [ax, ay] = corners[i];
-    const [bx, by] = corners[(i + 1) % corners.length];
-    // Against the first corner, so that a small ring far from 0° keeps its digits.
-    twice += (ax - corners[0][0]) * (by - corners[0][1]) - (bx - corners[0][0]) * (ay - corners[0][1]);
-  }
-  return twice / 2;
-}
-
 export interface RingExtent {
   west: number;
   east: number;
@@ -61,13 +50,6 @@ export interface RingExtent {
 
 /** Extent in degrees; across the antimeridian `east` is above 180 (or `west` below -180). */
 export function ringExtent(ring: readonly Position[]): RingExtent {
-  const corners = unwrapRing(ring);
-  const longitudes = corners.map(([longitude]) => longitude);
-  const latitudes = corners.map(([, latitude]) => latitude);
-  return {
-    west: Math.min(...longitudes),
-    east: Math.max(...longitudes),
-    south: Math.min(...latitudes),
-    north: Math.max(...latitudes),
-  };
+  const [west, south, east, north] = bbox(multiPoint(unwrapRing(ring)));
+  return { west, east, south, north };
 }
