@@ -14,7 +14,9 @@ import { memoFigures } from "./memo-figures.server";
 import type { MemoEstimate, MemoFacts, MemoInput } from "./memo-input";
 import { memoNumber } from "./memo-number";
 import { registerAssumptions, registerBoxes, registerSeries, registerWaters } from "./memo-register";
+import { shippedCoverage } from "./pdf/fonts.server";
 import type { Attachment } from "./render-pdf.server";
+import { undrawableWords } from "./undrawable-words";
 import { draftAnswer } from "./words";
 
 type Organisation = Pick<CurrentOrganisation, "name" | "units" | "paperSize">;
@@ -36,6 +38,7 @@ export interface ComposedDraft {
   draftedFindings: string;
   /** What the PDF carries. */
   attachments: Attachment[];
+  /** What keeps it from being checked and issued, a sentence each. */
   hindrances: string[];
   /** Where the signature in the row is for what the memo says now. */
   checkerName: string | null;
@@ -137,18 +140,20 @@ export async function composeDraft(
   const checkerName = isChecked && memo.checkerId ? (names.get(memo.checkerId) ?? null) : null;
   const [lead] = estimates;
   const words = lead && { units: organisation.units, zone, shore: lead.shore, boxName: lead.boxName };
+  const document = compose({
+    revision: "draft",
+    issuedFor: "draft",
+    checker: checkerName ?? UNCHECKED,
+    date: formatDate(new Date(), zone),
+    stamp: "",
+  });
+  const undrawable = undrawableWords(document, shippedCoverage);
   return {
-    document: compose({
-      revision: "draft",
-      issuedFor: "draft",
-      checker: checkerName ?? UNCHECKED,
-      date: formatDate(new Date(), zone),
-      stamp: "",
-    }),
+    document,
     content,
     draftedFindings: words ? textOf(draftAnswer(lead.response, words)) : "",
     attachments,
-    hindrances: hindrancesOf(pointed),
+    hindrances: [...hindrancesOf(pointed), ...(undrawable === null ? [] : [undrawable])],
     checkerName,
     compose: (issue) => compose({ ...issue, checker: issue.checker || UNCHECKED }),
   };
