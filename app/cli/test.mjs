@@ -63,15 +63,21 @@ async function ensureChromium() {
   return browser;
 }
 
-/** Tests that read PDFs back with these programs are skipped with a notice where they are absent. */
-async function offerPdfTools() {
-  const missing = [
-    ["pdftotext", "poppler-utils"],
-    ["qpdf", "qpdf"],
-  ].filter(([program]) => findProgram(program) === undefined);
+/** Whether Debian's Python finds a library. */
+async function hasPythonLibrary(name) {
+  return existsSync("/usr/bin/python3") && (await run("/usr/bin/python3", ["-c", `import ${name}`])).code === 0;
+}
+
+/** Tests that read PDFs back, or compare with reference libraries, are skipped with a notice where these are absent. */
+async function offerOptionalTools() {
+  const missing = [];
+  if (findProgram("pdftotext") === undefined) missing.push("poppler-utils");
+  if (findProgram("qpdf") === undefined) missing.push("qpdf");
+  for (const library of ["gsw", "geographiclib"]) {
+    if (!(await hasPythonLibrary(library))) missing.push(`python3-${library}`);
+  }
   if (missing.length === 0) return;
-  const packages = missing.map(([, name]) => name);
-  if (!(await aptInstall(...packages))) say(`Not installed: ${packages.join(", ")}; tests that need them are skipped.`);
+  if (!(await aptInstall(...missing))) say(`Not installed: ${missing.join(", ")}; tests that need them are skipped.`);
 }
 
 /** Adds up one project of the test runner from its report. */
@@ -117,7 +123,7 @@ async function everything() {
   mkdirSync(OUTPUT, { recursive: true });
   if (!packagesMatchLock() && !(await prepare("Installing packages", "npm", ["ci", "--no-audit", "--no-fund"]))) return;
   const chromium = await ensureChromium();
-  await offerPdfTools();
+  await offerOptionalTools();
   await prepare("Base map", "npm", ["run", "--silent", "basemap"]);
   for (const check of ["typecheck", "lint"]) {
     const { code, output } = await run("npm", ["run", "--silent", check]);
