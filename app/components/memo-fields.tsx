@@ -1,16 +1,10 @@
-import {
-  getFormProps,
-  getInputProps,
-  getSelectProps,
-  getTextareaProps,
-  useForm,
-  type SubmissionResult,
-} from "@conform-to/react";
+import { getFormProps, useForm, type SubmissionResult } from "@conform-to/react";
 import { parseWithZod } from "@conform-to/zod/v4";
 import type { ReactNode } from "react";
 import { Form } from "react-router";
 import type { z } from "zod";
-import { Field, FormErrors } from "./field";
+import { FormErrors } from "./field";
+import { SelectField, TextAreaField, TextField } from "./form-fields";
 import { SubmitButton } from "./submit-button";
 import { memoSchema, type MemoValues } from "~/memo/memo-schema";
 import { MEMO_PURPOSES } from "~/memo/purposes";
@@ -49,60 +43,22 @@ export function MemoFields({ lastResult, choices, values, submit, draftedFinding
   return (
     <Form method="post" {...getFormProps(form)} className="grid gap-4">
       <FormErrors errors={form.errors} id={form.errorId} />
-      <Field id={fields.title.id} label="Title" errors={fields.title.errors}>
-        {(described) => (
-          <input
-            {...getInputProps(fields.title, { type: "text" })}
-            {...described}
-            key={fields.title.key}
-            className="input"
-            autoComplete="off"
-          />
-        )}
-      </Field>
-      <Field
-        id={fields.question.id}
+      <TextField field={fields.title} label="Title" autoComplete="off" />
+      <TextAreaField
+        field={fields.question}
         label="Question"
         hint="What the client asks, and the decision that hangs on the answer."
-        errors={fields.question.errors}
-      >
-        {(described) => (
-          <textarea
-            {...getTextareaProps(fields.question)}
-            {...described}
-            key={fields.question.key}
-            rows={3}
-            className="input"
-          />
-        )}
-      </Field>
-      <Field
-        id={fields.findings.id}
+        rows={3}
+      />
+      <TextAreaField
+        field={fields.findings}
         label="Bottom line"
         hint="Left empty, it is drafted from the responses, with the range and what drives it."
-        errors={fields.findings.errors}
+        rows={5}
+        placeholder={draftedFindings}
         optional
-      >
-        {(described) => (
-          <textarea
-            {...getTextareaProps(fields.findings)}
-            {...described}
-            key={fields.findings.key}
-            rows={5}
-            className="input"
-            placeholder={draftedFindings}
-          />
-        )}
-      </Field>
-      <Field id={fields.purpose.id} label="Issued for" errors={fields.purpose.errors}>
-        {(described) => (
-          <select {...getSelectProps(fields.purpose)} {...described} key={fields.purpose.key} className="input">
-            {MEMO_PURPOSES.map((purpose) => (
-              <option key={purpose}>{purpose}</option>
-            ))}
-          </select>
-        )}
-      </Field>
+      />
+      <SelectField field={fields.purpose} label="Issued for" options={MEMO_PURPOSES} />
       <fieldset
         id={fields.estimates.id}
         tabIndex={-1}

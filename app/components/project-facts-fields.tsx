@@ -1,5 +1,5 @@
-import { getInputProps, getSelectProps, type FieldMetadata } from "@conform-to/react";
-import { Field } from "./field";
+import type { FieldMetadata } from "@conform-to/react";
+import { SelectField, TextField } from "./form-fields";
 
 type FactField = FieldMetadata<string, Record<string, unknown>, string[]>;
 
@@ -18,38 +18,15 @@ export function ProjectFactsFields({ fields, timeZones }: ProjectFactsFieldsProp
   return (
     <>
       {texts.map(({ field, label, hint }) => (
-        <Field key={field.id} id={field.id} label={label} hint={hint} errors={field.errors}>
-          {(described) => (
-            <input
-              {...getInputProps(field, { type: "text" })}
-              {...described}
-              key={field.key}
-              className="input"
-              autoComplete="off"
-            />
-          )}
-        </Field>
+        <TextField key={field.id} field={field} label={label} hint={hint} autoComplete="off" />
       ))}
-      <Field
-        id={fields.timeZone.id}
+      <SelectField
+        field={fields.timeZone}
         label="Time zone"
         hint="Times are stored in UTC and shown in this zone, always with its name."
-        errors={fields.timeZone.errors}
-      >
-        {(described) => (
-          <select
-            {...getSelectProps(fields.timeZone)}
-            {...described}
-            key={fields.timeZone.key}
-            defaultValue={fields.timeZone.initialValue ?? "UTC"}
-            className="input"
-          >
-            {timeZones.map((zone) => (
-              <option key={zone}>{zone}</option>
-            ))}
-          </select>
-        )}
-      </Field>
+        defaultValue={fields.timeZone.initialValue ?? "UTC"}
+        options={timeZones}
+      />
     </>
   );
 }

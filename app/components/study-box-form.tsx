@@ -1,9 +1,10 @@
-import { getFormProps, getInputProps, getSelectProps, useForm, type SubmissionResult } from "@conform-to/react";
+import { getFormProps, useForm, type SubmissionResult } from "@conform-to/react";
 import { parseWithZod } from "@conform-to/zod/v4";
 import { useMemo, useState, type ReactNode } from "react";
 import { Form, useNavigation } from "react-router";
 import type { z } from "zod";
-import { Field, FormErrors } from "./field";
+import { FormErrors } from "./field";
+import { NumberField, SelectField, TextField } from "./form-fields";
 import { BoxEditor } from "./map/box-editor";
 import { SubmitButton } from "./submit-button";
 import { boxSchema, type BoxValues, MOST_TRIGGER_LEVELS, TRIGGER_QUANTITY_IDS } from "~/area/box-schema";
@@ -12,6 +13,8 @@ import { displayUnit, quantity } from "~/units/quantities";
 import type { UnitChoices } from "~/units/unit-choices";
 
 type BoxFormValues = z.input<ReturnType<typeof boxSchema>>;
+
+const TRIGGER_CHOICES = TRIGGER_QUANTITIES.map((id) => ({ value: id, label: quantity(TRIGGER_QUANTITY_IDS[id]).name }));
 
 interface StudyBoxFormProps {
   lastResult?: SubmissionResult<string[]>;
@@ -56,29 +59,9 @@ export function StudyBoxForm({ lastResult, units, otherBoxes, ring: stored, valu
         errors={fields.polygon.errors ?? []}
       />
       <div className="grid gap-4 sm:grid-cols-2 lg:grid-cols-4">
-        <Field id={fields.name.id} label="Name" errors={fields.name.errors}>
-          {(described) => (
-            <input
-              {...getInputProps(fields.name, { type: "text" })}
-              {...described}
-              key={fields.name.key}
-              className="input"
-              autoComplete="off"
-            />
-          )}
-        </Field>
+        <TextField field={fields.name} label="Name" autoComplete="off" />
         {measures.map(({ field, label, unit, hint }) => (
-          <Field key={field.id} id={field.id} label={label} unit={unit} hint={hint} errors={field.errors} optional>
-            {(described) => (
-              <input
-                {...getInputProps(field, { type: "text" })}
-                {...described}
-                key={field.key}
-                className="input"
-                inputMode="decimal"
-              />
-            )}
-          </Field>
+          <NumberField key={field.id} field={field} label={label} unit={unit} hint={hint} optional />
         ))}
       </div>
       <fieldset className="border border-hairline p-4">
@@ -94,52 +77,14 @@ export function StudyBoxForm({ lastResult, units, otherBoxes, ring: stored, valu
               key={level.key}
               className="mt-3 grid grid-cols-2 items-start gap-3 sm:grid-cols-[2fr_1fr_1fr_1fr_auto]"
             >
-              <Field id={parts.quantity.id} label="Quantity" errors={parts.quantity.errors}>
-                {(described) => (
-                  <select {...getSelectProps(parts.quantity)} {...described} key={parts.quantity.key} className="input">
-                    {TRIGGER_QUANTITIES.map((id) => (
-                      <option key={id} value={id}>
-                        {quantity(TRIGGER_QUANTITY_IDS[id]).name}
-                      </option>
-                    ))}
-                  </select>
-                )}
-              </Field>
-              <Field id={parts.side.id} label="Side" errors={parts.side.errors}>
-                {(described) => (
-                  <select {...getSelectProps(parts.side)} {...described} key={parts.side.key} className="input">
-                    <option value="below">below</option>
-                    <option value="above">above</option>
-                  </select>
-                )}
-              </Field>
-              <Field
-                id={parts.value.id}
+              <SelectField field={parts.quantity} label="Quantity" options={TRIGGER_CHOICES} />
+              <SelectField field={parts.side} label="Side" options={["below", "above"]} />
+              <NumberField
+                field={parts.value}
                 label="Value"
                 unit={displayUnit(TRIGGER_QUANTITY_IDS[chosen], units).unit}
-                errors={parts.value.errors}
-              >
-                {(described) => (
-                  <input
-                    {...getInputProps(parts.value, { type: "text" })}
-                    {...described}
-                    key={parts.value.key}
-                    className="input"
-                    inputMode="decimal"
-                  />
-                )}
-              </Field>
-              <Field id={parts.hours.id} label="For" unit="h" errors={parts.hours.errors}>
-                {(described) => (
-                  <input
-                    {...getInputProps(parts.hours, { type: "text" })}
-                    {...described}
-                    key={parts.hours.key}
-                    className="input"
-                    inputMode="decimal"
-                  />
-                )}
-              </Field>
+              />
+              <NumberField field={parts.hours} label="For" unit="h" />
               <button
                 {...form.remove.getButtonProps({ name: fields.triggerLevels.name, index })}
                 className="button sm:mt-6"

@@ -1,16 +1,10 @@
-import {
-  getFormProps,
-  getInputProps,
-  getSelectProps,
-  useForm,
-  type FieldMetadata,
-  type SubmissionResult,
-} from "@conform-to/react";
+import { getFormProps, useForm, type FieldMetadata, type SubmissionResult } from "@conform-to/react";
 import { parseWithZod } from "@conform-to/zod/v4";
 import { useMemo, type ReactNode } from "react";
 import { Form } from "react-router";
 import type { z } from "zod";
-import { Field, FormErrors } from "~/components/field";
+import { FormErrors } from "~/components/field";
+import { NumberField, SelectField, TextAreaField, TextField } from "~/components/form-fields";
 import { SubmitButton } from "~/components/submit-button";
 import { fromDisplay } from "~/units/format-quantity";
 import { displayUnit } from "~/units/quantities";
@@ -57,62 +51,26 @@ export function WaterForm({ lastResult, units, values, children }: WaterFormProp
       <FormErrors errors={form.errors} id={form.errorId} />
       <div className="grid items-start gap-x-10 gap-y-6 lg:grid-cols-[minmax(0,1fr)_minmax(0,26rem)]">
         <div className="grid gap-5">
-          <Field id={fields.name.id} label="Name" errors={fields.name.errors}>
-            {(described) => (
-              <input
-                {...getInputProps(fields.name, { type: "text" })}
-                {...described}
-                key={fields.name.key}
-                autoComplete="off"
-                className="input"
-              />
-            )}
-          </Field>
-          <Field
-            id={fields.source.id}
+          <TextField field={fields.name} label="Name" autoComplete="off" />
+          <TextAreaField
+            field={fields.source}
             label="Where the numbers come from"
             hint="Cast, mooring, atlas or judgement, with place and date. It stands in the memo."
-            errors={fields.source.errors}
-          >
-            {(described) => (
-              <textarea
-                {...described}
-                name={fields.source.name}
-                key={fields.source.key}
-                defaultValue={fields.source.initialValue}
-                rows={2}
-                className="input"
-              />
-            )}
-          </Field>
-          <Field id={fields.salinityScale.id} label="Scale of the salinities" errors={fields.salinityScale.errors}>
-            {(described) => (
-              <select
-                {...getSelectProps(fields.salinityScale)}
-                {...described}
-                key={fields.salinityScale.key}
-                className="input"
-              >
-                {SALINITY_SCALES.map(({ value, label }) => (
-                  <option key={value} value={value}>
-                    {label}
-                  </option>
-                ))}
-              </select>
-            )}
-          </Field>
+            rows={2}
+          />
+          <SelectField field={fields.salinityScale} label="Scale of the salinities" options={SALINITY_SCALES} />
           <fieldset className="grid gap-4 border border-hairline p-4 sm:grid-cols-3">
             <legend className="px-1 text-small font-bold text-slate">The layer the storm works on</legend>
-            <NumberInput field={fields.temperature} label="Temperature" unit="°C" />
-            <NumberInput field={fields.salinity} label="Salinity" unit={scaleUnit(scale)} />
-            <NumberInput field={fields.layerDepth} label="Depth" unit={displayUnit("layerDepth", units).unit} />
+            <NumberField field={fields.temperature} label="Temperature" unit="°C" />
+            <NumberField field={fields.salinity} label="Salinity" unit={scaleUnit(scale)} />
+            <NumberField field={fields.layerDepth} label="Depth" unit={displayUnit("layerDepth", units).unit} />
           </fieldset>
           <fieldset className="grid gap-4 border border-hairline p-4 sm:grid-cols-3">
             <legend className="px-1 text-small font-bold text-slate">
               Water below <span className="font-normal text-quiet">· optional, both or neither</span>
             </legend>
-            <NumberInput field={fields.belowTemperature} label="Temperature" unit="°C" />
-            <NumberInput field={fields.belowSalinity} label="Salinity" unit={scaleUnit(scale)} />
+            <NumberField field={fields.belowTemperature} label="Temperature" unit="°C" />
+            <NumberField field={fields.belowSalinity} label="Salinity" unit={scaleUnit(scale)} />
             <p className="text-small text-quiet sm:pt-6">Without it there is no density step, and no deepening.</p>
           </fieldset>
         </div>
@@ -130,31 +88,6 @@ export function WaterForm({ lastResult, units, values, children }: WaterFormProp
         {children}
       </div>
     </Form>
-  );
-}
-
-function NumberInput({
-  field,
-  label,
-  unit,
-}: {
-  field: FieldMetadata<number | undefined>;
-  label: string;
-  unit: string;
-}) {
-  return (
-    <Field id={field.id} label={label} unit={unit} errors={field.errors}>
-      {(described) => (
-        <input
-          {...getInputProps(field, { type: "text" })}
-          {...described}
-          key={field.key}
-          inputMode="decimal"
-          autoComplete="off"
-          className="input"
-        />
-      )}
-    </Field>
   );
 }
 

@@ -1,10 +1,11 @@
-import { getFormProps, getInputProps, useForm } from "@conform-to/react";
+import { getFormProps, useForm } from "@conform-to/react";
 import { getZodConstraint, parseWithZod } from "@conform-to/zod/v4";
 import { data, Form, Link, redirect, useSearchParams } from "react-router";
 import type { z } from "zod";
 import type { Route } from "./+types/sign-in";
 import { AccountPage } from "~/components/account-page";
-import { Field, FormErrors } from "~/components/field";
+import { FormErrors } from "~/components/field";
+import { TextField } from "~/components/form-fields";
 import { SubmitButton } from "~/components/submit-button";
 import { actorContext } from "~/context";
 import { signInSchema } from "~/organisations/account-schema";
@@ -45,28 +46,8 @@ export default function SignIn({ actionData }: Route.ComponentProps) {
       <Form method="post" {...getFormProps(form)} className="grid gap-4">
         <FormErrors errors={form.errors} id={form.errorId} />
         <input type="hidden" name="to" value={search.get("to") ?? ""} />
-        <Field id={fields.email.id} label="E-mail address" errors={fields.email.errors}>
-          {(described) => (
-            <input
-              {...getInputProps(fields.email, { type: "email" })}
-              {...described}
-              key={fields.email.key}
-              className="input"
-              autoComplete="username"
-            />
-          )}
-        </Field>
-        <Field id={fields.password.id} label="Password" errors={fields.password.errors}>
-          {(described) => (
-            <input
-              {...getInputProps(fields.password, { type: "password" })}
-              {...described}
-              key={fields.password.key}
-              className="input"
-              autoComplete="current-password"
-            />
-          )}
-        </Field>
+        <TextField field={fields.email} label="E-mail address" type="email" autoComplete="username" />
+        <TextField field={fields.password} label="Password" type="password" autoComplete="current-password" />
         <SubmitButton busy="Signing in…">Sign in</SubmitButton>
       </Form>
       <p className="mt-6 text-slate">

@@ -1,10 +1,11 @@
-import { getFormProps, getInputProps, useForm } from "@conform-to/react";
+import { getFormProps, useForm } from "@conform-to/react";
 import { getZodConstraint, parseWithZod } from "@conform-to/zod/v4";
 import { data, Form, Link, redirect } from "react-router";
 import type { z } from "zod";
 import type { Route } from "./+types/sign-up";
 import { AccountPage } from "~/components/account-page";
-import { Field, FormErrors } from "~/components/field";
+import { FormErrors } from "~/components/field";
+import { TextField } from "~/components/form-fields";
 import { SubmitButton } from "~/components/submit-button";
 import { actorContext } from "~/context";
 import { signUpSchema } from "~/organisations/account-schema";
@@ -37,47 +38,25 @@ export default function SignUp({ actionData }: Route.ComponentProps) {
     onValidate: ({ formData }) => parseWithZod(formData, { schema: signUpSchema }),
     shouldRevalidate: "onInput",
   });
-  const inputs = [
-    { field: fields.organisationName, label: "Organisation", type: "text", autoComplete: "organization" },
-    {
-      field: fields.name,
-      label: "Your name",
-      type: "text",
-      autoComplete: "name",
-      hint: "As it stands on a memo, for example R. Ansel.",
-    },
-    { field: fields.email, label: "E-mail address", type: "email", autoComplete: "username" },
-    {
-      field: fields.password,
-      label: "Password",
-      type: "password",
-      autoComplete: "new-password",
-      hint: "At least 12 characters. A few words in a row are easy to keep; pasting is fine.",
-    },
-  ] as const;
   return (
     <AccountPage title="Make an account">
       <Form method="post" {...getFormProps(form)} className="grid gap-4">
         <FormErrors errors={form.errors} id={form.errorId} />
-        {inputs.map(({ field, label, type, autoComplete, ...rest }) => (
-          <Field
-            key={field.id}
-            id={field.id}
-            label={label}
-            hint={"hint" in rest ? rest.hint : undefined}
-            errors={field.errors}
-          >
-            {(described) => (
-              <input
-                {...getInputProps(field, { type })}
-                {...described}
-                key={field.key}
-                className="input"
-                autoComplete={autoComplete}
-              />
-            )}
-          </Field>
-        ))}
+        <TextField field={fields.organisationName} label="Organisation" autoComplete="organization" />
+        <TextField
+          field={fields.name}
+          label="Your name"
+          autoComplete="name"
+          hint="As it stands on a memo, for example R. Ansel."
+        />
+        <TextField field={fields.email} label="E-mail address" type="email" autoComplete="username" />
+        <TextField
+          field={fields.password}
+          label="Password"
+          type="password"
+          autoComplete="new-password"
+          hint="At least 12 characters. A few words in a row are easy to keep; pasting is fine."
+        />
         <SubmitButton busy="Making the account…">Make the account</SubmitButton>
       </Form>
       <p className="mt-6 text-slate">

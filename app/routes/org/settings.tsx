@@ -1,9 +1,10 @@
-import { getFormProps, getInputProps, getSelectProps, useForm } from "@conform-to/react";
+import { getFormProps, useForm } from "@conform-to/react";
 import { parseWithZod } from "@conform-to/zod/v4";
 import { data, Form } from "react-router";
 import type { z } from "zod";
 import type { Route } from "./+types/settings";
-import { Field, FormErrors } from "~/components/field";
+import { FormErrors } from "~/components/field";
+import { SelectField, TextField } from "~/components/form-fields";
 import { PageTitle } from "~/components/page-title";
 import { SubmitButton } from "~/components/submit-button";
 import { saveSettings } from "~/organisations/save-settings.server";
@@ -54,28 +55,10 @@ export default function Settings({ loaderData, actionData }: Route.ComponentProp
       )}
       <Form method="post" {...getFormProps(form)} className="grid gap-4">
         <FormErrors errors={form.errors} id={form.errorId} />
-        <Field id={fields.name.id} label="Name" hint="It heads every memo." errors={fields.name.errors}>
-          {(described) => (
-            <input
-              {...getInputProps(fields.name, { type: "text" })}
-              {...described}
-              key={fields.name.key}
-              className="input"
-              autoComplete="organization"
-            />
-          )}
-        </Field>
+        <TextField field={fields.name} label="Name" hint="It heads every memo." autoComplete="organization" />
         <div className="grid gap-4 sm:grid-cols-2">
           {choices.map(({ field, label, options }) => (
-            <Field key={field.id} id={field.id} label={label} errors={field.errors}>
-              {(described) => (
-                <select {...getSelectProps(field)} {...described} key={field.key} className="input">
-                  {options.map((option) => (
-                    <option key={option}>{option}</option>
-                  ))}
-                </select>
-              )}
-            </Field>
+            <SelectField key={field.id} field={field} label={label} options={options} />
           ))}
         </div>
         <div>
