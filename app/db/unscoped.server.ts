@@ -1,12 +1,13 @@
 /**
  * Look-ups that come before an organisation is known: who signs in, which organisations a person belongs to,
- * what a share link opens, which estimates wait for a worker. Each returns the organisation with what it found,
+ * what a share link opens, what a stamp stands for, which estimates wait for a worker. Each returns the organisation with what it found,
  * so that everything after goes through `forOrganisation`.
  */
 import type { Transaction } from "sequelize";
 import { newId } from "./id.server";
 import { Estimate } from "./models/estimate.server";
 import { Membership } from "./models/membership.server";
+import { MemoRevision } from "./models/memo-revision.server";
 import { Organisation } from "./models/organisation.server";
 import { ShareLink } from "./models/share-link.server";
 import { User } from "./models/user.server";
@@ -78,6 +79,10 @@ export async function namesOfUsers(ids: Iterable<string>): Promise<Map<string, s
 
 export async function findShareLinkByTokenHash(tokenHash: string): Promise<ShareLink | null> {
   return ShareLink.findOne({ where: { tokenHash } });
+}
+
+export async function findRevisionByStamp(stamp: string): Promise<{ organisationId: string; id: string } | null> {
+  return MemoRevision.findOne({ where: { stamp }, attributes: ["organisationId", "id"] });
 }
 
 /** What a stopped server left unfinished, oldest first. */

@@ -5,6 +5,7 @@ import type { MemoRevision } from "~/db/models/memo-revision.server";
 import type { ShareLink } from "~/db/models/share-link.server";
 import { forOrganisation } from "~/db/scoped.server";
 import { findShareLinkByTokenHash } from "~/db/unscoped.server";
+import { supersededBy } from "~/memo/superseded-by.server";
 
 /** Kept out of search engines, caches and the referrer of whatever is clicked next. */
 export const SHARE_HEADERS = {
@@ -57,11 +58,6 @@ export async function openShare(request: Request, linkId: string, act: "opened" 
   const tenant = forOrganisation(link.organisationId);
   const revision = await tenant.memoRevisions.find(link.memoRevisionId);
   if (!revision) closed();
-  const latest = await tenant.memoRevisions.first({
-    where: { memoId: revision.memoId },
-    order: [["sequence", "DESC"]],
-    without: ["pdf", "document"],
-  });
   await tenant.shareVisits.create({ shareLinkId: link.id, act });
-  return { revision, supersededBy: latest && latest.sequence > revision.sequence ? latest.label : null };
+  return { revision, supersededBy: await supersededBy(tenant, revision) };
 }

@@ -55,6 +55,9 @@ export default function Landing() {
           </div>
         ))}
       </dl>
+      <p className="mt-8 text-slate">
+        Someone sent you a memo? <Link to="/verify">Verify it by its stamp</Link>
+      </p>
       <p className="mt-10 max-w-prose text-small text-quiet">{CAUTION}</p>
     </main>
   );

@@ -48,7 +48,9 @@ export default function SharedMemo({ loaderData }: Route.ComponentProps) {
           </p>
         )}
         <DocumentView document={document} />
-        <p className="mt-6 break-all text-small text-quiet">SHA-256 of the PDF: {pdfSha256}</p>
+        <p className="mt-6 break-all text-small text-quiet">
+          SHA-256 of the PDF: {pdfSha256}. <a href={`/verify?stamp=${stamp}`}>Hold a file against it</a>
+        </p>
       </main>
     </div>
   );
