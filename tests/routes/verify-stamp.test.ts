@@ -1,3 +1,4 @@
+import { createHash } from "node:crypto";
 import { afterAll, beforeAll, expect, inject, test } from "vitest";
 import { HttpClient } from "../factories/http";
 import { makeTenants, type Tenants } from "../factories/tenants";
@@ -14,10 +15,10 @@ beforeAll(async () => {
   const { organisation, project, memo, revision } = tenants.parameters;
   const { email, password } = tenants.people.viewer;
   const viewer = await new HttpClient(server.url).signIn(email, password);
-  const page = await viewer.get(`/o/${organisation}/projects/${project}/memos/${memo}/revisions/${revision}`);
-  const text = await page.text();
-  stamp = /GP-[0-9A-Z]{4}-[0-9A-Z]{4}/.exec(text)?.[0] ?? "";
-  pdfSha256 = /[0-9a-f]{64}/.exec(text)?.[0] ?? "";
+  const address = `/o/${organisation}/projects/${project}/memos/${memo}/revisions/${revision}`;
+  stamp = /GP-[0-9A-Z]{4}-[0-9A-Z]{4}/.exec(await (await viewer.get(address)).text())?.[0] ?? "";
+  const pdf = await (await viewer.get(`${address}/memo.pdf`)).arrayBuffer();
+  pdfSha256 = createHash("sha256").update(Buffer.from(pdf)).digest("hex");
 });
 
 afterAll(async () => {
