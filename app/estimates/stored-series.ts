@@ -1,6 +1,14 @@
-/** A response's long arrays as flat rows, and back: its series, and the profiles of the column model. */
+/** A response's long arrays as flat rows, and back: its series, their bands, and the profiles of the column model. */
 import { isoTime } from "./build-scenario";
-import { SERIES_UNITS, type ResponseColumn, type ResponseSeries, type SeriesName } from "~/ocean/response";
+import {
+  SERIES_NAMES,
+  SERIES_UNITS,
+  type Response,
+  type ResponseColumn,
+  type ResponseSeries,
+  type SeriesBands,
+  type SeriesName,
+} from "~/ocean/response";
 import { epochSeconds } from "~/units/format-time";
 
 /** By time, then depth. */
@@ -13,7 +21,12 @@ const PROFILE_UNITS = {
 } as const;
 type ProfileName = keyof typeof PROFILE_UNITS;
 
-export type StoredSeriesName = SeriesName | "column.depth" | "column.time" | `column.${ProfileName}`;
+const PERCENTILES = ["p10", "p50", "p90"] as const;
+type Percentile = (typeof PERCENTILES)[number];
+
+type ProfileRow = "column.depth" | "column.time" | `column.${ProfileName}`;
+type BandRow = "band.time" | `band.${Percentile}.${SeriesName}`;
+export type StoredSeriesName = SeriesName | BandRow | ProfileRow;
 
 export interface StoredSeries {
   name: StoredSeriesName;
@@ -21,14 +34,38 @@ export interface StoredSeries {
   values: number[];
 }
 
-export const SERIES_NAMES = Object.keys(SERIES_UNITS) as SeriesName[];
 const PROFILE_NAMES = Object.keys(PROFILE_UNITS) as ProfileName[];
 
-export function storedSeries(series: ResponseSeries, column: ResponseColumn | undefined): StoredSeries[] {
-  const rows: StoredSeries[] = SERIES_NAMES.map((name) => ({ name, unit: SERIES_UNITS[name], values: series[name] }));
-  if (!column) return rows;
+/** All that a response has but for its profiles, by far its longest part. */
+export const ROWS_WITHOUT_PROFILES: readonly StoredSeriesName[] = [
+  ...SERIES_NAMES,
+  "band.time",
+  ...SERIES_NAMES.flatMap((name) => PERCENTILES.map((p): BandRow => `band.${p}.${name}`)),
+];
+
+export function storedSeries({ series, bands, column }: Pick<Response, "series" | "bands" | "column">): StoredSeries[] {
   return [
-    ...rows,
+    ...SERIES_NAMES.map((name) => ({ name, unit: SERIES_UNITS[name], values: series[name] })),
+    ...(bands ? bandRows(bands) : []),
+    ...(column ? profileRows(column) : []),
+  ];
+}
+
+function bandRows({ time, series }: SeriesBands): StoredSeries[] {
+  return [
+    { name: "band.time", unit: "s", values: time.map(epochSeconds) },
+    ...SERIES_NAMES.flatMap((name) =>
+      PERCENTILES.map((p): StoredSeries => ({
+        name: `band.${p}.${name}`,
+        unit: SERIES_UNITS[name],
+        values: series[name][p],
+      })),
+    ),
+  ];
+}
+
+function profileRows(column: ResponseColumn): StoredSeries[] {
+  return [
     { name: "column.depth", unit: "m", values: column.depth },
     { name: "column.time", unit: "s", values: column.time.map(epochSeconds) },
     ...PROFILE_NAMES.map((name): StoredSeries => ({
@@ -51,6 +88,17 @@ function valuesOf(stored: StoredValues, name: StoredSeriesName): number[] {
 export function readSeries(seconds: number[], stored: StoredValues): ResponseSeries {
   const series = Object.fromEntries(SERIES_NAMES.map((name) => [name, valuesOf(stored, name)]));
   return { time: seconds.map(isoTime), ...(series as Record<SeriesName, number[]>) };
+}
+
+/** Null where no ensemble ran. */
+export function readBands(stored: StoredValues): SeriesBands | null {
+  const time = stored.get("band.time");
+  if (!time) return null;
+  const series = SERIES_NAMES.map((name) => {
+    const band = PERCENTILES.map((p) => [p, valuesOf(stored, `band.${p}.${name}`)] as const);
+    return [name, Object.fromEntries(band) as Record<Percentile, number[]>] as const;
+  });
+  return { time: time.map(isoTime), series: Object.fromEntries(series) as SeriesBands["series"] };
 }
 
 export function readColumn(stored: StoredValues): ResponseColumn | null {

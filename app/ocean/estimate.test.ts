@@ -307,23 +307,3 @@ describe("estimate: what stands in a response", () => {
     expect(series.temperature[24]).toBeLessThan(20);
   });
 });
-
-describe("estimate: ensembles", () => {
-  const scenario = { ...plainScenario({ hours: 24 }), ensemble: { members: 40, seed: 7 } };
-
-  it("gives the same bands for the same seed, and others for another", () => {
-    expect(estimate(scenario)).toEqual(estimate(scenario));
-    const other = estimate({ ...scenario, ensemble: { members: 40, seed: 8 } });
-    expect(other.headline.peakDrift.p50).not.toBe(estimate(scenario).headline.peakDrift.p50);
-  });
-
-  it("orders its percentiles and leaves the value itself as it is without members", () => {
-    const { headline } = estimate(scenario);
-    const { peakStress, netDisplacement } = headline;
-    for (const { p10, p50, p90 } of [peakStress, netDisplacement]) {
-      expect(p10).toBeLessThan(p50 ?? 0);
-      expect(p50).toBeLessThan(p90 ?? 0);
-    }
-    expect(peakStress.value).toBe(estimate(plainScenario({ hours: 24 })).headline.peakStress.value);
-  });
-});

@@ -1,5 +1,5 @@
 import { CAUTION } from "./caution";
-import { withBands } from "./ensemble/run-ensemble";
+import { runEnsemble } from "./ensemble/run-ensemble";
 import { OceanError } from "./errors";
 import { fitContext } from "./fit/fit-context";
 import { fitNotes } from "./fit/fit-notes";
@@ -26,7 +26,7 @@ import { ENGINE_VERSION } from "./version";
  *   stress   → motion of the layer: steady Ekman, slab or coastal balance; or of every cell of a column
  *   heat, rain → temperature and salinity of the layer, or of every cell
  *   all of it → series, headline figures, triggers, fit notes
- *   members   → the same with uncertain inputs varied: a band beside every headline figure
+ *   members   → the same with uncertain inputs varied: a band beside every figure and series, and what they depend on
  *
  * @throws ScenarioInvalid with every problem found, each with its path, code and what to do
  */
@@ -36,9 +36,10 @@ export function estimate(scenario: Scenario): Response {
   const run = refusing(() => runModel(scenario));
   const series = responseSeries(scenario, run);
   const fit = fitContext(scenario, run);
+  const ensemble = refusing(() => runEnsemble(scenario, run, headlineOf(scenario, run, series)));
   const { model: recommendedModel, reason: recommendation } = recommendModel(fit);
   return {
-    headline: refusing(() => withBands(scenario, headlineOf(scenario, run, series))),
+    ...ensemble,
     series,
     ...(run.column && { column: responseColumn(scenario, run.column) }),
     fitNotes: fitNotes(fit),

@@ -40,6 +40,20 @@ export interface Headline {
   triggers: TriggerOutcome[];
 }
 
+/** The headline figures that are one number each. */
+export const HEADLINE_FIGURES = [
+  "peakStress",
+  "peakDrift",
+  "netDisplacement",
+  "transportAlong",
+  "transportAcross",
+  "surfaceSalinity",
+  "surfaceTemperature",
+  "layerDepth",
+  "densityStep",
+] as const satisfies readonly (keyof Headline)[];
+export type HeadlineFigureName = (typeof HEADLINE_FIGURES)[number];
+
 export const SERIES_UNITS = {
   stressX: "N/m²",
   stressY: "N/m²",
@@ -55,9 +69,43 @@ export const SERIES_UNITS = {
   layerDepth: "m",
 } as const;
 export type SeriesName = keyof typeof SERIES_UNITS;
+export const SERIES_NAMES = Object.keys(SERIES_UNITS) as SeriesName[];
 
 /** All of one length; plain arrays, so that they survive JSON. */
 export type ResponseSeries = { time: (string | number)[] } & Record<SeriesName, number[]>;
+
+/** Percentiles of every series over an ensemble; of a long storm at some of its samples. */
+export interface SeriesBands {
+  time: (string | number)[];
+  series: Record<SeriesName, Record<keyof Band, number[]>>;
+}
+
+/** A factor's setting and the headline figure that came of it, all else as in the scenario. */
+export interface FactorTrial {
+  setting: string;
+  value: number;
+}
+
+/** What one headline figure depends on. */
+export interface FigureEffects {
+  figure: HeadlineFigureName;
+  /** The scenario's own value. */
+  value: number;
+  /** One factor at a time through its range, the widest first. */
+  bars: { factor: string; low: FactorTrial; high: FactorTrial }[];
+  /** Share of the figure's variance that each factor alone explains, 0…1, the greatest first; none under 64 members, null where nothing varies. */
+  firstOrder: { factor: string; index: number | null }[];
+}
+
+export interface Uncertainty {
+  /** Members asked for, and those that could be computed. */
+  members: number;
+  computed: number;
+  seed: number;
+  /** What was varied, how far, and where that range comes from. */
+  factors: { name: string; range: string; basis: string }[];
+  effects: FigureEffects[];
+}
 
 export type FitSeverity = "ok" | "caution" | "doNotUse";
 
@@ -108,6 +156,9 @@ export interface Response {
   series: ResponseSeries;
   /** Model `column` only. */
   column?: ResponseColumn;
+  /** Where an ensemble ran: percentiles of the series, and what the headline figures depend on. */
+  bands?: SeriesBands;
+  uncertainty?: Uncertainty;
   fitNotes: FitNote[];
   recommendedModel: ModelId;
   /** Why that model, in a sentence. */

@@ -1,131 +1,157 @@
 import { DRAG_LAWS, type DragLawId, type Scenario } from "../scenario";
-
-/** One uncertain input: where its number in 0…1 leads, and how the scenario changes. */
-export interface Factor {
-  name: string;
-  /** Range in words, with its unit. */
-  range: string;
-  /** Whether the scenario has what the factor varies. */
-  applies: (scenario: Scenario) => boolean;
-  vary: (scenario: Scenario, u: number) => Scenario;
-}
+import { dragLawName } from "../stress/drag-law-names";
+import { heated, saltier, steepened, stretched, warmer, withMethod, withStorm } from "./change-scenario";
+import type { Factor } from "./factor";
 
 /** Laws that members draw from: every published one; the constant is an order of magnitude only. */
 const LAWS: readonly DragLawId[] = DRAG_LAWS.filter((law) => law !== "constant");
+/** From clear to turbid, in the order of the table of water types. */
+const CLARITIES = ["I", "IA", "IB", "II", "III"] as const;
+type Clarity = (typeof CLARITIES)[number];
+
+const CONVENTION = "a convention of this engine";
 
 const between = (low: number, high: number, u: number): number => low + (high - low) * u;
+const chosen = <Choice>(choices: readonly Choice[], u: number): Choice =>
+  choices[Math.min(choices.length - 1, Math.floor(u * choices.length))];
+const signed = (value: number, unit: string) => `${value > 0 ? "+" : value < 0 ? "−" : ""}${Math.abs(value)} ${unit}`;
+const percent = (factor: number) => signed(Math.round(100 * (factor - 1)), "%");
 
-const model = ({ method }: Scenario) => method?.model ?? "slab";
+/** The type and its neighbours in the table. */
+function neighbours(type: Clarity): Clarity[] {
+  const at = CLARITIES.indexOf(type);
+  return CLARITIES.slice(Math.max(0, at - 1), at + 2);
+}
+
+const thirdToThree = (u: number): number => Math.exp(between(-1, 1, u) * Math.log(3));
+
+/** Something multiplied by a factor from low to high. */
+function scaled(low: number, high: number, change: (scenario: Scenario, factor: number) => Scenario) {
+  return {
+    vary: (scenario: Scenario, u: number) => change(scenario, between(low, high, u)),
+    setting: (u: number) => percent(between(low, high, u)),
+  };
+}
+
+/** Something raised or lowered by up to `most`. */
+function shifted(most: number, unit: string, change: (scenario: Scenario, by: number) => Scenario) {
+  return {
+    vary: (scenario: Scenario, u: number) => change(scenario, between(-most, most, u)),
+    setting: (u: number) => signed(between(-most, most, u), unit),
+  };
+}
 
 /**
- * What members vary, with the ranges of this engine's convention. The drag law is drawn anew only where it was left to
- * the engine: a law that was chosen is the user's own statement.
+ * What members vary, and how far. The drag law, the damping and the water type are drawn anew only where they were left
+ * to the engine: what was chosen is the user's own statement.
  */
 export const FACTORS: readonly Factor[] = [
   {
     name: "drag law",
-    range: LAWS.join(", "),
+    range: LAWS.map(dragLawName).join(", "),
+    basis: "the spread of published laws",
     applies: ({ method }) => method?.dragLaw === undefined,
-    vary: (scenario, u) =>
-      withMethod(scenario, { dragLaw: LAWS[Math.min(LAWS.length - 1, Math.floor(u * LAWS.length))] }),
+    vary: (scenario, u) => withMethod(scenario, { dragLaw: chosen(LAWS, u) }),
+    setting: (u) => dragLawName(chosen(LAWS, u)),
+    choices: () => LAWS.length,
   },
   {
     name: "wind speed",
     range: "±10 %",
+    basis: CONVENTION,
     applies: () => true,
-    vary: (scenario, u) =>
-      withStorm(scenario, { windSpeed: scenario.storm.windSpeed.map((speed) => speed * between(0.9, 1.1, u)) }),
+    ...scaled(0.9, 1.1, (scenario, factor) =>
+      withStorm(scenario, { windSpeed: scenario.storm.windSpeed.map((speed) => speed * factor) }),
+    ),
   },
   {
     name: "wind direction",
     range: "±10°",
+    basis: CONVENTION,
     applies: () => true,
-    vary: (scenario, u) =>
-      withStorm(scenario, {
-        windFrom: scenario.storm.windFrom.map((from) => (from + between(-10, 10, u) + 360) % 360),
-      }),
+    ...shifted(10, "°", (scenario, turn) =>
+      withStorm(scenario, { windFrom: scenario.storm.windFrom.map((from) => (from + turn + 360) % 360) }),
+    ),
+  },
+  {
+    name: "averaging of the wind",
+    range: "85 to 100 % of a parametric wind",
+    basis: "between the 10-minute and the 1-minute mean (WMO/TD-1555; from memory)",
+    // Measured wind comes with its averaging period, which its reading sheet has settled.
+    applies: ({ storm }) => storm.cyclone !== undefined,
+    ...scaled(0.85, 1, (scenario, factor) =>
+      withStorm(scenario, { windSpeed: scenario.storm.windSpeed.map((speed) => speed * factor) }),
+    ),
   },
   {
     name: "layer depth",
     range: "±20 %",
+    basis: CONVENTION,
     applies: () => true,
-    vary: (scenario, u) => stretched(scenario, between(0.8, 1.2, u)),
+    ...scaled(0.8, 1.2, stretched),
   },
   {
     name: "step below the layer",
-    range: "±30 %",
+    range: "±30 % of the temperature step",
+    basis: CONVENTION,
     applies: ({ water }) => "cast" in water || water.below !== undefined,
-    vary: (scenario, u) => steepened(scenario, between(0.7, 1.3, u)),
+    ...scaled(0.7, 1.3, steepened),
   },
   {
-    name: "damping",
-    range: "1/2 to 1/10 per day",
-    applies: (scenario) => model(scenario) === "slab" && scenario.method?.dampingRate === undefined,
-    vary: (scenario, u) => withMethod(scenario, { dampingRate: 1 / (86400 * between(2, 10, u)) }),
+    name: "start temperature",
+    range: "±0.5 °C at every depth",
+    basis: CONVENTION,
+    applies: () => true,
+    ...shifted(0.5, "°C", warmer),
   },
   {
-    name: "eddy viscosity",
-    range: "a third to three times, evenly in its logarithm",
-    applies: (scenario) =>
-      scenario.method?.eddyViscosity !== undefined &&
-      (model(scenario) === "coastal" || scenario.method.ekman === "finiteDepth"),
-    vary: (scenario, u) =>
-      withMethod(scenario, {
-        eddyViscosity: Math.min(10, (scenario.method?.eddyViscosity ?? 0) * 3 ** between(-1, 1, u)),
-      }),
+    name: "start salinity",
+    range: "±0.2 g/kg at every depth",
+    basis: CONVENTION,
+    applies: () => true,
+    ...shifted(0.2, "g/kg", saltier),
+  },
+  {
+    name: "rain",
+    range: "±30 %",
+    basis: CONVENTION,
+    applies: ({ storm }) => storm.rain?.some((rate) => rate > 0) ?? false,
+    ...scaled(0.7, 1.3, (scenario, factor) =>
+      withStorm(scenario, { rain: scenario.storm.rain?.map((rate) => rate * factor) }),
+    ),
   },
   {
     name: "heat flux",
     range: "±50 W/m²",
+    basis: CONVENTION,
     applies: ({ storm }) => storm.heat !== undefined,
-    vary: (scenario, u) => warmed(scenario, between(-50, 50, u)),
+    ...shifted(50, "W/m²", heated),
+  },
+  {
+    name: "water clarity",
+    range: "one water type clearer to one more turbid",
+    basis: "Paulson & Simpson (1977), neighbouring rows of the table",
+    applies: ({ storm, method: choices }, { penetratingShortwave }) =>
+      penetratingShortwave && storm.heat?.shortwave !== undefined && choices?.waterType === undefined,
+    vary: (scenario, u, { waterType }) => withMethod(scenario, { waterType: chosen(neighbours(waterType), u) }),
+    setting: (u, { waterType }) => `type ${chosen(neighbours(waterType), u)}`,
+    choices: ({ waterType }) => neighbours(waterType).length,
+  },
+  {
+    name: "damping",
+    range: "1/2 to 1/10 per day",
+    basis: CONVENTION,
+    applies: ({ method: choices }, { model }) => model === "slab" && choices?.dampingRate === undefined,
+    vary: (scenario, u) => withMethod(scenario, { dampingRate: 1 / (86400 * between(2, 10, u)) }),
+    setting: (u) => `1/${Number(between(2, 10, u).toPrecision(2))} per day`,
+  },
+  {
+    name: "eddy viscosity",
+    range: "a third to three times, evenly in its logarithm",
+    basis: CONVENTION,
+    applies: (_, { model, ekman }) => model === "coastal" || (model === "budget" && ekman === "finiteDepth"),
+    vary: (scenario, u, { eddyViscosity }) =>
+      withMethod(scenario, { eddyViscosity: Math.min(10, eddyViscosity * thirdToThree(u)) }),
+    setting: (u) => `× ${Number(thirdToThree(u).toPrecision(2))}`,
   },
 ];
-
-function withMethod(scenario: Scenario, change: Partial<NonNullable<Scenario["method"]>>): Scenario {
-  return { ...scenario, method: { ...scenario.method, ...change } };
-}
-
-function withStorm(scenario: Scenario, change: Partial<Scenario["storm"]>): Scenario {
-  return { ...scenario, storm: { ...scenario.storm, ...change } };
-}
-
-function stretched(scenario: Scenario, factor: number): Scenario {
-  const { water } = scenario;
-  if (!("cast" in water)) return { ...scenario, water: { ...water, layerDepth: water.layerDepth * factor } };
-  const cast = water.cast.map((level) => ({ ...level, depth: level.depth * factor }));
-  const layerDepth = water.layerDepth === undefined ? undefined : water.layerDepth * factor;
-  return { ...scenario, water: { cast, ...(layerDepth !== undefined && { layerDepth }) } };
-}
-
-/** Moves the water below away from (or towards) the surface's temperature; salinity stays, so that the step keeps its sense. */
-function steepened(scenario: Scenario, factor: number): Scenario {
-  const { water } = scenario;
-  const scaled = (surface: number, value: number) => Math.min(45, Math.max(-4, surface + (value - surface) * factor));
-  if ("cast" in water) {
-    const surface = water.cast[0].temperature;
-    return {
-      ...scenario,
-      water: {
-        ...water,
-        cast: water.cast.map((level) => ({ ...level, temperature: scaled(surface, level.temperature) })),
-      },
-    };
-  }
-  if (!water.below) return scenario;
-  return {
-    ...scenario,
-    water: { ...water, below: { ...water.below, temperature: scaled(water.temperature, water.below.temperature) } },
-  };
-}
-
-function warmed(scenario: Scenario, offset: number): Scenario {
-  const heat = { ...scenario.storm.heat };
-  const added = (["net", "sensible", "longwave", "latent", "shortwave"] as const).find(
-    (name) => heat[name] !== undefined,
-  );
-  if (!added) return scenario;
-  // Added to a flux that neither evaporates water nor shines into it where there is one.
-  const offsetSeries = (heat[added] ?? []).map((flux) => flux + offset);
-  return withStorm(scenario, { heat: { ...heat, [added]: offsetSeries } });
-}

@@ -1,0 +1,61 @@
+import { OceanError } from "../errors";
+import { headlineOf } from "../headline/headline";
+import { responseSeries } from "../headline/response-series";
+import { runModel } from "../models/run-model";
+import { SERIES_NAMES, type Headline, type SeriesName } from "../response";
+import type { Scenario } from "../scenario";
+
+/** The headline figures and the series of one run. */
+export interface MemberResult {
+  headline: Headline;
+  series: Record<SeriesName, number[]>;
+}
+
+/**
+ * Runs one member. It may fall over an edge that the scenario itself does not, such as a thinner layer that evaporates away.
+ * @returns null there
+ */
+export function runMember(scenario: Scenario): MemberResult | null {
+  try {
+    const run = runModel(scenario);
+    const series = responseSeries(scenario, run);
+    return { headline: headlineOf(scenario, run, series), series };
+  } catch (error) {
+    if (error instanceof OceanError) return null;
+    throw error;
+  }
+}
+
+/** Samples kept of every series at most: a figure shows no more, and a thousand members of a long storm fit into memory. */
+const MOST_SAMPLES = 500;
+
+/** The series of many members at some of the storm's samples, one array a series, sample by sample. */
+export class MemberSeries {
+  /** Which of the storm's samples are kept. */
+  readonly samples: number[];
+  private readonly kept: Record<SeriesName, Float64Array>;
+  private readonly members: number;
+  private count = 0;
+
+  constructor(members: number, length: number) {
+    const every = Math.ceil(length / MOST_SAMPLES);
+    this.members = members;
+    this.samples = Array.from({ length }, (_, k) => k).filter((k) => k % every === 0 || k === length - 1);
+    const room = () => new Float64Array(members * this.samples.length);
+    this.kept = Object.fromEntries(SERIES_NAMES.map((name) => [name, room()])) as Record<SeriesName, Float64Array>;
+  }
+
+  add(series: Record<SeriesName, number[]>): void {
+    for (const name of SERIES_NAMES) {
+      const [into, from] = [this.kept[name], series[name]];
+      for (let k = 0; k < this.samples.length; k++) into[k * this.members + this.count] = from[this.samples[k]];
+    }
+    this.count += 1;
+  }
+
+  /** All members' values of a series at one of the kept samples. */
+  at(name: SeriesName, sample: number): Float64Array {
+    const start = sample * this.members;
+    return this.kept[name].subarray(start, start + this.count);
+  }
+}
