@@ -18,9 +18,11 @@ export function headers({ loaderHeaders }: Route.HeadersArgs) {
 }
 
 function problemOf(verdict: StampVerdict | null): string[] | undefined {
-  if (verdict?.kind === "misread") return ["This is no stamp. A stamp reads like GP-7K2M-41XQ; mind every sign."];
+  if (verdict?.kind === "misread") return ["This is no stamp. A stamp reads like GP-7K2M-41XQ."];
   if (verdict?.kind === "unknown")
-    return [`No memo was issued here under ${verdict.stamp}. Check the signs; if they are right, do not rely on it.`];
+    return [
+      `No memo was issued here under ${verdict.stamp}. Check its letters and digits; if they are right, do not rely on the memo.`,
+    ];
   return undefined;
 }
 
