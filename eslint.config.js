@@ -15,5 +15,20 @@ export default tseslint.config(
       "no-console": ["error", { allow: ["error", "warn"] }],
     },
   },
+  {
+    // Their last bits differ between JavaScript engines; see "Same numbers everywhere" in DEVELOPERS.md.
+    files: ["app/ocean/**"],
+    ignores: ["**/*.test.ts"],
+    rules: {
+      "no-restricted-syntax": [
+        "error",
+        { selector: "BinaryExpression[operator='**']:not([right.value=2])", message: "Use power() of ocean/power." },
+      ],
+      "no-restricted-properties": [
+        "error",
+        ...["pow", "tanh"].map((property) => ({ object: "Math", property, message: "Write it by exp and log." })),
+      ],
+    },
+  },
   { files: ["app/cli/**", "docker/**", "tests/bench/**", "tests/setup/**"], rules: { "no-console": "off" } },
 );
