@@ -51,6 +51,9 @@ describe("draftAnswer", () => {
     const text = answer({}, { fitNotes: [...sampleResponse().fitNotes, note] });
     expect(text).toMatch(/^The method should not be used here: the box lies at 1° latitude\. At Skarrow Bay/);
     const wordy = { ...note, message: "a word ".repeat(60) };
+    const cited = { ...note, message: "The wind passes the range of Trenberth et al. (1990). Take another law." };
+    expect(answer({}, { fitNotes: [cited] })).toContain("here: the wind passes the range of Trenberth et al. (1990).");
+    expect(answer({}, { fitNotes: [cited] })).not.toContain("another law");
     expect(answer({}, { fitNotes: [wordy] })).toMatch(/^The method should not be used here: see the fit notes\. At /);
   });
 

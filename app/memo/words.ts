@@ -196,9 +196,9 @@ function limit({ fitNotes }: Response): Sentence[] {
 
 const LONGEST_CLAUSE = 40;
 
-/** A note's first sentence, to follow a colon. */
+/** A note's first sentence, to follow a colon; "et al. (1990)" ends none. */
 function asClause(message: string): string {
-  const first = /^.*?[.!?](?=\s|$)/s.exec(message.trim())?.[0] ?? `${message.trim()}.`;
+  const first = /^.*?[.!?](?=\s+\p{Lu}|$)/su.exec(message.trim())?.[0] ?? `${message.trim()}.`;
   if (wordsIn(first) > LONGEST_CLAUSE) return "see the fit notes.";
   const [head = "", second = ""] = first;
   const lowered = second === second.toLowerCase() && /\p{L}|\s/u.test(second);
