@@ -4,6 +4,7 @@ import { index, prefix, route, type RouteConfig } from "@react-router/dev/routes
 export default [
   index("routes/public/landing.tsx"),
   route("verify", "routes/public/verify.tsx"),
+  route("methods", "routes/public/methods.tsx"),
   route("basemap/:z/:x/:y", "routes/basemap-tile.ts"),
 
   route("sign-in", "routes/account/sign-in.tsx"),

@@ -11,7 +11,6 @@ import {
 } from "./method-parameters";
 import { bandEnds, bandMark, type SmallMark } from "~/figures/small-marks";
 import type { FitSeverity, Response, TriggerOutcome } from "~/ocean/response";
-import { methodSources, type MethodSource } from "~/ocean/sources";
 import { formatTime } from "~/units/format-time";
 import { quantity, type ColourToken } from "~/units/quantities";
 import type { UnitChoices } from "~/units/unit-choices";
@@ -57,7 +56,6 @@ export interface ResponseView {
   fitNotes: { severity: FitSeverity; word: string; message: string; source: string }[];
   recommendation: string;
   method: MethodRowView[];
-  sources: MethodSource[];
   budgets: BudgetView[];
   caution: string;
 }
@@ -129,7 +127,6 @@ export function presentResponse(response: Response, context: FigureContext): Res
         },
       ];
     }),
-    sources: methodSources(method),
     budgets: BUDGETS.map(({ key, label, unit }) => ({
       label,
       unit,

@@ -93,7 +93,7 @@ describe("composeMemo", () => {
   });
 
   it("gives each equation the number of its reference", () => {
-    const used = methodSources(sampleResponse().method);
+    const used = methodSources(sampleResponse());
     const equations = all(memo.blocks, "equation");
     const { items } = all(memo.blocks, "references")[0]!;
     expect(equations.map(({ name }) => name)).toEqual(used.map(({ title }) => title));

@@ -30,6 +30,8 @@ export interface MethodSource {
   doi?: string;
   /** Plain text; one line a relation. */
   equation: string;
+  /** The same as TeX, to be typeset; one string a line. */
+  tex: readonly string[];
   symbols: MethodSymbol[];
   validRange: string;
   provenance: Provenance;

@@ -19,7 +19,7 @@ describe("sources", () => {
 
   it("gives a response the sources of what it used, in the order of the work", () => {
     const ids = methodSources(
-      estimate(plainScenario({ method: { model: "slab", dragLaw: "smith1980", rainHeat: true } })).method,
+      estimate(plainScenario({ method: { model: "slab", dragLaw: "smith1980", rainHeat: true } })),
     ).map(({ id }) => id);
     expect(ids).toContain("slab");
     expect(ids).toContain("drag-smith1980");

@@ -14,6 +14,7 @@ export interface Rule {
 export const RULES: Record<string, Rule> = {
   "routes/public/landing.tsx": { get: "public", post: null },
   "routes/public/verify.tsx": { get: "public", post: null },
+  "routes/public/methods.tsx": { get: "public", post: null },
   "routes/public/not-found.tsx": { get: "public", post: "public" },
   "routes/basemap-tile.ts": { get: "public", post: null, resource: true },
   "routes/account/sign-in.tsx": { get: "public", post: "public" },

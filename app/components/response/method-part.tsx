@@ -1,6 +1,8 @@
 import { WideTable } from "~/components/wide-table";
+import { Link } from "react-router";
+import { Equations, MethodFacts } from "~/components/method-entry";
+import type { MethodView } from "~/estimates/present-methods";
 import type { BudgetView, MethodRowView } from "~/estimates/present-response";
-import type { MethodSource } from "~/ocean/sources";
 
 /** Heads a row, without the rule that heads a column. */
 const ROW_HEAD = "border-b border-hairline align-top text-base font-normal text-ink";
@@ -33,46 +35,29 @@ export function MethodTable({ rows }: { rows: MethodRowView[] }) {
   );
 }
 
-export function EquationList({ sources }: { sources: MethodSource[] }) {
+/** The equations behind a response, each opening to its symbols and source. */
+export function EquationList({ methods }: { methods: MethodView[] }) {
   return (
-    <ul>
-      {sources.map((source) => (
-        <li key={source.id} className="border-b border-hairline">
-          <details>
-            <summary className="py-2">
-              {source.title} <span className="text-small text-quiet">· {source.provenance}</span>
-            </summary>
-            <div className="pb-4 pl-4">
-              <pre className="overflow-x-auto py-1 font-sans text-base" tabIndex={0}>
-                {source.equation}
-              </pre>
-              <dl className="mt-2 grid grid-cols-[auto_1fr] gap-x-4 text-small">
-                {source.symbols.map(({ symbol, meaning, unit }) => (
-                  <div key={symbol} className="contents">
-                    <dt className="font-bold">{symbol}</dt>
-                    <dd className="text-slate">
-                      {meaning}
-                      {unit !== "" && unit !== "1" && ` (${unit})`}
-                    </dd>
-                  </div>
-                ))}
-              </dl>
-              <p className="mt-2 text-small text-slate">Valid: {source.validRange}</p>
-              <p className="text-small text-slate">
-                {source.citation}
-                {source.doi && (
-                  <>
-                    {" · "}
-                    <a href={`https://doi.org/${source.doi}`}>doi:{source.doi}</a>
-                  </>
-                )}
-              </p>
-              {source.remark && <p className="text-small text-slate">{source.remark}</p>}
-            </div>
-          </details>
-        </li>
-      ))}
-    </ul>
+    <>
+      <ul>
+        {methods.map((method) => (
+          <li key={method.id} className="border-b border-hairline">
+            <details>
+              <summary className="py-2">
+                {method.title} <span className="text-small text-quiet">· {method.provenance}</span>
+              </summary>
+              <div className="pb-4 pl-4">
+                <Equations equations={method.equations} label={method.title} />
+                <MethodFacts method={method} />
+              </div>
+            </details>
+          </li>
+        ))}
+      </ul>
+      <p className="mt-2 text-small">
+        <Link to="/methods">All methods of the engine</Link>
+      </p>
+    </>
   );
 }
 

@@ -18,7 +18,7 @@ export function methodBlocks(input: MemoInput, references: readonly ReferenceIte
 
 /** The methods of all estimates, each once. */
 function methodsOf({ estimates }: MemoInput): MethodSource[] {
-  const methods = estimates.flatMap(({ response }) => methodSources(response.method));
+  const methods = estimates.flatMap(({ response }) => methodSources(response));
   return [...new Map(methods.map((method) => [method.id, method])).values()];
 }
 

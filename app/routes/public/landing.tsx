@@ -56,7 +56,8 @@ export default function Landing() {
         ))}
       </dl>
       <p className="mt-8 text-slate">
-        Someone sent you a memo? <Link to="/verify">Verify it by its stamp</Link>
+        The <Link to="/methods">methods</Link> are published ones, each with its source. Someone sent you a memo?{" "}
+        <Link to="/verify">Verify it by its stamp</Link>
       </p>
       <p className="mt-10 max-w-prose text-small text-quiet">{CAUTION}</p>
     </main>

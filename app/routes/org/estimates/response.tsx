@@ -20,6 +20,7 @@ import { isUnderWay, stateSentence } from "~/estimates/estimate-state";
 import { layerTrack } from "~/estimates/layer-track";
 import { loadResponse } from "~/estimates/load-response.server";
 import { presentInputs } from "~/estimates/present-inputs";
+import { presentMethod } from "~/estimates/present-methods";
 import { presentResponse } from "~/estimates/present-response";
 import { responseFigures } from "~/estimates/response-figures.server";
 import { choiceOf, KEEP, runSchema } from "~/estimates/run-request";
@@ -27,7 +28,9 @@ import { CannotStart, startEstimates } from "~/estimates/start-estimates.server"
 import { may } from "~/organisations/permissions";
 import { currentProject } from "~/projects/current-project.server";
 import { notFound } from "~/services/guard.server";
+import { methodSources } from "~/ocean/sources";
 import { readForm } from "~/services/read-form.server";
+import { mathMarkup } from "~/services/typeset.server";
 import { formatTime } from "~/units/format-time";
 
 export async function loader({ context, params }: Route.LoaderArgs) {
@@ -45,6 +48,7 @@ export async function loader({ context, params }: Route.LoaderArgs) {
   const shown = response && {
     view: presentResponse(response, { units, zone, shore: register.box.shoreNormal !== null }),
     figures: responseFigures({ response, register, forcing, zone, units, estimateCode: code }),
+    methods: methodSources(response).map((source) => presentMethod(source, mathMarkup)),
     track: layerTrack(register.box, response.series),
     inputs: response.inputs,
     engine: response.engine,
@@ -187,7 +191,7 @@ export default function ResponsePage({ loaderData, actionData }: Route.Component
             </div>
             <div className="min-w-0">
               <SectionHeading>Equations and sources</SectionHeading>
-              <EquationList sources={shown.view.sources} />
+              <EquationList methods={shown.methods} />
               <SectionHeading>Budgets</SectionHeading>
               <BudgetTable rows={shown.view.budgets} />
             </div>
