@@ -32,7 +32,7 @@ const water: WaterInput = {
   belowSalinity: 34,
 };
 const storm = scenarioStorm({ time: [0, 3600], windSpeed: [1, 2], windFrom: [3, 4], windHeight: 4, rain: [0, 1] });
-const input: EstimateInput = { box, water, storm, method: { model: "slab" } };
+const input: EstimateInput = { box, water, storm, method: { model: "slab" }, ensemble: null };
 
 describe("buildScenario", () => {
   it("says what the engine is asked, without what was not given", () => {
@@ -54,6 +54,12 @@ describe("buildScenario", () => {
       },
       method: { model: "slab" },
     });
+    expect(validateScenario(scenario)).toEqual([]);
+  });
+
+  it("asks for the ensemble of its sheet", () => {
+    const scenario = buildScenario({ ...input, ensemble: { members: 200, seed: 3 } });
+    expect(scenario.ensemble).toEqual({ members: 200, seed: 3 });
     expect(validateScenario(scenario)).toEqual([]);
   });
 

@@ -1,6 +1,7 @@
 /** One box, one storm, one water column, one method sheet: the scenario that the engine is asked. Pure. */
 import type { StormForcing } from "./storm-forcing";
 import type {
+  Ensemble,
   MethodChoices,
   Position,
   Scenario,
@@ -38,6 +39,7 @@ export interface EstimateInput {
   storm: ScenarioStorm;
   water: WaterInput;
   method: MethodChoices;
+  ensemble: Ensemble | null;
 }
 
 /** `2026-11-04T20:00:00Z`; milliseconds only where there are any. */
@@ -72,12 +74,13 @@ export function scenarioStorm({ time, ...series }: StormForcing): ScenarioStorm 
   return { time: time.map(isoTime), ...series };
 }
 
-export function buildScenario({ box, storm, water, method }: EstimateInput): Scenario {
+export function buildScenario({ box, storm, water, method, ensemble }: EstimateInput): Scenario {
   return {
     box: scenarioBox(box),
     water: scenarioWater(water),
     storm,
     method,
     ...(box.triggerLevels.length > 0 && { triggerLevels: box.triggerLevels }),
+    ...(ensemble && { ensemble }),
   };
 }

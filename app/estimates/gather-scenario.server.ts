@@ -50,7 +50,8 @@ export function heatInterpolationOf(sheet: MethodSheet): "linear" | "hold" {
 /** Puts rows and a storm's reading together; asks the database nothing. */
 export function gatherFrom({ box, storm, water, sheet }: EstimateRows, reading: StormReading): GatheredScenario {
   const { forcing, problems, assumptions, scenarioStorm, hash: stormHash, records } = reading;
-  const scenario = scenarioStorm && buildScenario({ box, storm: scenarioStorm, water, method: sheet.choices });
+  const { choices, ensemble } = sheet;
+  const scenario = scenarioStorm && buildScenario({ box, storm: scenarioStorm, water, method: choices, ensemble });
   const parts = scenario && stormHash ? inputParts(scenario, stormHash) : null;
   const { polygon, waterDepth, shoreNormal, distanceToShore, triggerLevels } = box;
   const { source, temperature, salinity, salinityScale, layerDepth, belowTemperature, belowSalinity } = water;
@@ -74,7 +75,7 @@ export function gatherFrom({ box, storm, water, sheet }: EstimateRows, reading: 
         belowTemperature,
         belowSalinity,
       },
-      method: { name: sheet.name, version: sheet.version, choices: sheet.choices },
+      method: { name: sheet.name, version: sheet.version, choices },
     },
   };
 }

@@ -151,21 +151,21 @@ function remarksOf(id: FigureId, headline: Headline, { units, zone, shore }: Fig
   }
 }
 
-function bandOf({ p10, p90 }: Band, shift: number): { p10: number; p90: number } | null {
-  return p10 === undefined || p90 === undefined ? null : { p10: p10 - shift, p90: p90 - shift };
+function bandOf({ p10, p90 }: Band): { p10: number; p90: number } | null {
+  return p10 === undefined || p90 === undefined ? null : { p10, p90 };
 }
 
 /** One figure of a headline, in the organisation's units. */
 export function headlineFigure(id: FigureId, headline: Headline, context: FigureContext): HeadlineFigure {
   const { units } = context;
   const entry = headline[id];
-  // The temperature's band is of its end; what is shown is the change, which differs by the start.
+  // The temperature is told as its change, which has a band of its own.
   const start =
     id === "surfaceTemperature" ? headline.surfaceTemperature.value - headline.surfaceTemperature.change : 0;
   const si = entry.value === null ? null : entry.value - start;
   const quantityId = QUANTITY_OF[id];
   const decimals = si === null ? undefined : decimalsOf(si, quantityId, units);
-  const band = bandOf(entry, start);
+  const band = id === "surfaceTemperature" ? bandOf(headline.surfaceTemperature.changeBand ?? {}) : bandOf(entry);
   const triggers = headline.triggers.filter((trigger) => trigger.quantity === TRIGGERS_OF[id]);
   return {
     id,

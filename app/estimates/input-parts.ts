@@ -26,7 +26,8 @@ export function inputParts(scenario: Scenario, stormHash = partHash(scenario.sto
     box: partHash(scenario.box),
     storm: stormHash,
     water: partHash(scenario.water),
-    method: partHash(scenario.method),
+    // Both are chosen on the method sheet; without an ensemble the hash is that of the choices, as it was before there were any.
+    method: partHash(scenario.ensemble ? [scenario.method, scenario.ensemble] : scenario.method),
     triggerLevels: partHash(scenario.triggerLevels),
   };
 }

@@ -17,6 +17,7 @@ describe("methodSheetSchema", () => {
     expect(methodSheetSchema.parse(form)).toEqual({
       name: "Slab",
       choices: { model: "slab", dampingRate: 2.9e-6, highWindCap: 30.5, rainHeat: false },
+      ensemble: null,
     });
   });
 
@@ -30,7 +31,23 @@ describe("methodSheetSchema", () => {
 
   it("comes back from what it shows", () => {
     const choices: MethodChoices = { model: "column", gradientMixing: false, cellSize: 0.5, waterType: "II" };
-    expect(methodSheetSchema.parse(formValues("Column", choices))).toEqual({ name: "Column", choices });
+    const ensemble = { members: 64, seed: 5 };
+    expect(methodSheetSchema.parse(formValues("Column", choices, ensemble))).toEqual({
+      name: "Column",
+      choices,
+      ensemble,
+    });
+    expect(methodSheetSchema.parse(formValues("Column", choices, null))).toEqual({
+      name: "Column",
+      choices,
+      ensemble: null,
+    });
+  });
+
+  it("asks for whole members within the engine's limits, and takes seed 1 where none is given", () => {
+    expect(methodSheetSchema.parse({ name: "x", members: "200" }).ensemble).toEqual({ members: 200, seed: 1 });
+    const wrong = methodSheetSchema.safeParse({ name: "x", members: "6000", seed: "0.5" });
+    expect(wrong.error?.issues.map(({ path }) => path.join("."))).toEqual(["members", "seed"]);
   });
 
   it("offers every choice that the engine knows, and none that it does not", () => {

@@ -1,5 +1,5 @@
 import { canonicalJson } from "~/ocean/canonical-json";
-import type { MethodChoices } from "~/ocean/scenario";
+import type { Ensemble, MethodChoices } from "~/ocean/scenario";
 import type { Tenant } from "~/db/scoped.server";
 
 /** A sheet is never edited: the same name begins the next version, unless nothing in it changed. */
@@ -7,14 +7,15 @@ export async function saveMethodSheet(
   tenant: Tenant,
   name: string,
   choices: MethodChoices,
+  ensemble: Ensemble | null,
 ): Promise<{ version: number; changed: boolean }> {
   return tenant.write(async (inner) => {
     const last = await inner.methodSheets.first({ where: { name }, order: [["version", "DESC"]] });
-    if (last && canonicalJson(last.choices) === canonicalJson(choices)) {
+    if (last && canonicalJson([last.choices, last.ensemble]) === canonicalJson([choices, ensemble])) {
       return { version: last.version, changed: false };
     }
     const version = (last?.version ?? 0) + 1;
-    await inner.methodSheets.create({ name, version, choices });
+    await inner.methodSheets.create({ name, version, choices, ensemble });
     return { version, changed: true };
   });
 }

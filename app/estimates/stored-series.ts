@@ -1,8 +1,11 @@
 /** A response's long arrays as flat rows, and back: its series, their bands, and the profiles of the column model. */
 import { isoTime } from "./build-scenario";
 import {
+  BAND_NAMES,
+  BAND_UNITS,
   SERIES_NAMES,
   SERIES_UNITS,
+  type BandName,
   type Response,
   type ResponseColumn,
   type ResponseSeries,
@@ -25,7 +28,7 @@ const PERCENTILES = ["p10", "p50", "p90"] as const;
 type Percentile = (typeof PERCENTILES)[number];
 
 type ProfileRow = "column.depth" | "column.time" | `column.${ProfileName}`;
-type BandRow = "band.time" | `band.${Percentile}.${SeriesName}`;
+type BandRow = "band.time" | `band.${Percentile}.${BandName}`;
 export type StoredSeriesName = SeriesName | BandRow | ProfileRow;
 
 export interface StoredSeries {
@@ -40,7 +43,7 @@ const PROFILE_NAMES = Object.keys(PROFILE_UNITS) as ProfileName[];
 export const ROWS_WITHOUT_PROFILES: readonly StoredSeriesName[] = [
   ...SERIES_NAMES,
   "band.time",
-  ...SERIES_NAMES.flatMap((name) => PERCENTILES.map((p): BandRow => `band.${p}.${name}`)),
+  ...BAND_NAMES.flatMap((name) => PERCENTILES.map((p): BandRow => `band.${p}.${name}`)),
 ];
 
 export function storedSeries({ series, bands, column }: Pick<Response, "series" | "bands" | "column">): StoredSeries[] {
@@ -54,10 +57,10 @@ export function storedSeries({ series, bands, column }: Pick<Response, "series" 
 function bandRows({ time, series }: SeriesBands): StoredSeries[] {
   return [
     { name: "band.time", unit: "s", values: time.map(epochSeconds) },
-    ...SERIES_NAMES.flatMap((name) =>
+    ...BAND_NAMES.flatMap((name) =>
       PERCENTILES.map((p): StoredSeries => ({
         name: `band.${p}.${name}`,
-        unit: SERIES_UNITS[name],
+        unit: BAND_UNITS[name],
         values: series[name][p],
       })),
     ),
@@ -94,7 +97,7 @@ export function readSeries(seconds: number[], stored: StoredValues): ResponseSer
 export function readBands(stored: StoredValues): SeriesBands | null {
   const time = stored.get("band.time");
   if (!time) return null;
-  const series = SERIES_NAMES.map((name) => {
+  const series = BAND_NAMES.map((name) => {
     const band = PERCENTILES.map((p) => [p, valuesOf(stored, `band.${p}.${name}`)] as const);
     return [name, Object.fromEntries(band) as Record<Percentile, number[]>] as const;
   });

@@ -105,16 +105,11 @@ function hoursBeyond(trigger: TriggerOutcome, units: UnitChoices): string {
 }
 
 function temperature({ headline }: Response, { units }: Context): HeadlineRow {
-  const { value, change } = headline.surfaceTemperature;
-  const bands = headline.surfaceTemperature;
-  // The band is of the end value; the row tells the change from the same start.
-  const start = value - change;
-  const band: Band =
-    bands.p10 === undefined || bands.p90 === undefined ? {} : { p10: bands.p10 - start, p90: bands.p90 - start };
+  const { value, change, changeBand = {} } = headline.surfaceTemperature;
   const depth = formatQuantity(headline.layerDepth.value, "layerDepth", units).text;
   const step = headline.densityStep.value;
   const below = step === null ? "" : `; density step ${formatQuantity(step, "densityStep", units).text}`;
-  const base = row("Surface temperature change", "temperatureChange", change, band, units, "");
+  const base = row("Surface temperature change", "temperatureChange", change, changeBand, units, "");
   return {
     ...base,
     value: formatQuantity(change, "temperatureChange", units, { sign: true }).number,

@@ -29,10 +29,10 @@ export interface Headline {
   transportAlong: { value: number } & Band;
   /** m³ per m of shore over the storm. With a shore: positive offshore; without: east. */
   transportAcross: { value: number } & Band;
-  /** g/kg: the lowest, when, and its difference from the start. */
-  surfaceSalinity: { value: number; time: string | number; change: number } & Band;
-  /** °C at the end, and its difference from the start. */
-  surfaceTemperature: { value: number; change: number } & Band;
+  /** g/kg: the lowest, when, and its difference from the start; the difference has a band of its own. */
+  surfaceSalinity: { value: number; time: string | number; change: number; changeBand?: Band } & Band;
+  /** °C at the end, and its difference from the start; the difference has a band of its own. */
+  surfaceTemperature: { value: number; change: number; changeBand?: Band } & Band;
   /** m at the end */
   layerDepth: { value: number } & Band;
   /** kg/m³ at the end, water below minus layer; null where nothing is known of the water below. */
@@ -54,6 +54,16 @@ export const HEADLINE_FIGURES = [
 ] as const satisfies readonly (keyof Headline)[];
 export type HeadlineFigureName = (typeof HEADLINE_FIGURES)[number];
 
+/** What effects are told of: the headline figures, and the two changes from a start that is itself uncertain. */
+export const EFFECT_FIGURES = [...HEADLINE_FIGURES, "salinityChange", "temperatureChange"] as const;
+export type EffectFigureName = (typeof EFFECT_FIGURES)[number];
+
+export function effectValue(headline: Headline, figure: EffectFigureName): number | null {
+  if (figure === "salinityChange") return headline.surfaceSalinity.change;
+  if (figure === "temperatureChange") return headline.surfaceTemperature.change;
+  return headline[figure].value;
+}
+
 export const SERIES_UNITS = {
   stressX: "N/m²",
   stressY: "N/m²",
@@ -71,13 +81,18 @@ export const SERIES_UNITS = {
 export type SeriesName = keyof typeof SERIES_UNITS;
 export const SERIES_NAMES = Object.keys(SERIES_UNITS) as SeriesName[];
 
+/** What an ensemble has bands of: every series, and the sizes of the two vectors that figures show. */
+export const BAND_UNITS = { ...SERIES_UNITS, stress: "N/m²", driftSpeed: "m/s" } as const;
+export type BandName = keyof typeof BAND_UNITS;
+export const BAND_NAMES = Object.keys(BAND_UNITS) as BandName[];
+
 /** All of one length; plain arrays, so that they survive JSON. */
 export type ResponseSeries = { time: (string | number)[] } & Record<SeriesName, number[]>;
 
 /** Percentiles of every series over an ensemble; of a long storm at some of its samples. */
 export interface SeriesBands {
   time: (string | number)[];
-  series: Record<SeriesName, Record<keyof Band, number[]>>;
+  series: Record<BandName, Record<keyof Band, number[]>>;
 }
 
 /** A factor's setting and the headline figure that came of it, all else as in the scenario. */
@@ -88,7 +103,7 @@ export interface FactorTrial {
 
 /** What one headline figure depends on. */
 export interface FigureEffects {
-  figure: HeadlineFigureName;
+  figure: EffectFigureName;
   /** The scenario's own value. */
   value: number;
   /** One factor at a time through its range, the widest first. */

@@ -152,13 +152,19 @@ export interface TriggerLevel {
   hours: number;
 }
 
+/** Members of a Latin hypercube over what is uncertain; the same seed draws the same members. */
+export interface Ensemble {
+  members: number;
+  seed: number;
+}
+
 export interface Scenario {
   box: ScenarioBox;
   water: ScenarioWater;
   storm: ScenarioStorm;
   method?: MethodChoices;
   triggerLevels?: TriggerLevel[];
-  ensemble?: { members: number; seed: number };
+  ensemble?: Ensemble;
 }
 
 export interface ScenarioProblem {

@@ -1,7 +1,7 @@
 import { inWriteTransaction } from "~/db/connection.server";
 import { forOrganisation } from "~/db/scoped.server";
 import { createOrganisation, createUser, findUserByEmail, slugIsTaken } from "~/db/unscoped.server";
-import { DEFAULT_METHOD_CHOICES } from "~/estimates/default-method";
+import { DEFAULT_METHOD_SHEET } from "~/estimates/default-method";
 import { hashPassword } from "~/services/password.server";
 import { DEFAULT_UNITS } from "~/units/unit-choices";
 import type { Transaction } from "sequelize";
@@ -45,7 +45,7 @@ export async function signUp(values: SignUp): Promise<{ userId: string; slug: st
     );
     const tenant = forOrganisation(organisation.id, transaction);
     await tenant.memberships.create({ userId: user.id, role: "owner" });
-    await tenant.methodSheets.create({ ...DEFAULT_METHOD_CHOICES, version: 1 });
+    await tenant.methodSheets.create({ ...DEFAULT_METHOD_SHEET, version: 1 });
     return { userId: user.id, slug };
   });
 }

@@ -90,7 +90,12 @@ describe("an estimate", () => {
   });
 
   it("keeps a column's profiles whole", async () => {
-    await use.saveMethodSheet(organisation.tenant, "Column", { model: "column", timeStep: 900, gradientMixing: false });
+    await use.saveMethodSheet(
+      organisation.tenant,
+      "Column",
+      { model: "column", timeStep: 900, gradientMixing: false },
+      null,
+    );
     const sheet = await organisation.tenant.methodSheets.first({ where: { name: "Column" } });
     const { response } = await load(await run({ methodSheetId: sheet?.id }));
     if (!response?.column) throw new Error("No column came back.");
@@ -164,7 +169,7 @@ describe("an estimate", () => {
   });
 
   it("passes on what the engine refuses", async () => {
-    await use.saveMethodSheet(organisation.tenant, "Coast", { model: "coastal" });
+    await use.saveMethodSheet(organisation.tenant, "Coast", { model: "coastal" }, null);
     const sheet = await organisation.tenant.methodSheets.first({ where: { name: "Coast" } });
     await organisation.tenant.studyBoxes.update(box.id, { shoreNormal: null });
     const { state } = await load(await run({ methodSheetId: sheet?.id }));
@@ -268,9 +273,12 @@ describe("the ledger", () => {
 describe("method sheets", () => {
   it("begin a next version under the same name, unless they say the same", async () => {
     const { tenant } = organisation;
-    const save = (choices: object) => use.saveMethodSheet(tenant, "Gentle", choices);
+    const save = (choices: object, ensemble: { members: number; seed: number } | null = null) =>
+      use.saveMethodSheet(tenant, "Gentle", choices, ensemble);
     expect(await save({ model: "slab" })).toEqual({ version: 1, changed: true });
     expect(await save({ model: "slab" })).toEqual({ version: 1, changed: false });
     expect(await save({ model: "budget" })).toEqual({ version: 2, changed: true });
+    expect(await save({ model: "budget" }, { members: 64, seed: 1 })).toEqual({ version: 3, changed: true });
+    expect(await save({ model: "budget" }, { members: 64, seed: 1 })).toEqual({ version: 3, changed: false });
   });
 });

@@ -1,6 +1,7 @@
 import type { RunnableMigration } from "umzug";
 import { firstTables } from "./2026-12-01-first-tables.server";
 import { estimateInputs } from "./2026-12-01-estimate-inputs.server";
+import { methodSheetEnsembles } from "./2026-12-01-method-sheet-ensembles.server";
 
 export interface MigrationContext {
   /** Runs one statement inside the migration's transaction. */
@@ -9,4 +10,4 @@ export interface MigrationContext {
 export type Migration = RunnableMigration<MigrationContext>;
 
 /** In order. A migration that has been released is never edited: add the next one. */
-export const migrations: Migration[] = [firstTables, estimateInputs];
+export const migrations: Migration[] = [firstTables, estimateInputs, methodSheetEnsembles];

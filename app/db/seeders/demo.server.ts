@@ -7,7 +7,7 @@ import type { Project } from "~/db/models/project.server";
 import type { Storm } from "~/db/models/storm.server";
 import { forOrganisation, type Tenant } from "~/db/scoped.server";
 import { createOrganisation, createUser, membershipBySlug, findUserByEmail } from "~/db/unscoped.server";
-import { DEFAULT_METHOD_CHOICES } from "~/estimates/default-method";
+import { DEFAULT_METHOD_SHEET } from "~/estimates/default-method";
 import { queueIsEmpty } from "~/estimates/run-queue.server";
 import { startEstimates } from "~/estimates/start-estimates.server";
 import { composeDraft } from "~/memo/compose-draft.server";
@@ -40,7 +40,7 @@ async function makeOrganisation() {
       transaction,
     );
     const tenant = forOrganisation(organisation.id, transaction);
-    await tenant.methodSheets.create({ ...DEFAULT_METHOD_CHOICES, version: 1 });
+    await tenant.methodSheets.create({ ...DEFAULT_METHOD_SHEET, version: 1 });
     const people = [];
     for (const { email, name, role } of DEMO.people) {
       const user = await createUser({ email, name, passwordHash }, transaction);

@@ -1,5 +1,12 @@
 import type { ResolvedMethod } from "../method/resolve-method";
-import { HEADLINE_FIGURES, type FactorTrial, type FigureEffects, type Headline } from "../response";
+import {
+  EFFECT_FIGURES,
+  effectValue,
+  type EffectFigureName,
+  type FactorTrial,
+  type FigureEffects,
+  type Headline,
+} from "../response";
 import type { Scenario } from "../scenario";
 import { correlationRatio } from "../statistics/correlation-ratio";
 import { trialsOf, type Factor } from "./factor";
@@ -33,12 +40,12 @@ export function effectsOf(
       return run ? [{ setting: factor.setting(u, method), headline: run.headline }] : [];
     }),
   );
-  return HEADLINE_FIGURES.flatMap((figure) => {
-    const value = base[figure].value;
+  return EFFECT_FIGURES.flatMap((figure) => {
+    const value = effectValue(base, figure);
     if (value === null) return [];
     const bars = factors.flatMap(({ name }, k) => {
       const tried = trials[k].flatMap(({ setting, headline }): FactorTrial[] => {
-        const own = headline[figure].value;
+        const own = effectValue(headline, figure);
         return own === null ? [] : [{ setting, value: own }];
       });
       if (tried.length === 0) return [];
@@ -51,14 +58,14 @@ export function effectsOf(
 }
 
 function firstOrder(
-  figure: (typeof HEADLINE_FIGURES)[number],
+  figure: EffectFigureName,
   factors: readonly Factor[],
   method: ResolvedMethod,
   { rows, headlines }: Drawn,
 ): FigureEffects["firstOrder"] {
   if (rows.length < FEWEST_FOR_INDICES) return [];
   const kept = rows.flatMap((row, member) => {
-    const { value } = headlines[member][figure];
+    const value = effectValue(headlines[member], figure);
     return value === null ? [] : [{ row, value }];
   });
   if (kept.length < FEWEST_FOR_INDICES) return [];

@@ -2,7 +2,7 @@ import { OceanError } from "../errors";
 import { headlineOf } from "../headline/headline";
 import { responseSeries } from "../headline/response-series";
 import { runModel } from "../models/run-model";
-import { SERIES_NAMES, type Headline, type SeriesName } from "../response";
+import { BAND_NAMES, type BandName, type Headline, type SeriesName } from "../response";
 import type { Scenario } from "../scenario";
 
 /** The headline figures and the series of one run. */
@@ -29,11 +29,18 @@ export function runMember(scenario: Scenario): MemberResult | null {
 /** Samples kept of every series at most: a figure shows no more, and a thousand members of a long storm fit into memory. */
 const MOST_SAMPLES = 500;
 
+/** One sample of a series, or of the size of the vector that two of them make. */
+function sampleOf(series: Record<SeriesName, number[]>, name: BandName, k: number): number {
+  if (name === "stress") return Math.hypot(series.stressX[k], series.stressY[k]);
+  if (name === "driftSpeed") return Math.hypot(series.driftEast[k], series.driftNorth[k]);
+  return series[name][k];
+}
+
 /** The series of many members at some of the storm's samples, one array a series, sample by sample. */
 export class MemberSeries {
   /** Which of the storm's samples are kept. */
   readonly samples: number[];
-  private readonly kept: Record<SeriesName, Float64Array>;
+  private readonly kept: Record<BandName, Float64Array>;
   private readonly members: number;
   private count = 0;
 
@@ -42,19 +49,21 @@ export class MemberSeries {
     this.members = members;
     this.samples = Array.from({ length }, (_, k) => k).filter((k) => k % every === 0 || k === length - 1);
     const room = () => new Float64Array(members * this.samples.length);
-    this.kept = Object.fromEntries(SERIES_NAMES.map((name) => [name, room()])) as Record<SeriesName, Float64Array>;
+    this.kept = Object.fromEntries(BAND_NAMES.map((name) => [name, room()])) as Record<BandName, Float64Array>;
   }
 
   add(series: Record<SeriesName, number[]>): void {
-    for (const name of SERIES_NAMES) {
-      const [into, from] = [this.kept[name], series[name]];
-      for (let k = 0; k < this.samples.length; k++) into[k * this.members + this.count] = from[this.samples[k]];
+    for (const name of BAND_NAMES) {
+      const into = this.kept[name];
+      for (let k = 0; k < this.samples.length; k++) {
+        into[k * this.members + this.count] = sampleOf(series, name, this.samples[k]);
+      }
     }
     this.count += 1;
   }
 
   /** All members' values of a series at one of the kept samples. */
-  at(name: SeriesName, sample: number): Float64Array {
+  at(name: BandName, sample: number): Float64Array {
     const start = sample * this.members;
     return this.kept[name].subarray(start, start + this.count);
   }

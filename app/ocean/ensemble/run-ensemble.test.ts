@@ -1,7 +1,7 @@
 import { describe, expect, it } from "vitest";
 import { plainScenario } from "../../../tests/factories/scenario-arbitrary";
 import { estimate } from "../estimate";
-import { HEADLINE_FIGURES, SERIES_NAMES, type Response, type Uncertainty } from "../response";
+import { BAND_NAMES, EFFECT_FIGURES, HEADLINE_FIGURES, type Response, type Uncertainty } from "../response";
 import type { Scenario } from "../scenario";
 import { FEWEST_FOR_INDICES } from "./effects";
 
@@ -54,7 +54,7 @@ describe("an ensemble", () => {
   it("bands every series at its times, the value at the start by the start's own uncertainty", () => {
     const { bands, series } = spreadOf(whole);
     expect(bands?.time).toEqual(series.time);
-    for (const name of SERIES_NAMES) {
+    for (const name of BAND_NAMES) {
       const { p10, p50, p90 } = bands?.series[name] ?? { p10: [], p50: [], p90: [] };
       expect(p10).toHaveLength(series.time.length);
       expect(
@@ -66,6 +66,13 @@ describe("an ensemble", () => {
     // Uniform over ±0.5 °C: its 10th and 90th percentile lie 0.4 °C away.
     expect((start?.p90[0] ?? NaN) - (start?.p10[0] ?? NaN)).toBeCloseTo(0.8, 1);
     expect(bands?.series.displacementEast.p90[0]).toBe(0);
+  });
+
+  it("bands a change by itself: the start's uncertainty moves both its ends alike", () => {
+    const { surfaceTemperature } = estimate(whole).headline;
+    const width = ({ p10 = NaN, p90 = NaN }) => p90 - p10;
+    expect(width(surfaceTemperature.changeBand ?? {})).toBeLessThan(0.7 * width(surfaceTemperature));
+    expect(surfaceTemperature.changeBand?.p10).toBeLessThan(surfaceTemperature.change);
   });
 
   it("keeps at most 500 samples of a long storm's bands, its end among them", () => {
@@ -113,7 +120,7 @@ describe("an ensemble", () => {
 
   it("tells how far each factor alone moves a figure, the widest first, on both sides of the value where it is monotone", () => {
     const { effects } = spreadOf(whole).uncertainty;
-    expect(effects.map(({ figure }) => figure)).toEqual([...HEADLINE_FIGURES]);
+    expect(effects.map(({ figure }) => figure)).toEqual([...EFFECT_FIGURES]);
     for (const { figure, value, bars } of effects) {
       const swings = bars.map(({ low, high }) => high.value - low.value);
       expect(

@@ -1,6 +1,6 @@
 import { OceanError } from "../errors";
 import type { ModelRun } from "../models/run-model";
-import { HEADLINE_FIGURES, SERIES_NAMES, type Band, type Headline, type SeriesBands, type Response } from "../response";
+import { HEADLINE_FIGURES, BAND_NAMES, type Band, type Headline, type SeriesBands, type Response } from "../response";
 import type { Scenario } from "../scenario";
 import { latinHypercube } from "../statistics/latin-hypercube";
 import { quantile } from "../statistics/quantile";
@@ -59,6 +59,9 @@ function withBands(headline: Headline, members: readonly Headline[]): Headline {
       [figure]: { ...headline[figure], ...bandOf(members.map((member) => member[figure].value)) },
     });
   }
+  for (const figure of ["surfaceSalinity", "surfaceTemperature"] as const) {
+    banded[figure].changeBand = bandOf(members.map((member) => member[figure].change));
+  }
   banded.triggers = headline.triggers.map((trigger, k) => ({
     ...trigger,
     ...bandOf(members.map((member) => member.triggers[k].hoursBeyond)),
@@ -76,7 +79,7 @@ function percentiles(values: Float64Array): Required<Band> {
 }
 
 function bandsOf(scenario: Scenario, members: MemberSeries): SeriesBands {
-  const bands = SERIES_NAMES.map((name) => {
+  const bands = BAND_NAMES.map((name) => {
     const at = members.samples.map((_, sample) => percentiles(members.at(name, sample)));
     const series = { p10: at.map(({ p10 }) => p10), p50: at.map(({ p50 }) => p50), p90: at.map(({ p90 }) => p90) };
     return [name, series] as const;

@@ -74,7 +74,7 @@ export default function Methods({ loaderData }: Route.ComponentProps) {
 
 function Method({ method }: { method: MethodView }) {
   return (
-    <article id={method.id} className="scroll-mt-6 break-inside-avoid border-b border-hairline py-4 target:bg-mist">
+    <article id={method.id} className="-mx-3 scroll-mt-6 break-inside-avoid border-b border-hairline px-3 py-4 target:bg-mist">
       <h3 className="flex flex-wrap items-baseline justify-between gap-x-4 font-bold">
         <a href={`#${method.id}`} className="text-ink no-underline">
           {method.title}

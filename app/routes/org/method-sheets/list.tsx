@@ -18,19 +18,24 @@ export async function loader({ context }: Route.LoaderArgs) {
     defaultMethodSheet(tenant),
   ]);
   return {
-    sheets: sheets.map(({ id, name, version, choices, createdAt }) => ({
+    sheets: sheets.map(({ id, name, version, choices, ensemble, createdAt }) => ({
       id,
       name,
       version,
       created: createdAt.toISOString().slice(0, 10),
       isDefault: id === standard?.id,
       isNewest: sheets.every((other) => other.name !== name || other.version <= version),
-      chosen: METHOD_KEYS.flatMap((key) => {
-        const value = choices[key];
-        const parameter = PARAMETERS[key];
-        if (value === undefined) return [];
-        return [`${parameter.label}: ${parameterText(key, value, parameter.kind === "number" ? parameter.unit : "")}`];
-      }),
+      chosen: [
+        ...METHOD_KEYS.flatMap((key) => {
+          const value = choices[key];
+          const parameter = PARAMETERS[key];
+          if (value === undefined) return [];
+          return [
+            `${parameter.label}: ${parameterText(key, value, parameter.kind === "number" ? parameter.unit : "")}`,
+          ];
+        }),
+        ensemble ? `range from ${ensemble.members} members, seed ${ensemble.seed}` : "no range",
+      ],
     })),
     mayEdit: may(organisation.role, "project.edit"),
   };
@@ -61,7 +66,7 @@ export default function MethodSheetList({ loaderData }: Route.ComponentProps) {
                 <strong>{sheet.name}</strong>, version {sheet.version}
                 {sheet.isDefault && <span className="text-small text-slate"> · default of new estimates</span>}
               </p>
-              <p className="text-small text-slate">{sheet.chosen.join(" · ") || "nothing chosen: all defaults"}</p>
+              <p className="text-small text-slate">{sheet.chosen.join(" · ")}</p>
               <p className="text-small text-quiet">
                 since {sheet.created} UTC; all else as the engine’s stated defaults
               </p>

@@ -19,15 +19,18 @@ export async function loader({ request, context }: Route.LoaderArgs) {
   const { tenant } = currentTenant(context, "project.edit");
   const from = new URL(request.url).searchParams.get("from");
   const sheet = from ? await tenant.methodSheets.find(from) : null;
-  return { values: sheet && formValues(sheet.name, sheet.choices), next: sheet ? sheet.version + 1 : null };
+  return {
+    values: sheet && formValues(sheet.name, sheet.choices, sheet.ensemble),
+    next: sheet ? sheet.version + 1 : null,
+  };
 }
 
 export async function action({ request, context }: Route.ActionArgs) {
   const { organisation, tenant } = currentTenant(context, "project.edit");
   const submission = await readForm(request, methodSheetSchema);
   if (submission.status !== "success") return data(submission.reply(), { status: 400 });
-  const { name, choices } = submission.value;
-  const saved = await saveMethodSheet(tenant, name, choices);
+  const { name, choices, ensemble } = submission.value;
+  const saved = await saveMethodSheet(tenant, name, choices, ensemble);
   if (!saved.changed) {
     const message = `Version ${saved.version} of this sheet says the same already: change something, or give another name.`;
     return data(submission.reply({ fieldErrors: { name: [message] } }), { status: 400 });
@@ -36,7 +39,7 @@ export async function action({ request, context }: Route.ActionArgs) {
 }
 
 export default function NewMethodSheet({ actionData, loaderData }: Route.ComponentProps) {
-  const [form, fields] = useForm<Record<"name" | MethodKey, string>>({
+  const [form, fields] = useForm<Record<"name" | "members" | "seed" | MethodKey, string>>({
     lastResult: actionData,
     defaultValue: loaderData.values ?? undefined,
     onValidate: ({ formData }) => parseWithZod(formData, { schema: methodSheetSchema }) as never,
@@ -102,6 +105,56 @@ export default function NewMethodSheet({ actionData, loaderData }: Route.Compone
           )}
         </Field>
         <div className="grid items-start gap-5 sm:grid-cols-2">{FIRST.map(field)}</div>
+        <fieldset className="border-y border-hairline py-3">
+          <legend className="float-left w-full font-bold">Range of the answer</legend>
+          <p className="clear-left max-w-prose text-small text-slate">
+            Each estimate is run again for every member of an ensemble, with wind speed and direction, drag law, layer
+            depth, the step below, the start, rain, heat and what else is uncertain drawn from{" "}
+            <Link to="/methods#ensemble">stated ranges</Link>. A law or parameter that is chosen above is not drawn.
+          </p>
+          <div className="mt-4 grid items-start gap-5 sm:grid-cols-2">
+            <Field
+              id={fields.members.id}
+              label="Members"
+              hint="At least 200 for layer models, 64 for the column; up to 5000. Leave it open for no range."
+              errors={fields.members.errors}
+              optional
+            >
+              {(described) => (
+                <input
+                  {...getInputProps(fields.members, { type: "text" })}
+                  {...described}
+                  key={fields.members.key}
+                  inputMode="numeric"
+                  list="usual-members"
+                  className="input"
+                />
+              )}
+            </Field>
+            <datalist id="usual-members">
+              {[64, 200, 500, 1000].map((count) => (
+                <option key={count} value={count} />
+              ))}
+            </datalist>
+            <Field
+              id={fields.seed.id}
+              label="Seed"
+              hint="The same seed draws the same members, so that a number can be computed again. 1 if left open."
+              errors={fields.seed.errors}
+              optional
+            >
+              {(described) => (
+                <input
+                  {...getInputProps(fields.seed, { type: "text" })}
+                  {...described}
+                  key={fields.seed.key}
+                  inputMode="numeric"
+                  className="input"
+                />
+              )}
+            </Field>
+          </div>
+        </fieldset>
         <details open={wrongBelow || undefined} className="border-y border-hairline py-3">
           <summary className="font-bold">All other parameters</summary>
           <div className="mt-4 grid items-start gap-5 sm:grid-cols-2">{REST.map(field)}</div>
