@@ -1,6 +1,6 @@
 import { METRES_PER_DEGREE } from "../box/ring";
 import { coriolis, inertialPeriod } from "../ekman/coriolis";
-import { CONVENTION, hours, type Indicator } from "./fit-context";
+import { hours, thresholdSource, type Indicator } from "./fit-context";
 
 const WIDE = 500_000;
 
@@ -8,7 +8,12 @@ const WIDE = 500_000;
 export const boxExtent: Indicator = ({ place }) => {
   if (place.size === null) return null;
   const width = `The box is about ${(place.size / 1000).toFixed(0)} km wide`;
-  const note = { code: "BOX_EXTENT", value: place.size / 1000, threshold: WIDE / 1000, source: CONVENTION };
+  const note = {
+    code: "BOX_EXTENT",
+    value: place.size / 1000,
+    threshold: WIDE / 1000,
+    source: thresholdSource("fit-extent"),
+  };
   if (place.size <= WIDE) {
     return { ...note, severity: "ok", message: `${width}: one latitude stands for all of it.` };
   }

@@ -1,5 +1,5 @@
 import { EQUATORIAL_LIMIT } from "../guards";
-import { CONVENTION, hours, kilometres, type Indicator } from "./fit-context";
+import { hours, kilometres, thresholdSource, type Indicator } from "./fit-context";
 import { rossbyNumber } from "./rossby-number";
 
 const SMALL = 0.1;
@@ -12,7 +12,7 @@ const LARGE = 0.5;
 export const boxRossby: Indicator = ({ place, peakDrift }) => {
   if (place.size === null || Math.abs(place.latitude) < EQUATORIAL_LIMIT) return null;
   const value = rossbyNumber(peakDrift, place.size, place.latitude);
-  const note = { code: "BOX_ROSSBY_NUMBER", value, source: CONVENTION };
+  const note = { code: "BOX_ROSSBY_NUMBER", value, source: thresholdSource("fit-rossby") };
   const numbers = `Rossby number ${value.toFixed(2)}`;
   if (value <= SMALL) {
     const message = `The drift is slow for a box of ${kilometres(place.size)} (${numbers}): little water comes from outside.`;

@@ -1,4 +1,4 @@
-import { atMost, CONVENTION, kilometres, type Indicator } from "./fit-context";
+import { atMost, kilometres, thresholdSource, type Indicator } from "./fit-context";
 
 const SMALL = 0.5;
 const LARGE = 1;
@@ -10,7 +10,7 @@ export const boxStormSize: Indicator = ({ scenario, place }) => {
   const value = place.size / cyclone.radiusOfMaximumWind;
   const severity = atMost(value, SMALL, LARGE);
   const widths = `The box is ${kilometres(place.size)} wide, ${value.toFixed(2)} times the storm's radius of maximum wind of ${kilometres(cyclone.radiusOfMaximumWind)}`;
-  const note = { code: "BOX_STORM_SIZE", severity, value, source: CONVENTION };
+  const note = { code: "BOX_STORM_SIZE", severity, value, source: thresholdSource("fit-storm-size") };
   if (severity === "ok") {
     return { ...note, message: `${widths}: one wind holds for all of it.`, threshold: SMALL };
   }

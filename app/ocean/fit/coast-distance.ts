@@ -1,5 +1,5 @@
 import { EQUATORIAL_LIMIT } from "../guards";
-import { CONVENTION, kilometres, type Indicator } from "./fit-context";
+import { kilometres, thresholdSource, type Indicator } from "./fit-context";
 import { rossbyRadius } from "./rossby-radius";
 
 const OPEN = 3;
@@ -15,11 +15,7 @@ export const coastDistance: Indicator = ({ place, internalSpeed, method }) => {
   const reckoned = internalSpeed === null ? ", reckoned with internal waves of 1 m/s" : "";
   const distance = `The shore is ${kilometres(place.distanceToShore)} away`;
   const radii = `internal Rossby radius (${kilometres(radius)}${reckoned})`;
-  const note = {
-    code: "COAST_DISTANCE",
-    value,
-    source: `internal Rossby radius (common practice); thresholds ${CONVENTION}`,
-  };
+  const note = { code: "COAST_DISTANCE", value, source: thresholdSource("fit-coast") };
   if (value > OPEN) {
     const message = `${distance}, more than three times the ${radii}: open water for the drift.`;
     return { ...note, severity: "ok", message, threshold: OPEN };

@@ -1,4 +1,4 @@
-import { CONVENTION, hours, type Indicator } from "./fit-context";
+import { hours, thresholdSource, type Indicator } from "./fit-context";
 
 const STEADY = 2;
 const IMPULSIVE = 0.25;
@@ -9,7 +9,7 @@ export const duration: Indicator = ({ duration: seconds, inertialPeriod, method 
   const value = seconds / inertialPeriod;
   const steady = method.model === "budget" || method.model === "coastal";
   const lengths = `The storm lasts ${hours(seconds)}, ${value.toFixed(2)} inertial periods of ${hours(inertialPeriod)}`;
-  const note = { code: "DURATION", value, source: CONVENTION };
+  const note = { code: "DURATION", value, source: thresholdSource("fit-duration") };
   if (value >= STEADY) {
     return { ...note, severity: "ok", message: `${lengths}: long enough for the drift to settle.`, threshold: STEADY };
   }

@@ -1,5 +1,5 @@
 import { EQUATORIAL_LIMIT, EQUATORIAL_MARGIN } from "../guards";
-import { CONVENTION, type Indicator } from "./fit-context";
+import { thresholdSource, type Indicator } from "./fit-context";
 
 /**
  * Near the equator f goes to zero, and with it every balance that divides by it. The steady balance of deep water is
@@ -7,7 +7,7 @@ import { CONVENTION, type Indicator } from "./fit-context";
  */
 export const equatorial: Indicator = ({ place }) => {
   const value = Math.abs(place.latitude);
-  const note = { value, source: CONVENTION };
+  const note = { value, source: thresholdSource("fit-equator") };
   if (value >= EQUATORIAL_MARGIN) {
     const message = `The box lies ${value.toFixed(1)}° from the equator, where the Earth's rotation is strong enough for every balance used here.`;
     return { ...note, code: "LATITUDE", severity: "ok", message, threshold: EQUATORIAL_MARGIN };

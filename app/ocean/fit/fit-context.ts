@@ -5,6 +5,7 @@ import type { ModelRun } from "../models/run-model";
 import type { FitNote, FitSeverity } from "../response";
 import type { Scenario } from "../scenario";
 import { potentialDensityOf } from "../seawater/density";
+import { sourceOf } from "../sources";
 import { internalWaveSpeed } from "./two-layer-speed";
 
 /** What the indicators look at. */
@@ -64,7 +65,11 @@ export function atMost(value: number, good: number, bad: number): FitSeverity {
   return value <= bad ? "caution" : "doNotUse";
 }
 
-export const CONVENTION = "convention of this engine";
+/** Where a threshold comes from; a source that was not read is said to be from memory. */
+export function thresholdSource(id: string): string {
+  const { citation, provenance } = sourceOf(id);
+  return provenance === "from memory" ? `${citation} (from memory)` : citation;
+}
 
 /** Metres as kilometres for a message. */
 export function kilometres(metres: number): string {

@@ -1,4 +1,4 @@
-import { CONVENTION, type Indicator } from "./fit-context";
+import type { Indicator } from "./fit-context";
 
 /** A layer cannot be deeper than the water. */
 export const layerInWater: Indicator = ({ water, place }) => {
@@ -10,6 +10,6 @@ export const layerInWater: Indicator = ({ water, place }) => {
     message,
     value: water.askedDepth,
     threshold: place.waterDepth,
-    source: CONVENTION,
+    source: "convention of this engine",
   };
 };

@@ -3,8 +3,7 @@ import type { ColumnRecord } from "../models/column-run";
 import { coastalResponse } from "../motion/steady-responses";
 import { apply } from "../motion/steady-motion";
 import { potentialDensityOf } from "../seawater/density";
-import { sourceOf } from "../sources";
-import { hours, type FitContext, type Indicator } from "./fit-context";
+import { hours, thresholdSource, type FitContext, type Indicator } from "./fit-context";
 
 /** Density of surface and bed this close: one layer, as inside the column. kg/m³ */
 const SAME_DENSITY = 1e-4;
@@ -34,7 +33,7 @@ export const mixedToBed: Indicator = (context) => {
     message,
     value: mixed / 3600,
     threshold: 0,
-    source: sourceOf("column").citation,
+    source: thresholdSource("fit-mixed-to-bed"),
   };
 };
 

@@ -2,7 +2,7 @@ import { EQUATORIAL_LIMIT } from "../guards";
 import type { FitNote } from "../response";
 import type { ModelId } from "../scenario";
 import { coastDistance } from "./coast-distance";
-import { CONVENTION, type FitContext } from "./fit-context";
+import { thresholdSource, type FitContext } from "./fit-context";
 import { layerRichardson } from "./layer-richardson";
 import { layerStability } from "./layer-stability";
 import { stressSteadiness } from "./stress-steadiness";
@@ -63,19 +63,23 @@ function columnAdvice(context: FitContext): ModelAdvice | null {
 function fixedLayerAdvice(context: FitContext): ModelAdvice {
   const { place, duration, inertialPeriod, stress } = context;
   if (inertialPeriod === null || Math.abs(place.latitude) < EQUATORIAL_LIMIT) {
-    const decided = { value: Math.abs(place.latitude), threshold: EQUATORIAL_LIMIT, source: CONVENTION };
+    const decided = {
+      value: Math.abs(place.latitude),
+      threshold: EQUATORIAL_LIMIT,
+      source: thresholdSource("fit-equator"),
+    };
     const reason = "Near the equator there is no steady Ekman drift; the slab needs none.";
     return advice("slab", reason, decided, ["column"]);
   }
   const periods = duration / inertialPeriod;
-  const length = { value: periods, threshold: SETTLED, source: CONVENTION };
+  const length = { value: periods, threshold: SETTLED, source: thresholdSource("fit-duration") };
   if (periods < SETTLED) {
     const reason = `The storm lasts only ${periods.toFixed(1)} inertial periods, so inertial motion carries a good share of the drift.`;
     return advice("slab", reason, length, ["column"]);
   }
   const share = stressSteadiness(stress);
   if (share < STEADY_SHARE) {
-    const decided = { value: share, threshold: STEADY_SHARE, source: CONVENTION };
+    const decided = { value: share, threshold: STEADY_SHARE, source: thresholdSource("fit-steadiness") };
     const reason = "The wind changes as it blows, so inertial motion carries a good share of the drift.";
     return advice("slab", reason, decided, ["column"]);
   }

@@ -1,5 +1,5 @@
 import { LONGEST_GAP } from "../constants";
-import { CONVENTION, hours, type Indicator } from "./fit-context";
+import { hours, thresholdSource, type Indicator } from "./fit-context";
 
 const CLOSE = 3600;
 
@@ -8,7 +8,12 @@ export const samplingGap: Indicator = ({ forcing }) => {
   let longest = 0;
   for (let k = 1; k < forcing.seconds.length; k++)
     longest = Math.max(longest, forcing.seconds[k] - forcing.seconds[k - 1]);
-  const note = { code: "SAMPLING", value: longest / 3600, threshold: CLOSE / 3600, source: CONVENTION };
+  const note = {
+    code: "SAMPLING",
+    value: longest / 3600,
+    threshold: CLOSE / 3600,
+    source: thresholdSource("fit-sampling"),
+  };
   if (longest <= CLOSE) {
     return { ...note, severity: "ok", message: `Samples are at most ${(longest / 3600).toFixed(2)} h apart.` };
   }

@@ -1,5 +1,5 @@
 import { EQUATORIAL_LIMIT } from "../guards";
-import { CONVENTION, type Indicator } from "./fit-context";
+import { thresholdSource, type Indicator } from "./fit-context";
 import { stormSpeedNumber } from "./storm-speed-number";
 
 const SLOW = 0.5;
@@ -10,8 +10,7 @@ export const stormSpeed: Indicator = ({ scenario, place }) => {
   const { cyclone } = scenario.storm;
   if (!cyclone || Math.abs(place.latitude) < EQUATORIAL_LIMIT) return null;
   const value = stormSpeedNumber(cyclone.translationSpeed, cyclone.radiusOfMaximumWind, place.latitude);
-  const source = `Price, Sanford & Forristall (1994), from memory; thresholds ${CONVENTION}`;
-  const note = { code: "STORM_SPEED_NUMBER", value, source };
+  const note = { code: "STORM_SPEED_NUMBER", value, source: thresholdSource("fit-storm-speed") };
   const number = `The storm speed number is ${value.toFixed(2)}`;
   if (value < SLOW) {
     const message = `${number}: the storm is slow against the inertial motion, so water rises under it, which no model here follows. Expect more cooling than estimated.`;

@@ -1,4 +1,4 @@
-import { CONVENTION, type Indicator } from "./fit-context";
+import { thresholdSource, type Indicator } from "./fit-context";
 
 /** A cyclone no faster than this leaves time for water to rise under it, m/s. */
 const SLOW = 4;
@@ -9,8 +9,7 @@ export const upwellingUnderStorm: Indicator = ({ scenario, internalSpeed }) => {
   if (!cyclone) return null;
   const value = cyclone.translationSpeed;
   const pace = `The storm's centre moves at ${value.toFixed(1)} m/s`;
-  const source = `Price (1981) for the effect, 4 m/s from memory; comparison with internal waves ${CONVENTION}`;
-  const note = { code: "UPWELLING", value, source };
+  const note = { code: "UPWELLING", value, source: thresholdSource("fit-upwelling") };
   if (internalSpeed !== null && value <= internalSpeed) {
     const message = `${pace}, no faster than long internal waves (${internalSpeed.toFixed(1)} m/s), so water rises under it all the while and rules the cooling. Use a model with three dimensions for temperature and salinity.`;
     return { ...note, severity: "doNotUse", message, threshold: internalSpeed };

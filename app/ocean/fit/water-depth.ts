@@ -1,4 +1,4 @@
-import type { Indicator } from "./fit-context";
+import { thresholdSource, type Indicator } from "./fit-context";
 
 const DEEP = 1.25;
 const FRICTIONAL = 0.5;
@@ -10,7 +10,7 @@ export const waterDepth: Indicator = ({ place, ekmanDepth, method }) => {
   const { model, ekman } = method;
   const aware = model === "coastal" || model === "column" || (model === "budget" && ekman === "finiteDepth");
   const depths = `The water is ${place.waterDepth.toFixed(0)} m deep, ${value.toFixed(2)} times the Ekman depth of ${ekmanDepth.toFixed(0)} m`;
-  const note = { code: "WATER_DEPTH", value, source: "Ekman (1905), finite depth; computed here" };
+  const note = { code: "WATER_DEPTH", value, source: thresholdSource("fit-depth") };
   if (value >= DEEP) {
     const message = `${depths}: deep enough that the bed does not slow the drift.`;
     return { ...note, severity: "ok", message, threshold: DEEP };

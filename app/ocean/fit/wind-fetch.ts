@@ -1,6 +1,5 @@
 import type { Forcing } from "../forcing/read-forcing";
-import { sourceOf } from "../sources";
-import { kilometres, type Indicator } from "./fit-context";
+import { kilometres, thresholdSource, type Indicator } from "./fit-context";
 
 /** Measuring heights of 10 m that the wind must have crossed for the sea to be as the drag laws take it: 8 km. */
 const GROWN_FETCH = 8000;
@@ -17,7 +16,7 @@ export const windFetch: Indicator = ({ place, forcing, peakWind }) => {
   if (offLand <= ALONGSHORE) return null;
   const metres = place.distanceToShore / offLand;
   const note = { code: "FETCH", value: metres / 1000, threshold: GROWN_FETCH / 1000 };
-  const source = sourceOf("drag-largePond1981").citation;
+  const source = thresholdSource("fit-fetch");
   const blow =
     place.shoreNormal === null
       ? `The wind crosses at least ${kilometres(metres)} of water, the distance to the nearest shore`
