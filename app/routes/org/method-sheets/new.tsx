@@ -1,8 +1,9 @@
-import { getFormProps, getInputProps, getSelectProps, useForm } from "@conform-to/react";
+import { getFormProps, useForm } from "@conform-to/react";
 import { parseWithZod } from "@conform-to/zod/v4";
 import { data, Form, Link, redirect } from "react-router";
 import type { Route } from "./+types/new";
-import { Field, FormErrors } from "~/components/field";
+import { FormErrors } from "~/components/field";
+import { NumberField, SelectField, TextField } from "~/components/form-fields";
 import { PageTitle } from "~/components/page-title";
 import { SubmitButton } from "~/components/submit-button";
 import { METHOD_KEYS, PARAMETERS, type MethodKey } from "~/estimates/method-parameters";
@@ -47,39 +48,10 @@ export default function NewMethodSheet({ actionData, loaderData }: Route.Compone
   });
   const field = (key: MethodKey) => {
     const parameter = PARAMETERS[key];
-    const { errors, id, key: remount } = fields[key];
-    return (
-      <Field
-        key={key}
-        id={id}
-        label={parameter.label}
-        unit={parameter.kind === "number" ? parameter.unit : undefined}
-        hint={parameter.hint}
-        errors={errors}
-        optional
-      >
-        {(described) =>
-          parameter.kind === "choice" ? (
-            <select {...getSelectProps(fields[key])} {...described} key={remount} className="input">
-              <option value="">default</option>
-              {Object.entries(parameter.options).map(([value, label]) => (
-                <option key={value} value={value}>
-                  {label}
-                </option>
-              ))}
-            </select>
-          ) : (
-            <input
-              {...getInputProps(fields[key], { type: "text" })}
-              {...described}
-              key={remount}
-              inputMode="decimal"
-              className="input"
-            />
-          )
-        }
-      </Field>
-    );
+    const texts = { field: fields[key], label: parameter.label, hint: parameter.hint, optional: true };
+    if (parameter.kind === "number") return <NumberField key={key} {...texts} unit={parameter.unit} />;
+    const options = Object.entries(parameter.options).map(([value, label]) => ({ value, label }));
+    return <SelectField key={key} {...texts} options={[{ value: "", label: "default" }, ...options]} />;
   };
   const wrongBelow = REST.some((key) => fields[key].errors?.length);
   return (
@@ -88,22 +60,12 @@ export default function NewMethodSheet({ actionData, loaderData }: Route.Compone
       <PageTitle first>{loaderData.next ? `Method sheet, version ${loaderData.next}` : "New method sheet"}</PageTitle>
       <Form method="post" {...getFormProps(form)} className="grid max-w-4xl gap-5">
         <FormErrors errors={form.errors} id={form.errorId} />
-        <Field
-          id={fields.name.id}
+        <TextField
+          field={fields.name}
           label="Name"
-          errors={fields.name.errors}
           hint="The same name as an existing sheet makes its next version."
           className="max-w-md"
-        >
-          {(described) => (
-            <input
-              {...getInputProps(fields.name, { type: "text" })}
-              {...described}
-              key={fields.name.key}
-              className="input"
-            />
-          )}
-        </Field>
+        />
         <div className="grid items-start gap-5 sm:grid-cols-2">{FIRST.map(field)}</div>
         <fieldset className="border-y border-hairline py-3">
           <legend className="float-left w-full font-bold">Range of the answer</legend>
@@ -113,46 +75,26 @@ export default function NewMethodSheet({ actionData, loaderData }: Route.Compone
             <Link to="/methods#ensemble">stated ranges</Link>. A law or parameter that is chosen above is not drawn.
           </p>
           <div className="mt-4 grid items-start gap-5 sm:grid-cols-2">
-            <Field
-              id={fields.members.id}
+            <TextField
+              field={fields.members}
               label="Members"
               hint="At least 200 for layer models, 64 for the column; up to 5000. Leave it open for no range."
-              errors={fields.members.errors}
+              inputMode="numeric"
+              list="usual-members"
               optional
-            >
-              {(described) => (
-                <input
-                  {...getInputProps(fields.members, { type: "text" })}
-                  {...described}
-                  key={fields.members.key}
-                  inputMode="numeric"
-                  list="usual-members"
-                  className="input"
-                />
-              )}
-            </Field>
+            />
             <datalist id="usual-members">
               {[64, 200, 500, 1000].map((count) => (
                 <option key={count} value={count} />
               ))}
             </datalist>
-            <Field
-              id={fields.seed.id}
+            <TextField
+              field={fields.seed}
               label="Seed"
               hint="The same seed draws the same members, so that a number can be computed again. 1 if left open."
-              errors={fields.seed.errors}
+              inputMode="numeric"
               optional
-            >
-              {(described) => (
-                <input
-                  {...getInputProps(fields.seed, { type: "text" })}
-                  {...described}
-                  key={fields.seed.key}
-                  inputMode="numeric"
-                  className="input"
-                />
-              )}
-            </Field>
+            />
           </div>
         </fieldset>
         <details open={wrongBelow || undefined} className="border-y border-hairline py-3">
