@@ -38,7 +38,7 @@ export function mixAtGradients(state: ColumnState, search: LeastInterface, criti
           `Gradient mixing did not settle in ${most} exchanges; use a shorter time step or larger cells.`,
         );
       }
-      exchange(state, k, (1 - richardson[k] / TARGET) / 2);
+      exchange(state, k, (1 - Math.max(0, richardson[k]) / TARGET) / 2);
       const above = k > 0 ? k - 1 : 0;
       const below = k + 1 < interfaces ? k + 1 : k;
       renewRichardson(state, richardson, scaled, above, below + 1);
@@ -74,7 +74,11 @@ function exchange(state: ColumnState, k: number, share: number): void {
   renewDensity(state, k, k + 2);
 }
 
-/** Richardson numbers of the interfaces from…to - 1. */
+/**
+ * Richardson numbers of the interfaces from…to - 1. Where nothing is stratified the number is 0 whatever the shear, so
+ * these are told apart by it, as negative numbers: taken in the order of depth instead, shear would creep through mixed
+ * water in more exchanges than a step can have.
+ */
 function renewRichardson(
   { u, v, rho }: ColumnState,
   richardson: Float64Array,
@@ -88,6 +92,6 @@ function renewRichardson(
     const shear2 = du * du + dv * dv;
     const step = rho[k + 1] - rho[k];
     if (shear2 < NO_SHEAR) richardson[k] = Number.POSITIVE_INFINITY;
-    else richardson[k] = step > 0 ? (scaled * step) / shear2 : 0;
+    else richardson[k] = step > 0 ? (scaled * step) / shear2 : -shear2;
   }
 }
