@@ -1,11 +1,14 @@
 /** What the figures of an estimate are drawn from, for its page and for a memo. */
 import type { StormForcing } from "./storm-forcing";
+import { linearAt } from "./resample";
 import { windAtTenMetres } from "./wind-at-ten-metres";
 import { measureBox } from "~/area/measure-box";
 import type { LocalPosition } from "~/figures/drift-track";
 import type { ForcingData } from "~/figures/forcing-stack";
-import type { MethodUsed } from "~/ocean/response";
+import type { SeriesBand } from "~/figures/response-panels";
+import type { BandName, MethodUsed, SeriesBands } from "~/ocean/response";
 import type { Position } from "~/ocean/scenario";
+import { epochSeconds } from "~/units/format-time";
 
 const EARTH_RADIUS = 6_371_008.8;
 const RADIANS = Math.PI / 180;
@@ -39,6 +42,15 @@ export function forcingData(forcing: StormForcing, method: MethodUsed): ForcingD
     rainRate: forcing.rain,
     netHeat: netHeat(forcing),
   };
+}
+
+/** A band at the times of the series: as it is, or on the line between its samples where a long storm has fewer of them. */
+export function bandAt({ time, series }: SeriesBands, name: BandName, at: readonly number[]): SeriesBand {
+  const knots = time.map(epochSeconds);
+  const { p10, p90 } = series[name];
+  if (knots.length === at.length) return { p10, p90 };
+  const between = (values: number[]) => at.map((moment) => linearAt({ time: knots, values }, moment));
+  return { p10: between(p10), p90: between(p90) };
 }
 
 /** Depth that never changes says nothing through time. */

@@ -1,5 +1,5 @@
 import { figureCsv } from "~/figures/figure-csv";
-import { SERIES_UNITS, type Response, type SeriesName } from "~/ocean/response";
+import { SERIES_NAMES, SERIES_UNITS, type Response, type SeriesName } from "~/ocean/response";
 
 /** Names as a spreadsheet's reader wants them; the unit is added to each. */
 const HEADERS: Record<SeriesName, string> = {
@@ -17,14 +17,29 @@ const HEADERS: Record<SeriesName, string> = {
   layerDepth: "layer depth",
 };
 
-/** The series of a response as CSV: ISO UTC, SI, units in the header, numbers unrounded. */
-export function responseCsv({ series }: Response): string {
-  const names = Object.keys(SERIES_UNITS) as SeriesName[];
+const PERCENTILES = { p10: "10th percentile", p50: "median", p90: "90th percentile" } as const;
+const PERCENTILE_KEYS = Object.keys(PERCENTILES) as (keyof typeof PERCENTILES)[];
+
+/**
+ * The series of a response as CSV: ISO UTC, SI, units in the header, numbers unrounded. Where an ensemble ran, its
+ * percentiles follow; a long storm has them at some of its times, and blanks between.
+ */
+export function responseCsv({ series, bands }: Pick<Response, "series" | "bands">): string {
+  const banded = bands ? SERIES_NAMES.flatMap((name) => PERCENTILE_KEYS.map((p) => ({ name, p }))) : [];
+  const sampleAt = new Map(bands?.time.map((time, sample) => [time, sample]));
   return figureCsv({
     columns: [
       { name: "time (UTC)", unit: "" },
-      ...names.map((name) => ({ name: HEADERS[name], unit: SERIES_UNITS[name] })),
+      ...SERIES_NAMES.map((name) => ({ name: HEADERS[name], unit: SERIES_UNITS[name] })),
+      ...banded.map(({ name, p }) => ({ name: `${HEADERS[name]}, ${PERCENTILES[p]}`, unit: SERIES_UNITS[name] })),
     ],
-    rows: series.time.map((time, index) => [time, ...names.map((name) => series[name][index])]),
+    rows: series.time.map((time, index) => {
+      const sample = sampleAt.get(time);
+      return [
+        time,
+        ...SERIES_NAMES.map((name) => series[name][index]),
+        ...banded.map(({ name, p }) => (sample === undefined ? null : (bands?.series[name][p][sample] ?? null))),
+      ];
+    }),
   });
 }

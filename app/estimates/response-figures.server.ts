@@ -1,6 +1,8 @@
 /** The figures of a response page, drawn once for each width and kept while they are asked for. */
-import { changing, forcingData, localOutline } from "./figure-data";
+import { bandAt, changing, forcingData, localOutline } from "./figure-data";
+import type { FigureId } from "./headline-figures";
 import type { InputsRegister } from "./inputs-register";
+import { presentUncertainty } from "./present-uncertainty";
 import { Recent } from "./recent";
 import type { StormForcing } from "./storm-forcing";
 import { driftTrack } from "~/figures/drift-track";
@@ -8,10 +10,12 @@ import type { Figure } from "~/figures/figure";
 import { FIGURE_WIDTHS, type FigureContext } from "~/figures/figure-context";
 import { forcingStack } from "~/figures/forcing-stack";
 import { hodograph } from "~/figures/hodograph";
-import { layerStack } from "~/figures/layer-stack";
+import { layerStack, type LayerStackData } from "~/figures/layer-stack";
 import { serverPlotDocument } from "~/figures/plot-document.server";
+import type { SeriesBand } from "~/figures/response-panels";
 import { stressAndDrift } from "~/figures/stress-and-drift";
-import type { Response } from "~/ocean/response";
+import { tornado } from "~/figures/tornado";
+import type { BandName, Response } from "~/ocean/response";
 import type { UnitChoices } from "~/units/unit-choices";
 import { epochSeconds } from "~/units/format-time";
 
@@ -27,6 +31,8 @@ export interface ResponseFigures {
   layer: FigurePair;
   track: FigurePair;
   hodograph: FigurePair;
+  /** What each headline figure depends on; none without an ensemble. */
+  tornadoes: Partial<Record<FigureId, FigurePair>>;
 }
 
 export interface FigureRequest {
@@ -54,18 +60,46 @@ function draw({ response, register, forcing, ...shared }: FigureRequest): Respon
     const narrow = at(FIGURE_WIDTHS.narrow);
     return { wide: at(width), narrow: { ...narrow, table: { columns: [], rows: [] } } };
   };
+  const { bands, uncertainty } = response;
+  const banded = bands && ((name: BandName) => bandAt(bands, name, time));
+  const effects = uncertainty ? presentUncertainty(uncertainty, register.box.shoreNormal !== null).effects : [];
   const drivenBy = forcing && forcingData(forcing, response.method);
   return {
     forcing: drivenBy && pair((context) => forcingStack(drivenBy, context)),
-    stressAndDrift: pair((context) => stressAndDrift({ ...series, time, triggers }, context)),
+    stressAndDrift: pair((context) =>
+      stressAndDrift(
+        {
+          ...series,
+          time,
+          triggers,
+          bands: banded && { stress: banded("stress"), driftSpeed: banded("driftSpeed") },
+        },
+        context,
+      ),
+    ),
     layer: pair((context) =>
-      layerStack({ ...series, time, layerDepth: changing(series.layerDepth), triggers }, context),
+      layerStack(
+        { ...series, time, layerDepth: changing(series.layerDepth), triggers, bands: banded && layerBands(banded) },
+        context,
+      ),
     ),
     track: pair(
       (context) => driftTrack({ ...series, time, box: localOutline(register.box.polygon) }, context),
       SIDE_WIDTH,
     ),
     hodograph: pair((context) => hodograph({ ...series, time }, context), SIDE_WIDTH),
+    tornadoes: Object.fromEntries(
+      effects.map(({ id, tornado: data }) => [id, pair((context) => tornado(data, context), SIDE_WIDTH)]),
+    ),
+  };
+}
+
+function layerBands(banded: (name: BandName) => SeriesBand): LayerStackData["bands"] {
+  return {
+    temperature: banded("temperature"),
+    salinity: banded("salinity"),
+    density: banded("density"),
+    layerDepth: banded("layerDepth"),
   };
 }
 

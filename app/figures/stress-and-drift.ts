@@ -7,7 +7,7 @@ import { drawTimeFigure } from "./draw-time-figure";
 import { extremes } from "./extremes";
 import type { Figure } from "./figure";
 import { caption, type FigureContext } from "./figure-context";
-import { magnitude, seriesPanel } from "./response-panels";
+import { magnitude, seriesPanel, type SeriesBand } from "./response-panels";
 import { timeTable } from "./time-table";
 
 export interface StressAndDriftData {
@@ -20,21 +20,24 @@ export interface StressAndDriftData {
   driftEast: ArrayLike<number>;
   driftNorth: ArrayLike<number>;
   triggers?: readonly TriggerLevel[];
+  /** Of the sizes of both, where an ensemble ran. */
+  bands?: { stress: SeriesBand; driftSpeed: SeriesBand };
 }
 
 /** Wind stress above the drift of the layer, the drift as speed and as its two components. */
 export function stressAndDrift(data: StressAndDriftData, context: FigureContext): Figure {
-  const { time, stressX, stressY, driftEast, driftNorth, triggers } = data;
+  const { time, stressX, stressY, driftEast, driftNorth, triggers, bands } = data;
   const stress = magnitude(stressX, stressY);
   const speed = magnitude(driftEast, driftNorth);
   const panels = [
-    seriesPanel("stress", { values: stress, triggers }, context.units),
+    seriesPanel("stress", { values: stress, triggers, band: bands?.stress }, context.units),
     {
       ...seriesPanel(
         "driftSpeed",
         {
           values: speed,
           label: "speed",
+          band: bands?.driftSpeed,
           more: [
             { values: driftEast, label: "east", dash: "6,2" },
             { values: driftNorth, label: "north", dash: "2,3" },
@@ -56,6 +59,7 @@ export function stressAndDrift(data: StressAndDriftData, context: FigureContext)
     caption: caption(
       [
         "Wind stress; drift of the layer as speed and as its components towards east and north.",
+        bands ? "Tinted: from the 10th to the 90th percentile of stress and speed." : null,
         beyondSentence(drawn.levelsBeyond),
         `${periodOf(time, context)}.`,
       ],

@@ -1,4 +1,4 @@
-import { changing, forcingData, localOutline } from "~/estimates/figure-data";
+import { bandAt, changing, forcingData, localOutline } from "~/estimates/figure-data";
 import type { LoadedResponse } from "~/estimates/load-response.server";
 import { driftTrack } from "~/figures/drift-track";
 import type { Figure } from "~/figures/figure";
@@ -8,7 +8,7 @@ import { hodograph } from "~/figures/hodograph";
 import { serverPlotDocument } from "~/figures/plot-document.server";
 import { seriesLine } from "~/figures/series-line";
 import { stressAndDrift } from "~/figures/stress-and-drift";
-import type { Response } from "~/ocean/response";
+import type { BandName, Response } from "~/ocean/response";
 import { epochSeconds } from "~/units/format-time";
 
 type Drawn = Pick<LoadedResponse, "register" | "forcing"> & { response: Response };
@@ -21,13 +21,21 @@ export function memoFigures(drawn: Drawn, options: Omit<FigureContext, "document
   const { triggers } = headline;
   const context: FigureContext = { ...options, document: serverPlotDocument() };
   const layerDepth = changing(series.layerDepth);
+  const { bands } = response;
+  const band = (name: BandName) => (bands ? bandAt(bands, name, time) : undefined);
+  const [stress, driftSpeed] = [band("stress"), band("driftSpeed")];
   return [
-    seriesLine("salinity", { time, values: series.salinity, triggers }, context),
+    seriesLine("salinity", { time, values: series.salinity, band: band("salinity"), triggers }, context),
     ...(forcing ? [forcingStack(forcingData(forcing, response.method), context)] : []),
-    seriesLine("temperature", { time, values: series.temperature, triggers }, context),
-    seriesLine("density", { time, values: series.density, triggers }, context),
-    ...(layerDepth ? [seriesLine("layerDepth", { time, values: layerDepth, triggers }, context)] : []),
-    stressAndDrift({ ...series, time, triggers }, context),
+    seriesLine("temperature", { time, values: series.temperature, band: band("temperature"), triggers }, context),
+    seriesLine("density", { time, values: series.density, band: band("density"), triggers }, context),
+    ...(layerDepth
+      ? [seriesLine("layerDepth", { time, values: layerDepth, band: band("layerDepth"), triggers }, context)]
+      : []),
+    stressAndDrift(
+      { ...series, time, triggers, ...(stress && driftSpeed && { bands: { stress, driftSpeed } }) },
+      context,
+    ),
     driftTrack({ ...series, time, box: localOutline(register.box.polygon) }, context),
     hodograph({ ...series, time }, context),
   ];

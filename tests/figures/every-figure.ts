@@ -32,6 +32,11 @@ export interface EverySeries {
   coast?: readonly (readonly LocalPosition[])[];
 }
 
+const bandAround = (values: number[]) => ({
+  p10: values.map((value) => 0.8 * Math.abs(value)),
+  p90: values.map((value) => 1.2 * Math.abs(value)),
+});
+
 /** Every figure there is, of one set of series. */
 export function everyFigure(series: EverySeries, context: FigureContext): Figure[] {
   const { time, triggerLevels: triggers } = series;
@@ -53,7 +58,10 @@ export function everyFigure(series: EverySeries, context: FigureContext): Figure
     seriesLine("density", { time, values: series.density }, context),
     seriesLine("layerDepth", { time, values: series.layerDepth }, context),
     layerStack({ ...series, triggers }, context),
-    stressAndDrift(series, context),
+    stressAndDrift(
+      { ...series, bands: { stress: bandAround(series.stressX), driftSpeed: bandAround(series.driftEast) } },
+      context,
+    ),
     hodograph({ ...series, inertialAmplitude: 0.5 }, context),
     driftTrack({ ...series, box: series.boxOutline, land: series.coast }, context),
   ];

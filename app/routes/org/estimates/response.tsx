@@ -11,6 +11,7 @@ import { InputsPart } from "~/components/response/inputs-part";
 import { BudgetTable, EquationList, MethodTable } from "~/components/response/method-part";
 import { StateBanner } from "~/components/response/state-banner";
 import { TriggerList } from "~/components/response/trigger-list";
+import { UncertaintyPart } from "~/components/response/uncertainty-part";
 import { SectionHeading } from "~/components/section-heading";
 import { SubmitButton } from "~/components/submit-button";
 import { TitleBlock } from "~/components/title-block";
@@ -22,6 +23,7 @@ import { loadResponse } from "~/estimates/load-response.server";
 import { presentInputs } from "~/estimates/present-inputs";
 import { presentMethod } from "~/estimates/present-methods";
 import { presentResponse } from "~/estimates/present-response";
+import { presentUncertainty } from "~/estimates/present-uncertainty";
 import { responseFigures } from "~/estimates/response-figures.server";
 import { choiceOf, KEEP, runSchema } from "~/estimates/run-request";
 import { CannotStart, startEstimates } from "~/estimates/start-estimates.server";
@@ -47,6 +49,9 @@ export async function loader({ context, params }: Route.LoaderArgs) {
   ]);
   const shown = response && {
     view: presentResponse(response, { units, zone, shore: register.box.shoreNormal !== null }),
+    uncertainty: response.uncertainty
+      ? presentUncertainty(response.uncertainty, register.box.shoreNormal !== null)
+      : null,
     figures: responseFigures({ response, register, forcing, zone, units, estimateCode: code }),
     methods: methodSources(response).map((source) => presentMethod(source, mathMarkup)),
     track: layerTrack(register.box, response.series),
@@ -168,6 +173,12 @@ export default function ResponsePage({ loaderData, actionData }: Route.Component
                 <FigureView figure={shown.figures.hodograph.wide} narrow={shown.figures.hodograph.narrow} />
               </div>
             </section>
+            {shown.uncertainty && (
+              <section aria-labelledby="spread">
+                <SectionHeading id="spread">What the answer depends on</SectionHeading>
+                <UncertaintyPart view={shown.uncertainty} tornadoes={shown.figures.tornadoes} />
+              </section>
+            )}
             <section aria-labelledby="fit">
               <SectionHeading id="fit">Fit notes</SectionHeading>
               <FitNoteList notes={shown.view.fitNotes} recommendation={shown.view.recommendation} />
