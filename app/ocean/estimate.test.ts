@@ -288,30 +288,6 @@ describe("estimate: what stands in a response", () => {
     expect(headline.densityStep.value).toBeGreaterThan(1);
   });
 
-  it("carries shear down through water of one density in shallow water under gusts, which once took a million exchanges", () => {
-    const windSpeed = [
-      2.21, 14.09, 10.28, 26.1, 7.87, 15.38, 18.42, 25.74, 8.59, 2.24, 5.01, 24.85, 21.78, 7.09, 12.04, 6.64, 26.82,
-      10.99, 10.04,
-    ];
-    const windFrom = [
-      63.22, 50.65, 33.75, 20.74, 9.37, 354.31, 336.37, 330.38, 310.71, 301.01, 289.01, 268.55, 259.82, 241.72, 231.6,
-      214.18, 205.62, 188.46, 177.94,
-    ];
-    const { headline } = estimate({
-      box: { latitude: -35.7, longitude: 10.1, waterDepth: 33.9 },
-      water: {
-        temperature: 10.4,
-        practicalSalinity: 32.9,
-        layerDepth: 24.7,
-        below: { temperature: 6.6, practicalSalinity: 37 },
-      },
-      storm: { time: windSpeed.map((_, k) => 3600 * k), windSpeed, windFrom },
-      method: { model: "column" },
-    });
-    expect(headline.peakDrift.value).toBeGreaterThan(0.5);
-    expect(headline.peakDrift.value).toBeLessThan(2.5);
-  });
-
   it("gives the column through time and depth, with the layer deepening under a gale", () => {
     const scenario = plainScenario({
       hours: 24,

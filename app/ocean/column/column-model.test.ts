@@ -199,6 +199,20 @@ describe("column", () => {
     );
   });
 
+  it("spreads shear through water of one density in few exchanges, taking the greatest first", () => {
+    const uniform = column(
+      () => 15,
+      () => 35,
+      { f: 0 },
+    );
+    // As the wind leaves it when a lighter layer has just been mixed away: a jet above water that is still.
+    uniform.state.u.fill(1, 0, CELLS / 2);
+    uniform.step(900, still);
+    expect(uniform.exchanges).toBeGreaterThan(0);
+    expect(uniform.exchanges).toBeLessThan(100_000);
+    expect(CELL * sum(uniform.state.u)).toBeCloseTo((CELL * CELLS) / 2, 9);
+  });
+
   it("is braked by its bed, never reversed, and works at the equator", () => {
     const free = column(
       () => 15,
