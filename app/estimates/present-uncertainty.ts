@@ -9,7 +9,7 @@ export interface EffectView {
   /** Which input matters most, in a sentence. */
   sentence: string;
   tornado: TornadoData;
-  /** Input and its share of the spread, the greatest first; empty where the members are too few. */
+  /** Inputs with their shares of the spread, the greatest first; empty where the members are too few. */
   shares: { factor: string; share: string }[];
 }
 
@@ -25,6 +25,8 @@ const EFFECT_OF: Partial<Record<FigureId, EffectFigureName>> = { surfaceTemperat
 
 /** Shares below this are noise of the estimate. */
 const NOTABLE = 0.05;
+/** Shares below this would read 0.00. */
+const SHOWN = 0.005;
 
 export function presentUncertainty(
   { members, computed, seed, factors, effects }: Uncertainty,
@@ -51,7 +53,9 @@ function presentEffect(id: FigureId, { value, bars, firstOrder }: FigureEffects,
     label,
     sentence: sentenceOf(bars[0].factor, firstOrder),
     tornado: { id, name: label, quantity: QUANTITY_OF[id], value, bars },
-    shares: firstOrder.map(({ factor, index }) => ({ factor, share: index === null ? "none" : index.toFixed(2) })),
+    shares: firstOrder.flatMap(({ factor, index }) =>
+      index !== null && index >= SHOWN ? [{ factor, share: index.toFixed(2) }] : [],
+    ),
   };
 }
 

@@ -57,6 +57,8 @@ const PLACES: { name: string; part: string; link?: RegExp }[] = [
   { name: "facts", part: "/facts" },
 ];
 
+const PUBLIC_PLACES = ["/methods", "/verify"];
+
 const SCREENS = [360, 768, 1280, 1920].flatMap((width) =>
   (["light", "dark"] as const).map((colorScheme) => ({ width, colorScheme })),
 );
@@ -70,14 +72,21 @@ describe.each(SCREENS)("the demonstration at $width px, $colorScheme", ({ width,
     const page = await browser.newPage({ width, height: 900, colorScheme });
     const home = await signIn(page);
     const faults: string[] = [];
-    for (const { name, part, link } of PLACES) {
-      await open(page, home, part, link);
+    const look = async (name: string) => {
       const sideways = await page.evaluate(() => document.documentElement.scrollWidth - window.innerWidth);
       if (sideways > 0) faults.push(`${name} is ${sideways} px too wide`);
-      if (!closely) continue;
+      if (!closely) return;
       // The map's canvas is drawn over by its own list of boxes, which is the equal view.
       const { violations } = await new AxeBuilder({ page }).exclude(".maplibregl-map").analyze();
       for (const { id, nodes } of violations) faults.push(`${name}: ${id} at ${nodes[0].target.join(" ")}`);
+    };
+    for (const { name, part, link } of PLACES) {
+      await open(page, home, part, link);
+      await look(name);
+    }
+    for (const place of PUBLIC_PLACES) {
+      await page.goto(new URL(place, page.url()).href, { waitUntil: "networkidle" });
+      await look(place);
     }
     expect(faults).toEqual([]);
   });

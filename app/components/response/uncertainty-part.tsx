@@ -39,6 +39,10 @@ export function UncertaintyPart({ view, tornadoes }: UncertaintyPartProps) {
                         <td className="number">{share}</td>
                       </tr>
                     ))}
+                    <tr>
+                      <td className="text-quiet">each of the others</td>
+                      <td className="number text-quiet">under 0.01</td>
+                    </tr>
                   </tbody>
                 </WideTable>
               )}

@@ -67,7 +67,7 @@ export default function NewMethodSheet({ actionData, loaderData }: Route.Compone
           className="max-w-md"
         />
         <div className="grid items-start gap-5 sm:grid-cols-2">{FIRST.map(field)}</div>
-        <fieldset className="border-y border-hairline py-3">
+        <fieldset className="border-t border-hairline py-3">
           <legend className="float-left w-full font-bold">Range of the answer</legend>
           <p className="clear-left max-w-prose text-small text-slate">
             Each estimate is run again for every member of an ensemble, with wind speed and direction, drag law, layer
