@@ -21,6 +21,7 @@ def points(request):
         "beta": beta,
         "sigma0": gsw.sigma0(SA, CT),
         "pt": pt,
+        "conductivity": gsw.C_from_SP(gsw.SP_from_SR(SA), t, p) / 10,
         "CT": gsw.CT_from_pt(SA, pt),
         "t": t,
         "pt0": gsw.pt0_from_t(SA, t, p),

@@ -13,6 +13,7 @@ import {
   inSituFromConservative,
   potentialFromInSitu,
 } from "~/ocean/seawater/potential-temperature";
+import { salinityFromConductivity } from "~/ocean/seawater/practical-salinity";
 import { pressureFromDepth } from "~/ocean/seawater/pressure-from-depth";
 import { buoyancyFrequencySquared, turnerAngle } from "~/ocean/seawater/stability";
 import { mulberry32 } from "~/ocean/statistics/mulberry32";
@@ -68,6 +69,17 @@ describe.skipIf(!found)("seawater against python3-gsw", () => {
     const t = theirs?.list("t") ?? [];
     const pt0 = water.SA.map((SA, k) => potentialFromInSitu(SA, t[k] ?? NaN, water.p[k]));
     expect(worst(pt0, theirs?.list("pt0") ?? [], 1)).toBeLessThan(1e-12);
+  });
+
+  it("finds salinity from conductivity as the library finds conductivity from salinity, within its scale", () => {
+    const conductivity = theirs?.list("conductivity") ?? [];
+    const t = theirs?.list("t") ?? [];
+    const worstOff = water.SA.reduce((most, SA, k) => {
+      const SP = (SA * 35) / 35.16504;
+      if (SP < 2 || (t[k] ?? 99) > 35) return most;
+      return Math.max(most, Math.abs(salinityFromConductivity(conductivity[k] ?? NaN, t[k] ?? NaN, water.p[k]) - SP));
+    }, 0);
+    expect(worstOff).toBeLessThan(1e-6);
   });
 
   it("freezes at the same temperature, air-saturated", () => {

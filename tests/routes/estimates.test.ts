@@ -77,6 +77,8 @@ describe("a response", () => {
         "recommendedModel",
         "recommendation",
         "method",
+        "bands",
+        "uncertainty",
         "budgets",
         "inputs",
         "engine",
@@ -88,6 +90,8 @@ describe("a response", () => {
     expect(header).toContain("surface Absolute Salinity (g/kg)");
     expect(first.startsWith(`${json.series.time[0]},`)).toBe(true);
     expect(rest).toHaveLength(json.series.time.length - 1);
+    expect(header).toContain("surface temperature, 10th percentile (°C)");
+    expect(json.uncertainty?.computed).toBe(200);
   });
 
   it("tells its inputs by file and hash, its cautions and its sources", async () => {
