@@ -1,7 +1,7 @@
 /**
  * Bundles what runs in Node beside the React Router build: the server's entry, the operator's command line (for images
- * without the tools of development) and, since that build does not bundle worker threads, the worker that computes
- * estimates. Packages stay outside the bundles.
+ * without the tools of development) and, since that build does not bundle worker threads, the workers that compute
+ * estimates and read HDF5. Packages stay outside the bundles.
  */
 import { fileURLToPath } from "node:url";
 import { build } from "esbuild";
@@ -12,6 +12,7 @@ const bundles = [
   { from: "app/server.ts", to: "build/start.mjs" },
   { from: "app/cli/galeprint.ts", to: "build/galeprint.mjs" },
   { from: "app/estimates/estimate-worker.ts", to: "build/worker/estimate-worker.mjs" },
+  { from: "app/readers/netcdf/hdf5-worker.ts", to: "build/worker/hdf5-worker.mjs" },
 ];
 
 await Promise.all(

@@ -108,8 +108,8 @@ function sayConversion(column: SettledColumn, channel: ChannelName, times: RowTi
   if (channel === "shortwave") {
     said.understood.push({
       what: `“${name}”`,
-      taken: /\bnet\b/i.test(name) ? "net of reflection" : "incoming: reflection at the surface is not taken off",
-      confidence: "assumed",
+      taken: column.column.net ? "net of reflection" : "incoming: reflection at the surface is not taken off",
+      confidence: column.column.senseKnown ? column.column.confidence : "assumed",
     });
   }
 }

@@ -67,6 +67,14 @@ export function binaryKind(bytes: Uint8Array): { what: string; toDo: string } | 
   return found === undefined ? null : { what: found.what, toDo: found.toDo };
 }
 
+const HDF5 = [0x89, 0x48, 0x44, 0x46, 0x0d, 0x0a, 0x1a, 0x0a];
+const CLASSIC = [0x43, 0x44, 0x46];
+
+/** Whether bytes are a NetCDF file of any kind: classic (`CDF` and a version) or NetCDF-4, which is HDF5. */
+export function isNetcdf(bytes: Uint8Array): boolean {
+  return startsWith(bytes, HDF5) || (startsWith(bytes, CLASSIC) && [1, 2, 5].includes(bytes[3] ?? 0));
+}
+
 const OLE = [0xd0, 0xcf, 0x11, 0xe0];
 
 /** Whether bytes are an Excel workbook: zipped (`.xlsx`) or of the older binary kind (`.xls`). */

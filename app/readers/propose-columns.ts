@@ -20,6 +20,11 @@ export interface ColumnProposal {
   confidence: Understood["confidence"];
   note: string | null;
   height: number | null;
+  averagingMinutes: number | null;
+  /** Whether the format settles which way a direction or a heat flux counts. */
+  senseKnown: boolean;
+  /** Shortwave: whether it is net of reflection. */
+  net: boolean;
 }
 
 /** Whether a role is a channel or a wind component. */
@@ -37,37 +42,46 @@ export function proposeColumns(
   return table.names.map((name, index) => {
     const parts = nameParts(name);
     const unitText = table.unitTexts[index] ?? parts.unitText;
+    const known = knowledge.columnByName(name);
     const base = {
       index,
       name: parts.bare === "" ? `column ${index + 1}` : parts.bare,
       statedUnit: unitText,
       missingCodes: answers.missingCodes?.[String(index)] ?? null,
-      traceCodes: knowledge.columnByName(name)?.traceCodes ?? [],
+      traceCodes: known?.traceCodes ?? [],
       note: null,
-      height: parts.height ?? (/^[uv]10/i.test(parts.bare) ? 10 : null),
+      height: known?.height ?? parts.height ?? (/^[uv]10/i.test(parts.bare) ? 10 : null),
+      averagingMinutes: known?.averagingMinutes ?? minutesIn(parts.bare),
+      senseKnown: known !== null && known.senseKnown !== false,
+      net: known?.net ?? /\bnet\b/i.test(parts.bare),
     };
     const answer = answers.columns?.[String(index)];
     if (answer !== undefined) {
       const role = answer.role;
       const unit = answer.unit ?? null;
       const settled = unit !== null ? unitById(unit) : isValueRole(role) ? statedUnit(table, index, name, role) : null;
-      return { ...base, role, unit: settled, confidence: "answered" as const };
+      return { ...base, role, unit: settled, senseKnown: false, confidence: "answered" as const };
     }
     if (stampColumns.includes(index))
       return { ...base, role: "time" as const, unit: null, confidence: "by content" as const };
-    const known = knowledge.columnByName(name);
     if (known !== null) {
       return {
         ...base,
         role: known.role,
         unit: known.unit === null ? null : unitById(known.unit),
         missingCodes: base.missingCodes ?? known.missingCodes,
-        confidence: "by the format" as const,
+        confidence: known.confidence ?? ("by the format" as const),
         note: known.note ?? null,
       };
     }
     return { ...base, ...byName(table, index, name) };
   });
+}
+
+/** `wind 10-min` → 10. */
+function minutesIn(name: string): number | null {
+  const minutes = /(\d{1,2})[ _-]?min/i.exec(name)?.[1];
+  return minutes === undefined ? null : Number(minutes);
 }
 
 function byName(

@@ -2,7 +2,8 @@ import { ProblemList } from "./problem-list";
 import { UnreadableFile, type ReadingAnswers, type SeriesReading } from "./reading";
 import { TEXT_RECOGNISERS } from "./recognisers";
 import { openText } from "./source-file";
-import { isWorkbook } from "./magic-bytes";
+import { isNetcdf, isWorkbook } from "./magic-bytes";
+import { readNetcdf } from "./netcdf/read-netcdf";
 import { readWorkbook } from "./workbook";
 
 export { MAX_SERIES_FILE_BYTES } from "./source-file";
@@ -19,6 +20,7 @@ export { MAX_SERIES_FILE_BYTES } from "./source-file";
 export function readSeries(input: { bytes: Uint8Array; fileName: string; answers?: ReadingAnswers }): SeriesReading {
   const problems = new ProblemList();
   if (isWorkbook(input.bytes)) return readWorkbook(input.bytes, input.fileName, input.answers ?? {}, problems);
+  if (isNetcdf(input.bytes)) return readNetcdf(input.bytes, input.fileName, input.answers ?? {}, problems);
   const source = openText(input.bytes, input.fileName, problems);
   const recogniser = source === null ? undefined : TEXT_RECOGNISERS.find((candidate) => candidate.recognises(source));
   if (source === null || recogniser === undefined) throw new UnreadableFile(problems.toArray());

@@ -27,7 +27,10 @@ export const CHANNEL_NAMES = Object.keys(CHANNEL_UNITS) as ChannelName[];
 
 export type Severity = "error" | "warning" | "note";
 
-/** `row` is the line of the file, counted from 1, header lines included; `column` is its name, or its number from 1. */
+/**
+ * `row` is the line of the file, counted from 1, header lines included, or its record where it has no lines; `column` is
+ * its name, or its number from 1.
+ */
 export interface ReadingProblem {
   severity: Severity;
   code: string;
@@ -52,7 +55,12 @@ export interface ReadingQuestion {
     | "averagingMinutes"
     | "columns"
     | "missingCodes"
-    | "leaveOutBadRows";
+    | "leaveOutBadRows"
+    | "place"
+    | "gridMethod"
+    | "timeAxis"
+    | "accumulation"
+    | "flagged";
   /** False once answered: an answered question stays in the list so that the answer can be changed. */
   needed: boolean;
   message: string;
@@ -140,6 +148,15 @@ export interface ReadingAnswers {
   missingCodes?: Record<string, string[]>;
   /** Rows with an error (an unreadable number, negative rain, wind beyond any measured) are left out instead of stopping the import. */
   leaveOutBadRows?: boolean;
+  /** Where in a file of several places or of a grid: `LAT,LON` in decimal degrees, or a place's name in the file. */
+  place?: string;
+  gridMethod?: "nearestSea" | "bilinear";
+  /** Name of the variable of time, where a file has several. */
+  timeAxis?: string;
+  /** Over which time the amounts of a file add up: its step, the day since 00 UTC, or all since the start. */
+  accumulation?: "step" | "day" | "start";
+  /** What becomes of values that the file's own flags call bad. */
+  flagged?: "leaveOut" | "keep";
 }
 
 export interface PreviewRow {

@@ -39,7 +39,8 @@ export function seriesFromTable(
     index: Number(index),
     role: answer.role,
   }));
-  const assigned = answered.filter(({ role }) => role === "time").map(({ index }) => index);
+  const byFormat = table.names.flatMap((name, index) => (knowledge.columnByName(name)?.role === "time" ? [index] : []));
+  const assigned = [...answered.filter(({ role }) => role === "time").map(({ index }) => index), ...byFormat];
   const barred = new Set(answered.filter(({ role }) => role !== "time").map(({ index }) => index));
   const plan = findStampColumns(table, assigned, barred);
   const stamps = plan === null ? noStamps(table, problems) : readStamps(table, plan, knowledge, answers, problems);

@@ -193,13 +193,8 @@ function sentinelsOf(
  */
 export function settleHeatSense(settled: SettledColumn, state: Settling): SettledColumn {
   const { column, unit, role, scan } = settled;
-  if (
-    !hasHeatSense(role) ||
-    answeredUnit(column, state.answers) !== null ||
-    column.confidence === "by the format" ||
-    statesHeatSense(column.name)
-  )
-    return settled;
+  const known = column.senseKnown || statesHeatSense(column.name);
+  if (!hasHeatSense(role) || answeredUnit(column, state.answers) !== null || known) return settled;
   const upward = unitById(`${unit.id} upward`);
   const leavesSea = role === "latent" && medianOf(scan.values) > 0 && upward !== null;
   const taken = leavesSea && upward !== null ? upward : unit;

@@ -21,10 +21,20 @@ export interface TextTable {
 export interface KnownColumn {
   role: ColumnReading["role"];
   unit: string | null;
-  missingCodes: string[];
+  /** Null where the values must tell. */
+  missingCodes: string[] | null;
   /** Codes for rain too little to measure. */
   traceCodes?: string[];
   note?: string;
+  /** Where the file itself states what the column is; else it is by the format. */
+  confidence?: Understood["confidence"];
+  /** m above the sea */
+  height?: number;
+  averagingMinutes?: number;
+  /** False where the format leaves open which way a flux counts. */
+  senseKnown?: boolean;
+  /** Shortwave: whether what is reflected is taken off. */
+  net?: boolean;
 }
 
 /** What a format fixes for a whole file. */

@@ -53,8 +53,7 @@ function settleAveraging(
   knowledge: FormatKnowledge,
   answers: ReadingAnswers,
 ): void {
-  const minutes = /(\d{1,2})[ _-]?min/i.exec(wind.column.name)?.[1];
-  const stated = minutes === undefined ? null : Number(minutes);
+  const stated = wind.column.averagingMinutes;
   facts.averagingMinutes = answers.averagingMinutes ?? stated;
   if (facts.averagingMinutes !== null) {
     const confidence = answers.averagingMinutes !== undefined ? "answered" : "stated in the file";
@@ -73,15 +72,17 @@ function settleAveraging(
 function settleSense(facts: WindFacts, settled: readonly SettledColumn[], answers: ReadingAnswers): void {
   const direction = settled.find(({ role }) => role === "windFrom" || role === "windTowards");
   if (direction === undefined) return;
-  const stated = direction.column.confidence === "by the format" ? "from" : directionSenseOf(direction.column.name);
-  const taken = answers.directionSense ?? (direction.role === "windTowards" ? "towards" : "from");
+  const { senseKnown, name } = direction.column;
+  const ofRole = direction.role === "windTowards" ? "towards" : "from";
+  const stated = senseKnown ? ofRole : directionSenseOf(name);
+  const taken = answers.directionSense ?? ofRole;
   const confidence =
     answers.directionSense !== undefined
       ? "answered"
       : stated === null
         ? "assumed"
-        : direction.column.confidence === "by the format"
-          ? "by the format"
+        : senseKnown
+          ? direction.column.confidence
           : "stated in the file";
   facts.understood.push({
     what: "Wind direction",
