@@ -25,6 +25,15 @@ export function exponential(a: Complex): Complex {
   return { re: size * Math.cos(a.im), im: size * Math.sin(a.im) };
 }
 
+/** 1 - e^(-a), without loss of digits for a small a. */
+export function decayed(a: Complex): Complex {
+  if (modulus(a) > 1e-3) return subtract(complex(1), exponential(scale(a, -1)));
+  // a - a²/2 + a³/6 - a⁴/24 + a⁵/120: what is left out is below 1e-17 of it.
+  let sum = complex(1);
+  for (let n = 5; n >= 2; n--) sum = subtract(complex(1), scale(multiply(a, sum), 1 / n));
+  return multiply(a, sum);
+}
+
 /** The root with a real part that is not negative. */
 export function squareRoot(a: Complex): Complex {
   const size = modulus(a);

@@ -1,9 +1,9 @@
 import fc from "fast-check";
 import { describe, expect, it } from "vitest";
-import { complex, divide, modulus, multiply, scale } from "../complex";
+import { complex, decayed, divide, exponential, modulus, multiply, scale, subtract, type Complex } from "../complex";
 import { coriolis, inertialPeriod } from "./coriolis";
 import { coastalBalance } from "./finite-depth-coast";
-import { finiteDepthCurrent, finiteDepthTransport } from "./finite-depth";
+import { finiteDepthCurrent, finiteDepthLayerMean, finiteDepthTransport } from "./finite-depth";
 import { ekmanDepth, ekmanSpiral } from "./spiral";
 import { surfaceDeflectionOfRatio } from "./surface-deflection";
 import { ekmanTransport } from "./transport";
@@ -80,6 +80,59 @@ describe("steady Ekman", () => {
         },
       ),
     );
+  });
+
+  const anyLayer = fc.record({
+    f: fc.oneof(number(-1.4e-4, 1.4e-4), number(-1e-8, 1e-8), fc.constant(0)),
+    eddyViscosity: fc.oneof(number(1e-6, 10), number(1e-6, 1e-4)),
+    depth: fc.oneof(number(0.001, 12_000), number(1, 100)),
+    onshoreTo: number(0, 360),
+  });
+  const relative = (a: Complex, b: Complex) => modulus(subtract(a, b)) / modulus(b);
+
+  it("has a mean over the whole depth that is the transport over it, in boundary layers of any thickness, shore or none", () => {
+    const T = complex(1e-4, -3e-4);
+    fc.assert(
+      fc.property(anyLayer, ({ onshoreTo, ...setting }) => {
+        const carried = scale(finiteDepthLayerMean(T, setting, setting.depth), setting.depth);
+        // Where rotation is weak the mean is that without any; the transport has one term more of the series.
+        expect(relative(carried, finiteDepthTransport(T, setting))).toBeLessThan(1e-6);
+        const shore = coastalBalance(T, setting, onshoreTo, 9.81);
+        const azimuth = (onshoreTo * Math.PI) / 180;
+        const fromShore = multiply(shore.layerMean(setting.depth), complex(Math.sin(azimuth), -Math.cos(azimuth)));
+        const acrossAndAlong = complex(shore.crossTransport, shore.alongTransport);
+        expect(relative(scale(fromShore, setting.depth), acrossAndAlong)).toBeLessThan(1e-5);
+      }),
+    );
+  });
+
+  it("has the mean over a layer that its currents add up to", () => {
+    const setting = { f: -8e-5, eddyViscosity: 0.03, depth: 60 };
+    const T = complex(2e-4, 1e-4);
+    const balance = coastalBalance(T, setting, 70, 9.81);
+    const panels = 2000;
+    for (const D of [0.5, 17, 60]) {
+      // Midpoint rule: its error falls with the square of the panels, to 1e-7 of the mean here.
+      const added = (currentAt: (z: number) => Complex) =>
+        Array.from({ length: panels }, (_, k) => currentAt((-(k + 0.5) * D) / panels)).reduce((sum, { re, im }) => ({
+          re: sum.re + re,
+          im: sum.im + im,
+        }));
+      const open = scale(
+        added((z) => finiteDepthCurrent(T, setting, z)),
+        1 / panels,
+      );
+      expect(relative(open, finiteDepthLayerMean(T, setting, D))).toBeLessThan(1e-6);
+      expect(relative(scale(added(balance.currentAt), 1 / panels), balance.layerMean(D))).toBeLessThan(1e-6);
+    }
+    expect(() => finiteDepthLayerMean(T, setting, 60.1)).toThrow(/does not lie within 60 m/);
+  });
+
+  it("takes 1 - e^(-a) without loss for small a, and without a step where the series ends", () => {
+    expect(decayed(complex(1e-12, 2e-12))).toEqual({ re: 1e-12 - (1e-24 - 4e-24) / 2, im: 2e-12 - 2e-24 });
+    const a = complex(6e-4, 7.9e-4);
+    const direct = subtract(complex(1), exponential(scale(a, -1)));
+    expect(relative(decayed(a), direct)).toBeLessThan(1e-12);
   });
 
   it("turns the surface current by 45 degrees in deep water and hardly at all in shallow", () => {

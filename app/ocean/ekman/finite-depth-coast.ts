@@ -2,6 +2,7 @@ import {
   add,
   complex,
   conjugate,
+  decayed,
   divide,
   exponential,
   modulus,
@@ -16,6 +17,7 @@ import {
   ekmanWavenumber,
   finiteDepthBedStress,
   finiteDepthCurrent,
+  finiteDepthLayerMean,
   finiteDepthTransport,
   requireSetting,
   WEAK_ROTATION,
@@ -25,6 +27,8 @@ import {
 export interface CoastalBalance {
   /** Current at a depth, m/s. */
   currentAt: (z: number) => Complex;
+  /** Mean current from the surface to a depth within the water, m/s. */
+  layerMean: (layerDepth: number) => Complex;
   /** Rise of the sea surface towards the shore, m/m: positive for set-up. */
   setupSlope: number;
   /** Transport towards the shore, m²/s: zero but for rounding. */
@@ -59,6 +63,8 @@ export function coastalBalance(
   const transport = multiply(conjugate(onshore), add(windTransport, multiply(push, pressure.transport)));
   return {
     currentAt: (z) => add(finiteDepthCurrent(T, setting, z), multiply(push, pressure.currentAt(z))),
+    layerMean: (layerDepth) =>
+      add(finiteDepthLayerMean(T, setting, layerDepth), multiply(push, pressure.layerMean(layerDepth))),
     setupSlope: -acceleration / gravity,
     crossTransport: transport.re,
     alongTransport: transport.im,
@@ -69,7 +75,10 @@ export function coastalBalance(
   };
 }
 
-/** Of a unit pressure acceleration: current (1 - cosh λz/cosh λH)/(if), transport (H - tanh(λH)/λ)/(if), bed stress tanh(λH)/λ. */
+/**
+ * Of a unit pressure acceleration: current (1 - cosh λz/cosh λH)/(if), its mean over a layer D
+ * (1 - sinh(λD)/(λD cosh λH))/(if), transport (H - tanh(λH)/λ)/(if), bed stress tanh(λH)/λ.
+ */
 function pressureResponse(setting: FiniteDepthSetting) {
   const { f, depth, eddyViscosity } = setting;
   const lambda = ekmanWavenumber(setting);
@@ -79,6 +88,7 @@ function pressureResponse(setting: FiniteDepthSetting) {
       bedStress: scale(subtract(complex(1), scale(lambdaH2, 1 / 3)), depth),
       transport: scale(subtract(complex(1), scale(lambdaH2, 2 / 5)), power(depth, 3) / (3 * eddyViscosity)),
       currentAt: (z: number) => complex((depth * depth - z * z) / (2 * eddyViscosity)),
+      layerMean: (layerDepth: number) => complex((depth * depth - (layerDepth * layerDepth) / 3) / (2 * eddyViscosity)),
     };
   }
   const rotation = complex(0, f);
@@ -91,6 +101,11 @@ function pressureResponse(setting: FiniteDepthSetting) {
       const below = exponential(scale(lambda, -(depth + z)));
       const above = exponential(scale(lambda, -(depth - z)));
       return divide(subtract(complex(1), divide(add(below, above), add(complex(1), decay2H))), rotation);
+    },
+    layerMean: (layerDepth: number) => {
+      const sinh = multiply(exponential(scale(lambda, layerDepth - depth)), decayed(scale(lambda, 2 * layerDepth)));
+      const lost = divide(sinh, multiply(scale(lambda, layerDepth), add(complex(1), decay2H)));
+      return divide(subtract(complex(1), lost), rotation);
     },
   };
 }

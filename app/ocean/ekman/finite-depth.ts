@@ -1,4 +1,16 @@
-import { complex, divide, exponential, modulus, multiply, scale, squareRoot, subtract, type Complex } from "../complex";
+import {
+  add,
+  complex,
+  decayed,
+  divide,
+  exponential,
+  modulus,
+  multiply,
+  scale,
+  squareRoot,
+  subtract,
+  type Complex,
+} from "../complex";
 import { OceanError } from "../errors";
 import { requireDepth, requireFinite, requirePositive } from "../guards";
 
@@ -43,9 +55,29 @@ export function finiteDepthCurrent(T: Complex, setting: FiniteDepthSetting, z: n
   if (modulus(lambda) * depth < WEAK_ROTATION) return scale(T, (z + depth) / eddyViscosity);
   const one = complex(1);
   const above = subtract(one, exponential(scale(lambda, -2 * (z + depth))));
-  const below = { re: 1 + exponential(scale(lambda, -2 * depth)).re, im: exponential(scale(lambda, -2 * depth)).im };
+  const below = add(one, exponential(scale(lambda, -2 * depth)));
   const shape = divide(multiply(exponential(scale(lambda, z)), above), below);
   return multiply(divide(T, scale(lambda, eddyViscosity)), shape);
+}
+
+/**
+ * Mean of `finiteDepthCurrent` from the surface to a depth D:
+ * -i(T/fD)(1 - e^(-λD))(1 - e^(-λ(2H-D)))/(1 + e^(-2λH)).
+ * @param layerDepth D, m, 0…depth
+ * @returns m/s as u + i v
+ * @throws OceanError NONPOSITIVE_DEPTH, INVALID_INPUT
+ */
+export function finiteDepthLayerMean(T: Complex, setting: FiniteDepthSetting, layerDepth: number): Complex {
+  requireSetting(setting);
+  requireDepth("layerDepth", layerDepth);
+  const { f, depth, eddyViscosity } = setting;
+  if (layerDepth > depth)
+    throw new OceanError("INVALID_INPUT", `A layer of ${layerDepth} m does not lie within ${depth} m of water.`);
+  const lambda = ekmanWavenumber(setting);
+  if (modulus(lambda) * depth < WEAK_ROTATION) return scale(T, (depth - layerDepth / 2) / eddyViscosity);
+  const across = multiply(decayed(scale(lambda, layerDepth)), decayed(scale(lambda, 2 * depth - layerDepth)));
+  const shape = divide(across, add(complex(1), exponential(scale(lambda, -2 * depth))));
+  return multiply(scale(multiply(T, complex(0, -1)), 1 / (f * layerDepth)), shape);
 }
 
 /**

@@ -2,7 +2,7 @@ import { complex, scale, type Complex } from "../complex";
 import { coastalBalance } from "../ekman/finite-depth-coast";
 import {
   finiteDepthBedStress,
-  finiteDepthCurrent,
+  finiteDepthLayerMean,
   finiteDepthTransport,
   type FiniteDepthSetting,
 } from "../ekman/finite-depth";
@@ -24,7 +24,7 @@ export function finiteDepthResponse(
   const perStress = (tau: Complex): Column => {
     const T = complex(tau.re / waterDensity, tau.im / waterDensity);
     return {
-      drift: layerMean((z) => finiteDepthCurrent(T, setting, z), layerDepth),
+      drift: finiteDepthLayerMean(T, setting, layerDepth),
       transport: finiteDepthTransport(T, setting),
       resistance: scale(finiteDepthBedStress(T, setting), waterDensity),
     };
@@ -47,7 +47,7 @@ export function coastalResponse(
   const perStress = (tau: Complex): Column => {
     const balance = coastalBalance(complex(tau.re / waterDensity, tau.im / waterDensity), setting, onshoreTo, gravity);
     return {
-      drift: layerMean(balance.currentAt, layerDepth),
+      drift: balance.layerMean(layerDepth),
       transport: complex(left.re * balance.alongTransport, left.im * balance.alongTransport),
       resistance: scale(balance.resistance, waterDensity),
     };
@@ -72,24 +72,4 @@ function assembled(perStress: (tau: Complex) => Column, f: number, waterDensity:
     f,
     waterDensity,
   };
-}
-
-/** Nodes and weights of Gauss–Legendre quadrature of order 5 on -1…1. Abramowitz & Stegun, table 25.4. */
-const NODES = [0, 0.538469310105683, -0.538469310105683, 0.906179845938664, -0.906179845938664];
-const WEIGHTS = [0.568888888888889, 0.478628670499366, 0.478628670499366, 0.236926885056189, 0.236926885056189];
-const PANELS = 64;
-
-/** Mean of a smooth current from the surface to `layerDepth`. */
-function layerMean(currentAt: (z: number) => Complex, layerDepth: number): Complex {
-  let re = 0;
-  let im = 0;
-  const half = layerDepth / PANELS / 2;
-  for (let panel = 0; panel < PANELS; panel++) {
-    for (let node = 0; node < NODES.length; node++) {
-      const current = currentAt(Math.max(-layerDepth, -(2 * panel + 1 + NODES[node]) * half));
-      re += WEIGHTS[node] * current.re;
-      im += WEIGHTS[node] * current.im;
-    }
-  }
-  return complex(re / (2 * PANELS), im / (2 * PANELS));
 }
