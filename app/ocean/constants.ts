@@ -51,5 +51,12 @@ export const LONGEST_GAP = 6 * SECONDS_PER_HOUR;
 /** Wind speed above which the drag coefficient is held, m/s. After Powell, Vickery & Reinhold (2003): drag levels off above hurricane force. */
 export const HIGH_WIND_CAP = 33;
 
+/** Saltier, g/kg, or hotter, °C, than any sea: water that a storm would bring beyond this is refused. Convention of this engine. */
+export const SALTIEST = 60;
+export const HOTTEST = 50;
+
+/** Thinner than this nothing is computed as a layer, m. Convention of this engine. */
+export const THINNEST_LAYER = 1e-3;
+
 /** Range of the COARE 3.5 wind–wave fit: neutral 10 m wind, m/s. Edson et al. (2013). */
 export const COARE_CAP = 25;

@@ -5,11 +5,24 @@ export type OceanErrorCode = (typeof OCEAN_ERROR_CODES)[number];
 /** A refusal with a code and a sentence that says what to do. */
 export class OceanError extends Error {
   readonly code: OceanErrorCode;
+  /** The part of a scenario that is to blame, as `water.layerDepth`; empty where a formula knows of none. */
+  readonly path: string;
 
-  constructor(code: OceanErrorCode, message: string) {
+  constructor(code: OceanErrorCode, message: string, path = "") {
     super(message);
     this.name = "OceanError";
     this.code = code;
+    this.path = path;
+  }
+}
+
+/** Does some work, and blames a part of the scenario for what it refuses. */
+export function blaming<Result>(path: string, work: () => Result): Result {
+  try {
+    return work();
+  } catch (error) {
+    if (!(error instanceof OceanError)) throw error;
+    throw new OceanError(error.code, error.message, path);
   }
 }
 

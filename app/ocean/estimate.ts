@@ -59,6 +59,6 @@ function refusing<Result>(work: () => Result): Result {
     return work();
   } catch (error) {
     if (!(error instanceof OceanError)) throw error;
-    throw new ScenarioInvalid([{ path: "", code: error.code, message: error.message }]);
+    throw new ScenarioInvalid([{ path: error.path, code: error.code, message: error.message }]);
   }
 }

@@ -1,3 +1,4 @@
+import { SALTIEST } from "./constants";
 import { OceanError } from "./errors";
 
 /** @throws OceanError INVALID_INPUT unless every named value is a finite number. */
@@ -65,7 +66,7 @@ export function requireRotation(latitude: number): void {
 export function requireSeawater(SA: number, temperature: number, p: number): void {
   requireFinite({ temperature });
   requireNotNegative({ SA, p });
-  if (SA > 60) {
-    throw new OceanError("INVALID_INPUT", `Absolute Salinity must not exceed 60 g/kg; it is ${SA}.`);
+  if (SA > SALTIEST) {
+    throw new OceanError("INVALID_INPUT", `Absolute Salinity must not exceed ${SALTIEST} g/kg; it is ${SA}.`);
   }
 }

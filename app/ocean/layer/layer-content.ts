@@ -1,3 +1,4 @@
+import { HOTTEST, SALTIEST } from "../constants";
 import { OceanError } from "../errors";
 import { evaporationRate } from "../heat/evaporation";
 import { fluxOver, type Forcing } from "../forcing/read-forcing";
@@ -29,6 +30,7 @@ export interface LayerContent {
 /**
  * Heats and freshens a layer of fixed depth: ΔCT = ∫Q dt/(ρ cp D) and S = S0 D/(D + ∫(P - E) dt).
  * Light that passes the base leaves the layer where the method says so.
+ * @throws OceanError INVALID_INPUT where the layer would pass 50 °C or 60 g/kg; NONPOSITIVE_DEPTH where it evaporates away
  */
 export function layerContent(forcing: Forcing, water: InitialWater, method: ResolvedMethod): LayerContent {
   const n = forcing.seconds.length;
@@ -43,13 +45,15 @@ export function layerContent(forcing: Forcing, water: InitialWater, method: Reso
     const dt = forcing.seconds[k + 1] - forcing.seconds[k];
     const heat = intervalHeat(forcing, method, k, passing, CT[k], SA[k]);
     freshWater[k + 1] = freshWater[k] + forcing.rain[k] * dt - evaporated(forcing, k, CT[k], SA[k]);
-    SA[k + 1] = water.SA + rainDilution(water.SA, water.layerDepth, freshWater[k + 1]);
+    // Not below zero by rounding where a flood leaves no salt to speak of.
+    SA[k + 1] = Math.max(0, water.SA + rainDilution(water.SA, water.layerDepth, freshWater[k + 1]));
+    requireBearableSalinity(SA[k + 1], forcing.seconds[k + 1], water.layerDepth);
     const warmed = CT[k] + heat / capacity;
-    const freezing = freezingTemperature(Math.min(SA[k + 1], 60), 0);
+    const freezing = freezingTemperature(SA[k + 1], 0);
     // Only cooling is stopped at freezing; a layer that starts below it is left as it was given.
     const held = heat < 0 && warmed < freezing ? Math.min(CT[k], freezing) : warmed;
     const deficit = (held - warmed) * capacity;
-    requireBearable(held, forcing.seconds[k + 1], water.layerDepth);
+    requireBearableHeat(held, forcing.seconds[k + 1], water.layerDepth);
     CT[k + 1] = held;
     freezingDeficit += deficit;
     heatIn += heat + deficit;
@@ -67,15 +71,21 @@ export function layerContent(forcing: Forcing, water: InitialWater, method: Reso
   };
 }
 
-/** Hotter than this no sea surface is, °C: the layer is too thin for the heat it is given. */
-const HOTTEST = 60;
-
-function requireBearable(CT: number, seconds: number, layerDepth: number): void {
+function requireBearableHeat(CT: number, seconds: number, layerDepth: number): void {
   if (CT <= HOTTEST) return;
   const hours = (seconds / 3600).toFixed(1);
   throw new OceanError(
     "INVALID_INPUT",
     `After ${hours} h a layer of ${layerDepth} m would pass ${HOTTEST} °C: it is too thin for this heat flux, or the flux is wrong.`,
+  );
+}
+
+function requireBearableSalinity(SA: number, seconds: number, layerDepth: number): void {
+  if (SA <= SALTIEST) return;
+  const hours = (seconds / 3600).toFixed(1);
+  throw new OceanError(
+    "INVALID_INPUT",
+    `After ${hours} h evaporation would bring a layer of ${layerDepth} m past ${SALTIEST} g/kg: it is too thin for this much, or the evaporation is wrong.`,
   );
 }
 

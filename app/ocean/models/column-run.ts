@@ -1,8 +1,9 @@
 import { columnAtRest, renewDensity, type ColumnState } from "../column/column-state";
 import { ColumnModel, type ColumnForcing } from "../column/column-model";
 import { lightShares } from "../column/light-shares";
+import { mixStatically } from "../column/static-mixing";
 import type { Place } from "../box/place";
-import { FRESH_WATER_DENSITY } from "../constants";
+import { FRESH_WATER_DENSITY, HOTTEST, SALTIEST } from "../constants";
 import { OceanError } from "../errors";
 import type { Forcing } from "../forcing/read-forcing";
 import { assumedRainHeatLoss } from "../heat/assumed-rain-heat";
@@ -10,6 +11,7 @@ import { latentHeatOfVaporisation } from "../heat/evaporation";
 import { waterClarity } from "../heat/shortwave";
 import type { ResolvedMethod } from "../method/resolve-method";
 import { emptyMotion, vectorBudget, type Motion } from "../motion/motion";
+import { potentialFromConservative } from "../seawater/conservative-temperature";
 import { potentialDensityInto } from "../seawater/density";
 import { freezingTemperature } from "../seawater/freezing";
 import { inertialShare } from "../slab/inertial-share";
@@ -35,11 +37,6 @@ export interface ColumnRecord {
 
 /** More profiles than this are not kept: a figure cannot show them and the answer would be too long. */
 const MOST_PROFILES = 250;
-
-/** A cell cannot be saltier than any sea or less than fresh. g/kg */
-const SALTIEST = 60;
-/** A sea surface cannot be hotter, °C. */
-const HOTTEST = 60;
 
 interface ColumnCase {
   place: Place;
@@ -154,11 +151,19 @@ export function runColumn({ place, method, law, forcing, water }: ColumnCase): {
     step.tauY = stress.y;
     step.shortwave = forcing.shortwave ? heatAt(forcing.shortwave) : 0;
     step.nonSolarHeat = heatAt(forcing.netHeat) - step.shortwave;
-    if (method.rainHeat && forcing.rain[k] > 0) step.nonSolarHeat -= assumedRainHeatLoss(forcing.rain[k], state.T[0]);
+    if (method.rainHeat && forcing.rain[k] > 0) {
+      step.nonSolarHeat -= assumedRainHeatLoss(forcing.rain[k], surfaceTemperature());
+    }
     step.freshWater = forcing.rain[k];
     if (forcing.evaporation) step.freshWater -= forcing.evaporation[k];
     else if (forcing.latent)
-      step.freshWater += heatAt(forcing.latent) / (FRESH_WATER_DENSITY * latentHeatOfVaporisation(state.T[0]));
+      step.freshWater +=
+        heatAt(forcing.latent) / (FRESH_WATER_DENSITY * latentHeatOfVaporisation(surfaceTemperature()));
+  }
+
+  /** °C, as the air meets it: in fresh water it is a degree and more below the Conservative Temperature. */
+  function surfaceTemperature(): number {
+    return potentialFromConservative(state.S[0], state.T[0]);
   }
 
   function requireBearable(seconds: number): void {
@@ -180,6 +185,9 @@ export function runColumn({ place, method, law, forcing, water }: ColumnCase): {
       state.T[cell] = freezing;
       renewDensity(state, cell, cell + 1);
     }
+    if (kept === 0) return 0;
+    // Near freezing brackish water is the lighter the colder it is: what was held may now lie too high.
+    mixStatically(state);
     const heat = kept * method.waterDensity * method.heatCapacity * state.cellSize;
     totals.heatIn += heat;
     return heat;

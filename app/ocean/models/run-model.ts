@@ -1,4 +1,5 @@
 import { placeOf, type Place } from "../box/place";
+import { blaming } from "../errors";
 import { readForcing, type Forcing } from "../forcing/read-forcing";
 import { layerContent } from "../layer/layer-content";
 import { runColumn, type ColumnRecord } from "./column-run";
@@ -60,12 +61,13 @@ export function runModel(scenario: Scenario): ModelRun {
   const forcing = readForcing(scenario.storm, law, method.heatInterpolation);
   const stress = stressRecord(forcing, law, method.airDensity, method.timeStep);
   const shared = { place, method, law, forcing, stress, water };
-  if (method.model === "column") return { ...shared, ...runColumn(shared) };
+  if (method.model === "column") return { ...shared, ...blaming("method.cellSize", () => runColumn(shared)) };
+  const layer = "cast" in scenario.water && !scenario.water.layerDepth ? "water.cast" : "water.layerDepth";
   return {
     ...shared,
     column: null,
     motion: layerMotion(place, method, stress, water),
-    layer: fixedLayer(forcing, water, method),
+    layer: blaming(layer, () => fixedLayer(forcing, water, method)),
   };
 }
 

@@ -17,16 +17,16 @@ export function numberWithin(low: number, high: number, unit: string) {
   });
 }
 
-/** A depth in m that must be greater than zero: code NONPOSITIVE_DEPTH where it is not. */
-export function depthUpTo(high: number) {
-  const message = (input: unknown) => `Must be a depth greater than 0 and at most ${high} m; ${told(input)}.`;
+/** A depth in m: code NONPOSITIVE_DEPTH where it is not greater than zero. */
+export function depthWithin(low: number, high: number) {
+  const message = (input: unknown) => `Must be a depth from ${low} to ${high} m; ${told(input)}.`;
   return z
     .number({ error: (issue) => message(issue.input) })
     .refine((value) => value > 0, {
       error: (issue) => message(issue.input),
       params: { code: "NONPOSITIVE_DEPTH" satisfies OceanErrorCode },
     })
-    .refine((value) => value <= high, { error: (issue) => message(issue.input) });
+    .refine((value) => value <= 0 || (value >= low && value <= high), { error: (issue) => message(issue.input) });
 }
 
 export function seriesOf(element: z.ZodType<number>) {

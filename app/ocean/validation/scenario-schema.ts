@@ -1,9 +1,13 @@
 import { z } from "zod";
+import { SALTIEST, SALINITY_PER_PSS, THINNEST_LAYER } from "../constants";
 import { DRAG_LAWS, TRIGGER_QUANTITIES } from "../scenario";
-import { depthUpTo, numberWithin, oneOf, seriesOf, yesOrNo } from "./fields";
+import { depthWithin, numberWithin, oneOf, seriesOf, yesOrNo } from "./fields";
 
 /** The deepest water of the ocean, rounded up, m. */
 const DEEPEST = 12000;
+
+/** The Practical Salinity that is the greatest Absolute Salinity, rounded down. */
+const SALTIEST_PRACTICAL = Math.floor((10 * SALTIEST) / SALINITY_PER_PSS) / 10;
 
 const position = z.tuple([numberWithin(-360, 360, "degrees east"), numberWithin(-90, 90, "degrees north")], {
   error: "Must be a pair [longitude, latitude].",
@@ -14,21 +18,21 @@ export const boxSchema = z.object({
   polygon: z.array(position, { error: "Must be a list of [longitude, latitude] pairs." }).optional(),
   latitude: numberWithin(-90, 90, "degrees").optional(),
   longitude: numberWithin(-360, 360, "degrees").optional(),
-  waterDepth: depthUpTo(DEEPEST).optional(),
+  waterDepth: depthWithin(THINNEST_LAYER, DEEPEST).optional(),
   shoreNormal: numberWithin(0, 360, "degrees true").optional(),
   distanceToShore: numberWithin(0, 2e7, "m").optional(),
 });
 
 const salinities = {
-  salinity: numberWithin(0, 60, "g/kg").optional(),
-  practicalSalinity: numberWithin(0, 60, "").optional(),
+  salinity: numberWithin(0, SALTIEST, "g/kg").optional(),
+  practicalSalinity: numberWithin(0, SALTIEST_PRACTICAL, "").optional(),
 };
 const temperature = numberWithin(-4, 45, "°C");
 
 export const twoLayerSchema = z.object({
   temperature,
   ...salinities,
-  layerDepth: depthUpTo(DEEPEST),
+  layerDepth: depthWithin(THINNEST_LAYER, DEEPEST),
   below: z.object({ temperature, ...salinities }).optional(),
 });
 
@@ -39,7 +43,7 @@ export const castSchema = z.object({
     })
     .min(2, { error: "A cast needs at least two levels." })
     .max(20000, { error: "A cast may hold at most 20000 levels; thin it first." }),
-  layerDepth: depthUpTo(DEEPEST).optional(),
+  layerDepth: depthWithin(THINNEST_LAYER, DEEPEST).optional(),
 });
 
 const heatFlux = seriesOf(numberWithin(-5000, 5000, "W/m²")).optional();

@@ -1,4 +1,5 @@
 import type { Place } from "../box/place";
+import { THINNEST_LAYER } from "../constants";
 import type { CastWater, ScenarioWater, TwoLayerWater } from "../scenario";
 import { absoluteSalinity, type SalinityRegion } from "../seawater/absolute-salinity";
 import { potentialDensityOf } from "../seawater/density";
@@ -69,9 +70,10 @@ function fromCast(water: CastWater, place: Place, layerDensityStep: number): Ini
     conservativeFromInSitu(SA[k], level.temperature, pressureFromDepth(level.depth, place.latitude)),
   );
   const sigma0 = depth.map((_, k) => potentialDensityOf(SA[k], CT[k]));
-  // A cast that starts at the surface with a step right below it has a layer at least as deep as its first interval is fine.
+  // A cast with a step right below the surface has a layer at least a hundredth as deep as its first interval.
   const found =
-    water.layerDepth ?? Math.max(mixedLayerDepth(depth, sigma0, layerDensityStep), depth[0], depth[1] / 100);
+    water.layerDepth ??
+    Math.max(mixedLayerDepth(depth, sigma0, layerDensityStep), depth[0], depth[1] / 100, THINNEST_LAYER);
   const { layerDepth, askedDepth } = withinWater(found, place);
   const base = layerDepth + BELOW_BASE;
   const below =
