@@ -16,15 +16,22 @@ interface Given {
   bytes: Uint8Array;
   fileName: string;
   zone: string | undefined;
-  latitude: number | undefined;
+  /** Latitude and longitude, degrees. */
+  at: [number, number] | undefined;
 }
 
 /** Reads as the upload of each kind does, with the reader's own best answers. */
 const READERS: Record<FileKind, (given: Given) => unknown> = {
-  series: ({ bytes, fileName, zone }) =>
-    summaryOfReading(readSeries({ bytes, fileName, answers: zone === undefined ? {} : { zone } })),
-  cast: ({ bytes, fileName, latitude }) =>
-    summaryOfCast(readCast({ bytes, fileName, answers: latitude === undefined ? {} : { latitude } })),
+  series: ({ bytes, fileName, zone, at }) =>
+    summaryOfReading(
+      readSeries({
+        bytes,
+        fileName,
+        answers: { ...(zone !== undefined && { zone }), ...(at && { place: at.join(",") }) },
+      }),
+    ),
+  cast: ({ bytes, fileName, at }) =>
+    summaryOfCast(readCast({ bytes, fileName, answers: at ? { latitude: at[0] } : {} })),
   track: ({ bytes, fileName }) => summaryOfTrack(readTrack({ bytes, fileName })),
   shape: ({ bytes, fileName }) => summaryOfShape(readShape({ bytes, fileName })),
 };
@@ -51,7 +58,7 @@ export async function read(args: string[]): Promise<number> {
   const fileName = basename(asked.file);
   const kind = asked.kind ?? kindOfFile(bytes, fileName);
   try {
-    print(READERS[kind]({ bytes, fileName, zone: asked.zone, latitude: asked.at?.[0] }));
+    print(READERS[kind]({ bytes, fileName, zone: asked.zone, at: asked.at }));
     return 0;
   } catch (error) {
     if (!(error instanceof UnreadableFile)) throw error;
@@ -67,7 +74,6 @@ interface Asked {
   zone: string | undefined;
   /** Latitude and longitude, degrees. */
   at: [number, number] | undefined;
-  place: string | undefined;
 }
 
 function parseArguments(args: string[]): Asked | { problem: ReadingProblem } {

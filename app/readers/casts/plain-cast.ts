@@ -7,6 +7,17 @@ import type { CastTable } from "./cast-table";
 
 const LINES_OF_HEADER = 200;
 
+/** Whether a line of names near the top has depth or pressure, temperature, and salt, but neither wind nor a time. */
+export function isPlainCast(source: SourceFile): boolean {
+  return source.lines.slice(0, LINES_OF_HEADER).some((line) => {
+    if (/^\s*[%#*]/.test(line) || /\b(?:time|date|wind)/i.test(line)) return false;
+    const cells = line.split(/[,;\t]/);
+    const channels = castColumns(cells.map(bareName), cells.map(unitOf)).map(({ channel }) => channel);
+    const salt = channels.includes("salinity") || channels.includes("conductivity");
+    return salt && channels.includes("temperature") && (channels.includes("pressure") || channels.includes("depth"));
+  });
+}
+
 /**
  * Takes delimited text apart: remarks with keys above (`% Start latitude,-36.2`), one line of names with units in
  * brackets or in a line beneath, then numbers. Handheld instruments and spreadsheets write casts so.

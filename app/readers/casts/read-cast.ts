@@ -19,7 +19,7 @@ import {
 import type { CastTable } from "./cast-table";
 import { exchangeTable, isExchangeCast } from "./exchange-cast";
 import { instrumentTable, isInstrumentCast } from "./instrument-cast";
-import { plainTable } from "./plain-cast";
+import { isPlainCast, plainTable } from "./plain-cast";
 
 interface CastForm {
   id: string;
@@ -34,9 +34,9 @@ const FORMS: readonly CastForm[] = [
   { id: "castPlain", label: "delimited cast", recognises: () => true, table: plainTable },
 ];
 
-/** Whether a text is unmistakably a cast. */
+/** Whether a text is unmistakably a cast: a form of its own, or a table of salt and heat by depth without a time. */
 export function isCastText(source: SourceFile): boolean {
-  return isExchangeCast(source) || isInstrumentCast(source);
+  return isExchangeCast(source) || isInstrumentCast(source) || isPlainCast(source);
 }
 
 /** Latitude for depth where the file tells none, degrees: the pole and the equator differ from it by 0.3 %. */
