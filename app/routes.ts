@@ -27,6 +27,7 @@ export default [
       ...prefix("area", [
         index("routes/org/area/list.tsx"),
         route("new", "routes/org/area/new.tsx"),
+        route("import", "routes/org/area/import.tsx"),
         route(":box", "routes/org/area/edit.tsx"),
       ]),
 

@@ -33,6 +33,7 @@ export const RULES: Record<string, Rule> = {
   "routes/org/projects/edit.tsx": { get: "project.edit", post: "project.edit" },
   "routes/org/area/list.tsx": { get: "project.view", post: null },
   "routes/org/area/new.tsx": { get: "project.edit", post: "project.edit" },
+  "routes/org/area/import.tsx": { get: "project.edit", post: "project.edit" },
   "routes/org/area/edit.tsx": { get: "project.edit", post: "project.edit" },
   "routes/org/storms/list.tsx": { get: "project.view", post: null },
   "routes/org/storms/new.tsx": { get: "project.edit", post: "project.edit" },

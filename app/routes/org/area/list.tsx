@@ -19,9 +19,14 @@ export async function loader({ context, params }: Route.LoaderArgs) {
 export default function Area({ loaderData }: Route.ComponentProps) {
   const { boxes, mayEdit, units } = loaderData;
   const draw = mayEdit && (
-    <Link to="new" className="button button-primary">
-      New study box
-    </Link>
+    <>
+      <Link to="import" className="button">
+        Import shapes
+      </Link>
+      <Link to="new" className="button button-primary">
+        New study box
+      </Link>
+    </>
   );
   return (
     <>

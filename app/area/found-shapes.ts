@@ -1,0 +1,75 @@
+/** Polygons of an imported file on their way to becoming study boxes. */
+import { z } from "zod";
+import { checkBox } from "./check-box";
+import { measureBox } from "./measure-box";
+import type { Position } from "~/ocean/scenario";
+import type { ShapeReading } from "~/readers/shapes/shape-reading";
+import { formatQuantity } from "~/units/format-quantity";
+import type { UnitChoices } from "~/units/unit-choices";
+
+/** More shapes than this are no choice of study boxes. */
+export const MOST_SHAPES = 200;
+
+export interface FoundShape {
+  name: string;
+  ring: Position[];
+  /** What it is, as `4 corners, 1.2 km²`. */
+  facts: string;
+  /** Why it cannot be a study box; empty where it can. */
+  problems: string[];
+}
+
+/** The polygons of a reading, each checked as one that was drawn; holes are told of, since a box has none. */
+export function foundShapes({ polygons }: Pick<ShapeReading, "polygons">, units: UnitChoices): FoundShape[] {
+  return polygons.slice(0, MOST_SHAPES).map(({ name, outer, holes }) => {
+    const checked = checkBox(outer);
+    const area = checked.ok ? [formatQuantity(measureBox(checked.ring).areaKm2 * 1e6, "area", units).text] : [];
+    const hole =
+      holes.length === 0 ? [] : [`${holes.length} ${holes.length === 1 ? "hole" : "holes"}, which will be filled`];
+    return {
+      name: name.slice(0, 120),
+      ring: checked.ok ? checked.ring : outer,
+      facts: [`${outer.length} corners`, ...area, ...hole].join(", "),
+      problems: checked.ok ? [] : checked.problems.slice(0, 2).map(({ message }) => message),
+    };
+  });
+}
+
+const chosen = z.object({
+  name: z.string().trim().min(1, "Name the box.").max(120, "Use at most 120 characters."),
+  ring: z.array(z.tuple([z.number(), z.number()])).min(3),
+});
+export type ChosenShape = z.infer<typeof chosen>;
+
+export interface ChosenShapes {
+  shapes: ChosenShape[];
+  /** By name of the field. */
+  errors: Record<string, string[]>;
+}
+
+/** Fields `take-N` for those that are wanted, with `name-N` and `ring-N`. */
+export function readChosenShapes(form: FormData): ChosenShapes {
+  const shapes: ChosenShape[] = [];
+  const errors: Record<string, string[]> = {};
+  for (const field of form.keys()) {
+    const index = /^take-(\d{1,4})$/.exec(field)?.[1];
+    if (index === undefined) continue;
+    const read = chosen.safeParse({ name: form.get(`name-${index}`), ring: parsedRing(form.get(`ring-${index}`)) });
+    if (read.success) shapes.push(read.data);
+    else
+      errors[`name-${index}`] = [
+        read.error.issues[0].path[0] === "name"
+          ? read.error.issues[0].message
+          : "Its corners were lost: bring the file again.",
+      ];
+  }
+  return { shapes, errors };
+}
+
+function parsedRing(value: FormDataEntryValue | null): unknown {
+  try {
+    return typeof value === "string" ? JSON.parse(value) : null;
+  } catch {
+    return null;
+  }
+}
