@@ -96,9 +96,9 @@ function orderedByUse(columns: readonly LeveledColumn[], records: number): Level
 
 function sample(column: LeveledColumn, place: SettledPlace): SampledColumn {
   const values = place.valuesOf(column);
-  if (values === null) {
-    const note = column.note ?? "it is not along the time and the place alone";
-    return { column: { ...column, role: "leftOut", unit: null, sense: null, note }, values: new Float64Array() };
+  if ("unread" in values) {
+    const unread: LeveledColumn = { ...column, role: "leftOut", unit: null, sense: null, note: values.unread };
+    return { column: unread, values: new Float64Array() };
   }
   return { column, values };
 }

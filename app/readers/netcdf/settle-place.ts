@@ -13,8 +13,8 @@ export interface SettledPlace {
   isSettled: boolean;
   understood: Understood[];
   questions: ReadingQuestion[];
-  /** One value a record; null where a column is not along the time and the place alone. */
-  valuesOf: (column: LeveledColumn) => Float64Array | null;
+  /** One value a record; or why a column has none, for its note. */
+  valuesOf: (column: LeveledColumn) => Float64Array | { unread: string };
   /** What is stored beside a column's values, as its flags are; null where they are of several cells, or elsewhere. */
   storedBeside: (column: LeveledColumn, beside: NetcdfVariable) => Float64Array | null;
 }
@@ -51,9 +51,8 @@ export function settlePlace(
     choices.set(key, choice);
     return choice;
   };
-  const primary =
-    columns.find(({ role }) => role === "windSpeed" || role === "windU") ??
-    columns.find(({ role }) => role !== "leftOut");
+  const used = columns.filter((column) => column.role !== "leftOut" && spaceFor(column).kind !== "unread");
+  const primary = used.find(({ role }) => role === "windSpeed" || role === "windU") ?? used[0];
   const first = primary === undefined ? null : choiceFor(primary);
   const isSettled = first === null || first.cells !== null;
   const cellsFor = (column: LeveledColumn): Cell[] | null => {
@@ -66,7 +65,11 @@ export function settlePlace(
     questions: first?.questions ?? [],
     valuesOf: (column) => {
       const cells = cellsFor(column);
-      return cells === null ? null : weightedAt(file, column.variable, cells, samplingOf(column, time));
+      const space = spaceFor(column);
+      if (space.kind === "unread")
+        return { unread: `“${space.dimension}”, one of its dimensions, is neither time nor place` };
+      if (cells === null) return { unread: "its grid does not reach the place" };
+      return weightedAt(file, column.variable, cells, samplingOf(column, time));
     },
     storedBeside: (column, beside) => {
       const cells = cellsFor(column);
