@@ -119,7 +119,7 @@ export default function ImportShapes({ actionData, loaderData }: Route.Component
         errors={[
           ...(answer.notes ?? []),
           ...Object.entries(errors).flatMap(([field, messages]) =>
-            field === "file" || field === "pasted" ? [] : messages,
+            field === "file" || field === "pasted" ? [] : (messages ?? []),
           ),
         ]}
       />
