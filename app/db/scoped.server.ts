@@ -14,6 +14,7 @@ import type {
 } from "sequelize";
 import { inWriteTransaction } from "./connection.server";
 import { newId } from "./id.server";
+import { Cast } from "./models/cast.server";
 import { Estimate } from "./models/estimate.server";
 import { Membership } from "./models/membership.server";
 import { MemoEstimate } from "./models/memo-estimate.server";
@@ -131,6 +132,7 @@ export interface Tenant {
   readonly records: TenantTable<StormRecord>;
   readonly series: TenantTable<Series>;
   readonly waterColumns: TenantTable<WaterColumn>;
+  readonly casts: TenantTable<Cast>;
   readonly methodSheets: TenantTable<MethodSheet>;
   readonly estimates: TenantTable<Estimate>;
   readonly results: TenantTable<Result>;
@@ -157,6 +159,7 @@ export function forOrganisation(organisationId: string, transaction?: Transactio
     records: table(StormRecord),
     series: table(Series),
     waterColumns: table(WaterColumn),
+    casts: table(Cast),
     methodSheets: table(MethodSheet),
     estimates: table(Estimate),
     results: table(Result),

@@ -8,7 +8,7 @@ import { freezingPoint, layerDensities, type SalinityScale } from "./water-densi
 const TEMPERATURE = { min: -2.5, max: 40 };
 const SALINITY = { min: 0, max: 42 };
 /** m */
-const LAYER_DEPTH = { min: 0.1, max: 1000 };
+export const LAYER_DEPTH = { min: 0.1, max: 1000 };
 /** Colder than the freezing point by more than this is refused: readings and rounding, °C. */
 const FREEZING_ALLOWANCE = 0.1;
 

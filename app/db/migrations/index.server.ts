@@ -2,6 +2,7 @@ import type { RunnableMigration } from "umzug";
 import { firstTables } from "./2026-12-01-first-tables.server";
 import { estimateInputs } from "./2026-12-01-estimate-inputs.server";
 import { methodSheetEnsembles } from "./2026-12-01-method-sheet-ensembles.server";
+import { casts } from "./2026-12-01-casts.server";
 
 export interface MigrationContext {
   /** Runs one statement inside the migration's transaction. */
@@ -10,4 +11,4 @@ export interface MigrationContext {
 export type Migration = RunnableMigration<MigrationContext>;
 
 /** In order. A migration that has been released is never edited: add the next one. */
-export const migrations: Migration[] = [firstTables, estimateInputs, methodSheetEnsembles];
+export const migrations: Migration[] = [firstTables, estimateInputs, methodSheetEnsembles, casts];

@@ -1,0 +1,73 @@
+import type { Cast } from "~/db/models/cast.server";
+import type { Tenant } from "~/db/scoped.server";
+import { fromBlob } from "~/db/typed-array.server";
+import type { CastAnswers, CastReading } from "~/readers/casts/cast-reading";
+import { readCast } from "~/readers/casts/read-cast";
+import { UnreadableFile } from "~/readers/reading";
+import { notFound } from "~/services/guard.server";
+import { keepOriginal, type Original } from "~/storms/original.server";
+import { StormRefusal } from "~/storms/refusal";
+import type { CastLevels } from "./describe-cast";
+import type { SalinityScale } from "./water-density";
+
+/** The cast that the address names, in this project; else 404. */
+export async function castOf(tenant: Tenant, projectId: string, castId: string): Promise<Cast> {
+  return (await tenant.casts.find(castId, { where: { projectId } })) ?? notFound();
+}
+
+function readOriginal({ bytes, name }: Pick<Original, "bytes" | "name">, answers: CastAnswers): CastReading {
+  return readCast({ bytes, fileName: name, answers });
+}
+
+/**
+ * Begins a cast: nothing counts before its sheet is confirmed.
+ * @throws StormRefusal where nothing can be read, before anything is saved
+ */
+export async function startCast(tenant: Tenant, projectId: string, original: Original, userId: string): Promise<Cast> {
+  try {
+    readOriginal(original, {});
+  } catch (error) {
+    if (!(error instanceof UnreadableFile)) throw error;
+    const messages = error.problems.map(({ message }) => message);
+    throw new StormRefusal(
+      [`${original.name}: nothing was saved.`, ...messages],
+      original.origin === "file" ? "file" : "pasted",
+    );
+  }
+  return tenant.write(async (inner) => {
+    const source = await keepOriginal(inner, projectId, original, userId);
+    return inner.casts.create({
+      projectId,
+      sourceFileId: source.id,
+      name: original.name.slice(0, 255),
+      origin: original.origin,
+      answers: {},
+      createdBy: userId,
+    });
+  });
+}
+
+/**
+ * The cast's file read with its answers, or with others to see what they would change.
+ * @throws UnreadableFile where the answers leave nothing to read
+ */
+export async function readStoredCast(
+  tenant: Tenant,
+  cast: Cast,
+  answers: CastAnswers = cast.answers,
+): Promise<CastReading> {
+  const source = (await tenant.sourceFiles.find(cast.sourceFileId)) ?? notFound();
+  return readOriginal({ bytes: source.bytes, name: cast.name }, answers);
+}
+
+/** The levels of a confirmed cast. */
+export function levelsOf(cast: Cast, salinityScale: SalinityScale): CastLevels {
+  const { depth, temperature, salinity, length } = cast;
+  if (!depth || !temperature || !salinity) throw new Error(`Cast ${cast.id} has no levels: it is not confirmed.`);
+  return {
+    depth: fromBlob(depth, length),
+    temperature: fromBlob(temperature, length),
+    salinity: fromBlob(salinity, length),
+    salinityScale,
+  };
+}
