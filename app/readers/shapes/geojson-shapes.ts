@@ -29,7 +29,9 @@ const DEEPEST = 12;
 
 /** Whether a text looks like GeoJSON. */
 export function isGeoJson(text: string): boolean {
-  return /^\s*\{/.test(text) && /"(?:FeatureCollection|Feature|Polygon|MultiPolygon|GeometryCollection)"/.test(text);
+  const types =
+    /"type"\s*:\s*"(?:FeatureCollection|Feature|GeometryCollection|(?:Multi)?(?:Polygon|LineString|Point))"/;
+  return /^\s*\{/.test(text) && types.test(text);
 }
 
 /**

@@ -170,7 +170,7 @@ describe("shapes", () => {
   });
 
   it("says why what is none cannot be read", () => {
-    expect(() => read('{not json, but a FeatureCollection said "FeatureCollection"')).toThrow(/not JSON/);
+    expect(() => read('{not json, but a "type": "FeatureCollection"')).toThrow(/not JSON/);
     expect(() =>
       read(
         '{"type":"FeatureCollection","features":[{"type":"Feature","geometry":{"type":"Polygon","coordinates":[[["a"]]]}}]}',
