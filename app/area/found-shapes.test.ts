@@ -1,5 +1,5 @@
 import { describe, expect, it } from "vitest";
-import { foundShapes, MOST_SHAPES, readChosenShapes } from "./found-shapes";
+import { foundShapes, MOST_SHAPES, readChosenShapes, shapesOfForm } from "./found-shapes";
 import type { Position } from "~/ocean/scenario";
 import { DEFAULT_UNITS } from "~/units/unit-choices";
 
@@ -47,6 +47,17 @@ describe("found shapes", () => {
 });
 
 describe("chosen shapes", () => {
+  it("come back as they were sent where the form is refused", () => {
+    const ring = JSON.stringify(square);
+    const sent = formOf({ "take-0": "on", "name-0": "North", "ring-0": ring, "name-1": "South", "ring-1": ring });
+    const back = shapesOfForm(sent, DEFAULT_UNITS);
+    expect(back.map(({ name, taken }) => [name, taken])).toEqual([
+      ["North", true],
+      ["South", false],
+    ]);
+    expect(shapesOfForm(formOf({ "ring-0": "[[", "name-0": "x" }), DEFAULT_UNITS)).toEqual([]);
+  });
+
   it("are those that were ticked, with the name that was given", () => {
     const ring = JSON.stringify(square);
     const { shapes, errors } = readChosenShapes(

@@ -17,6 +17,8 @@ export interface FoundShape {
   facts: string;
   /** Why it cannot be a study box; empty where it can. */
   problems: string[];
+  /** Whether it has been chosen. */
+  taken: boolean;
 }
 
 /** The polygons of a reading, each checked as one that was drawn; holes are told of, since a box has none. */
@@ -31,13 +33,29 @@ export function foundShapes({ polygons }: Pick<ShapeReading, "polygons">, units:
       ring: checked.ok ? checked.ring : outer,
       facts: [`${outer.length} corners`, ...area, ...hole].join(", "),
       problems: checked.ok ? [] : checked.problems.slice(0, 2).map(({ message }) => message),
+      // A file of one shape was brought for that shape.
+      taken: checked.ok && polygons.length === 1,
     };
+  });
+}
+
+const ringSchema = z.array(z.tuple([z.number(), z.number()])).min(3);
+
+/** The shapes of a form that was sent and refused, as they stood there, so that the file need not be brought again. */
+export function shapesOfForm(form: FormData, units: UnitChoices): FoundShape[] {
+  const indices = [...form.keys()].flatMap((field) => /^ring-(\d{1,4})$/.exec(field)?.[1] ?? []);
+  return indices.slice(0, MOST_SHAPES).flatMap((index) => {
+    const ring = ringSchema.safeParse(parsedRing(form.get(`ring-${index}`)));
+    const name = form.get(`name-${index}`);
+    if (!ring.success || typeof name !== "string") return [];
+    const [shape] = foundShapes({ polygons: [{ name, outer: ring.data, holes: [] }] }, units);
+    return [{ ...shape, taken: form.has(`take-${index}`) }];
   });
 }
 
 const chosen = z.object({
   name: z.string().trim().min(1, "Name the box.").max(120, "Use at most 120 characters."),
-  ring: z.array(z.tuple([z.number(), z.number()])).min(3),
+  ring: ringSchema,
 });
 export type ChosenShape = z.infer<typeof chosen>;
 

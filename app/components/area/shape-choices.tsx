@@ -21,14 +21,14 @@ export function ShapeChoices({ shapes, units }: { shapes: FoundShape[]; units: U
           className="h-96"
         />
         <ul className="border-t border-hairline">
-          {shapes.map(({ name, ring, facts, problems }, index) => (
+          {shapes.map(({ name, ring, facts, problems, taken }, index) => (
             <li key={index} className="grid gap-1 border-b border-hairline py-3">
               <label className="flex items-center gap-2.5">
                 <input
                   type="checkbox"
                   name={`take-${index}`}
                   disabled={problems.length > 0}
-                  defaultChecked={problems.length === 0 && shapes.length === 1}
+                  defaultChecked={taken}
                   className="size-5 shrink-0 accent-ink"
                 />
                 <span className="sr-only">Take {name}</span>

@@ -1,6 +1,6 @@
 import { data, Form, Link, redirect } from "react-router";
 import type { Route } from "./+types/import";
-import { foundShapes, MOST_SHAPES, readChosenShapes, type FoundShape } from "~/area/found-shapes";
+import { foundShapes, MOST_SHAPES, readChosenShapes, shapesOfForm, type FoundShape } from "~/area/found-shapes";
 import { saveShapes } from "~/area/save-shapes.server";
 import { ShapeChoices } from "~/components/area/shape-choices";
 import { Field, FormErrors } from "~/components/field";
@@ -50,12 +50,14 @@ export async function action({ request, context, params }: Route.ActionArgs) {
       }
     }
     const { shapes, errors } = readChosenShapes(form);
+    const refuse = (refusals: Answer["errors"]) =>
+      data<Answer>({ shapes: shapesOfForm(form, organisation.units), errors: refusals }, { status: 400 });
     if (shapes.length === 0 && Object.keys(errors).length === 0) errors.shapes = ["Choose at least one shape."];
-    if (Object.keys(errors).length > 0) return data<Answer>({ errors }, { status: 400 });
+    if (Object.keys(errors).length > 0) return refuse(errors);
     const refused = await saveShapes(tenant, project.id, shapes);
     if (refused.length > 0) {
       const messages = refused.map(({ name, messages: why }) => `${name}: ${why.join(" ")}`);
-      return data<Answer>({ errors: { shapes: [...messages, "Nothing was saved."] } }, { status: 400 });
+      return refuse({ shapes: [...messages, "Nothing was saved."] });
     }
     return redirect(`/o/${organisation.slug}/projects/${project.id}/area`);
   });
@@ -115,14 +117,16 @@ export default function ImportShapes({ actionData, loaderData }: Route.Component
           </Link>
         </div>
       </Form>
-      <FormErrors
-        errors={[
-          ...(answer.notes ?? []),
-          ...Object.entries(errors).flatMap(([field, messages]) =>
-            field === "file" || field === "pasted" ? [] : (messages ?? []),
-          ),
-        ]}
-      />
+      <div className="mt-5">
+        <FormErrors
+          errors={[
+            ...(answer.notes ?? []),
+            ...Object.entries(errors).flatMap(([field, messages]) =>
+              field === "file" || field === "pasted" ? [] : (messages ?? []),
+            ),
+          ]}
+        />
+      </div>
       {answer.shapes && !answer.question && <ShapeChoices shapes={answer.shapes} units={loaderData.units} />}
     </>
   );
