@@ -1,5 +1,6 @@
 import type { Figure } from "~/figures/figure";
 import type { FigureContext } from "~/figures/figure-context";
+import { castProfile } from "~/figures/cast-profile";
 import { driftTrack } from "~/figures/drift-track";
 import { forcingStack } from "~/figures/forcing-stack";
 import { hodograph } from "~/figures/hodograph";
@@ -31,6 +32,11 @@ export interface EverySeries {
   boxOutline?: readonly LocalPosition[];
   coast?: readonly (readonly LocalPosition[])[];
 }
+
+const CAST_LAYERS = [
+  { step: 0.03, depth: 14, reached: true },
+  { step: 0.125, depth: 60, reached: false },
+];
 
 const bandAround = (values: number[]) => ({
   p10: values.map((value) => 0.8 * Math.abs(value)),
@@ -64,5 +70,6 @@ export function everyFigure(series: EverySeries, context: FigureContext): Figure
     ),
     hodograph({ ...series, inertialAmplitude: 0.5 }, context),
     driftTrack({ ...series, box: series.boxOutline, land: series.coast }, context),
+    castProfile({ ...series, depth: time.map((_, level) => 0.75 * level), layers: CAST_LAYERS }, context),
   ];
 }
