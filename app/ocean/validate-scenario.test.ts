@@ -202,38 +202,6 @@ describe("validateScenario", () => {
     expect(problems[50].message).toContain("150 more");
   });
 
-  it.each<[string, Partial<Scenario>, Record<string, number>, string, RegExp]>([
-    ["salt water dries up", thin(0.05), { evaporation: 10 }, "water.layerDepth", /past 60 g\/kg/],
-    ["fresh water dries up", thin(0.05, 0), { evaporation: 10 }, "water.layerDepth", /use up the whole layer/],
-    ["a film of water boils", thin(0.001), { net: 800 }, "water.layerDepth", /too thin/],
-    [
-      "a cast's layer boils",
-      { water: { cast: [level(0, 20), level(1, 10)] } },
-      { net: 5000 },
-      "water.cast",
-      /too thin/,
-    ],
-    [
-      "a cell floods",
-      { water: { ...thin(5).water, below: { temperature: 9, salinity: 35 } }, method: { model: "column" } },
-      { rain: 90_000 },
-      "method.cellSize",
-      /cannot hold its rain/,
-    ],
-  ])("turns water that cannot bear the storm into a problem of that water: %s", (_, change, flux, path, message) => {
-    const { net, ...rates } = flux;
-    const steady = (value: number) => plain.storm.time.map(() => value);
-    const storm = {
-      ...plain.storm,
-      ...Object.fromEntries(Object.entries(rates).map(([name, value]) => [name, steady(value)])),
-      ...(net !== undefined && { heat: { net: steady(net) } }),
-    };
-    const refused = () => estimate({ ...plain, ...change, storm });
-    expect(refused).toThrow(ScenarioInvalid);
-    expect(refused).toThrow(message);
-    expect(refused).toThrow(`${path}: `);
-  });
-
   it("refuses a layer thinner than a millimetre and more salt than water holds, whichever scale it is on", () => {
     const of = (water: Record<string, unknown>) => paths({ ...plain, water: { temperature: 18, ...water } });
     expect(of({ salinity: 35, layerDepth: 1e-300 })).toEqual(["water.layerDepth INVALID_INPUT"]);
@@ -242,11 +210,3 @@ describe("validateScenario", () => {
     expect(of({ practicalSalinity: 60, layerDepth: 10 })).toEqual(["water.practicalSalinity INVALID_INPUT"]);
   });
 });
-
-function thin(layerDepth: number, salinity = 35) {
-  return { water: { temperature: 18, salinity, layerDepth } };
-}
-
-function level(depth: number, temperature: number) {
-  return { depth, temperature, salinity: 35 };
-}

@@ -7,8 +7,8 @@ import { finiteDepthCurrent, finiteDepthLayerMean, finiteDepthTransport } from "
 import { ekmanDepth, ekmanSpiral } from "./spiral";
 import { surfaceDeflectionOfRatio } from "./surface-deflection";
 import { ekmanTransport } from "./transport";
+import { uniformOrTiny as number } from "../../../tests/factories/uniform";
 
-const number = (min: number, max: number) => fc.double({ min, max, noNaN: true });
 const midLatitude = fc.oneof(number(5, 85), number(-85, -5));
 
 describe("steady Ekman", () => {

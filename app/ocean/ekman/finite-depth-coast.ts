@@ -84,9 +84,11 @@ function pressureResponse(setting: FiniteDepthSetting) {
   const lambda = ekmanWavenumber(setting);
   if (modulus(lambda) * depth < WEAK_ROTATION) {
     const lambdaH2 = multiply(scale(lambda, depth), scale(lambda, depth));
+    const shape = subtract(complex(1), scale(lambdaH2, 2 / 5));
     return {
-      bedStress: scale(subtract(complex(1), scale(lambdaH2, 1 / 3)), depth),
-      transport: scale(subtract(complex(1), scale(lambdaH2, 2 / 5)), power(depth, 3) / (3 * eddyViscosity)),
+      // To the same term as the transport, so that what the bed takes and what is turned add up.
+      bedStress: scale(subtract(complex(1), scale(multiply(lambdaH2, shape), 1 / 3)), depth),
+      transport: scale(shape, power(depth, 3) / (3 * eddyViscosity)),
       currentAt: (z: number) => complex((depth * depth - z * z) / (2 * eddyViscosity)),
       layerMean: (layerDepth: number) => complex((depth * depth - (layerDepth * layerDepth) / 3) / (2 * eddyViscosity)),
     };

@@ -1,9 +1,9 @@
 import fc from "fast-check";
 import { describe, expect, it } from "vitest";
 import { inertialShare } from "./inertial-share";
-import { SlabIntegrator } from "./slab-integrator";
+import { SlabIntegrator, slabPath } from "./slab-integrator";
+import { uniform as number } from "../../../tests/factories/uniform";
 
-const number = (min: number, max: number) => fc.double({ min, max, noNaN: true });
 const setting = { f: 1e-4, dampingRate: 3e-6, layerDepth: 30, waterDensity: 1025 };
 
 describe("slab", () => {
@@ -30,6 +30,31 @@ describe("slab", () => {
           expect(Math.abs(split.y - whole.y)).toBeLessThan(size);
         },
       ),
+    );
+  });
+
+  it("goes on from where a window ended as if it had never stopped", () => {
+    const knots = fc.array(fc.tuple(number(1, 20_000), number(-3, 3), number(-3, 3)), { minLength: 3, maxLength: 20 });
+    fc.assert(
+      fc.property(knots, number(-1.5e-4, 1.5e-4), number(0, 1e-4), number(0, 1), (drawn, f, dampingRate, share) => {
+        let now = 0;
+        const seconds = Float64Array.from(drawn, ([step]) => (now += step));
+        const [x, y] = [1, 2].map((k) => Float64Array.from(drawn, (knot) => knot[k]));
+        const window = (from: number, to: number) => ({
+          seconds: seconds.slice(from, to),
+          x: x.slice(from, to),
+          y: y.slice(from, to),
+        });
+        const cut = 1 + Math.floor(share * (drawn.length - 2));
+        const whole = new SlabIntegrator({ ...setting, f, dampingRate });
+        whole.follow({ seconds, x, y }, slabPath(drawn.length));
+        const first = new SlabIntegrator({ ...setting, f, dampingRate });
+        first.follow(window(0, cut + 1), slabPath(cut + 1));
+        const second = new SlabIntegrator({ ...setting, f, dampingRate });
+        second.startFrom(first.u, first.v, first.x, first.y);
+        second.follow(window(cut, drawn.length), slabPath(drawn.length - cut));
+        for (const name of ["u", "v", "x", "y"] as const) expect(second[name]).toBe(whole[name]);
+      }),
     );
   });
 
