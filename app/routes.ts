@@ -43,6 +43,8 @@ export default [
       ...prefix("water", [
         index("routes/org/water/list.tsx"),
         route("new", "routes/org/water/new.tsx"),
+        route("casts/new", "routes/org/water/new-cast.tsx"),
+        route("casts/:cast", "routes/org/water/cast-sheet.tsx"),
         route(":column", "routes/org/water/edit.tsx"),
       ]),
 

@@ -1,8 +1,10 @@
 import { describe, expect, it } from "vitest";
 import {
   buildScenario,
+  castWater,
   isoTime,
   scenarioStorm,
+  twoLayerWater,
   type BoxInput,
   type EstimateInput,
   type WaterInput,
@@ -32,7 +34,13 @@ const water: WaterInput = {
   belowSalinity: 34,
 };
 const storm = scenarioStorm({ time: [0, 3600], windSpeed: [1, 2], windFrom: [3, 4], windHeight: 4, rain: [0, 1] });
-const input: EstimateInput = { box, water, storm, method: { model: "slab" }, ensemble: null };
+const input: EstimateInput = {
+  box,
+  water: twoLayerWater(water),
+  storm,
+  method: { model: "slab" },
+  ensemble: null,
+};
 
 describe("buildScenario", () => {
   it("says what the engine is asked, without what was not given", () => {
@@ -64,7 +72,26 @@ describe("buildScenario", () => {
   });
 
   it("leaves the water below out unless both numbers are known", () => {
-    expect(buildScenario({ ...input, water: { ...water, belowSalinity: null } }).water).not.toHaveProperty("below");
+    expect(twoLayerWater({ ...water, belowSalinity: null })).not.toHaveProperty("below");
+  });
+
+  it("asks for a cast level by level, on its own scale, with the depth of its layer only where it was set", () => {
+    const levels = {
+      depth: Float64Array.of(0, 10),
+      temperature: Float64Array.of(20, 18),
+      salinity: Float64Array.of(35, 35.5),
+      salinityScale: "practical" as const,
+    };
+    const cast = [
+      { depth: 0, temperature: 20, practicalSalinity: 35 },
+      { depth: 10, temperature: 18, practicalSalinity: 35.5 },
+    ];
+    expect(castWater(levels, null)).toEqual({ cast });
+    expect(validateScenario(buildScenario({ ...input, water: castWater(levels, 8) }))).toEqual([]);
+    expect(castWater({ ...levels, salinityScale: "absolute" }, 8)).toMatchObject({
+      layerDepth: 8,
+      cast: [{ salinity: 35 }, { salinity: 35.5 }],
+    });
   });
 
   it("writes milliseconds only where there are any", () => {
@@ -77,7 +104,7 @@ describe("the parts of a scenario", () => {
 
   it.each([
     ["box", { ...input, box: { ...box, waterDepth: 20 } }],
-    ["water", { ...input, water: { ...water, temperature: 12.1 } }],
+    ["water", { ...input, water: twoLayerWater({ ...water, temperature: 12.1 }) }],
     ["method", { ...input, method: { model: "budget" } }],
     ["storm", { ...input, storm: { ...storm, rain: [0, 2] } }],
     [

@@ -1,15 +1,18 @@
 /** One box, one storm, one water column, one method sheet: the scenario that the engine is asked. Pure. */
 import type { StormForcing } from "./storm-forcing";
 import type {
+  CastWater,
   Ensemble,
   MethodChoices,
   Position,
   Scenario,
   ScenarioBox,
   ScenarioStorm,
+  ScenarioWater,
   TriggerLevel,
   TwoLayerWater,
 } from "~/ocean/scenario";
+import type { CastLevels } from "~/water/describe-cast";
 
 export interface BoxInput {
   polygon: Position[];
@@ -37,7 +40,8 @@ export interface EstimateInput {
   box: BoxInput;
   /** From `scenarioStorm`. */
   storm: ScenarioStorm;
-  water: WaterInput;
+  /** From `twoLayerWater` or `castWater`. */
+  water: ScenarioWater;
   method: MethodChoices;
   ensemble: Ensemble | null;
 }
@@ -57,9 +61,12 @@ export function scenarioBox({ polygon, waterDepth, shoreNormal, distanceToShore 
   };
 }
 
-export function scenarioWater(water: WaterInput): TwoLayerWater {
-  const salinity = (value: number) =>
-    water.salinityScale === "practical" ? { practicalSalinity: value } : { salinity: value };
+function salinityOn(scale: WaterInput["salinityScale"]) {
+  return (value: number) => (scale === "practical" ? { practicalSalinity: value } : { salinity: value });
+}
+
+export function twoLayerWater(water: WaterInput): TwoLayerWater {
+  const salinity = salinityOn(water.salinityScale);
   const { temperature, layerDepth, belowTemperature, belowSalinity } = water;
   return {
     temperature,
@@ -70,6 +77,18 @@ export function scenarioWater(water: WaterInput): TwoLayerWater {
   };
 }
 
+/** @param layerDepth m, where a person set it; null where the method's step of density finds it */
+export function castWater(
+  { depth, temperature, salinity, salinityScale }: CastLevels,
+  layerDepth: number | null,
+): CastWater {
+  const asGiven = salinityOn(salinityScale);
+  return {
+    cast: Array.from(depth, (metres, k) => ({ depth: metres, temperature: temperature[k], ...asGiven(salinity[k]) })),
+    ...(layerDepth !== null && { layerDepth }),
+  };
+}
+
 export function scenarioStorm({ time, ...series }: StormForcing): ScenarioStorm {
   return { time: time.map(isoTime), ...series };
 }
@@ -77,7 +96,7 @@ export function scenarioStorm({ time, ...series }: StormForcing): ScenarioStorm 
 export function buildScenario({ box, storm, water, method, ensemble }: EstimateInput): Scenario {
   return {
     box: scenarioBox(box),
-    water: scenarioWater(water),
+    water,
     storm,
     method,
     ...(box.triggerLevels.length > 0 && { triggerLevels: box.triggerLevels }),

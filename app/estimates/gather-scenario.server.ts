@@ -3,12 +3,12 @@ import { buildScenario } from "./build-scenario";
 import { inputParts, type InputParts } from "./input-parts";
 import type { InputsRegister } from "./inputs-register";
 import { readStorm, type StormReading } from "./read-storm.server";
+import { readWater, type WaterReading } from "./read-water.server";
 import { Recent } from "./recent";
 import type { StormForcing } from "./storm-forcing";
 import type { MethodSheet } from "~/db/models/method-sheet.server";
 import type { Storm } from "~/db/models/storm.server";
 import type { StudyBox } from "~/db/models/study-box.server";
-import type { WaterColumn } from "~/db/models/water-column.server";
 import type { Tenant } from "~/db/scoped.server";
 import { inputHash } from "~/ocean/input-hash";
 import type { Scenario, ScenarioProblem } from "~/ocean/scenario";
@@ -29,7 +29,7 @@ export interface GatheredScenario {
 export interface EstimateRows {
   box: StudyBox;
   storm: Storm;
-  water: WaterColumn;
+  water: WaterReading;
   sheet: MethodSheet;
 }
 
@@ -51,10 +51,11 @@ export function heatInterpolationOf(sheet: MethodSheet): "linear" | "hold" {
 export function gatherFrom({ box, storm, water, sheet }: EstimateRows, reading: StormReading): GatheredScenario {
   const { forcing, problems, assumptions, scenarioStorm, hash: stormHash, records } = reading;
   const { choices, ensemble } = sheet;
-  const scenario = scenarioStorm && buildScenario({ box, storm: scenarioStorm, water, method: choices, ensemble });
-  const parts = scenario && stormHash ? inputParts(scenario, stormHash) : null;
+  const { scenarioWater, registered } = water;
+  const scenario =
+    scenarioStorm && buildScenario({ box, storm: scenarioStorm, water: scenarioWater, method: choices, ensemble });
+  const parts = scenario && stormHash ? inputParts(scenario, { storm: stormHash, water: water.hash }) : null;
   const { polygon, waterDepth, shoreNormal, distanceToShore, triggerLevels } = box;
-  const { source, temperature, salinity, salinityScale, layerDepth, belowTemperature, belowSalinity } = water;
   return {
     scenario,
     hash: scenario && parts && problems.length === 0 ? hashOf(scenario, parts) : null,
@@ -65,16 +66,7 @@ export function gatherFrom({ box, storm, water, sheet }: EstimateRows, reading: 
     register: {
       box: { name: box.name, polygon, waterDepth, shoreNormal, distanceToShore, triggerLevels },
       storm: { name: storm.name, startsAt: storm.startsAt, endsAt: storm.endsAt, records },
-      water: {
-        name: water.name,
-        source,
-        temperature,
-        salinity,
-        salinityScale,
-        layerDepth,
-        belowTemperature,
-        belowSalinity,
-      },
+      water: registered,
       method: { name: sheet.name, version: sheet.version, choices },
     },
   };
@@ -103,5 +95,6 @@ export async function gatherScenario(
     tenant.methodSheets.find(methodSheetId),
   ]);
   if (!box || !storm || !water || !sheet) return null;
-  return gatherFrom({ box, storm, water, sheet }, await readStorm(tenant, storm, heatInterpolationOf(sheet), zone));
+  const read = await readStorm(tenant, storm, heatInterpolationOf(sheet), zone);
+  return gatherFrom({ box, storm, water: await readWater(tenant, water), sheet }, read);
 }

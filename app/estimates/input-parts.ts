@@ -20,12 +20,12 @@ export function partHash(value: unknown): string {
   return bytesToHex(sha256(utf8ToBytes(canonicalJson(value ?? null))));
 }
 
-/** @param stormHash the storm's part, where it was made before: its series are the long part of a scenario */
-export function inputParts(scenario: Scenario, stormHash = partHash(scenario.storm)): InputParts {
+/** @param known parts whose hashes were made before: series and casts are the long parts of a scenario */
+export function inputParts(scenario: Scenario, known: Partial<Pick<InputParts, "storm" | "water">> = {}): InputParts {
   return {
     box: partHash(scenario.box),
-    storm: stormHash,
-    water: partHash(scenario.water),
+    storm: known.storm ?? partHash(scenario.storm),
+    water: known.water ?? partHash(scenario.water),
     // Both are chosen on the method sheet; without an ensemble the hash is that of the choices, as it was before there were any.
     method: partHash(scenario.ensemble ? [scenario.method, scenario.ensemble] : scenario.method),
     triggerLevels: partHash(scenario.triggerLevels),

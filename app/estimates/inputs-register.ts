@@ -2,6 +2,7 @@
 import type { InputParts } from "./input-parts";
 import type { MethodChoices, Position, TriggerLevel } from "~/ocean/scenario";
 import type { RecordProvenance } from "~/storms/provenance";
+import type { CastProvenance } from "~/water/cast-provenance";
 
 export interface RegisteredRecord {
   name: string;
@@ -11,6 +12,21 @@ export interface RegisteredRecord {
   fileName: string | null;
   sha256: string | null;
   provenance: RecordProvenance | null;
+}
+
+export interface RegisteredWater {
+  name: string;
+  source: string;
+  /** In situ, °C: of the layer, as are the next two. */
+  temperature: number;
+  salinity: number;
+  salinityScale: "absolute" | "practical";
+  /** m */
+  layerDepth: number;
+  belowTemperature: number | null;
+  belowSalinity: number | null;
+  /** The file behind it; absent where two layers were typed. */
+  cast?: { levels: number; sourceFileId: string; fileName: string; sha256: string; provenance: CastProvenance };
 }
 
 export interface InputsRegister {
@@ -24,16 +40,7 @@ export interface InputsRegister {
   };
   /** Seconds since 1970-01-01T00:00:00Z. */
   storm: { name: string; startsAt: number | null; endsAt: number | null; records: RegisteredRecord[] };
-  water: {
-    name: string;
-    source: string;
-    temperature: number;
-    salinity: number;
-    salinityScale: "absolute" | "practical";
-    layerDepth: number;
-    belowTemperature: number | null;
-    belowSalinity: number | null;
-  };
+  water: RegisteredWater;
   method: { name: string; version: number; choices: MethodChoices };
 }
 

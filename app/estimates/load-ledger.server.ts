@@ -2,6 +2,7 @@
 import { estimateState, type EstimateState } from "./estimate-state";
 import { gatherFrom, heatInterpolationOf, type GatheredScenario } from "./gather-scenario.server";
 import { readStorm, type StormReading } from "./read-storm.server";
+import { readWater } from "./read-water.server";
 import { readHeadlines, resultKey, type ResponseWithoutSeries } from "./result-store.server";
 import type { Estimate } from "~/db/models/estimate.server";
 import type { MethodSheet } from "~/db/models/method-sheet.server";
@@ -82,11 +83,12 @@ export async function loadLedger(tenant: Tenant, project: Pick<Project, "id" | "
   const storms = await Promise.all(
     stormRows.map(async (storm) => ({ storm, reading: await reading(storm, "linear") })),
   );
+  const waters = await Promise.all(columns.map((column) => readWater(tenant, column)));
   const gathered = await Promise.all(
     estimates.map(async (estimate): Promise<Gathered[]> => {
       const box = boxes.find(({ id }) => id === estimate.studyBoxId);
       const column = storms.find(({ storm }) => storm.id === estimate.stormId);
-      const water = columns.find(({ id }) => id === estimate.waterColumnId);
+      const water = waters.find(({ column: { id } }) => id === estimate.waterColumnId);
       const sheet = sheets.find(({ id }) => id === estimate.methodSheetId);
       if (!box || !column || !water || !sheet) return [];
       const interpolation = heatInterpolationOf(sheet);

@@ -5,7 +5,7 @@ import { formatPosition } from "~/area/format-coordinates";
 import { measureBox } from "~/area/measure-box";
 import type { TriggerLevel } from "~/ocean/scenario";
 import { SALINITY_PER_PSS } from "~/ocean/constants";
-import { formatBearing, formatQuantity } from "~/units/format-quantity";
+import { formatBearing, formatQuantity, formatRange } from "~/units/format-quantity";
 import { formatPeriod } from "~/units/format-time";
 import { quantity } from "~/units/quantities";
 import { CHANNELS } from "~/storms/channels";
@@ -30,6 +30,8 @@ export interface InputsView {
   storm: Row[];
   records: RecordView[];
   water: Row[];
+  /** The cast's original; null where two layers were typed. */
+  castFile: { sourceFileId: string; fileName: string; sha256: string } | null;
 }
 
 function triggerRow({ quantity: id, side, value, hours }: TriggerLevel, units: UnitChoices): string {
@@ -74,6 +76,23 @@ function salinityText(value: number, { salinityScale }: InputsRegister["water"],
   return `${value.toFixed(2)}\u00a0PSS-78 as given, about ${(value * SALINITY_PER_PSS).toFixed(2)}\u00a0g/kg`;
 }
 
+function castRows({ cast }: InputsRegister["water"], units: UnitChoices): Row[] {
+  if (!cast) return [];
+  const { formatLabel, rows, half, shallowest, deepest, layerDepth, leftOut } = cast.provenance;
+  const range = formatRange(shallowest, deepest, "depth", units, { decimals: 1 });
+  return [
+    { label: "Cast", value: `${formatLabel}, ${rows} records; ${cast.levels} levels of the way ${half}, ${range}` },
+    {
+      label: "Depth of the layer",
+      value:
+        layerDepth === null
+          ? "found by the method sheet's step of density; in the next row by 0.03\u00a0kg/m³"
+          : `set by hand to ${formatQuantity(layerDepth, "layerDepth", units).text}`,
+    },
+    ...(leftOut.length > 0 ? [{ label: "Columns left out", value: leftOut.join(", ") }] : []),
+  ];
+}
+
 export function presentInputs(register: InputsRegister, zone: string, units: UnitChoices): InputsView {
   const { box, storm, water, method } = register;
   const { areaKm2, centroid } = measureBox(box.polygon);
@@ -114,11 +133,13 @@ export function presentInputs(register: InputsRegister, zone: string, units: Uni
       sha256: record.sha256,
       rows: recordRows(record, zone, units),
     })),
+    castFile: water.cast ?? null,
     water: [
       { label: "Water column", value: water.name },
       { label: "Source of the numbers", value: water.source || "not given" },
+      ...castRows(water, units),
       {
-        label: "Layer",
+        label: water.cast ? "Layer of the cast" : "Layer",
         value: `${formatQuantity(water.temperature, "temperature", units, { decimals: 2 }).text}, ${salinityText(water.salinity, water, units)}, ${formatQuantity(water.layerDepth, "layerDepth", units).text} deep`,
       },
       {

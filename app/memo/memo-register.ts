@@ -1,7 +1,7 @@
 /** The memo's register of what was put in: boxes, series, water and assumptions, each once. */
 import { measureBox } from "~/area/measure-box";
 import type { InputsRegister, RegisteredRecord } from "~/estimates/inputs-register";
-import { formatQuantity } from "~/units/format-quantity";
+import { formatQuantity, formatRange } from "~/units/format-quantity";
 import type { UnitChoices } from "~/units/unit-choices";
 import type { MemoAssumption, MemoBox, MemoSeries, MemoWater } from "./memo-input";
 
@@ -70,6 +70,19 @@ export function registerSeries(registers: InputsRegister[]): MemoSeries[] {
   );
 }
 
+function castDetails({ cast }: InputsRegister["water"], units: UnitChoices): MemoWater["details"] {
+  if (!cast) return [];
+  const { formatLabel, half, shallowest, deepest, layerDepth } = cast.provenance;
+  const range = formatRange(shallowest, deepest, "depth", units, { decimals: 1 });
+  return [
+    { label: "Cast", text: `${formatLabel}; the way ${half}, ${range}` },
+    {
+      label: "Layer by",
+      text: layerDepth === null ? "the method sheet's step of density; here by 0.03 kg/m³" : "judgement",
+    },
+  ];
+}
+
 export function registerWaters(registers: InputsRegister[], units: UnitChoices): MemoWater[] {
   return unique(
     registers.map(({ water }) => water),
@@ -86,15 +99,16 @@ export function registerWaters(registers: InputsRegister[], units: UnitChoices):
         : `${temperature(water.belowTemperature)}, ${salinity(water.belowSalinity)}`;
     return {
       name: water.name,
-      kind: "two layers",
+      kind: water.cast ? `cast of ${water.cast.levels} levels` : "two layers",
       details: [
         { label: "Source", text: water.source },
+        ...castDetails(water, units),
         { label: "Layer", text: `${temperature(water.temperature)}, ${salinity(water.salinity)}` },
         { label: "Layer depth", text: formatQuantity(water.layerDepth, "layerDepth", units).text },
         { label: "Water below", text: below },
       ],
-      fileName: null,
-      sha256: null,
+      fileName: water.cast?.fileName ?? null,
+      sha256: water.cast?.sha256 ?? null,
     };
   });
 }

@@ -14,6 +14,8 @@ export interface CastProvenance {
   /** m */
   shallowest: number;
   deepest: number;
+  /** m: of the layer, where a person set it; null where the method sheet's threshold finds it. */
+  layerDepth: number | null;
   understood: Understood[];
   leftOut: string[];
   /** Whose answers these are, and when (ISO UTC). */
@@ -23,7 +25,7 @@ export interface CastProvenance {
 
 export function provenanceOf(
   { formatLabel, rows, time, latitude, longitude, half, samples, understood, leftOut }: CastReading,
-  confirmed: Pick<CastProvenance, "confirmedBy" | "confirmedAt">,
+  confirmed: Pick<CastProvenance, "layerDepth" | "confirmedBy" | "confirmedAt">,
 ): CastProvenance {
   return {
     formatLabel,

@@ -2,10 +2,9 @@ import type { Cast } from "~/db/models/cast.server";
 import type { Tenant } from "~/db/scoped.server";
 import { toBlob } from "~/db/typed-array.server";
 import type { CastReading } from "~/readers/casts/cast-reading";
-import { dropIfUnused } from "~/storms/original.server";
 import { StormRefusal } from "~/storms/refusal";
 import { provenanceOf, type CastProvenance } from "./cast-provenance";
-import { describeCast, type CastLevels } from "./describe-cast";
+import { describeCast, type CastDescription, type CastLevels } from "./describe-cast";
 import { saveColumn } from "./save-column.server";
 import { readStoredCast } from "./stored-cast.server";
 
@@ -22,8 +21,8 @@ export function levelsIn({ samples, salinityScale }: CastReading): CastLevels {
   };
 }
 
-export function describeReading(reading: CastReading) {
-  return describeCast(levelsIn(reading), reading.latitude ?? MIDDLE_LATITUDE);
+export function describeReading(reading: CastReading, layerDepth: number | null): CastDescription {
+  return describeCast(levelsIn(reading), reading.latitude ?? MIDDLE_LATITUDE, layerDepth);
 }
 
 /** Whether nothing stands between a reading and its confirmation. */
@@ -32,7 +31,7 @@ export function mayConfirm({ questions, problems, samples }: CastReading): boole
   return !open && samples.length > 1;
 }
 
-export interface CastConfirmation extends Pick<CastProvenance, "confirmedBy" | "confirmedAt"> {
+export interface CastConfirmation extends Pick<CastProvenance, "layerDepth" | "confirmedBy" | "confirmedAt"> {
   name: string;
   /** Where the numbers come from, in the consultant's words. */
   source: string;
@@ -54,7 +53,7 @@ export async function confirmCast(
     throw new StormRefusal("Questions are open: answer them on this sheet first. Nothing was taken over.");
   }
   const levels = levelsIn(reading);
-  const { below, ...layer } = describeReading(reading).twoLayers;
+  const { below, ...layer } = describeReading(reading, confirmed.layerDepth).twoLayers;
   return tenant.write(async (inner) => {
     const saved = await saveColumn(inner, projectId, cast.waterColumnId, {
       name,
@@ -73,28 +72,5 @@ export async function confirmCast(
       salinity: toBlob(levels.salinity),
     });
     return saved.id;
-  });
-}
-
-/** Takes a cast away that was not confirmed, with its original where nothing else uses it. */
-export async function removeCast(tenant: Tenant, cast: Cast): Promise<void> {
-  await tenant.write(async (inner) => {
-    await inner.casts.remove({ id: cast.id });
-    await dropIfUnused(inner, [cast.sourceFileId]);
-  });
-}
-
-/** Takes a column away with the estimates on it, its cast, and the original where nothing else uses it. */
-export async function removeColumn(tenant: Tenant, columnId: string): Promise<void> {
-  await tenant.write(async (inner) => {
-    const casts = await inner.casts.list({
-      where: { waterColumnId: columnId },
-      without: ["depth", "temperature", "salinity"],
-    });
-    await inner.waterColumns.remove({ id: columnId });
-    await dropIfUnused(
-      inner,
-      casts.map(({ sourceFileId }) => sourceFileId),
-    );
   });
 }

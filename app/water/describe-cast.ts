@@ -23,7 +23,7 @@ export interface CastDescription {
   sigma0: Float64Array;
   /** Depth of the layer by each threshold. */
   layers: { step: number; depth: number; reached: boolean }[];
-  /** As two layers, by the first threshold: what a list and a sketch show. */
+  /** As two layers, by the first threshold or the depth that was chosen: what a list and a sketch show. */
   twoLayers: TwoLayers;
   /** The greatest fall of density from one level to the next, where there is one beyond the noise of the instrument. */
   inversion: { fall: number; above: number; below: number } | null;
@@ -37,9 +37,10 @@ const NOISE = 0.02;
 
 /**
  * @param latitude degrees: of the cast where known; it moves pressure by less than 0.6 %
+ * @param chosenDepth m: of the layer, where a person set it; null to go by the threshold
  * @throws OceanError INVALID_INPUT for what is no seawater
  */
-export function describeCast(levels: CastLevels, latitude: number): CastDescription {
+export function describeCast(levels: CastLevels, latitude: number, chosenDepth: number | null): CastDescription {
   const { depth, temperature, salinity, salinityScale } = levels;
   const sigma0 = Float64Array.from(depth, (metres, k) => {
     const SA = gramsPerKilogram(salinity[k], salinityScale);
@@ -56,7 +57,7 @@ export function describeCast(levels: CastLevels, latitude: number): CastDescript
       reached: sigma0.some((s) => s >= sigma0[0] + step),
     };
   });
-  const layerDepth = layers[0].depth;
+  const layerDepth = chosenDepth ?? layers[0].depth;
   const beneath = layerDepth + BELOW_BASE;
   return {
     sigma0,

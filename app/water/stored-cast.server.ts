@@ -10,9 +10,16 @@ import { StormRefusal } from "~/storms/refusal";
 import type { CastLevels } from "./describe-cast";
 import type { SalinityScale } from "./water-density";
 
+const LEVELS = ["depth", "temperature", "salinity"] as const satisfies (keyof Cast)[];
+
 /** The cast that the address names, in this project; else 404. */
 export async function castOf(tenant: Tenant, projectId: string, castId: string): Promise<Cast> {
   return (await tenant.casts.find(castId, { where: { projectId } })) ?? notFound();
+}
+
+/** The cast that a column stands on, without its levels; null for one that was typed. */
+export async function castBehind(tenant: Tenant, columnId: string): Promise<Cast | null> {
+  return tenant.casts.first({ where: { waterColumnId: columnId }, without: LEVELS });
 }
 
 function readOriginal({ bytes, name }: Pick<Original, "bytes" | "name">, answers: CastAnswers): CastReading {
@@ -70,4 +77,19 @@ export function levelsOf(cast: Cast, salinityScale: SalinityScale): CastLevels {
     salinity: fromBlob(salinity, length),
     salinityScale,
   };
+}
+
+/** The casts of a project without their levels, in the order they came. */
+export async function listCasts(tenant: Tenant, projectId: string): Promise<Cast[]> {
+  return tenant.casts.list({
+    where: { projectId },
+    order: [["createdAt", "ASC"]],
+    without: LEVELS,
+  });
+}
+
+/** The original behind a cast, without its bytes. */
+export async function originalFactsOf(tenant: Tenant, { sourceFileId }: Pick<Cast, "sourceFileId">) {
+  const source = await tenant.sourceFiles.find(sourceFileId, { without: ["bytes"] });
+  return source && { id: source.id, name: source.name, size: source.size, sha256: source.sha256 };
 }

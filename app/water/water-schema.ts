@@ -38,7 +38,7 @@ const salinity = z
 /** Digits that survive a conversion there and back. */
 const SURE_DIGITS = 10;
 
-function layerDepth(units: UnitChoices) {
+export function layerDepth(units: UnitChoices) {
   const { unit } = displayUnit("layerDepth", units);
   const shown = (metres: number) => `${Number((metres / fromDisplay(1, "layerDepth", units)).toPrecision(3))} ${unit}`;
   return z
@@ -50,20 +50,24 @@ function layerDepth(units: UnitChoices) {
     });
 }
 
+export const columnName = z
+  .string("Write the name of the column.")
+  .trim()
+  .min(1, "Write the name of the column.")
+  .max(120, "Use at most 120 characters.");
+
+export const columnSource = z
+  .string("Say where the numbers come from.")
+  .trim()
+  .min(1, "Say where the numbers come from.")
+  .max(500, "Use at most 500 characters.");
+
 /** The form of a water column, read in the organisation's unit of length and turned to SI. */
 export function waterSchema(units: UnitChoices) {
   return z
     .object({
-      name: z
-        .string("Write the name of the column.")
-        .trim()
-        .min(1, "Write the name of the column.")
-        .max(120, "Use at most 120 characters."),
-      source: z
-        .string("Say where the numbers come from.")
-        .trim()
-        .min(1, "Say where the numbers come from.")
-        .max(500, "Use at most 500 characters."),
+      name: columnName,
+      source: columnSource,
       salinityScale: z.enum(["absolute", "practical"], "Choose the scale of the salinities."),
       temperature,
       salinity,

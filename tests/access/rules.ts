@@ -43,6 +43,8 @@ export const RULES: Record<string, Rule> = {
   "routes/org/storms/source-file.ts": { get: "project.view", post: null, resource: true },
   "routes/org/water/list.tsx": { get: "project.view", post: null },
   "routes/org/water/new.tsx": { get: "project.edit", post: "project.edit" },
+  "routes/org/water/new-cast.tsx": { get: "project.edit", post: "project.edit" },
+  "routes/org/water/cast-sheet.tsx": { get: "project.edit", post: "project.edit" },
   "routes/org/water/edit.tsx": { get: "project.edit", post: "project.edit" },
   "routes/org/estimates/list.tsx": { get: "project.view", post: null },
   "routes/org/estimates/response.tsx": { get: "project.view", post: "estimate.run" },

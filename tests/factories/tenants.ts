@@ -40,6 +40,7 @@ export async function makeTenants(seededDatabase: string): Promise<Tenants> {
   const { beginProject } = await import("../../app/projects/save-project.server");
   const { hashPassword } = await import("../../app/services/password.server");
   const { findUserByEmail } = await import("../../app/db/unscoped.server");
+  const { startCast } = await import("../../app/water/stored-cast.server");
 
   const demoOwner = await findUserByEmail(DEMO.people[0].email);
   const demo = demoOwner && (await membershipBySlug(demoOwner.id, DEMO.slug));
@@ -69,14 +70,21 @@ export async function makeTenants(seededDatabase: string): Promise<Tenants> {
   const record = await tenant.records.first({ where: { origin: "file" }, order: [["createdAt", "ASC"]] });
   const revision = await tenant.memoRevisions.first({ without: ["pdf", "document"] });
   if (!record || !revision) throw new Error("The demonstration has no record or no issued memo.");
+  const project = await one(tenant.projects.first({}));
+  const cast = {
+    name: "cast.csv",
+    bytes: new TextEncoder().encode("depth (m),temperature (°C),salinity\n0,20,35\n10,18,35\n"),
+    origin: "file" as const,
+  };
   const parameters = {
     organisation: DEMO.slug,
-    project: await one(tenant.projects.first({})),
+    project,
     box: await one(tenant.studyBoxes.first({})),
     storm: record.stormId,
     record: record.id,
     file: await one(tenant.sourceFiles.first({ without: ["bytes"] })),
     column: await one(tenant.waterColumns.first({})),
+    cast: await one(startCast(tenant, project, cast, demoOwner.id)),
     estimate: await one(tenant.estimates.first({ where: { state: "done" } })),
     memo: revision.memoId,
     revision: revision.id,

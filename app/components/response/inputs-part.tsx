@@ -14,6 +14,24 @@ function Rows({ rows }: { rows: Row[] }) {
   );
 }
 
+interface FileLineProps {
+  file: { sourceFileId: string | null; fileName: string | null; sha256: string | null };
+  /** Where there is no file. */
+  name?: string;
+  home: string;
+}
+
+function FileLine({ file: { sourceFileId, fileName, sha256 }, name, home }: FileLineProps) {
+  return (
+    <>
+      <p className="break-words font-bold">
+        {sourceFileId ? <a href={`${home}/files/${sourceFileId}`}>{fileName}</a> : name}
+      </p>
+      {sha256 && <p className="break-all text-small text-slate">SHA-256 {sha256}</p>}
+    </>
+  );
+}
+
 interface InputsPartProps {
   inputs: InputsView;
   assumptions: string[];
@@ -36,6 +54,7 @@ export function InputsPart({ inputs, assumptions, home }: InputsPartProps) {
           </ol>
         </details>
         <SectionHeading>Water and method</SectionHeading>
+        {inputs.castFile && <FileLine file={inputs.castFile} home={home} />}
         <Rows rows={inputs.water} />
         {assumptions.length > 0 && (
           <>
@@ -53,14 +72,7 @@ export function InputsPart({ inputs, assumptions, home }: InputsPartProps) {
         <Rows rows={inputs.storm} />
         {inputs.records.map((record, index) => (
           <div key={index} className="mt-4 border-l-2 border-hairline pl-4">
-            <p className="break-words font-bold">
-              {record.sourceFileId ? (
-                <a href={`${home}/files/${record.sourceFileId}`}>{record.fileName}</a>
-              ) : (
-                record.name
-              )}
-            </p>
-            {record.sha256 && <p className="break-all text-small text-slate">SHA-256 {record.sha256}</p>}
+            <FileLine file={record} name={record.name} home={home} />
             <Rows rows={record.rows} />
           </div>
         ))}

@@ -5,9 +5,21 @@ import type { FormErrorsByField } from "~/storms/refusal";
 interface OriginalFieldsProps {
   uploadLimitBytes: number;
   errors: FormErrorsByField;
+  /** Begins the hint of the file: what may be brought. */
+  accepts?: string;
+  pasteHint?: string;
+  placeholder?: string;
 }
 
 const MEGABYTE = 1024 * 1024;
+
+/** What is said of a storm's series, which most files are. */
+const SERIES = {
+  accepts:
+    "Delimited text of any kind, an agency's buoy, airport or hourly text, an Excel workbook, or CF NetCDF (.nc)",
+  pasteHint: "Copy the cells with their heading row, times in the first column, and paste them here.",
+  placeholder: "time\twind speed (m/s)\twind from (deg)\train (mm/h)",
+};
 
 function tooLarge(file: File, limit: number): string | null {
   if (file.size <= limit) return null;
@@ -16,7 +28,13 @@ function tooLarge(file: File, limit: number): string | null {
 }
 
 /** A file, dropped or chosen, or rows pasted from a spreadsheet: shared by every form that brings a record. */
-export function OriginalFields({ uploadLimitBytes, errors }: OriginalFieldsProps) {
+export function OriginalFields({
+  uploadLimitBytes,
+  errors,
+  accepts = SERIES.accepts,
+  pasteHint = SERIES.pasteHint,
+  placeholder = SERIES.placeholder,
+}: OriginalFieldsProps) {
   const input = useRef<HTMLInputElement>(null);
   const [over, setOver] = useState(false);
   const [trouble, setTrouble] = useState<string | null>(null);
@@ -46,7 +64,7 @@ export function OriginalFields({ uploadLimitBytes, errors }: OriginalFieldsProps
         id={`${id}-file`}
         label="File"
         errors={trouble ? [trouble] : errors.file}
-        hint={`Delimited text of any kind or an agency's buoy text, up to ${uploadLimitBytes / MEGABYTE} MB. It is kept as it is, byte for byte.`}
+        hint={`${accepts}, up to ${uploadLimitBytes / MEGABYTE} MB. It is kept as it is, byte for byte.`}
       >
         {(described) => (
           <div
@@ -70,12 +88,7 @@ export function OriginalFields({ uploadLimitBytes, errors }: OriginalFieldsProps
           </div>
         )}
       </Field>
-      <Field
-        id={`${id}-pasted`}
-        label="Or rows from a spreadsheet"
-        errors={errors.pasted}
-        hint="Copy the cells with their heading row, times in the first column, and paste them here."
-      >
+      <Field id={`${id}-pasted`} label="Or rows from a spreadsheet" errors={errors.pasted} hint={pasteHint}>
         {(described) => (
           <textarea
             {...described}
@@ -83,7 +96,7 @@ export function OriginalFields({ uploadLimitBytes, errors }: OriginalFieldsProps
             rows={4}
             spellCheck={false}
             className="input font-sans text-small"
-            placeholder={"time\twind speed (m/s)\twind from (deg)\train (mm/h)"}
+            placeholder={placeholder}
           />
         )}
       </Field>

@@ -9,8 +9,11 @@ import { readForm } from "~/services/read-form.server";
 import { toDisplay } from "~/units/format-quantity";
 import type { UnitChoices } from "~/units/unit-choices";
 import { saveColumn } from "~/water/save-column.server";
+import { removeColumn } from "~/water/remove-column.server";
+import { castBehind } from "~/water/stored-cast.server";
 import { columnOf, estimatesOn } from "~/water/stored-column.server";
 import { waterSchema } from "~/water/water-schema";
+import { whatGetsOld, whatGoes } from "~/water/estimates-on";
 
 /** As typed: ten digits are all that a conversion there and back leaves sure. */
 function formValues(column: WaterColumn, units: UnitChoices) {
@@ -30,6 +33,9 @@ function formValues(column: WaterColumn, units: UnitChoices) {
 export async function loader({ context, params }: Route.LoaderArgs) {
   const { organisation, tenant, project } = await currentProject(context, params, "project.edit");
   const column = await columnOf(tenant, project.id, params.column);
+  const water = `/o/${organisation.slug}/projects/${project.id}/water`;
+  const cast = await castBehind(tenant, column.id);
+  if (cast) throw redirect(`${water}/casts/${cast.id}`);
   return {
     name: column.name,
     values: formValues(column, organisation.units),
@@ -47,9 +53,11 @@ export async function action({ request, context, params }: Route.ActionArgs) {
     .formData()
     .catch(() => null);
   if (form?.get("intent") === "delete") {
-    await tenant.waterColumns.remove({ id: column.id });
+    await removeColumn(tenant, column.id);
     return redirect(water);
   }
+  const cast = await castBehind(tenant, column.id);
+  if (cast) return redirect(`${water}/casts/${cast.id}`);
   const submission = await readForm(request, waterSchema(organisation.units));
   if (submission.status !== "success") return data(submission.reply(), { status: 400 });
   const saved = await saveColumn(tenant, project.id, column.id, submission.value);
@@ -67,27 +75,12 @@ export default function EditColumn({ loaderData, actionData }: Route.ComponentPr
           Cancel
         </Link>
       </WaterForm>
-      {estimates.length > 0 && (
-        <p className="mt-3 text-small text-quiet">
-          {estimates.length === 1 ? "One estimate uses" : `${estimates.length} estimates use`} this column and{" "}
-          {estimates.length === 1 ? "becomes" : "become"} out of date when its numbers change: {shorten(estimates)}.
-        </p>
-      )}
+      {estimates.length > 0 && <p className="mt-3 text-small text-quiet">{whatGetsOld(estimates)}</p>}
       <div className="mt-10 border-t border-hairline pt-4">
         <ConfirmButton label="Delete the column" title={`Delete ${name}?`} fields={{ intent: "delete" }}>
-          {estimates.length === 0
-            ? "No estimate uses it."
-            : `The ${estimates.length === 1 ? "estimate" : "estimates"} on it ${estimates.length === 1 ? "goes" : "go"} too: ${shorten(estimates)}. Issued memos keep what they say.`}{" "}
-          This cannot be taken back.
+          {whatGoes(estimates)}
         </ConfirmButton>
       </div>
     </>
   );
-}
-
-const MOST_NAMED = 12;
-
-function shorten(codes: string[]): string {
-  const named = codes.slice(0, MOST_NAMED).join(", ");
-  return codes.length > MOST_NAMED ? `${named} and ${codes.length - MOST_NAMED} more` : named;
 }

@@ -5,36 +5,51 @@ import { WideTable } from "~/components/wide-table";
 import { may } from "~/organisations/permissions";
 import { currentProject } from "~/projects/current-project.server";
 import { presentColumn, type PresentedLayer } from "~/water/present-column";
+import { castSentence } from "~/water/present-cast";
+import { listCasts } from "~/water/stored-cast.server";
 import { twoLayersOf } from "~/water/stored-column.server";
 
 export async function loader({ context, params }: Route.LoaderArgs) {
   const { organisation, tenant, project } = await currentProject(context, params, "project.view");
   const columns = await tenant.waterColumns.list({ where: { projectId: project.id }, order: [["name", "ASC"]] });
+  const casts = await listCasts(tenant, project.id);
   return {
-    columns: columns.map((column) => ({
-      id: column.id,
-      name: column.name,
-      source: column.source,
-      ...presentColumn(twoLayersOf(column), organisation.units),
-    })),
+    columns: columns.map((column) => {
+      const cast = casts.find(({ waterColumnId }) => waterColumnId === column.id);
+      return {
+        id: column.id,
+        name: column.name,
+        source: column.source,
+        cast: cast ? castSentence(cast, organisation.units) : null,
+        ...presentColumn(twoLayersOf(column), organisation.units),
+      };
+    }),
+    waiting: casts.filter(({ waterColumnId }) => waterColumnId === null).map(({ id, name }) => ({ id, name })),
     mayEdit: may(organisation.role, "project.edit"),
   };
 }
 
 export default function WaterList({ loaderData }: Route.ComponentProps) {
-  const { columns, mayEdit } = loaderData;
+  const { columns, waiting, mayEdit } = loaderData;
   const describeOne = mayEdit && (
-    <Link to="new" className="button button-primary">
-      New water column
-    </Link>
+    <>
+      <Link to="casts/new" className="button button-primary">
+        Import a cast
+      </Link>
+      <Link to="new" className="button">
+        New water column
+      </Link>
+    </>
   );
   return (
     <>
       <PageTitle actions={columns.length > 0 && describeOne}>Water</PageTitle>
+      {mayEdit && waiting.length > 0 && <Waiting casts={waiting} />}
       {columns.length === 0 ? (
         <EmptyState title="No water column yet" action={describeOne}>
           A water column is what the storm finds: a layer with its temperature, salinity and depth, and where they are
-          known those of the water below. Take them from a cast, a mooring or an atlas, and say from which.
+          known those of the water below. Import a cast, and the whole profile is used; or type two layers from a
+          mooring or an atlas, and say from which.
         </EmptyState>
       ) : (
         <WideTable label="Water columns">
@@ -53,7 +68,7 @@ export default function WaterList({ loaderData }: Route.ComponentProps) {
             </tr>
           </thead>
           <tbody>
-            {columns.map(({ id, name, source, layer, layerDepth, below, densityStep }) => (
+            {columns.map(({ id, name, source, cast, layer, layerDepth, below, densityStep }) => (
               <tr key={id}>
                 <td className="min-w-36 font-bold">
                   {mayEdit ? (
@@ -70,13 +85,34 @@ export default function WaterList({ loaderData }: Route.ComponentProps) {
                 <td className="number whitespace-nowrap">{layerDepth}</td>
                 <td className="min-w-40">{below ? <LayerCell layer={below} /> : "not given"}</td>
                 <td className="number whitespace-nowrap">{densityStep ?? "not known"}</td>
-                <td className="min-w-48 text-small text-slate">{source}</td>
+                <td className="min-w-48 text-small text-slate">
+                  {source}
+                  {cast && <span className="block text-quiet">{cast}</span>}
+                </td>
               </tr>
             ))}
           </tbody>
         </WideTable>
       )}
     </>
+  );
+}
+
+/** Casts whose sheet nobody confirmed yet: they count for nothing. */
+function Waiting({ casts }: { casts: { id: string; name: string }[] }) {
+  return (
+    <div className="mb-5 border-l-4 border-ink py-1 pl-3">
+      {casts.length === 1 ? "A cast waits" : `${casts.length} casts wait`} to be looked through and confirmed:
+      <ul>
+        {casts.map(({ id, name }) => (
+          <li key={id} className="break-words">
+            <Link to={`casts/${id}`} className="underline">
+              {name}
+            </Link>
+          </li>
+        ))}
+      </ul>
+    </div>
   );
 }
 
