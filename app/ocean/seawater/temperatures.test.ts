@@ -1,5 +1,6 @@
 import fc from "fast-check";
 import { describe, expect, it } from "vitest";
+import { uniformOrTiny as number } from "../../../tests/factories/uniform";
 import { OceanError } from "../errors";
 import { absoluteSalinity, practicalSalinity, practicalSalinityWarning, salinityRegion } from "./absolute-salinity";
 import { conservativeFromPotential, potentialFromConservative } from "./conservative-temperature";
@@ -10,8 +11,6 @@ import {
   inSituFromPotential,
   potentialFromInSitu,
 } from "./potential-temperature";
-
-const number = (min: number, max: number) => fc.double({ min, max, noNaN: true });
 
 describe("temperatures and salinities there and back", () => {
   it("potential and Conservative Temperature", () => {

@@ -1,13 +1,12 @@
 import fc from "fast-check";
 import { describe, expect, it } from "vitest";
+import { uniformOrTiny as number } from "../../../tests/factories/uniform";
 import { dragLaw } from "../stress/drag-law";
 import { averagingFactor, convertAveraging } from "./averaging";
 import { windComponents } from "./components";
 import { directionTowards } from "./direction-to";
 import { logLawWind10 } from "./log-law";
 import { powerLawWind10 } from "./power-law";
-
-const number = (min: number, max: number) => fc.double({ min, max, noNaN: true });
 
 describe("wind", () => {
   it("blows towards the opposite of where it comes from", () => {
