@@ -1,4 +1,5 @@
-import { useSyncExternalStore } from "react";
+import { saveFile } from "~/components/save-file";
+import { useScripted } from "~/components/use-scripted";
 import type { Figure } from "~/figures/figure";
 import { figureCsv } from "~/figures/figure-csv";
 import { fileSvg, pageSvg } from "~/figures/present-svg";
@@ -99,11 +100,7 @@ function isNumeric(unit: string | undefined): boolean {
 
 /** Made in the browser from what the page holds already; without scripts only the server's own address is offered. */
 function Downloads({ figure, csvHref }: { figure: Figure; csvHref?: string }) {
-  const scripted = useSyncExternalStore(
-    () => () => undefined,
-    () => true,
-    () => false,
-  );
+  const scripted = useScripted();
   const button = "py-1 underline underline-offset-4";
   return (
     <>
@@ -112,7 +109,7 @@ function Downloads({ figure, csvHref }: { figure: Figure; csvHref?: string }) {
           type="button"
           className={button}
           aria-label={`Download figure “${figure.title}” as SVG`}
-          onClick={() => save(`${figure.id}.svg`, "image/svg+xml", fileSvg(figure))}
+          onClick={() => saveFile(`${figure.id}.svg`, "image/svg+xml", fileSvg(figure))}
         >
           SVG
         </button>
@@ -128,7 +125,7 @@ function Downloads({ figure, csvHref }: { figure: Figure; csvHref?: string }) {
             className={button}
             aria-label={`Download the numbers of “${figure.title}” as CSV`}
             // The mark at the start tells spreadsheets that the file is UTF-8.
-            onClick={() => save(`${figure.id}.csv`, "text/csv", `\ufeff${figureCsv(figure.table)}`)}
+            onClick={() => saveFile(`${figure.id}.csv`, "text/csv", `\ufeff${figureCsv(figure.table)}`)}
           >
             CSV
           </button>
@@ -136,14 +133,4 @@ function Downloads({ figure, csvHref }: { figure: Figure; csvHref?: string }) {
       )}
     </>
   );
-}
-
-function save(fileName: string, type: string, content: string): void {
-  const address = URL.createObjectURL(new Blob([content], { type: `${type};charset=utf-8` }));
-  const link = document.createElement("a");
-  link.href = address;
-  link.download = fileName;
-  link.click();
-  // Some browsers read it only after the click has been handled.
-  setTimeout(() => URL.revokeObjectURL(address), 60_000);
 }

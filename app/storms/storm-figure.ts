@@ -10,6 +10,7 @@ import type { ChannelName } from "~/readers/reading";
 import type { ChannelSeries } from "./channel-series";
 import { CHANNELS } from "./channels";
 import { onCommonAxis } from "./common-axis";
+import { HEAT_PARTS } from "./heat-parts";
 import type { StormWindow } from "./storm-window";
 
 interface StormFigureOptions {
@@ -23,19 +24,11 @@ interface StormFigureOptions {
   mostTableRows: number;
 }
 
-const HEAT_PARTS: readonly { channel: ChannelName; label: string; dash: string }[] = [
-  { channel: "shortwave", label: "shortwave", dash: "" },
-  { channel: "longwave", label: "longwave", dash: "6,2" },
-  { channel: "sensible", label: "sensible", dash: "2,3" },
-  { channel: "latent", label: "latent", dash: "6,2,2,2" },
-];
-
 const DRAWN: readonly ChannelName[] = [
   "windSpeed",
   "windGust",
   "windFrom",
   "rain",
-  "netHeat",
   ...HEAT_PARTS.map(({ channel }) => channel),
 ];
 
@@ -115,17 +108,16 @@ function rainOf(rain: Float64Array | undefined): TimePanel | null {
 }
 
 function heatOf(of: ValuesOf): TimePanel | null {
-  const net = of("netHeat");
-  const parts = HEAT_PARTS.flatMap(({ channel, label, dash }) => {
+  const lines = HEAT_PARTS.flatMap(({ channel, label, dash }) => {
     const values = of(channel);
     return values ? [{ values, label, dash, openPauses: true }] : [];
   });
-  if (!net && parts.length === 0) return null;
+  if (lines.length === 0) return null;
   return {
     quantity: "netHeat",
-    heading: net ? "net heat into the sea" : "heat into the sea",
+    heading: of("netHeat") ? "net heat into the sea" : "heat into the sea",
     colour: "heat",
-    lines: [...(net ? [{ values: net, label: "net", openPauses: true }] : []), ...parts],
+    lines,
     zero: true,
     height: 72,
   };

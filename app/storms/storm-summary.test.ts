@@ -1,7 +1,7 @@
 import { describe, expect, it } from "vitest";
 import type { ChannelName } from "~/readers/reading";
 import type { ChannelSeries } from "./channel-series";
-import { heldTotal, summariseStorm } from "./storm-summary";
+import { summariseStorm } from "./storm-summary";
 
 const HOUR = 3600;
 
@@ -13,28 +13,6 @@ function series(channel: ChannelName, hours: number[], values: number[]): Channe
     values: Float64Array.from(values),
   };
 }
-
-describe("rain held until the next time", () => {
-  it("sums hourly rates to the amount", () => {
-    const rain = series("rain", [0, 1, 2, 3], [2, 4, 0, 1]);
-    expect(heldTotal(rain, { startsAt: 0, endsAt: 4 * HOUR })).toBe(7);
-  });
-
-  it("does not stretch a rate across a gap", () => {
-    const rain = series("rain", [0, 1, 2, 50, 51], [0, 0, 6, 0, 0]);
-    expect(heldTotal(rain, { startsAt: 0, endsAt: 60 * HOUR })).toBe(6);
-  });
-
-  it("stops at the end of the window", () => {
-    const rain = series("rain", [0, 1], [0, 10]);
-    expect(heldTotal(rain, { startsAt: 0, endsAt: 1.5 * HOUR })).toBe(5);
-  });
-
-  it("takes ten-minute rates for a sixth of an hour each", () => {
-    const rain = series("rain", [0, 1 / 6, 2 / 6], [6, 6, 6]);
-    expect(heldTotal(rain, { startsAt: 0, endsAt: HOUR })).toBeCloseTo(3, 12);
-  });
-});
 
 describe("the summary of a storm", () => {
   const wind = series("windSpeed", [0, 1, 2, 3, 4], [3, 8, 31, 9, 40]);

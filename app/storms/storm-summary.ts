@@ -1,11 +1,8 @@
 import { LONGEST_GAP } from "~/ocean/constants";
 import type { ChannelName } from "~/readers/reading";
-import { medianStep, type ChannelSeries } from "./channel-series";
+import type { ChannelSeries } from "./channel-series";
+import { longestPause, runningRain } from "./running-totals";
 import { withinWindow, type StormWindow } from "./storm-window";
-
-const HOUR = 3600;
-/** A value that holds is not stretched over more than this many usual steps: beyond, the record has a gap. */
-const STEPS_HELD = 1.5;
 
 export interface Peak {
   value: number;
@@ -45,7 +42,7 @@ export function summariseStorm(series: readonly ChannelSeries[], window: StormWi
     peakWind,
     peakGust: peakOf(channel("windGust")),
     peakWindFrom: peakWind && valueAt(channel("windFrom"), peakWind.at),
-    rainTotal: rain ? heldTotal(rain, window) : null,
+    rainTotal: rain ? (runningRain(rain, window).values.at(-1) ?? 0) : null,
     meanNetHeat:
       heat && heat.values.length > 0 ? heat.values.reduce((sum, value) => sum + value, 0) / heat.values.length : null,
     gaps: inside.flatMap((entry) => longGaps(entry, window)),
@@ -65,27 +62,13 @@ function valueAt(series: ChannelSeries | undefined, seconds: number): number | n
   return series && index >= 0 ? series.values[index] : null;
 }
 
-/**
- * mm from rates in mm/h that hold until the next time, but not across a gap, nor beyond the window.
- */
-export function heldTotal({ time, values }: Pick<ChannelSeries, "time" | "values">, window: StormWindow): number {
-  const step = medianStep(time) ?? HOUR;
-  let total = 0;
-  values.forEach((rate, index) => {
-    const next = index + 1 < time.length ? time[index + 1] : time[index] + step;
-    const held = next - time[index] > STEPS_HELD * step ? step : next - time[index];
-    total += (rate * Math.max(0, Math.min(held, window.endsAt - time[index]))) / HOUR;
-  });
-  return total;
-}
-
 /** The channels that the engine needs without a gap. */
 const FORCING: readonly ChannelName[] = ["windSpeed", "rain", "netHeat", "shortwave", "longwave", "sensible", "latent"];
 
-/** Wind is held to the limit; rain or heat of longer regular steps (a daily gauge) may pause as long as it always does. */
+/** Wind is held to the limit. */
 function longGaps({ channel, time }: ChannelSeries, { startsAt, endsAt }: StormWindow): Gap[] {
   if (!FORCING.includes(channel)) return [];
-  const longest = channel === "windSpeed" ? LONGEST_GAP : Math.max(LONGEST_GAP, STEPS_HELD * (medianStep(time) ?? 0));
+  const longest = channel === "windSpeed" ? LONGEST_GAP : longestPause(time);
   const edges = [startsAt, ...time, endsAt];
   return edges
     .slice(1)

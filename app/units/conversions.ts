@@ -17,6 +17,7 @@ export const SQUARE_METRES_TO_SQUARE_NAUTICAL_MILES: Ratio = [1, 1852 * 1852];
 export const ABSOLUTE_TO_PRACTICAL_SALINITY: Ratio = [35, 35.16504];
 /** m³ per metre of shore to million m³ per kilometre of shore. */
 export const PER_METRE_TO_MILLION_PER_KILOMETRE: Ratio = [1, 1000];
+export const JOULES_TO_MEGAJOULES: Ratio = [1, 1_000_000];
 export const FRACTION_TO_PERCENT: Ratio = [100, 1];
 export const SECONDS_TO_HOURS: Ratio = [1, 3600];
 

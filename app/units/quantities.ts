@@ -1,6 +1,7 @@
 import {
   ABSOLUTE_TO_PRACTICAL_SALINITY,
   FRACTION_TO_PERCENT,
+  JOULES_TO_MEGAJOULES,
   METRES_PER_SECOND_TO_KNOTS,
   METRES_TO_FEET,
   METRES_TO_KILOMETRES,
@@ -185,6 +186,15 @@ export const QUANTITIES = {
     colour: "heat",
     dash: "",
     limits: { min: -5000, max: 1500 },
+  },
+  heatTotal: {
+    name: "heat into the sea",
+    symbol: "ΣQ",
+    si: "J/m²",
+    shown: fixed("MJ/m²", 1, JOULES_TO_MEGAJOULES),
+    colour: "heat",
+    dash: "",
+    limits: { min: -1e11, max: 1e11 },
   },
   airTemperature: {
     name: "air temperature",

@@ -127,7 +127,10 @@ async function bringStorm(page: Page, { file, windHeight }: Record): Promise<voi
     .getByText(/3(\.0)?\smm\/h/)
     .first()
     .waitFor();
+  await page.getByRole("img", { name: /^Wind rose/ }).waitFor();
+  await page.getByRole("heading", { name: "What the storm added up to" }).waitFor();
   await expectNoSideways(page);
+  await expectAccessible(page);
 }
 
 async function describeWater(page: Page): Promise<void> {

@@ -8,6 +8,7 @@ import { RecordCard } from "~/components/storms/record-card";
 import { SeriesFigure } from "~/components/storms/series-figure";
 import { StormFacts } from "~/components/storms/storm-facts";
 import { StormSettings } from "~/components/storms/storm-settings";
+import { WindPart } from "~/components/storms/wind-part";
 import { FIGURE_WIDTHS } from "~/figures/figure-context";
 import { serverPlotDocument } from "~/figures/plot-document.server";
 import { may } from "~/organisations/permissions";
@@ -15,6 +16,7 @@ import { currentProject } from "~/projects/current-project.server";
 import { config } from "~/services/config.server";
 import { answerRefusal } from "~/storms/answer-refusal.server";
 import { addConstant } from "~/storms/constant-record.server";
+import { presentWind } from "~/storms/present-wind";
 import { postedConstant } from "~/storms/posted-constant";
 import { postedWindow } from "~/storms/posted-window";
 import { originalFrom, receiveForm } from "~/storms/receive-original.server";
@@ -27,9 +29,12 @@ import { recordOf, stormOf } from "~/storms/stored-record.server";
 import { stormFigure } from "~/storms/storm-figure";
 import { postedName } from "~/storms/storm-name";
 import { summariseStorm } from "~/storms/storm-summary";
+import { totalsFigure } from "~/storms/totals-figure";
 import { extentOf, wallClock, windowOf, withinWindow } from "~/storms/storm-window";
 
 const MOST_TABLE_ROWS = 1000;
+/** px; a rose needs no more, and leaves room beside it. */
+const ROSE_WIDTH = 420;
 
 export async function loader({ context, params }: Route.LoaderArgs) {
   const { organisation, tenant, project } = await currentProject(context, params, "project.view");
@@ -37,12 +42,26 @@ export async function loader({ context, params }: Route.LoaderArgs) {
   const { series, ...shown } = await showStorm(tenant, storm);
   const window = windowOf(storm);
   const inside = window ? series.map((entry) => withinWindow(entry, window)) : series;
+  const summary = window && summariseStorm(series, window);
+  const { windHeight } = shown;
+  const sized = (width: number) => ({
+    document: serverPlotDocument(),
+    zone: project.timeZone,
+    units: organisation.units,
+    width,
+  });
   const draw = (width: number) =>
     stormFigure(
       inside,
-      { id: "storm-series", title: storm.name, windHeight: shown.windHeight, mostTableRows: MOST_TABLE_ROWS },
-      { document: serverPlotDocument(), zone: project.timeZone, units: organisation.units, width },
+      { id: "storm-series", title: storm.name, windHeight, mostTableRows: MOST_TABLE_ROWS },
+      sized(width),
     );
+  const drawWind = (width: number) =>
+    window && summary?.peakWind
+      ? presentWind(series, window, { peak: summary.peakWind.value, windHeight }, sized(width))
+      : null;
+  const drawTotals = (width: number) =>
+    window && totalsFigure(series, window, { mostTableRows: MOST_TABLE_ROWS }, sized(width));
   return {
     storm: { id: storm.id, name: storm.name },
     // In full, since a file's link is not the router's: one that is relative would hang on a slash at the end.
@@ -54,7 +73,11 @@ export async function loader({ context, params }: Route.LoaderArgs) {
       startsAt: wallClock(window.startsAt, project.timeZone),
       endsAt: wallClock(window.endsAt, project.timeZone),
     },
-    summary: window && summariseStorm(series, window),
+    summary,
+    wind: drawWind(ROSE_WIDTH),
+    narrowRose: drawWind(FIGURE_WIDTHS.narrow)?.rose ?? null,
+    totals: drawTotals(FIGURE_WIDTHS.wide),
+    narrowTotals: drawTotals(FIGURE_WIDTHS.narrow),
     figure: draw(FIGURE_WIDTHS.wide),
     narrowFigure: draw(FIGURE_WIDTHS.narrow),
     zone: project.timeZone,
@@ -100,7 +123,7 @@ export async function action({ request, context, params }: Route.ActionArgs) {
 }
 
 export default function ShowStorm({ loaderData, actionData }: Route.ComponentProps) {
-  const { storm, home, figure, narrowFigure, records, window, mayEdit, estimates } = loaderData;
+  const { storm, home, figure, narrowFigure, wind, totals, records, window, mayEdit, estimates } = loaderData;
   const errors = actionData?.errors ?? {};
   const csv = `${home}/storms/${storm.id}/series.csv`;
   return (
@@ -123,6 +146,13 @@ export default function ShowStorm({ loaderData, actionData }: Route.ComponentPro
           <div className="mt-5">
             <SeriesFigure figure={figure} narrow={narrowFigure} csvHref={csv} />
           </div>
+          {totals && (
+            <>
+              <SectionHeading>{totals.title}</SectionHeading>
+              <SeriesFigure figure={totals} narrow={loaderData.narrowTotals} />
+            </>
+          )}
+          {wind && <WindPart {...wind} narrowRose={loaderData.narrowRose} />}
         </>
       ) : (
         <EmptyState title="Nothing confirmed yet">
