@@ -176,7 +176,7 @@ async function runAndRead(page: Page): Promise<void> {
   await expectNoSideways(page);
   await expectAccessible(page);
   await page.getByRole("link", { name: "0412-01" }).first().click();
-  await page.getByRole("region", { name: "The answer" }).getByText("Peak wind stress").waitFor();
+  await page.getByRole("region", { name: "The answer" }).getByText("Peak wind stress", { exact: true }).waitFor();
   await page.getByText("Range from 200 members").waitFor();
   await page.getByText("Where the layer went").waitFor();
   await page.getByRole("heading", { name: "Fit notes" }).waitFor();
