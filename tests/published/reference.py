@@ -48,13 +48,18 @@ def casts(_request):
     SP, t, p = (data[name].T for name in ("SP_chck_cast", "t_chck_cast", "p_chck_cast"))
     longitude, latitude = data["long_chck_cast"], data["lat_chck_cast"]
     SA = gsw.SA_from_SP(SP, p, longitude[:, None], latitude[:, None])
+    CT = gsw.CT_from_t(SA, t, p)
+    rho, alpha, beta = gsw.rho_alpha_beta(SA, CT, p)
     return {
         "SP": SP,
         "t": t,
         "p": p,
         "SA": SA,
-        "CT": gsw.CT_from_t(SA, t, p),
-        "rho": gsw.rho_t_exact(SA, t, p),
+        "CT": CT,
+        "rho": rho,
+        "alpha": alpha,
+        "beta": beta,
+        "rho_exact": gsw.rho_t_exact(SA, t, p),
         "latitude": latitude,
         "longitude": longitude,
     }

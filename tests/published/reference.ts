@@ -35,12 +35,24 @@ function missing(name: string): never {
   throw new Error(`The reference program gave no "${name}".`);
 }
 
+type Numbers = readonly (number | null)[];
+
 /** The largest |a - b|/(|b| + floor) over all pairs; a missing number on one side alone counts as infinite. */
-export function worst(ours: readonly (number | null)[], theirs: readonly (number | null)[], floor = 0): number {
-  if (ours.length !== theirs.length) return Number.POSITIVE_INFINITY;
+export function worst(ours: Numbers, theirs: Numbers, floor = 0): number {
+  return largest(ours, theirs, (a, b) => Math.abs(a - b) / (Math.abs(b) + floor));
+}
+
+/** The largest |a - b| over all pairs; a missing number on one side alone counts as infinite. */
+export function greatest(ours: Numbers, theirs: Numbers): number {
+  return largest(ours, theirs, (a, b) => Math.abs(a - b));
+}
+
+function largest(ours: Numbers, theirs: Numbers, size: (a: number, b: number) => number): number {
+  if (ours.length !== theirs.length || ours.length === 0) return Number.POSITIVE_INFINITY;
   return ours.reduce<number>((most, value, k) => {
     const other = theirs[k];
     if (value === null || other === null) return value === other ? most : Number.POSITIVE_INFINITY;
-    return Math.max(most, Math.abs(value - other) / (Math.abs(other) + floor));
+    const off = size(value, other);
+    return Number.isNaN(off) ? Number.POSITIVE_INFINITY : Math.max(most, off);
   }, 0);
 }
