@@ -1,14 +1,9 @@
+import { csvCell } from "~/figures/csv-cell";
 import { unionOfTimes } from "./common-axis";
 import type { ChannelSeries } from "./channel-series";
 import { CHANNELS } from "./channels";
 
 const LINE_END = "\r\n";
-
-/** RFC 4180; a cell that a spreadsheet would take for a formula is made text. */
-export function csvCell(text: string): string {
-  const safe = /^[=+\-@\t\r]/.test(text) ? `'${text}` : text;
-  return /[",\r\n]/.test(safe) ? `"${safe.replaceAll('"', '""')}"` : safe;
-}
 
 /**
  * A storm's channels as CSV: a line for every time of any channel, ISO UTC, SI units in the header, an empty cell where a
