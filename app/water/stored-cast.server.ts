@@ -49,6 +49,12 @@ export async function startCast(tenant: Tenant, projectId: string, original: Ori
       name: original.name.slice(0, 255),
       origin: original.origin,
       answers: {},
+      waterColumnId: null,
+      provenance: null,
+      length: 0,
+      depth: null,
+      temperature: null,
+      salinity: null,
       createdBy: userId,
     });
   });

@@ -13,18 +13,18 @@ export class Cast extends Model<InferAttributes<Cast>, InferCreationAttributes<C
   declare projectId: string;
   declare sourceFileId: string;
   /** Null until it is confirmed. */
-  declare waterColumnId: CreationOptional<string | null>;
+  declare waterColumnId: string | null;
   declare name: string;
   declare origin: "file" | "pasted";
   declare answers: CastAnswers;
-  declare provenance: CreationOptional<CastProvenance | null>;
-  declare length: CreationOptional<number>;
+  declare provenance: CastProvenance | null;
+  declare length: number;
   /** m */
-  declare depth: CreationOptional<Buffer | null>;
+  declare depth: Buffer | null;
   /** In situ, °C. */
-  declare temperature: CreationOptional<Buffer | null>;
+  declare temperature: Buffer | null;
   /** On the scale of its water column. */
-  declare salinity: CreationOptional<Buffer | null>;
+  declare salinity: Buffer | null;
   declare createdBy: string;
   declare createdAt: CreationOptional<Date>;
   declare updatedAt: CreationOptional<Date>;
@@ -41,7 +41,7 @@ Cast.init(
     origin: { type: DataTypes.TEXT, allowNull: false },
     answers: { type: DataTypes.JSON, allowNull: false },
     provenance: { type: DataTypes.JSON, allowNull: true },
-    length: { type: DataTypes.INTEGER, allowNull: false, defaultValue: 0 },
+    length: { type: DataTypes.INTEGER, allowNull: false },
     depth: { type: DataTypes.BLOB, allowNull: true },
     temperature: { type: DataTypes.BLOB, allowNull: true },
     salinity: { type: DataTypes.BLOB, allowNull: true },
