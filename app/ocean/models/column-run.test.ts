@@ -60,6 +60,20 @@ describe("a column run", () => {
     );
   });
 
+  it("does not leave brackish water that was held at freezing on top of lighter water", () => {
+    // Cooled faster than it mixes, water of 8 g/kg grows light; held at its freezing point it is the denser again.
+    const { column, headline } = estimate({
+      box: { latitude: 58, longitude: -40, waterDepth: 4 },
+      water: { temperature: 8, salinity: 8, layerDepth: 1, below: { temperature: 8, salinity: 8 } },
+      storm: { time: [0, STEP, 2 * STEP], windSpeed: [0, 0, 0], windFrom: [0, 0, 0], heat: { net: [0, -5000, -5000] } },
+      method: { model: "column", timeStep: STEP, cellSize: 0.05 },
+    });
+    expect(headline.surfaceTemperature.value).toBeLessThan(8);
+    for (const density of column?.density ?? []) {
+      for (let k = 1; k < density.length; k++) expect(density[k]).toBeGreaterThan(density[k - 1] - 1e-9);
+    }
+  });
+
   it("takes the rain's heat from the surface as warm as it is: fresh water's Conservative Temperature is not that", () => {
     const { budgets } = estimate({
       box: { latitude: 10, longitude: -40 },
