@@ -2,11 +2,12 @@ import { scenarioStorm } from "./build-scenario";
 import { partHash } from "./input-parts";
 import type { RegisteredRecord } from "./inputs-register";
 import { Recent } from "./recent";
-import { readForcing, type ReadForcing, type StormChannels } from "./storm-forcing";
+import { readForcing, type ReadForcing } from "./storm-forcing";
 import type { Storm } from "~/db/models/storm.server";
 import type { Tenant } from "~/db/scoped.server";
 import { fromBlob } from "~/db/typed-array.server";
 import type { ScenarioStorm } from "~/ocean/scenario";
+import type { SampledChannels } from "~/quality/samples";
 
 /** A storm's series as the engine will take them. */
 export interface StormReading extends ReadForcing {
@@ -20,7 +21,7 @@ type Series = Omit<StormReading, "records">;
 
 const recent = new Recent<Series>(64);
 
-async function channelsOf(tenant: Tenant, stormId: string): Promise<StormChannels> {
+async function channelsOf(tenant: Tenant, stormId: string): Promise<SampledChannels> {
   const rows = await tenant.series.list({ where: { stormId } });
   return Object.fromEntries(
     rows.map(({ channel, time, values, length }) => [

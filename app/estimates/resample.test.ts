@@ -1,5 +1,5 @@
 import { describe, expect, it } from "vitest";
-import { heldAt, lastAtOrBefore, linearAt, medianStep, unionAxis } from "./resample";
+import { heldAt, lastAtOrBefore, linearAt, unionAxis } from "./resample";
 
 const samples = { time: [0, 10, 30], values: [1, 3, -1] };
 
@@ -34,10 +34,5 @@ describe("resampling", () => {
 
   it("takes every time once, the ends too, and none outside them", () => {
     expect(unionAxis([[0, 10, 20], [5, 10], [99]], 3, 18)).toEqual([3, 5, 10, 18]);
-  });
-
-  it("knows the usual step", () => {
-    expect(medianStep([0, 1, 2, 3, 50])).toBe(1);
-    expect(medianStep([7])).toBeNaN();
   });
 });

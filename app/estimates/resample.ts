@@ -1,8 +1,4 @@
-/** Samples of one channel: seconds since 1970-01-01T00:00:00Z, ascending, and a value for each. */
-export interface Samples {
-  time: ArrayLike<number>;
-  values: ArrayLike<number>;
-}
+import type { Samples } from "~/quality/samples";
 
 /** Index of the last element of an ascending list that is not above `moment`; -1 before the first. */
 export function lastAtOrBefore(time: ArrayLike<number>, moment: number): number {
@@ -29,14 +25,6 @@ export function linearAt({ time, values }: Samples, moment: number): number {
 export function heldAt({ time, values }: Samples, moment: number): number {
   const before = lastAtOrBefore(time, moment);
   return before < 0 ? Number.NaN : values[before];
-}
-
-/** Seconds between neighbours, the middle one in size; NaN for fewer than two samples. */
-export function medianStep(time: ArrayLike<number>): number {
-  const steps = Array.from({ length: Math.max(0, time.length - 1) }, (_, index) => time[index + 1] - time[index]).sort(
-    (a, b) => a - b,
-  );
-  return steps.length === 0 ? Number.NaN : steps[steps.length >> 1];
 }
 
 /** All moments of several ascending lists within [from, to], and both ends: ascending, each once. */

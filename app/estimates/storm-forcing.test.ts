@@ -1,7 +1,7 @@
 import fc from "fast-check";
 import { describe, expect, it } from "vitest";
-import { readForcing, type StormChannels, type StormInput } from "./storm-forcing";
-import type { Samples } from "./resample";
+import { readForcing, type StormInput } from "./storm-forcing";
+import type { SampledChannels, Samples } from "~/quality/samples";
 
 const HOUR = 3600;
 const START = Date.parse("2026-11-03T00:00:00Z") / 1000;
@@ -13,12 +13,12 @@ function every(hours: number, step: number, value: (hour: number) => number): Sa
   return { time, values: time.map((seconds) => value((seconds - START) / HOUR)) };
 }
 
-const wind = (hours = 24): StormChannels => ({
+const wind = (hours = 24): SampledChannels => ({
   windSpeed: every(hours, 1, (hour) => 5 + hour),
   windFrom: every(hours, 1, () => 270),
 });
 
-function read(channels: StormChannels, changes: Partial<StormInput> = {}) {
+function read(channels: SampledChannels, changes: Partial<StormInput> = {}) {
   const input = { channels, windHeight: 10, startsAt: at(0), endsAt: at(24), heatInterpolation: "linear" as const };
   return readForcing({ ...input, ...changes }, "UTC");
 }
@@ -174,7 +174,7 @@ describe("what is missing", () => {
       {},
       "share their times",
     ],
-  ] as [string, StormChannels, Partial<StormInput>, string][])(
+  ] as [string, SampledChannels, Partial<StormInput>, string][])(
     "stops at %s, in words",
     (_, channels, changes, words) => {
       const { forcing, problems } = read(channels, changes);

@@ -3,16 +3,17 @@
  * wind is brought to the common axis as a vector, rain and evaporation as rates that hold until their next time,
  * heat on the straight line between its times, or held where the method says so.
  */
-import { heldAt, linearAt, lastAtOrBefore, medianStep, unionAxis, type Samples } from "./resample";
+import { heldAt, linearAt, lastAtOrBefore, unionAxis } from "./resample";
 import { LONGEST_GAP } from "~/ocean/constants";
 import type { HeatSeries, ScenarioProblem } from "~/ocean/scenario";
-import type { ChannelName } from "~/readers/reading";
+import { forcingOf, HEAT_PARTS, unbridgedPauses, type ForcingChannel, type Pause } from "~/quality/gap-rule";
+import { pairWind, type PairedWind } from "~/quality/pair-wind";
+import type { SampledChannels, Samples } from "~/quality/samples";
+import { medianStep } from "~/storms/channel-series";
 import { formatTime } from "~/units/format-time";
 
-export type StormChannels = Partial<Record<ChannelName, Samples>>;
-
 export interface StormInput {
-  channels: StormChannels;
+  channels: SampledChannels;
   /** m above the sea; null where the record does not say. */
   windHeight: number | null;
   /** Seconds since 1970-01-01T00:00:00Z. */
@@ -44,9 +45,7 @@ export interface ReadForcing {
   assumptions: string[];
 }
 
-const HEAT_PARTS = ["shortwave", "longwave", "sensible", "latent"] as const;
-
-const LABELS: Partial<Record<ChannelName, string>> = {
+const LABELS: Record<ForcingChannel, string> = {
   windSpeed: "wind",
   rain: "rain",
   evaporation: "evaporation",
@@ -57,35 +56,10 @@ const LABELS: Partial<Record<ChannelName, string>> = {
   latent: "latent heat",
 };
 
-interface Wind {
-  time: number[];
-  speed: number[];
-  from: number[];
-  east: number[];
-  north: number[];
-}
-
 const RADIANS = Math.PI / 180;
 
-/** Samples that have both speed and direction; a calm needs no direction. */
-function pairWind(speed: Samples, from: Samples): Wind {
-  const wind: Wind = { time: [], speed: [], from: [], east: [], north: [] };
-  for (let index = 0; index < speed.time.length; index++) {
-    const moment = speed.time[index];
-    const at = lastAtOrBefore(from.time, moment);
-    const bearing = at >= 0 && from.time[at] === moment ? from.values[at] : speed.values[index] === 0 ? 0 : Number.NaN;
-    if (Number.isNaN(bearing)) continue;
-    wind.time.push(moment);
-    wind.speed.push(speed.values[index]);
-    wind.from.push(bearing);
-    wind.east.push(-speed.values[index] * Math.sin(bearing * RADIANS));
-    wind.north.push(-speed.values[index] * Math.cos(bearing * RADIANS));
-  }
-  return wind;
-}
-
 /** As measured where a sample stands; between samples the vector on the straight line, turned back to speed and direction. */
-function windAt(wind: Wind, moment: number): [speed: number, from: number] {
+function windAt(wind: PairedWind, moment: number): [speed: number, from: number] {
   const at = lastAtOrBefore(wind.time, moment);
   if (at >= 0 && wind.time[at] === moment) return [wind.speed[at], wind.from[at]];
   const east = linearAt({ time: wind.time, values: wind.east }, moment);
@@ -94,37 +68,19 @@ function windAt(wind: Wind, moment: number): [speed: number, from: number] {
   return [speed, speed === 0 ? 0 : (Math.atan2(-east, -north) / RADIANS + 360) % 360];
 }
 
-interface Pause {
-  from: number;
-  to: number;
+/** Where a scenario holds what the channel brings. */
+function pathOf(channel: ForcingChannel): string {
+  if (channel === "windSpeed" || channel === "rain" || channel === "evaporation") return `storm.${channel}`;
+  return `storm.heat.${channel === "netHeat" ? "net" : channel}`;
 }
 
-/** Pauses that are longer than the channel may have, cut to [from, to]; a missing start or end counts as one. */
-function pausesOf(time: ArrayLike<number>, from: number, to: number, longest: number): Pause[] {
-  const within = Array.from({ length: time.length }, (_, index) => time[index]).filter((at) => at > from && at < to);
-  const before = lastAtOrBefore(time, from);
-  const after = Array.prototype.find.call(time, (at: number) => at >= to) as number | undefined;
-  const knots = [before >= 0 ? time[before] : from, ...within, after ?? to];
-  return knots.slice(1).flatMap((next, index) => {
-    const previous = knots[index];
-    return next - previous > longest ? [{ from: Math.max(previous, from), to: Math.min(next, to) }] : [];
-  });
-}
-
-/** Wind is held to the limit; a channel of longer regular steps (a daily gauge) may pause for as long as it always does. */
-function longestPause(channel: ChannelName, time: ArrayLike<number>): number {
-  if (channel === "windSpeed") return LONGEST_GAP;
-  const step = medianStep(time);
-  return Number.isFinite(step) ? Math.max(LONGEST_GAP, 1.5 * step) : LONGEST_GAP;
-}
-
-function pauseProblem(channel: ChannelName, path: string, pause: Pause, zone: string): ScenarioProblem {
+function pauseProblem(pause: Pause, zone: string): ScenarioProblem {
   const hours = ((pause.to - pause.from) / 3600).toFixed(1);
   return {
-    path,
+    path: pathOf(pause.channel),
     code: "GAP",
     message:
-      `The ${LABELS[channel] ?? channel} has no value for ${hours} h, from ${formatTime(pause.from, zone)} to ` +
+      `The ${LABELS[pause.channel]} has no value for ${hours} h, from ${formatTime(pause.from, zone)} to ` +
       `${formatTime(pause.to, zone)}. A pause this long is not bridged: bring a record that covers it, or narrow the storm's window.`,
   };
 }
@@ -133,7 +89,7 @@ function pauseProblem(channel: ChannelName, path: string, pause: Pause, zone: st
 function heldRate(samples: Samples, axis: number[]): number[] {
   const last = samples.time[samples.time.length - 1];
   const step = medianStep(samples.time);
-  const end = Number.isFinite(step) ? last + step : Number.POSITIVE_INFINITY;
+  const end = step === null ? Number.POSITIVE_INFINITY : last + step;
   return axis.map((moment) => {
     const value = moment >= end ? 0 : heldAt(samples, moment);
     return Number.isNaN(value) ? 0 : value;
@@ -202,13 +158,13 @@ export function readForcing(input: StormInput, zone: string): ReadForcing {
   }
   const from = Math.max(startsAt, wind.time[0]);
   const to = Math.min(endsAt, wind.time[wind.time.length - 1]);
+  const pauses = unbridgedPauses(channels, startsAt, endsAt);
+  problems.push(...pauses.map((pause) => pauseProblem(pause, zone)));
   for (const [start, end] of [
     [startsAt, Math.min(from, endsAt)],
     [Math.max(to, startsAt), endsAt],
   ]) {
-    if (end - start > LONGEST_GAP) {
-      problems.push(pauseProblem("windSpeed", "storm.windSpeed", { from: start, to: end }, zone));
-    } else if (end > start) {
+    if (end > start && end - start <= LONGEST_GAP) {
       assumptions.push(
         `The wind record lacks ${formatTime(start, zone)} to ${formatTime(end, zone)}: the estimate covers what it holds.`,
       );
@@ -222,19 +178,8 @@ export function readForcing(input: StormInput, zone: string): ReadForcing {
     );
   }
 
-  const used = (["windSpeed", "rain", "evaporation", "netHeat", ...HEAT_PARTS] as const).filter(
-    (name) => channels[name] && !(channels.netHeat && (HEAT_PARTS as readonly string[]).includes(name)),
-  );
-  const timesOf = (name: ChannelName) => (name === "windSpeed" ? wind.time : (channels[name]?.time ?? []));
-  const pauses = used.flatMap((name) => {
-    const path =
-      name === "windSpeed" || name === "rain" || name === "evaporation"
-        ? `storm.${name}`
-        : `storm.heat.${name === "netHeat" ? "net" : name}`;
-    const found = pausesOf(timesOf(name), from, to, longestPause(name, timesOf(name)));
-    problems.push(...found.map((pause) => pauseProblem(name, path, pause, zone)));
-    return found;
-  });
+  const used = forcingOf(channels);
+  const timesOf = (name: ForcingChannel) => (name === "windSpeed" ? wind.time : (channels[name]?.time ?? []));
   // Nothing is invented inside a pause: the axis itself has it, and the engine refuses it as well.
   const axis = unionAxis([...used.map(timesOf), ...heldEnds(channels)], from, to).filter((moment) =>
     pauses.every((pause) => moment <= pause.from || moment >= pause.to),
@@ -267,9 +212,9 @@ export function readForcing(input: StormInput, zone: string): ReadForcing {
 }
 
 /** Moments at which a held rate ends, so that the axis has them. */
-function heldEnds(channels: StormChannels): number[][] {
+function heldEnds(channels: SampledChannels): number[][] {
   return [channels.rain, channels.evaporation].flatMap((samples) => {
     if (!samples || samples.time.length < 2) return [];
-    return [[samples.time[samples.time.length - 1] + medianStep(samples.time)]];
+    return [[samples.time[samples.time.length - 1] + (medianStep(samples.time) ?? 0)]];
   });
 }

@@ -1,5 +1,6 @@
 import type { Storm } from "~/db/models/storm.server";
 import type { Tenant } from "~/db/scoped.server";
+import { FORCING_CHANNELS } from "~/quality/gap-rule";
 import { loadSeries } from "./load-series.server";
 import { windowOf, type StormWindow } from "./storm-window";
 import { summariseStorm, type Peak } from "./storm-summary";
@@ -11,6 +12,8 @@ export interface StormLine {
   peakWind: Peak | null;
   /** mm; null without a rain record. */
   rainTotal: number | null;
+  /** Name of the storm that this one is a scenario of. */
+  scenarioOf: string | null;
   records: { id: string; name: string; state: "reading" | "confirmed" }[];
   /** Pauses that are too long for an estimate to bridge. */
   gaps: number;
@@ -27,7 +30,7 @@ export async function listStorms(tenant: Tenant, projectId: string): Promise<Sto
 async function describe(tenant: Tenant, storm: Storm): Promise<StormLine> {
   const [records, series] = await Promise.all([
     tenant.records.list({ where: { stormId: storm.id }, order: [["createdAt", "ASC"]] }),
-    loadSeries(tenant, storm.id, ["windSpeed", "rain"]),
+    loadSeries(tenant, storm.id, FORCING_CHANNELS),
   ]);
   const window = windowOf(storm);
   const summary = window && summariseStorm(series, window);
@@ -37,6 +40,7 @@ async function describe(tenant: Tenant, storm: Storm): Promise<StormLine> {
     window,
     peakWind: summary?.peakWind ?? null,
     rainTotal: summary?.rainTotal ?? null,
+    scenarioOf: records.find(({ provenance }) => provenance?.scenario)?.provenance?.scenario?.of ?? null,
     records: records.map(({ id, name, state }) => ({ id, name, state })),
     gaps: summary?.gaps.length ?? 0,
   };

@@ -1,4 +1,4 @@
-import { LONGEST_GAP } from "~/ocean/constants";
+import { GAP_STEPS, longestBridged } from "~/quality/gap-rule";
 import { medianStep, type ChannelSeries } from "./channel-series";
 import type { StormWindow } from "./storm-window";
 
@@ -12,16 +12,13 @@ export interface RunningTotal {
 type Samples = Pick<ChannelSeries, "time" | "values">;
 
 const HOUR = 3600;
-/** A value that holds is not stretched over more than this many usual steps: beyond, the record has a gap. */
-export const STEPS_HELD = 1.5;
-
 /** mm from rates in mm/h that hold until the next time, but not across a gap, nor beyond the window. */
 export function runningRain({ time, values }: Samples, window: StormWindow): RunningTotal {
   const step = medianStep(time) ?? HOUR;
   const total = new Growing();
   values.forEach((rate, index) => {
     const next = index + 1 < time.length ? time[index + 1] : time[index] + step;
-    const held = next - time[index] > STEPS_HELD * step ? step : next - time[index];
+    const held = next - time[index] > GAP_STEPS * step ? step : next - time[index];
     const inside = Math.max(0, Math.min(held, window.endsAt - time[index]));
     total.pass(time[index]);
     total.grow(time[index] + inside, (rate * inside) / HOUR);
@@ -31,7 +28,7 @@ export function runningRain({ time, values }: Samples, window: StormWindow): Run
 
 /** J/m² from W/m² that change evenly from sample to sample; nothing is added across a pause that is not bridged. */
 export function runningHeat({ time, values }: Samples): RunningTotal {
-  const longest = longestPause(time);
+  const longest = longestBridged("netHeat", time);
   const total = new Growing();
   values.forEach((flux, index) => {
     const pause = index === 0 ? Infinity : time[index] - time[index - 1];
@@ -39,11 +36,6 @@ export function runningHeat({ time, values }: Samples): RunningTotal {
     else total.grow(time[index], ((flux + values[index - 1]) / 2) * pause);
   });
   return total.finish();
-}
-
-/** s; rain or heat of longer regular steps (a daily gauge) may pause as long as it always does. */
-export function longestPause(time: ArrayLike<number>): number {
-  return Math.max(LONGEST_GAP, STEPS_HELD * (medianStep(time) ?? 0));
 }
 
 /** Value of a total at any time: none before its first, its last for ever after. */

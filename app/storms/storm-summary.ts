@@ -1,19 +1,12 @@
-import { LONGEST_GAP } from "~/ocean/constants";
-import type { ChannelName } from "~/readers/reading";
+import { unbridgedPauses, type Pause } from "~/quality/gap-rule";
 import type { ChannelSeries } from "./channel-series";
-import { longestPause, runningRain } from "./running-totals";
+import { runningRain } from "./running-totals";
 import { withinWindow, type StormWindow } from "./storm-window";
 
 export interface Peak {
   value: number;
   /** Seconds since 1970-01-01T00:00:00Z. */
   at: number;
-}
-
-export interface Gap {
-  channel: ChannelName;
-  from: number;
-  to: number;
 }
 
 export interface StormSummary {
@@ -27,13 +20,13 @@ export interface StormSummary {
   /** W/m², mean over the window. */
   meanNetHeat: number | null;
   /** Gaps in the window that are too long to be bridged. */
-  gaps: Gap[];
+  gaps: Pause[];
 }
 
 /** What a storm's series say inside its window. */
 export function summariseStorm(series: readonly ChannelSeries[], window: StormWindow): StormSummary {
   const inside = series.map((entry) => withinWindow(entry, window));
-  const channel = (name: ChannelName) => inside.find((entry) => entry.channel === name);
+  const channel = (name: ChannelSeries["channel"]) => inside.find((entry) => entry.channel === name);
   const wind = channel("windSpeed");
   const peakWind = peakOf(wind);
   const rain = channel("rain");
@@ -45,7 +38,11 @@ export function summariseStorm(series: readonly ChannelSeries[], window: StormWi
     rainTotal: rain ? (runningRain(rain, window).values.at(-1) ?? 0) : null,
     meanNetHeat:
       heat && heat.values.length > 0 ? heat.values.reduce((sum, value) => sum + value, 0) / heat.values.length : null,
-    gaps: inside.flatMap((entry) => longGaps(entry, window)),
+    gaps: unbridgedPauses(
+      Object.fromEntries(series.map((entry) => [entry.channel, entry])),
+      window.startsAt,
+      window.endsAt,
+    ),
   };
 }
 
@@ -60,18 +57,4 @@ function peakOf(series: ChannelSeries | undefined): Peak | null {
 function valueAt(series: ChannelSeries | undefined, seconds: number): number | null {
   const index = series?.time.indexOf(seconds) ?? -1;
   return series && index >= 0 ? series.values[index] : null;
-}
-
-/** The channels that the engine needs without a gap. */
-const FORCING: readonly ChannelName[] = ["windSpeed", "rain", "netHeat", "shortwave", "longwave", "sensible", "latent"];
-
-/** Wind is held to the limit. */
-function longGaps({ channel, time }: ChannelSeries, { startsAt, endsAt }: StormWindow): Gap[] {
-  if (!FORCING.includes(channel)) return [];
-  const longest = channel === "windSpeed" ? LONGEST_GAP : longestPause(time);
-  const edges = [startsAt, ...time, endsAt];
-  return edges
-    .slice(1)
-    .map((to, index) => ({ channel, from: edges[index], to }))
-    .filter(({ from, to }) => to - from > longest);
 }
