@@ -4,6 +4,7 @@ import { CHANNEL_UNITS } from "~/readers/reading";
 import type { ChannelSeries } from "./channel-series";
 import { channelsOf, groupLabel, groupOf } from "./channels";
 import { constantLabel, type ConstantKind } from "./constant-kinds";
+import { refuseInScenario } from "./copy-as-scenario.server";
 import { loadSeries, storeSeries } from "./load-series.server";
 import type { ConstantForcing, RecordProvenance } from "./provenance";
 import { StormRefusal } from "./refusal";
@@ -72,6 +73,7 @@ export async function addConstant(tenant: Tenant, storm: Storm, request: Constan
   };
   const series = constantSeries(constant, window);
   await tenant.write(async (inner) => {
+    await refuseInScenario(inner, storm.id);
     const channel = channelsOf(groupOf(kind.channel));
     const [there] = await loadSeries(inner, storm.id, channel);
     if (there && !replace) {
@@ -106,6 +108,13 @@ export async function fillConstants(tenant: Tenant, stormId: string, window: Sto
     const series = constantSeries(provenance.constant, window);
     await storeSeries(tenant, { stormId, recordId: record.id }, series);
     const by = { by: provenance.confirmedBy, at: provenance.confirmedAt };
-    await tenant.records.update(record.id, { provenance: provenanceOf(provenance.constant, series, record.name, by) });
+    const { steps, scenario } = provenance;
+    await tenant.records.update(record.id, {
+      provenance: {
+        ...provenanceOf(provenance.constant, series, record.name, by),
+        steps,
+        ...(scenario && { scenario }),
+      },
+    });
   }
 }

@@ -1,4 +1,5 @@
 import type { ChannelName, ReadingStep, Understood } from "~/readers/reading";
+import type { StormScenario } from "./scenario";
 
 /** A value that a person set to stand over the whole storm, in the channel's unit. */
 export interface ConstantForcing {
@@ -26,6 +27,8 @@ export interface RecordProvenance {
   channels: { channel: ChannelName; unit: string; count: number; missing: number; fromColumns: string[] }[];
   /** Only where no file stands behind the record. */
   constant?: ConstantForcing;
+  /** Only where the record was taken over from another storm. */
+  scenario?: StormScenario;
   /** Whose answers these are, and when (ISO UTC). */
   confirmedBy: string;
   confirmedAt: string;

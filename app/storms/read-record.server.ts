@@ -22,16 +22,16 @@ export function readOriginal(original: Original, answers: ReadingAnswers): Serie
   return cachedReading(key, () => read(original, answers));
 }
 
-/** The original behind a record, without having been read; null for a constant. */
+/** The original behind a record, without having been read; null for a constant, and in a scenario, which is not read anew. */
 export async function originalOf(tenant: Tenant, record: StormRecord): Promise<Original | null> {
-  if (record.sourceFileId === null || record.origin === "constant") return null;
+  if (record.sourceFileId === null || record.origin === "constant" || record.provenance?.scenario) return null;
   const source = await tenant.sourceFiles.find(record.sourceFileId);
   return source && { name: record.name, bytes: source.bytes, origin: record.origin };
 }
 
 /**
  * A record's file read with its answers, or with others to see what they would change.
- * @returns null for a constant, which has no file
+ * @returns null for a constant, which has no file, and in a scenario
  * @throws UnreadableFile where the answers leave nothing to read
  */
 export async function readRecord(

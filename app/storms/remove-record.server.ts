@@ -5,6 +5,7 @@ import { channelsIn } from "./confirm-record.server";
 import type { ChannelSeries } from "./channel-series";
 import { groupOf } from "./channels";
 import { constantSeries } from "./constant-record.server";
+import { refuseInScenario } from "./copy-as-scenario.server";
 import { loadSeries, storeSeries } from "./load-series.server";
 import { dropIfUnused } from "./original.server";
 import { readRecord } from "./read-record.server";
@@ -14,9 +15,11 @@ import { windowOf } from "./storm-window";
 /**
  * Takes a record out of its storm, with its series and, where no other record uses it, its original. What it had replaced is
  * read again from the record that had it before.
+ * @throws StormRefusal in a scenario
  */
 export async function removeRecord(tenant: Tenant, storm: Storm, record: StormRecord): Promise<void> {
   await tenant.write(async (inner) => {
+    await refuseInScenario(inner, storm.id);
     await inner.records.remove({ id: record.id });
     await bringBackReplaced(inner, storm);
     await refitWindow(inner, storm);

@@ -2,6 +2,7 @@ import type { StormRecord } from "~/db/models/record.server";
 import type { Storm } from "~/db/models/storm.server";
 import type { Tenant } from "~/db/scoped.server";
 import { UnreadableFile, type SeriesReading } from "~/readers/reading";
+import { refuseInScenario } from "./copy-as-scenario.server";
 import { keepOriginal, type Original } from "./original.server";
 import { readOriginal } from "./read-record.server";
 import { StormRefusal } from "./refusal";
@@ -41,7 +42,7 @@ async function addRecord(
 
 /**
  * Brings a file or a paste to a storm that is there.
- * @throws StormRefusal where nothing can be read, before anything is saved
+ * @throws StormRefusal where nothing can be read, or the storm is a scenario, before anything is saved
  */
 export async function startRecord(
   tenant: Tenant,
@@ -50,7 +51,10 @@ export async function startRecord(
   userId: string,
 ): Promise<StormRecord> {
   firstReading(original);
-  return tenant.write((inner) => addRecord(inner, storm, original, userId));
+  return tenant.write(async (inner) => {
+    await refuseInScenario(inner, storm.id);
+    return addRecord(inner, storm, original, userId);
+  });
 }
 
 /**

@@ -18,6 +18,8 @@ interface StormFigureOptions {
   title: string;
   /** m; null where it is not known. */
   windHeight: number | null;
+  /** Where the series are not what was recorded: `as changed for the scenario`. */
+  told?: string;
   /** Shown on a tinted ground. */
   window?: StormWindow | null;
   /** A longer table is left out: it would weigh more than the rest of the page. */
@@ -35,7 +37,7 @@ const DRAWN: readonly ChannelName[] = [
 /** Wind at its own height, rain and heat as recorded, above one time axis; null where there is none of the three. */
 export function stormFigure(
   series: readonly ChannelSeries[],
-  { id, title, windHeight, window, mostTableRows }: StormFigureOptions,
+  { id, title, windHeight, window, mostTableRows, told = "as recorded" }: StormFigureOptions,
   context: FigureContext,
 ): Figure | null {
   const drawn = series.filter(({ channel }) => DRAWN.includes(channel));
@@ -60,7 +62,7 @@ export function stormFigure(
     title,
     caption: caption(
       [
-        `${shown[0].toUpperCase()}${shown.slice(1)}, as recorded.`,
+        `${shown[0].toUpperCase()}${shown.slice(1)}, ${told}.`,
         of("windFrom") && "Arrows point where the wind blows to.",
         window && "The storm's window is tinted.",
         `${periodOf(time, context)}.`,

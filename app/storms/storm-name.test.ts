@@ -21,7 +21,7 @@ describe("a storm without a name", () => {
 
   it("takes the first number that is free", () => {
     expect(freeName("Gale", new Set())).toBe("Gale");
-    expect(freeName("Gale", new Set(["Gale", "Gale 2"]))).toBe("Gale 3");
+    expect(freeName("Gale", new Set(["Gale", "Gale (2)"]))).toBe("Gale (3)");
     expect(freeName("x".repeat(120), new Set(["x".repeat(120)]))).toHaveLength(117);
   });
 

@@ -16,7 +16,7 @@ export function proposeStormName(reading: SeriesReading, zone: string): string {
 export function freeName(wanted: string, taken: ReadonlySet<string>): string {
   if (!taken.has(wanted)) return wanted;
   for (let number = 2; ; number++) {
-    const numbered = `${wanted.slice(0, STORM_NAME_LENGTH - 5)} ${number}`;
+    const numbered = `${wanted.slice(0, STORM_NAME_LENGTH - 7)} (${number})`;
     if (!taken.has(numbered)) return numbered;
   }
 }
@@ -25,9 +25,9 @@ export function freeName(wanted: string, taken: ReadonlySet<string>): string {
  * The name in a form; empty where none was given.
  * @throws StormRefusal for one that is too long
  */
-export function postedName(form: FormData): string {
-  const text = form.get("name");
+export function postedName(form: FormData, field = "name"): string {
+  const text = form.get(field);
   const name = typeof text === "string" ? text.trim() : "";
-  if (name.length > STORM_NAME_LENGTH) throw new StormRefusal(`Use at most ${STORM_NAME_LENGTH} characters.`, "name");
+  if (name.length > STORM_NAME_LENGTH) throw new StormRefusal(`Use at most ${STORM_NAME_LENGTH} characters.`, field);
   return name;
 }

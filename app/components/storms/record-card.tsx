@@ -17,11 +17,13 @@ const ORIGINS = { file: "file", pasted: "pasted rows", constant: "constant" } as
 /** One record of a storm: where it came from, how it was read, and what is in use from it. */
 export function RecordCard({ record, home, zone, mayEdit }: RecordCardProps) {
   const { id, name, origin, state, provenance, inUse, source } = record;
+  const scenario = provenance?.scenario;
   return (
     <article className="min-w-0 border border-hairline p-4">
       <h4 className="break-words font-bold">{name}</h4>
       <p className="text-small text-slate">
-        {ORIGINS[origin]} ·{" "}
+        {ORIGINS[origin]}
+        {scenario && `, taken over from ${scenario.of}`} ·{" "}
         {state === "reading"
           ? "waits for its reading sheet"
           : inUse.length > 0
@@ -35,7 +37,7 @@ export function RecordCard({ record, home, zone, mayEdit }: RecordCardProps) {
         </p>
       )}
       <div className="mt-3 flex flex-wrap items-center gap-2">
-        {mayEdit && origin !== "constant" && (
+        {mayEdit && origin !== "constant" && !scenario && (
           <Link to={`records/${id}`} className={`button ${state === "reading" ? "button-primary" : ""}`}>
             {state === "reading" ? "Look through and confirm" : "Reading sheet"}
           </Link>
@@ -45,7 +47,7 @@ export function RecordCard({ record, home, zone, mayEdit }: RecordCardProps) {
             Original
           </a>
         )}
-        {mayEdit && (
+        {mayEdit && !scenario && (
           <ConfirmButton label="Remove" title={`Remove ${name}?`} fields={{ intent: "remove-record", record: id }}>
             {inUse.length > 0 ? `The storm loses ${inUse.join(", ")}` : "The storm loses nothing that is in use"}
             {source ? ", and the original goes where no other record uses it" : ""}. What this record had replaced is

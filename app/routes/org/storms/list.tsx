@@ -20,11 +20,12 @@ export async function loader({ context, params }: Route.LoaderArgs) {
 }
 
 function present(storm: StormLine, units: UnitChoices, zone: string) {
-  const { id, name, window, peakWind, rainTotal, records, gaps } = storm;
+  const { id, name, window, peakWind, rainTotal, scenarioOf, records, gaps } = storm;
   const waiting = records.filter(({ state }) => state === "reading");
   return {
     id,
     name,
+    scenarioOf,
     window: window && formatPeriod(window.startsAt, window.endsAt, zone),
     peakWind: peakWind && {
       value: formatQuantity(peakWind.value, "windSpeed", units).text,
@@ -90,6 +91,7 @@ function StormRow({ storm }: { storm: Route.ComponentProps["loaderData"]["storms
         <Link to={storm.id} className="font-bold underline">
           {storm.name}
         </Link>
+        {storm.scenarioOf && <span className="block text-small text-quiet">scenario of {storm.scenarioOf}</span>}
       </td>
       <td className="min-w-44">{storm.window ?? "none yet"}</td>
       <td className="min-w-36">

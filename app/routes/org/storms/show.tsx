@@ -1,10 +1,12 @@
 import { Link, redirect } from "react-router";
 import type { Route } from "./+types/show";
 import { ConfirmButton } from "~/components/confirm-button";
+import { FormErrors } from "~/components/field";
 import { EmptyState, PageTitle } from "~/components/page-title";
 import { SectionHeading } from "~/components/section-heading";
 import { AddRecord } from "~/components/storms/add-record";
 import { RecordCard } from "~/components/storms/record-card";
+import { ScenarioForm } from "~/components/storms/scenario-form";
 import { SeriesFigure } from "~/components/storms/series-figure";
 import { StormFacts } from "~/components/storms/storm-facts";
 import { StormSettings } from "~/components/storms/storm-settings";
@@ -16,13 +18,17 @@ import { currentProject } from "~/projects/current-project.server";
 import { config } from "~/services/config.server";
 import { answerRefusal } from "~/storms/answer-refusal.server";
 import { addConstant } from "~/storms/constant-record.server";
+import { copyAsScenario } from "~/storms/copy-as-scenario.server";
 import { presentWind } from "~/storms/present-wind";
 import { postedConstant } from "~/storms/posted-constant";
+import { postedScenario } from "~/storms/posted-scenario";
 import { postedWindow } from "~/storms/posted-window";
 import { originalFrom, receiveForm } from "~/storms/receive-original.server";
+import { WHOLE_FORM } from "~/storms/refusal";
 import { removeRecord, removeStorm } from "~/storms/remove-record.server";
 import { renameStorm } from "~/storms/rename-storm.server";
 import { changeWindow } from "~/storms/set-window.server";
+import { scenarioWords } from "~/storms/scenario";
 import { showStorm } from "~/storms/show-storm.server";
 import { startRecord } from "~/storms/start-record.server";
 import { recordOf, stormOf } from "~/storms/stored-record.server";
@@ -44,6 +50,7 @@ export async function loader({ context, params }: Route.LoaderArgs) {
   const inside = window ? series.map((entry) => withinWindow(entry, window)) : series;
   const summary = window && summariseStorm(series, window);
   const { windHeight } = shown;
+  const scenario = shown.records.find(({ provenance }) => provenance?.scenario)?.provenance?.scenario;
   const sized = (width: number) => ({
     document: serverPlotDocument(),
     zone: project.timeZone,
@@ -53,7 +60,13 @@ export async function loader({ context, params }: Route.LoaderArgs) {
   const draw = (width: number) =>
     stormFigure(
       inside,
-      { id: "storm-series", title: storm.name, windHeight, mostTableRows: MOST_TABLE_ROWS },
+      {
+        id: "storm-series",
+        title: storm.name,
+        windHeight,
+        mostTableRows: MOST_TABLE_ROWS,
+        ...(scenario && { told: "as changed for the scenario" }),
+      },
       sized(width),
     );
   const drawWind = (width: number) =>
@@ -63,6 +76,7 @@ export async function loader({ context, params }: Route.LoaderArgs) {
   const drawTotals = (width: number) =>
     window && totalsFigure(series, window, { mostTableRows: MOST_TABLE_ROWS }, sized(width));
   return {
+    scenario: scenario ? { of: scenario.of, words: scenarioWords(scenario) } : null,
     storm: { id: storm.id, name: storm.name },
     // In full, since a file's link is not the router's: one that is relative would hang on a slash at the end.
     home: `/o/${organisation.slug}/projects/${project.id}`,
@@ -101,6 +115,14 @@ export async function action({ request, context, params }: Route.ActionArgs) {
       case "window":
         await changeWindow(tenant, storm, postedWindow(form, project.timeZone), project.timeZone);
         return redirect(here);
+      case "scenario": {
+        const copy = await copyAsScenario(tenant, storm, {
+          name: postedName(form, "scenarioName"),
+          changes: postedScenario(form),
+          requestedBy: actor.id,
+        });
+        return redirect(`${storms}/${copy.id}`);
+      }
       case "constant":
         await addConstant(tenant, storm, {
           ...postedConstant(form),
@@ -123,7 +145,7 @@ export async function action({ request, context, params }: Route.ActionArgs) {
 }
 
 export default function ShowStorm({ loaderData, actionData }: Route.ComponentProps) {
-  const { storm, home, figure, narrowFigure, wind, totals, records, window, mayEdit, estimates } = loaderData;
+  const { storm, scenario, home, figure, narrowFigure, wind, totals, records, window, mayEdit, estimates } = loaderData;
   const errors = actionData?.errors ?? {};
   const csv = `${home}/storms/${storm.id}/series.csv`;
   return (
@@ -140,6 +162,12 @@ export default function ShowStorm({ loaderData, actionData }: Route.ComponentPro
       >
         {storm.name}
       </PageTitle>
+      {scenario && (
+        <p className="mb-4 max-w-prose text-slate">
+          A scenario of {scenario.of}: {scenario.words}. It keeps the records of that storm, which cannot be changed
+          here; its window can.
+        </p>
+      )}
       {figure ? (
         <>
           <StormFacts {...loaderData} />
@@ -170,13 +198,18 @@ export default function ShowStorm({ loaderData, actionData }: Route.ComponentPro
       </div>
       {mayEdit && (
         <>
-          <AddRecord
-            key={records.length}
-            errors={errors}
-            uploadLimitBytes={loaderData.uploadLimitBytes}
-            hasWindow={window !== null}
-          />
+          {scenario ? (
+            <FormErrors errors={errors[WHOLE_FORM]} />
+          ) : (
+            <AddRecord
+              key={records.length}
+              errors={errors}
+              uploadLimitBytes={loaderData.uploadLimitBytes}
+              hasWindow={window !== null}
+            />
+          )}
           <StormSettings name={storm.name} clock={loaderData.clock} zone={loaderData.zone} errors={errors} />
+          {window && <ScenarioForm key={storm.id} errors={errors} />}
           <div className="mt-10 border-t border-hairline pt-4">
             <ConfirmButton label="Remove the storm" title={`Remove ${storm.name}?`} fields={{ intent: "remove-storm" }}>
               Its records and series go with it, their original files where no other storm uses them, and{" "}
