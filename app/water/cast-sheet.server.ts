@@ -68,6 +68,11 @@ export async function castSheet(
   };
 }
 
+/** The questions as they stand on the sheet now. */
+export async function castQuestions(tenant: Tenant, cast: Cast): Promise<CastReading["questions"]> {
+  return (await readStoredCast(tenant, cast)).questions;
+}
+
 function sourceOf(name: string, { time, latitude, longitude }: CastReading, zone: string): string {
   const where = latitude === null || longitude === null ? "" : ` at ${formatPosition([longitude, latitude])}`;
   const when = time === null ? "" : ` of ${formatTime(time, zone)}`;

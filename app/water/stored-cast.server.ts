@@ -4,11 +4,15 @@ import { fromBlob } from "~/db/typed-array.server";
 import type { CastAnswers, CastReading } from "~/readers/casts/cast-reading";
 import { readCast } from "~/readers/casts/read-cast";
 import { UnreadableFile } from "~/readers/reading";
+import { Recent } from "~/estimates/recent";
 import { notFound } from "~/services/guard.server";
 import { keepOriginal, type Original } from "~/storms/original.server";
 import { StormRefusal } from "~/storms/refusal";
 import type { CastLevels } from "./describe-cast";
 import type { SalinityScale } from "./water-density";
+
+/** A reading is a pure function of its key, so that it never goes stale; a sheet asks for the same one several times. */
+const recent = new Recent<CastReading>(4);
 
 const LEVELS = ["depth", "temperature", "salinity"] as const satisfies (keyof Cast)[];
 
@@ -69,8 +73,13 @@ export async function readStoredCast(
   cast: Cast,
   answers: CastAnswers = cast.answers,
 ): Promise<CastReading> {
+  const key = JSON.stringify([tenant.organisationId, cast.sourceFileId, cast.name, answers]);
+  const known = recent.get(key);
+  if (known) return known;
   const source = (await tenant.sourceFiles.find(cast.sourceFileId)) ?? notFound();
-  return readOriginal({ bytes: source.bytes, name: cast.name }, answers);
+  const reading = readOriginal({ bytes: source.bytes, name: cast.name }, answers);
+  recent.set(key, reading);
+  return reading;
 }
 
 /** The levels of a confirmed cast. */

@@ -21,7 +21,7 @@ interface Given {
 }
 
 /** Reads as the upload of each kind does, with the reader's own best answers. */
-const READERS: Record<FileKind, (given: Given) => unknown> = {
+const READERS: Record<FileKind, (given: Given) => { understood: string[] }> = {
   series: ({ bytes, fileName, zone, at }) =>
     summaryOfReading(
       readSeries({
@@ -58,7 +58,9 @@ export async function read(args: string[]): Promise<number> {
   const fileName = basename(asked.file);
   const kind = asked.kind ?? kindOfFile(bytes, fileName);
   try {
-    print(READERS[kind]({ bytes, fileName, zone: asked.zone, at: asked.at }));
+    const summary = READERS[kind]({ bytes, fileName, zone: asked.zone, at: asked.at });
+    const told = asked.kind === undefined && kind !== "series" ? [`Kind: ${kind} (by content)`] : [];
+    print({ ...summary, understood: [...told, ...summary.understood] });
     return 0;
   } catch (error) {
     if (!(error instanceof UnreadableFile)) throw error;

@@ -1,12 +1,24 @@
 import { Field } from "~/components/field";
 import type { CastQuestion } from "~/readers/casts/cast-reading";
 
-const LABELS: Record<CastQuestion["key"], { label: string; unit?: string }> = {
-  half: { label: "Way down or way up" },
-  latitude: { label: "Latitude of the cast", unit: "°" },
-  salinityScale: { label: "Kind of salinity" },
-  temperatureScale: { label: "Scale of temperature" },
-};
+function labelOf(key: CastQuestion["key"]): string {
+  switch (key) {
+    case "cast":
+      return "Which cast";
+    case "half":
+      return "Way down or way up";
+    case "latitude":
+      return "Latitude of the cast";
+    case "salinityScale":
+      return "Kind of salinity";
+    case "temperatureScale":
+      return "Scale of temperature";
+    default: {
+      const [kind, channel] = key.split("-");
+      return `${kind === "column" ? "Column" : "Unit"} of the ${channel}`;
+    }
+  }
+}
 
 interface CastQuestionFieldProps {
   question: CastQuestion;
@@ -16,11 +28,17 @@ interface CastQuestionFieldProps {
 /** One question of a cast's sheet with the control that answers it. An empty field stands for "as read". */
 export function CastQuestionField({ question, errors }: CastQuestionFieldProps) {
   const { key, needed, message, options, suggestion, answer } = question;
-  const { label, unit } = LABELS[key];
   const suggested = options?.find(({ value }) => value === suggestion)?.label ?? suggestion;
   const asRead = !needed && suggested !== undefined && `${suggested}`;
   return (
-    <Field id={`answer-${key}`} label={label} unit={unit} optional={!needed} hint={message} errors={errors}>
+    <Field
+      id={`answer-${key}`}
+      label={labelOf(key)}
+      unit={key === "latitude" ? "°" : undefined}
+      optional={!needed}
+      hint={message}
+      errors={errors}
+    >
       {(described) =>
         options ? (
           <select {...described} name={key} defaultValue={answer ?? ""} className="input">

@@ -2,7 +2,8 @@
 export interface CastHalves {
   downStart: number;
   turn: number;
-  /** Whether enough records come up to be a cast of their own. */
+  /** Whether enough records go down, and come up, to be a cast of their own; at least one is true. */
+  hasDowncast: boolean;
   hasUpcast: boolean;
 }
 
@@ -28,8 +29,11 @@ export function castHalves(pressure: Float64Array): CastHalves {
   while (downStart > 0 && pressure[downStart - 1] <= pressure[downStart] && pressure[downStart - 1] >= shallowest)
     downStart -= 1;
   const upward = pressure.subarray(turn + 1).filter(Number.isFinite);
-  const range = upward.length < FEWEST ? 0 : pressure[turn] - Math.min(...upward);
-  return { downStart, turn, hasUpcast: range > 0.5 * (pressure[turn] - shallowest) };
+  const uppermost = upward.reduce((least, value) => Math.min(least, value), Infinity);
+  const range = upward.length < FEWEST ? 0 : pressure[turn] - uppermost;
+  // A file that begins at the bottom has no way down to compare with.
+  const lowered = turn - downStart < FEWEST ? 0 : pressure[turn] - shallowest;
+  return { downStart, turn, hasDowncast: lowered > 0 || range === 0, hasUpcast: range > 0.5 * lowered };
 }
 
 /** Records whose pressure exceeds all before them: reversals in a swell are passed over. */

@@ -10,6 +10,9 @@ export const CAST_CHANNELS = {
 export type CastChannel = keyof typeof CAST_CHANNELS;
 export const CAST_CHANNEL_NAMES = Object.keys(CAST_CHANNELS) as CastChannel[];
 
+export type SalinityKind = "practical" | "absolute";
+export type TemperatureScale = "ITS-90" | "IPTS-68";
+
 /** One depth of a cast. */
 export interface CastSample {
   /** m, positive down */
@@ -23,22 +26,37 @@ export interface CastSample {
 }
 
 export interface CastQuestion {
-  /** The key of `CastAnswers` that settles it. */
-  key: "half" | "latitude" | "salinityScale" | "temperatureScale";
+  /** What of `CastAnswers` settles it; of columns and units, which channel's. */
+  key:
+    | "cast"
+    | "half"
+    | "latitude"
+    | "salinityScale"
+    | "temperatureScale"
+    | `column-${CastChannel}`
+    | `unit-${CastChannel}`;
+  /** False once answered, and where the reader is sure enough: the question stays so that the answer can be changed. */
   needed: boolean;
   message: string;
   options?: { value: string; label: string }[];
+  /** What the reading goes by until it is answered. */
   suggestion?: string;
   answer?: string;
 }
 
 /** Answers a person gave. All optional; JSON. */
 export interface CastAnswers {
+  /** Which of several casts in the file, by its label. */
+  cast?: string;
   half?: "down" | "up";
   /** Degrees north, for depth from pressure. */
   latitude?: number;
-  salinityScale?: "practical" | "absolute";
-  temperatureScale?: "ITS-90" | "IPTS-68";
+  salinityScale?: SalinityKind;
+  temperatureScale?: TemperatureScale;
+  /** Index of a channel's column, from 0; null for none. */
+  columns?: Partial<Record<CastChannel, number | null>>;
+  /** Ids of units, as in the question's options. */
+  units?: Partial<Record<CastChannel, string>>;
 }
 
 /** A channel over all records of the file, in the unit of `CAST_CHANNELS`. */
@@ -61,14 +79,14 @@ export interface CastReading {
   format: string;
   formatLabel: string;
   fileName: string;
-  /** Records of the file. */
+  /** Records of the cast. */
   rows: number;
   /** ISO UTC; null where the file does not say. */
   time: string | null;
   latitude: number | null;
   longitude: number | null;
   channels: Partial<Record<CastChannel, CastChannelReading>>;
-  salinityScale: "practical" | "absolute";
+  salinityScale: SalinityKind;
   /** The half that was chosen: from the surface down, depth ascending, each depth once. */
   samples: CastSample[];
   half: "down" | "up";
@@ -78,3 +96,9 @@ export interface CastReading {
   /** Names of columns that are not used. */
   leftOut: string[];
 }
+
+/** What one table of a file gives, before the file's own facts are added. */
+export type TableReading = Pick<
+  CastReading,
+  "channels" | "salinityScale" | "samples" | "half" | "understood" | "questions"
+>;

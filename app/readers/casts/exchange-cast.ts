@@ -1,52 +1,61 @@
 import type { SourceFile } from "../source-file";
-import type { CastTable } from "./cast-table";
+import { PLAIN_TABLE, type CastTable } from "./cast-table";
+
+const FIRST_LINE = /^\uFEFF?CTD,\d{8}/;
 
 /** Whether the first line is that of an exchange file: `CTD,` and a date stamp. */
 export function isExchangeCast(source: SourceFile): boolean {
-  return /^\uFEFF?CTD,\d{8}/.test(source.lines[0] ?? "");
+  return FIRST_LINE.test(source.lines[0] ?? "");
 }
 
 /**
- * Takes an exchange file of one cast apart: remarks, a header of keys, names, units, values with quality flags, END_DATA.
- * Source: WHP-Exchange format description, "CTD profiles"; flags 3 questionable, 4 bad, 5 not reported, 9 not sampled.
+ * Takes an exchange file apart: remarks, a header of keys, names, units, values with quality flags, END_DATA; then, where
+ * files were joined, the next cast.
+ * Source: WHP-Exchange format description, "CTD profiles": flags 2 good, 3 questionable, 4 bad, 5 not reported, 9 not
+ * sampled, −999 missing (from memory).
  */
-export function exchangeTable(source: SourceFile): CastTable {
+export function exchangeTables(source: SourceFile): CastTable[] {
+  const starts = source.lines.flatMap((line, index) => (FIRST_LINE.test(line) ? [index] : []));
+  return starts.map((start, k) => exchangeTable(source.lines.slice(start, starts[k + 1]), start));
+}
+
+function exchangeTable(all: readonly string[], start: number): CastTable {
   const keys = new Map<string, string>();
   let line = 1;
-  for (; line < source.lines.length; line += 1) {
-    const text = source.lines[line] ?? "";
+  for (; line < all.length; line += 1) {
+    const text = all[line] ?? "";
     if (text.startsWith("#")) continue;
     const pair = /^\s*([A-Z_]+)\s*=\s*(.*?)\s*$/.exec(text);
     if (!pair) break;
     keys.set(pair[1], pair[2]);
   }
   const cells = (text: string) => text.split(",").map((cell) => cell.trim());
-  const named = cells(source.lines[line] ?? "");
+  const names = cells(all[line] ?? "");
   // A trailing comma makes a last column without a name.
-  while (named.at(-1) === "") named.pop();
-  const units = cells(source.lines[line + 1] ?? "");
+  while (names.at(-1) === "") names.pop();
+  const units = cells(all[line + 1] ?? "");
   const rows: string[][] = [];
   const lines: number[] = [];
-  for (let at = line + 2; at < source.lines.length; at += 1) {
-    const text = source.lines[at] ?? "";
+  for (let at = line + 2; at < all.length; at += 1) {
+    const text = all[at] ?? "";
     if (text.startsWith("END_DATA")) break;
     if (text.trim() === "" || text.startsWith("#")) continue;
     rows.push(cells(text));
-    lines.push(at + 1);
+    lines.push(start + at + 1);
   }
-  const flagOf = new Map<number, number>();
-  named.forEach((name, index) => {
-    const flag = named.indexOf(`${name}_FLAG_W`);
-    if (flag >= 0) flagOf.set(index, flag);
-  });
+  const flags = names.map((name) => names.indexOf(`${name}_FLAG_W`));
+  const cast = keys.get("CASTNO");
   return {
-    names: named,
-    units: named.map((_, index) => units[index] ?? null),
+    ...PLAIN_TABLE,
+    label: `station ${keys.get("STNNBR") ?? "not told"}${cast === undefined ? "" : `, cast ${cast}`}`,
+    names,
+    units: names.map((_, index) => units[index] || null),
     rows,
     lines,
     missing: [-999],
-    flagOf,
+    flagOf: new Map(flags.flatMap((flag, index) => (flag < 0 ? [] : [[index, flag]]))),
     badFlags: ["4", "5", "9"],
+    doubtfulFlags: ["3"],
     time: timeOf(keys.get("DATE"), keys.get("TIME")),
     latitude: numberOrNull(keys.get("LATITUDE")),
     longitude: numberOrNull(keys.get("LONGITUDE")),

@@ -1,5 +1,7 @@
 import type { SourceFile } from "../source-file";
-import type { CastTable } from "./cast-table";
+import { PLAIN_TABLE, type CastTable } from "./cast-table";
+
+const USUAL_BAD = -9.99e-29;
 
 /** Whether the text has the header of an instrument's own ASCII: lines of `*` and `#` with numbered names. */
 export function isInstrumentCast(source: SourceFile): boolean {
@@ -8,15 +10,18 @@ export function isInstrumentCast(source: SourceFile): boolean {
 }
 
 /**
- * Takes an instrument's ASCII apart: numbered names with units in brackets, a flag for bad values, position and time.
+ * Takes an instrument's ASCII apart: numbered names with units in brackets, a flag for bad values and, in a column
+ * `flag`, for bad records, position and time.
  * Source: manual of the instrument's processing software, "data file formats" (from memory).
  */
-export function instrumentTable(source: SourceFile): CastTable {
+export function instrumentTables(source: SourceFile): CastTable[] {
   const names: string[] = [];
   const units: (string | null)[] = [];
-  let bad = -9.99e-29;
+  let bad = USUAL_BAD;
   let end = source.lines.length;
-  let [latitude, longitude, time]: [number | null, number | null, string | null] = [null, null, null];
+  let latitude: number | null = null;
+  let longitude: number | null = null;
+  let [satelliteTime, clockTime]: (string | null)[] = [null, null];
   for (const [index, line] of source.lines.entries()) {
     if (/^\*END\*/.test(line)) {
       end = index + 1;
@@ -30,9 +35,8 @@ export function instrumentTable(source: SourceFile): CastTable {
     bad = Number(/^#\s*bad_flag\s*=\s*(\S+)/.exec(line)?.[1] ?? bad);
     latitude ??= degreesOf(/^\*.*\blatitude\s*=\s*(.*)$/i.exec(line)?.[1]);
     longitude ??= degreesOf(/^\*.*\blongitude\s*=\s*(.*)$/i.exec(line)?.[1]);
-    time ??= timeOf(
-      /^\*.*\bUTC \(Time\)\s*=\s*(.*)$/.exec(line)?.[1] ?? /^#\s*start_time\s*=\s*([^[]*)/.exec(line)?.[1],
-    );
+    satelliteTime ??= timeOf(/^\*.*\bUTC \(Time\)\s*=\s*(.*)$/.exec(line)?.[1]);
+    clockTime ??= timeOf(/^#\s*start_time\s*=\s*([^[]*)/.exec(line)?.[1]);
   }
   const rows: string[][] = [];
   const lines: number[] = [];
@@ -43,18 +47,24 @@ export function instrumentTable(source: SourceFile): CastTable {
     lines.push(at + 1);
   }
   const filled = Array.from(names, (name, index) => name ?? `column ${index + 1}`);
-  return {
-    names: filled,
-    units: filled.map((name, index) => units[index] ?? /^c0(.*)$/.exec(name)?.[1] ?? null),
-    rows,
-    lines,
-    missing: [bad, -9.99e-29],
-    flagOf: new Map(),
-    badFlags: [],
-    time,
-    latitude,
-    longitude,
-  };
+  const flag = filled.indexOf("flag");
+  return [
+    {
+      ...PLAIN_TABLE,
+      label: "the file's cast",
+      names: filled,
+      units: filled.map((name, index) => units[index] ?? /^c[01](.*)$/.exec(name)?.[1] ?? null),
+      rows,
+      lines,
+      missing: [bad, USUAL_BAD],
+      isBadRow: (cells) => flag >= 0 && Number(cells[flag]) === bad,
+      time: satelliteTime ?? clockTime,
+      // The clock of the instrument or of the computer beside it.
+      timeConfidence: satelliteTime === null ? "assumed" : "stated in the file",
+      latitude,
+      longitude,
+    },
+  ];
 }
 
 /** `02 00.07 S`, `02 00 04 S` or decimal degrees. */

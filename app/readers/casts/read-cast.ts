@@ -1,46 +1,40 @@
-import { depthFromPressure } from "~/ocean/seawater/depth-from-pressure";
-import { salinityFromConductivity } from "~/ocean/seawater/practical-salinity";
-import { pressureFromDepth } from "~/ocean/seawater/pressure-from-depth";
 import { ProblemList } from "../problem-list";
 import { UnreadableFile, type Understood } from "../reading";
-import { exactSum } from "../series-statistics";
 import { openText, type SourceFile } from "../source-file";
 import { castColumns, type CastColumn } from "./cast-columns";
-import { castHalves, monotone } from "./cast-halves";
-import {
-  CAST_CHANNELS,
-  type CastAnswers,
-  type CastChannel,
-  type CastChannelReading,
-  type CastQuestion,
-  type CastReading,
-  type CastSample,
-} from "./cast-reading";
+import { castDepths } from "./cast-depths";
+import { castHalves, type CastHalves } from "./cast-halves";
+import { lackingOf, unusable } from "./cast-lacking";
+import { castQuestion, columnQuestions } from "./cast-questions";
+import type { CastAnswers, CastChannel, CastQuestion, CastReading, TableReading } from "./cast-reading";
+import { castSalinity } from "./cast-salinity";
+import { castSamples } from "./cast-samples";
+import { castStatistics } from "./cast-statistics";
 import type { CastTable } from "./cast-table";
-import { exchangeTable, isExchangeCast } from "./exchange-cast";
-import { instrumentTable, isInstrumentCast } from "./instrument-cast";
-import { isPlainCast, plainTable } from "./plain-cast";
+import { onScaleOf1990 } from "./cast-temperature";
+import { numbersIn, valuesOf } from "./cast-values";
+import { exchangeTables, isExchangeCast } from "./exchange-cast";
+import { instrumentTables, isInstrumentCast } from "./instrument-cast";
+import { isPlainCast, plainTables } from "./plain-cast";
 
 interface CastForm {
   id: string;
   label: string;
   recognises: (source: SourceFile) => boolean;
-  table: (source: SourceFile, problems: ProblemList) => CastTable | null;
+  tables: (source: SourceFile, problems: ProblemList) => CastTable[];
 }
 
+const PLAIN: CastForm = { id: "castPlain", label: "delimited cast", recognises: isPlainCast, tables: plainTables };
 const FORMS: readonly CastForm[] = [
-  { id: "castExchange", label: "exchange file of one cast", recognises: isExchangeCast, table: exchangeTable },
-  { id: "castInstrument", label: "instrument's ASCII file", recognises: isInstrumentCast, table: instrumentTable },
-  { id: "castPlain", label: "delimited cast", recognises: () => true, table: plainTable },
+  { id: "castExchange", label: "exchange file", recognises: isExchangeCast, tables: exchangeTables },
+  { id: "castInstrument", label: "instrument's ASCII file", recognises: isInstrumentCast, tables: instrumentTables },
+  PLAIN,
 ];
 
 /** Whether a text is unmistakably a cast: a form of its own, or a table of salt and heat by depth without a time. */
 export function isCastText(source: SourceFile): boolean {
-  return isExchangeCast(source) || isInstrumentCast(source) || isPlainCast(source);
+  return FORMS.some(({ recognises }) => recognises(source));
 }
-
-/** Latitude for depth where the file tells none, degrees: the pole and the equator differ from it by 0.3 %. */
-const ASSUMED_LATITUDE = 45;
 
 /**
  * Reads a cast: temperature and salinity down the water, whatever the file measures depth and salt by.
@@ -51,76 +45,16 @@ const ASSUMED_LATITUDE = 45;
 export function readCast(input: { bytes: Uint8Array; fileName: string; answers?: CastAnswers }): CastReading {
   const { bytes, fileName, answers = {} } = input;
   const problems = new ProblemList();
-  const refuse = (code: string, what: string, toDo: string): never => {
-    problems.add("error", code, what, toDo);
-    throw new UnreadableFile(problems.toArray());
-  };
   const source = openText(bytes, fileName, problems);
   if (!source) throw new UnreadableFile(problems.toArray());
-  const form = FORMS.find(({ recognises }) => recognises(source)) ?? FORMS[FORMS.length - 1];
-  const table = form.table(source, problems);
-  if (!table) {
-    return refuse(
-      "noCast",
-      `“${fileName}” has no line of column names with a depth or pressure and a temperature`,
-      "Name the columns, as `depth (m),temperature (°C),salinity`.",
-    );
-  }
-  const columns = castColumns(table.names, table.units);
-  const values = new Map(columns.map((column) => [column.channel, valuesOf(table, column, problems)]));
-  if (table.rows.length === 0)
-    return refuse("onlyHeader", `“${fileName}” has names but no records`, "Give the whole file.");
-  const temperature = values.get("temperature");
-  if (!temperature || !(values.has("pressure") || values.has("depth"))) {
-    return refuse(
-      "noCast",
-      `“${fileName}” has no ${temperature ? "depth or pressure" : "temperature"}; columns seen: ${table.names.join(", ").slice(0, 300)}`,
-      "Give a cast with depth or pressure, temperature, and salinity or conductivity.",
-    );
-  }
-  const understood: Understood[] = [
-    { what: "Format", taken: form.label, confidence: "by content" },
-    ...columns.map((column): Understood => {
-      const confidence = column.stated ? "stated in the file" : "assumed";
-      return { what: column.channel, taken: `“${column.name}” in ${column.unit}`, confidence };
-    }),
-  ];
-  const questions: CastQuestion[] = [];
-  if (answers.temperatureScale === "IPTS-68") {
-    temperature.forEach((t68, k) => (temperature[k] = t68 / 1.00024));
-    understood.push({ what: "Temperature scale", taken: "IPTS-68, turned to ITS-90", confidence: "answered" });
-  }
-  const told = table.latitude !== null && Math.abs(table.latitude) <= 90 ? table.latitude : null;
-  const latitude = answers.latitude ?? told ?? ASSUMED_LATITUDE;
-  const { pressure, depth } = depths(values, latitude);
-  if (!values.has("depth") && told === null) questions.push(latitudeQuestion(answers));
-  const salt = saltOf(values, temperature, pressure, answers, columns);
-  if (salt.note) understood.push(salt.note);
-  if (salt.question) questions.push(salt.question);
-  const halves = castHalves(pressure);
-  const half = answers.half ?? "down";
-  if (halves.hasUpcast) questions.push(halfQuestion(half, answers));
-  const order =
-    half === "down" ? range(halves.downStart, halves.turn) : range(halves.turn, pressure.length - 1).reverse();
-  const samples = samplesOf(monotone(order, pressure), { pressure, depth, temperature, salinity: salt.values });
-  if (halves.downStart > 0 && half === "down") {
-    understood.push({
-      what: "Soak at the surface",
-      taken: `the first ${halves.downStart} records are left out`,
-      confidence: "by content",
-    });
-  }
-  if (salt.values === null) {
-    problems.add(
-      "error",
-      "noSalinity",
-      "the cast has neither salinity nor conductivity",
-      "Give a cast with one of the two.",
-    );
-  } else if (samples.length < 2) {
-    problems.add("error", "tooShort", "fewer than two depths can be used", "Give a cast of the whole water.");
-  }
-  const channels = describe(values, pressure, depth, salt);
+  const form = FORMS.find(({ recognises }) => recognises(source)) ?? PLAIN;
+  const tables = form.tables(source, problems);
+  const table = tables.find(({ label }) => label === answers.cast) ?? tables.at(0);
+  const columns = table ? castColumns(table, (index) => numbersIn(table, index), answers) : [];
+  if (!table || columns.length === 0) return refuseNames(fileName, table, problems);
+  if (table.rows.length === 0) return refuse(problems, "onlyHeader", `“${fileName}” has names but no records`);
+  const reading = readTable(table, columns, answers, problems);
+  const several = castQuestion(tables, table, answers);
   return {
     kind: "cast",
     format: form.id,
@@ -128,191 +62,140 @@ export function readCast(input: { bytes: Uint8Array; fileName: string; answers?:
     fileName,
     rows: table.rows.length,
     time: table.time,
-    latitude: told,
+    latitude: latitudeOf(table),
     longitude: table.longitude,
-    channels: channels(columns),
-    salinityScale: salt.scale,
-    samples,
-    half,
-    understood,
-    questions,
+    ...reading,
+    understood: [{ what: "Format", taken: form.label, confidence: "by content" }, ...reading.understood],
+    questions: [...(several ? [several] : []), ...reading.questions],
     problems: problems.toArray(),
     leftOut: table.names.filter((_, index) => !columns.some((column) => column.index === index)),
   };
 }
 
-function valuesOf(table: CastTable, column: CastColumn, problems: ProblemList): Float64Array {
-  const flag = table.flagOf.get(column.index);
-  return Float64Array.from(table.rows, (cells, k) => {
-    const text = cells[column.index]?.trim() ?? "";
-    const value = text === "" || /^nan$/i.test(text) ? NaN : Number(text);
-    const missing =
-      Number.isNaN(value) || table.missing.some((code) => Math.abs(value - code) <= 1e-9 * Math.abs(code));
-    if (text !== "" && Number.isNaN(value) && !/^(?:nan|na|n\/a|-)$/i.test(text)) {
-      problems.add("error", "unreadableNumber", `“${text.slice(0, 30)}” is no number`, "Correct it in the file.", {
-        row: table.lines[k] ?? 0,
-        column: column.name,
-      });
-    }
-    if (missing) return NaN;
-    if (flag !== undefined && table.badFlags.includes(cells[flag]?.trim() ?? "")) {
-      problems.add("note", "flaggedBad", "values that the file flags as bad", "They were left out.", {
-        row: table.lines[k] ?? 0,
-        column: column.name,
-      });
-      return NaN;
-    }
-    return (value - column.zero) * column.factor;
-  });
+function refuse(problems: ProblemList, code: string, what: string): never {
+  problems.add("error", code, what, "Give the whole file.");
+  throw new UnreadableFile(problems.toArray());
 }
 
-/** Pressure and depth, each from the other where the file has one alone. In the air both are 0. */
-function depths(values: ReadonlyMap<CastChannel, Float64Array>, latitude: number) {
-  const [pressure, depth] = [values.get("pressure"), values.get("depth")];
-  const wet = (value: number) => Math.max(0, value);
-  return {
-    pressure:
-      pressure ??
-      (depth ?? new Float64Array()).map((d) => (Number.isNaN(d) ? NaN : pressureFromDepth(wet(d), latitude))),
-    depth:
-      depth ??
-      (pressure ?? new Float64Array()).map((p) => (Number.isNaN(p) ? NaN : depthFromPressure(wet(p), latitude))),
-  };
+function refuseNames(fileName: string, table: CastTable | undefined, problems: ProblemList): never {
+  const seen = table ? `; columns seen: ${table.names.join(", ").slice(0, 300)}` : "";
+  problems.add(
+    "error",
+    "noCast",
+    `“${fileName}” has no line of column names with a depth or pressure and a temperature${seen}`,
+    "Name the columns, as `depth (m),temperature (°C),salinity`.",
+  );
+  throw new UnreadableFile(problems.toArray());
 }
 
-interface Salt {
-  /** Null where the file has neither salinity nor conductivity. */
-  values: Float64Array | null;
-  scale: "practical" | "absolute";
-  from: string;
-  note: Understood | null;
-  question: CastQuestion | null;
+function latitudeOf({ latitude }: CastTable): number | null {
+  return latitude !== null && Math.abs(latitude) <= 90 ? latitude : null;
 }
 
-function saltOf(
-  values: ReadonlyMap<CastChannel, Float64Array>,
-  temperature: Float64Array,
-  pressure: Float64Array,
-  answers: CastAnswers,
+function readTable(
+  table: CastTable,
   columns: readonly CastColumn[],
-): Salt {
-  const given = values.get("salinity");
-  const conductivity = values.get("conductivity");
-  if (given) {
-    const name = columns.find(({ channel }) => channel === "salinity")?.name ?? "salinity";
-    const absolute = /absolute|^sa$/i.test(name);
-    const scale = answers.salinityScale ?? (absolute ? "absolute" : "practical");
-    return {
-      values: given,
-      scale,
-      from: name,
-      note: null,
-      question: {
-        key: "salinityScale",
-        needed: false,
-        message: "Is the salinity Practical (PSS-78) or Absolute (g/kg)?",
-        options: [
-          { value: "practical", label: "Practical Salinity" },
-          { value: "absolute", label: "Absolute Salinity, g/kg" },
-        ],
-        suggestion: scale,
-        ...(answers.salinityScale && { answer: answers.salinityScale }),
-      },
-    };
+  answers: CastAnswers,
+  problems: ProblemList,
+): TableReading {
+  const columnOf = (channel: CastChannel) => columns.find((column) => column.channel === channel);
+  const unitText = (channel: CastChannel) => table.units[columnOf(channel)?.index ?? -1] ?? null;
+  const values = new Map(columns.map((column) => [column.channel, valuesOf(table, column, problems)]));
+  const understood = [...headerNotes(table), ...columns.map(columnNote)];
+  const questions = columnQuestions(columns, table, answers);
+
+  const temperatureColumn = columnOf("temperature");
+  let temperature: Float64Array = new Float64Array(table.rows.length).fill(NaN);
+  if (temperatureColumn) {
+    const written = values.get("temperature") ?? temperature;
+    const scaled = onScaleOf1990(written, temperatureColumn.name, unitText("temperature"), answers);
+    temperature = scaled.values;
+    values.set("temperature", temperature);
+    understood.push(scaled.note);
+    questions.push(scaled.question);
   }
-  if (!conductivity) return { values: null, scale: "practical", from: "", note: null, question: null };
+  const depths = castDepths(values, latitudeOf(table), answers);
+  const { pressure, depth } = depths;
+  const salt = castSalinity(values, temperature, pressure, columnOf("salinity"), unitText("salinity"), answers);
+  understood.push(...depths.notes, ...(salt.note ? [salt.note] : []));
+  questions.push(...[depths.question, salt.question].filter((question) => question !== null));
+
+  const lacking = lackingOf(columns);
+  if (lacking.length > 0) {
+    return unusable(lacking, table, { answers, problems, understood, questions, values });
+  }
+  const halves = castHalves(pressure);
+  const half = answers.half ?? (halves.hasDowncast ? "down" : "up");
+  if (halves.hasUpcast) questions.push(halfQuestion(half, halves, answers));
+  if (half === "down" && halves.downStart > 0) {
+    const taken = `the first ${halves.downStart} records are left out`;
+    understood.push({ what: "Soak at the surface", taken, confidence: "by content" });
+  }
+  const profiles = { pressure, depth, temperature, salinity: salt.values };
+  const samples = castSamples(orderOf(half, halves, pressure.length), profiles, understood);
+  if (samples.length < 2) {
+    problems.add("error", "tooShort", "fewer than two depths can be used", "Give a cast of the whole water.");
+  }
+  for (const [channel, list] of [
+    ["pressure", pressure],
+    ["depth", depth],
+    ["salinity", salt.values],
+  ] as const) {
+    if (list) values.set(channel, list);
+  }
+  const derived = {
+    pressure: "depth, after Saunders (1981)",
+    depth: "pressure, after Saunders (1981)",
+    salinity: salt.derivedFrom,
+  };
   return {
-    values: conductivity.map((C, k) =>
-      C > 0 && Number.isFinite(temperature[k]) && Number.isFinite(pressure[k])
-        ? salinityFromConductivity(C, temperature[k], Math.max(0, pressure[k]))
-        : NaN,
-    ),
-    scale: "practical",
-    from: "conductivity, by PSS-78",
-    note: {
-      what: "salinity",
-      taken: "from conductivity, by the Practical Salinity Scale of 1978",
-      confidence: "by content",
-    },
-    question: null,
+    channels: describe(values, columns, derived),
+    salinityScale: salt.scale,
+    samples,
+    half,
+    understood,
+    questions,
   };
 }
 
-function range(from: number, to: number): number[] {
-  return Array.from({ length: Math.max(0, to - from + 1) }, (_, k) => from + k);
+function headerNotes({ time, timeConfidence }: CastTable): Understood[] {
+  if (time === null || timeConfidence === "stated in the file") return [];
+  return [
+    { what: "Time", taken: "by the clock of the instrument or its computer, for UTC", confidence: timeConfidence },
+  ];
 }
 
-interface Profiles {
-  pressure: Float64Array;
-  depth: Float64Array;
-  temperature: Float64Array;
-  salinity: Float64Array | null;
+function columnNote({ channel, name, unit, confidence, unitConfidence }: CastColumn): Understood {
+  const sure = confidence === "by name" ? unitConfidence : confidence;
+  return { what: channel, taken: channel === "salinity" ? `“${name}”` : `“${name}” in ${unit.id}`, confidence: sure };
 }
 
-function samplesOf(order: readonly number[], { pressure, depth, temperature, salinity }: Profiles): CastSample[] {
-  return order.flatMap((k) => {
-    const sample = {
-      depth: Math.max(0, depth[k]),
-      pressure: Math.max(0, pressure[k]),
-      temperature: temperature[k],
-      salinity: salinity?.[k] ?? NaN,
-    };
-    return Object.values(sample).every(Number.isFinite) ? [sample] : [];
-  });
+function orderOf(half: "down" | "up", { downStart, turn }: CastHalves, length: number): number[] {
+  return half === "down"
+    ? Array.from({ length: turn - downStart + 1 }, (_, k) => downStart + k)
+    : Array.from({ length: length - turn }, (_, k) => length - 1 - k);
 }
 
 function describe(
   values: ReadonlyMap<CastChannel, Float64Array>,
-  pressure: Float64Array,
-  depth: Float64Array,
-  salt: Salt,
-): (columns: readonly CastColumn[]) => CastReading["channels"] {
-  const all = new Map<CastChannel, Float64Array>([...values, ["pressure", pressure], ["depth", depth]]);
-  if (salt.values) all.set("salinity", salt.values);
-  const derived: Partial<Record<CastChannel, string>> = {
-    pressure: "depth, after Saunders (1981)",
-    depth: "pressure, after Saunders (1981)",
-    salinity: salt.from,
-  };
-  return (columns) =>
-    Object.fromEntries(
-      [...all].map(([channel, list]): [CastChannel, CastChannelReading] => {
-        const name = columns.find((column) => column.channel === channel)?.name;
-        return [channel, statisticsOf(channel, list, name ?? derived[channel] ?? "")];
-      }),
-    );
+  columns: readonly CastColumn[],
+  derived: Partial<Record<CastChannel, string | null>>,
+): CastReading["channels"] {
+  return Object.fromEntries(
+    [...values].map(([channel, list]) => {
+      const name = columns.find((column) => column.channel === channel)?.name;
+      return [channel, castStatistics(channel, list, name ?? derived[channel] ?? "")];
+    }),
+  );
 }
 
-function statisticsOf(channel: CastChannel, values: Float64Array, from: string): CastChannelReading {
-  const present = values.filter((value) => !Number.isNaN(value));
-  const some = present.length > 0;
-  return {
-    unit: CAST_CHANNELS[channel],
-    values,
-    count: present.length,
-    missing: values.length - present.length,
-    mean: some ? exactSum(present) / present.length : null,
-    min: some ? present.reduce((least, value) => Math.min(least, value), Infinity) : null,
-    max: some ? present.reduce((most, value) => Math.max(most, value), -Infinity) : null,
-    from,
-  };
-}
-
-function latitudeQuestion({ latitude }: CastAnswers): CastQuestion {
-  return {
-    key: "latitude",
-    needed: false,
-    message: `At which latitude was it taken? Depth follows from pressure by it; without one, ${ASSUMED_LATITUDE}° is assumed, within 0.3 %.`,
-    suggestion: String(ASSUMED_LATITUDE),
-    ...(latitude !== undefined && { answer: String(latitude) }),
-  };
-}
-
-function halfQuestion(half: "down" | "up", answers: CastAnswers): CastQuestion {
+function halfQuestion(half: "down" | "up", { hasDowncast }: CastHalves, answers: CastAnswers): CastQuestion {
   return {
     key: "half",
     needed: false,
-    message: "The file has the way down and the way up. Which is taken? On the way up the water has been stirred.",
+    message: hasDowncast
+      ? "The file has the way down and the way up. On the way up the instrument has stirred the water."
+      : "The file begins at the bottom: it has the way up alone.",
     options: [
       { value: "down", label: "the way down" },
       { value: "up", label: "the way up" },

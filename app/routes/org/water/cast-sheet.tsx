@@ -21,7 +21,7 @@ import { toDisplay } from "~/units/format-quantity";
 import { displayUnit } from "~/units/quantities";
 import { readCastAnswers } from "~/water/cast-answers";
 import { castColumnSchema } from "~/water/cast-column-schema";
-import { castSheet, changeCastAnswers } from "~/water/cast-sheet.server";
+import { castQuestions, castSheet, changeCastAnswers } from "~/water/cast-sheet.server";
 import { confirmCast } from "~/water/confirm-cast.server";
 import { whatGetsOld, whatGoes } from "~/water/estimates-on";
 import { removeCast, removeColumn } from "~/water/remove-column.server";
@@ -61,7 +61,7 @@ export async function action({ request, context, params }: Route.ActionArgs) {
       await (cast.waterColumnId === null ? removeCast(tenant, cast) : removeColumn(tenant, cast.waterColumnId));
       return redirect(water);
     }
-    const read = readCastAnswers(form);
+    const read = readCastAnswers(form, await castQuestions(tenant, cast));
     if ("errors" in read) return data({ errors: read.errors }, { status: 400 });
     if (canonicalJson(read.answers) !== canonicalJson(cast.answers)) {
       await changeCastAnswers(tenant, cast, read.answers);
