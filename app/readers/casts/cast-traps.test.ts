@@ -184,7 +184,7 @@ describe("traps of casts", () => {
       ["# start_time = Aug 24 2031 07:55:20 [System UpLoad Time]"],
     );
     expect(read(clock).time).toBe("2031-08-24T07:55:20Z");
-    expect(said(read(clock), "Time")?.confidence).toBe("assumed");
+    expect(said(read(clock), "Clock")?.confidence).toBe("assumed");
   });
 
   it("the kind of salinity is taken from name or unit where they say it", () => {

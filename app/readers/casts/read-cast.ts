@@ -160,9 +160,8 @@ function readTable(
 
 function headerNotes({ time, timeConfidence }: CastTable): Understood[] {
   if (time === null || timeConfidence === "stated in the file") return [];
-  return [
-    { what: "Time", taken: "by the clock of the instrument or its computer, for UTC", confidence: timeConfidence },
-  ];
+  const taken = "of the instrument or its computer, taken for UTC";
+  return [{ what: "Clock", taken, confidence: timeConfidence }];
 }
 
 function columnNote({ channel, name, unit, confidence, unitConfidence }: CastColumn): Understood {

@@ -9,7 +9,7 @@ import { ProblemList } from "~/components/storms/problem-list";
 import { SeriesFigure } from "~/components/storms/series-figure";
 import { UnderstoodLines } from "~/components/understood-lines";
 import { CastColumnFields } from "~/components/water/cast-column-fields";
-import { CastQuestionField } from "~/components/water/cast-question-field";
+import { CastQuestions } from "~/components/water/cast-questions";
 import { CastChannels, CastRows } from "~/components/water/cast-tables";
 import { LayerSketch } from "~/components/water/layer-sketch";
 import { canonicalJson } from "~/ocean/canonical-json";
@@ -90,6 +90,8 @@ export async function action({ request, context, params }: Route.ActionArgs) {
 export default function CastSheet({ loaderData, actionData }: Route.ComponentProps) {
   const { cast, figures, ready, name, column, original, home, answers } = loaderData;
   const busy = useNavigation().state !== "idle";
+  const open = cast.questions.filter(({ needed }) => needed);
+  const settled = cast.questions.filter(({ needed }) => !needed);
   const errors: FormErrorsByField = actionData && "errors" in actionData ? actionData.errors : {};
   return (
     <>
@@ -120,6 +122,14 @@ export default function CastSheet({ loaderData, actionData }: Route.ComponentPro
       )}
       <Form method="post" className="mt-4">
         <FormErrors errors={Object.values(errors).flatMap((messages) => messages ?? [])} />
+        {open.length > 0 && (
+          <section aria-label="Open questions" className="border-2 border-ink p-4">
+            <h3 className="font-bold">
+              {open.length === 1 ? "One question is open" : `${open.length} questions are open`}
+            </h3>
+            <CastQuestions questions={open} answers={answers} errors={errors} />
+          </section>
+        )}
         <ProblemList problems={cast.problems} dropped={[]} />
         <div className="grid items-start gap-x-10 lg:grid-cols-[minmax(0,3fr)_minmax(0,2fr)]">
           <div className="min-w-0">
@@ -143,22 +153,7 @@ export default function CastSheet({ loaderData, actionData }: Route.ComponentPro
         </div>
         <SectionHeading>What was understood</SectionHeading>
         <UnderstoodLines lines={cast.facts} />
-        {cast.questions.length > 0 && (
-          <>
-            <div
-              // Made anew after each reading, so that the fields show what is kept.
-              key={JSON.stringify(answers)}
-              className="mt-4 grid items-start gap-x-8 gap-y-5 md:grid-cols-2"
-            >
-              {cast.questions.map((question) => (
-                <CastQuestionField key={question.key} question={question} errors={errors[question.key]} />
-              ))}
-            </div>
-            <button type="submit" name="intent" value="read" formNoValidate disabled={busy} className="button mt-5">
-              Read again with these answers
-            </button>
-          </>
-        )}
+        {settled.length > 0 && <CastQuestions questions={settled} answers={answers} errors={errors} />}
         <SectionHeading>Channels</SectionHeading>
         <CastChannels cast={cast} />
         <SectionHeading>First and last levels, as they are taken over</SectionHeading>

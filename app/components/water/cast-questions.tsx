@@ -1,5 +1,7 @@
+import { useNavigation } from "react-router";
 import { Field } from "~/components/field";
-import type { CastQuestion } from "~/readers/casts/cast-reading";
+import type { FormErrorsByField } from "~/storms/refusal";
+import type { CastAnswers, CastQuestion } from "~/readers/casts/cast-reading";
 
 function labelOf(key: CastQuestion["key"]): string {
   switch (key) {
@@ -20,13 +22,35 @@ function labelOf(key: CastQuestion["key"]): string {
   }
 }
 
-interface CastQuestionFieldProps {
-  question: CastQuestion;
-  errors: string[] | undefined;
+interface CastQuestionsProps {
+  questions: readonly CastQuestion[];
+  answers: CastAnswers;
+  errors: FormErrorsByField;
+}
+
+/** Questions of a cast's sheet with their fields, and the button that reads the file again with the answers. */
+export function CastQuestions({ questions, answers, errors }: CastQuestionsProps) {
+  const busy = useNavigation().state !== "idle";
+  return (
+    <>
+      <div
+        // Made anew after each reading, so that the fields show what is kept.
+        key={JSON.stringify(answers)}
+        className="mt-4 grid items-start gap-x-8 gap-y-5 md:grid-cols-2"
+      >
+        {questions.map((question) => (
+          <CastQuestionField key={question.key} question={question} errors={errors[question.key]} />
+        ))}
+      </div>
+      <button type="submit" name="intent" value="read" formNoValidate disabled={busy} className="button mt-5">
+        Read again with these answers
+      </button>
+    </>
+  );
 }
 
 /** One question of a cast's sheet with the control that answers it. An empty field stands for "as read". */
-export function CastQuestionField({ question, errors }: CastQuestionFieldProps) {
+function CastQuestionField({ question, errors }: { question: CastQuestion; errors: string[] | undefined }) {
   const { key, needed, message, options, suggestion, answer } = question;
   const suggested = options?.find(({ value }) => value === suggestion)?.label ?? suggestion;
   const asRead = !needed && suggested !== undefined && `${suggested}`;
