@@ -103,7 +103,7 @@ describe("bringing a file", () => {
     expect(await organisation.tenant.sourceFiles.count({ projectId: project.id })).toBe(1);
     const sheet = await readingSheet(organisation.tenant, second.storm, second.record);
     expect(sheet?.alsoIn).toEqual([`${first.storm.name} (as wind.csv)`]);
-    expect(second.storm.name).toBe(`${first.storm.name} 2`);
+    expect(second.storm.name).toBe(`${first.storm.name} (2)`);
   });
 
   it("saves nothing of a file that cannot be read", async () => {
