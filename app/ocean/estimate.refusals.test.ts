@@ -129,7 +129,8 @@ describe("a valid scenario changed in one place", () => {
       }),
       { numRuns: 1500 },
     );
-    expect(Math.min(seen.valid, seen.invalid)).toBeGreaterThan(150);
+    // About one in ten mutants stays valid: both kinds must have been tried, whatever the seed.
+    expect(Math.min(seen.valid, seen.invalid)).toBeGreaterThan(75);
   });
 });
 

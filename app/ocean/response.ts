@@ -8,7 +8,7 @@ export interface Band {
   p90?: number;
 }
 
-/** A band, where an ensemble ran, is that of `hoursBeyond`. */
+/** Where an ensemble ran: the band of `hoursBeyond`, and in how many members the limit was met. */
 export interface TriggerOutcome extends TriggerLevel, Band {
   hoursBeyond: number;
   /** ISO 8601 UTC, or seconds where the storm was given in seconds; null if never. */
@@ -16,6 +16,7 @@ export interface TriggerOutcome extends TriggerLevel, Band {
   /** h */
   longestSpell: number;
   met: boolean;
+  metInMembers?: number;
 }
 
 export interface Headline {
@@ -95,10 +96,18 @@ export interface SeriesBands {
   series: Record<BandName, Record<keyof Band, number[]>>;
 }
 
-/** A factor's setting and the headline figure that came of it, all else as in the scenario. */
+/** A factor's setting (`as given` for the scenario's own) and the headline figure that came of it, all else as in the scenario. */
 export interface FactorTrial {
   setting: string;
   value: number;
+}
+
+export interface FirstOrderShare {
+  factor: string;
+  /** Share of the figure's variance that the factor alone explains, 0…1; null where nothing varies. */
+  index: number | null;
+  /** The share that a factor without effect reaches by chance, in so many members, about once in 25 times. */
+  chance: number;
 }
 
 /** What one headline figure depends on. */
@@ -106,19 +115,37 @@ export interface FigureEffects {
   figure: EffectFigureName;
   /** The scenario's own value. */
   value: number;
-  /** One factor at a time through its range, the widest first. */
+  /** One factor at a time: the least and the greatest over the ends of its range and the scenario itself; the widest first. */
   bars: { factor: string; low: FactorTrial; high: FactorTrial }[];
-  /** Share of the figure's variance that each factor alone explains, 0…1, the greatest first; none under 64 members, null where nothing varies. */
-  firstOrder: { factor: string; index: number | null }[];
+  /** The greatest first; none under 64 members. */
+  firstOrder: FirstOrderShare[];
+}
+
+/** What was varied, how far, and where that range comes from. */
+export interface VariedFactor {
+  name: string;
+  range: string;
+  basis: string;
+  /** Settings that could not be computed by themselves; absent where all could. */
+  failed?: string[];
+}
+
+/** Members that could not be computed for one reason. */
+export interface MemberFailure {
+  code: string;
+  /** Of the first of them. */
+  message: string;
+  members: number;
 }
 
 export interface Uncertainty {
   /** Members asked for, and those that could be computed. */
   members: number;
   computed: number;
+  /** Why the others could not; absent where all could. */
+  failures?: MemberFailure[];
   seed: number;
-  /** What was varied, how far, and where that range comes from. */
-  factors: { name: string; range: string; basis: string }[];
+  factors: VariedFactor[];
   effects: FigureEffects[];
 }
 

@@ -61,12 +61,14 @@ export interface HeatSeries {
   latent?: number[];
 }
 
-/** Of a tropical cyclone that passes; the fit notes look at it, no number of the response does. */
+/** Of a tropical cyclone that passes: for the fit notes, and for what an ensemble varies. No value of the response looks at it. */
 export interface ScenarioCyclone {
   /** Distance from the centre to the strongest wind, m. */
   radiusOfMaximumWind: number;
   /** Speed at which the centre moves over the sea, m/s. */
   translationSpeed: number;
+  /** Whether the wind was computed from the cyclone's track rather than measured: its averaging period is then uncertain. */
+  parametricWind?: boolean;
 }
 
 export interface ScenarioStorm {

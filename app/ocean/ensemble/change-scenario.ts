@@ -68,12 +68,10 @@ export function saltier(scenario: Scenario, by: number): Scenario {
   return { ...scenario, water: { ...salted(water), ...(water.below && { below: salted(water.below) }) } };
 }
 
-/** More heat into the sea, W/m², on a flux that neither evaporates water nor shines into it where there is one. */
+/** More heat into the sea, W/m²: on the net flux, or on the one component that neither evaporates water nor shines into it. */
 export function heated(scenario: Scenario, by: number): Scenario {
-  const heat = { ...scenario.storm.heat };
-  const added = (["net", "sensible", "longwave", "latent", "shortwave"] as const).find(
-    (name) => heat[name] !== undefined,
-  );
-  if (!added) return scenario;
-  return withStorm(scenario, { heat: { ...heat, [added]: (heat[added] ?? []).map((flux) => flux + by) } });
+  const { time, heat = {} } = scenario.storm;
+  const name = heat.net ? "net" : "sensible";
+  const flux = heat[name] ?? time.map(() => 0);
+  return withStorm(scenario, { heat: { ...heat, [name]: flux.map((value) => value + by) } });
 }

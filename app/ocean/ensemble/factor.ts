@@ -8,6 +8,8 @@ export interface Factor {
   range: string;
   /** Where the range comes from. */
   basis: string;
+  /** When it is varied, in words, as `applies` decides. */
+  when: string;
   /** Whether the scenario has what the factor varies; `method` is the one in use, defaults filled in. */
   applies: (scenario: Scenario, method: ResolvedMethod) => boolean;
   vary: (scenario: Scenario, u: number, method: ResolvedMethod) => Scenario;
@@ -15,10 +17,4 @@ export interface Factor {
   setting: (u: number, method: ResolvedMethod) => string;
   /** How many equal shares of 0…1 stand for one choice each; absent where the factor is continuous. */
   choices?: (method: ResolvedMethod) => number;
-}
-
-/** The values of u at which a factor is tried by itself: its two ends, or each of its choices. */
-export function trialsOf({ choices }: Factor, method: ResolvedMethod): number[] {
-  const count = choices?.(method);
-  return count === undefined ? [0, 1] : Array.from({ length: count }, (_, k) => (k + 0.5) / count);
 }

@@ -42,14 +42,15 @@ function shifted(most: number, unit: string, change: (scenario: Scenario, by: nu
 }
 
 /**
- * What members vary, and how far. The drag law, the damping and the water type are drawn anew only where they were left
- * to the engine: what was chosen is the user's own statement.
+ * What members vary, and how far. What a method can choose (drag law, damping, water type, eddy viscosity) is drawn only
+ * where it was left to the engine: what was chosen is the user's own statement.
  */
 export const FACTORS: readonly Factor[] = [
   {
     name: "drag law",
     range: LAWS.map(dragLawName).join(", "),
     basis: "the spread of published laws",
+    when: "where the method leaves the law open",
     applies: ({ method }) => method?.dragLaw === undefined,
     vary: (scenario, u) => withMethod(scenario, { dragLaw: chosen(LAWS, u) }),
     setting: (u) => dragLawName(chosen(LAWS, u)),
@@ -59,6 +60,7 @@ export const FACTORS: readonly Factor[] = [
     name: "wind speed",
     range: "±10 %",
     basis: CONVENTION,
+    when: "always",
     applies: () => true,
     ...scaled(0.9, 1.1, (scenario, factor) =>
       withStorm(scenario, { windSpeed: scenario.storm.windSpeed.map((speed) => speed * factor) }),
@@ -68,6 +70,7 @@ export const FACTORS: readonly Factor[] = [
     name: "wind direction",
     range: "±10°",
     basis: CONVENTION,
+    when: "always",
     applies: () => true,
     ...shifted(10, "°", (scenario, turn) =>
       withStorm(scenario, { windFrom: scenario.storm.windFrom.map((from) => (from + turn + 360) % 360) }),
@@ -77,8 +80,9 @@ export const FACTORS: readonly Factor[] = [
     name: "averaging of the wind",
     range: "85 to 100 % of a parametric wind",
     basis: "between the 10-minute and the 1-minute mean (WMO/TD-1555; from memory)",
+    when: "where the wind is that of a parametric cyclone, which is given without an averaging period",
     // Measured wind comes with its averaging period, which its reading sheet has settled.
-    applies: ({ storm }) => storm.cyclone !== undefined,
+    applies: ({ storm }) => storm.cyclone?.parametricWind === true,
     ...scaled(0.85, 1, (scenario, factor) =>
       withStorm(scenario, { windSpeed: scenario.storm.windSpeed.map((speed) => speed * factor) }),
     ),
@@ -87,6 +91,7 @@ export const FACTORS: readonly Factor[] = [
     name: "layer depth",
     range: "±20 %",
     basis: CONVENTION,
+    when: "always",
     applies: () => true,
     ...scaled(0.8, 1.2, stretched),
   },
@@ -94,6 +99,7 @@ export const FACTORS: readonly Factor[] = [
     name: "step below the layer",
     range: "±30 % of the temperature step",
     basis: CONVENTION,
+    when: "where the water below is known",
     applies: ({ water }) => "cast" in water || water.below !== undefined,
     ...scaled(0.7, 1.3, steepened),
   },
@@ -101,6 +107,7 @@ export const FACTORS: readonly Factor[] = [
     name: "start temperature",
     range: "±0.5 °C at every depth",
     basis: CONVENTION,
+    when: "always",
     applies: () => true,
     ...shifted(0.5, "°C", warmer),
   },
@@ -108,6 +115,7 @@ export const FACTORS: readonly Factor[] = [
     name: "start salinity",
     range: "±0.2 g/kg at every depth",
     basis: CONVENTION,
+    when: "always",
     applies: () => true,
     ...shifted(0.2, "g/kg", saltier),
   },
@@ -115,6 +123,7 @@ export const FACTORS: readonly Factor[] = [
     name: "rain",
     range: "±30 %",
     basis: CONVENTION,
+    when: "where it rains",
     applies: ({ storm }) => storm.rain?.some((rate) => rate > 0) ?? false,
     ...scaled(0.7, 1.3, (scenario, factor) =>
       withStorm(scenario, { rain: scenario.storm.rain?.map((rate) => rate * factor) }),
@@ -124,6 +133,7 @@ export const FACTORS: readonly Factor[] = [
     name: "heat flux",
     range: "±50 W/m²",
     basis: CONVENTION,
+    when: "where heat is given",
     applies: ({ storm }) => storm.heat !== undefined,
     ...shifted(50, "W/m²", heated),
   },
@@ -131,6 +141,7 @@ export const FACTORS: readonly Factor[] = [
     name: "water clarity",
     range: "one water type clearer to one more turbid",
     basis: "Paulson & Simpson (1977), neighbouring rows of the table",
+    when: "where shortwave reaches into the water and the method leaves the water type open",
     applies: ({ storm, method: choices }, { penetratingShortwave }) =>
       penetratingShortwave && storm.heat?.shortwave !== undefined && choices?.waterType === undefined,
     vary: (scenario, u, { waterType }) => withMethod(scenario, { waterType: chosen(neighbours(waterType), u) }),
@@ -141,6 +152,7 @@ export const FACTORS: readonly Factor[] = [
     name: "damping",
     range: "1/2 to 1/10 per day",
     basis: CONVENTION,
+    when: "in model slab, where the method leaves it open",
     applies: ({ method: choices }, { model }) => model === "slab" && choices?.dampingRate === undefined,
     vary: (scenario, u) => withMethod(scenario, { dampingRate: 1 / (86400 * between(2, 10, u)) }),
     setting: (u) => `1/${Number(between(2, 10, u).toPrecision(2))} per day`,
@@ -149,7 +161,9 @@ export const FACTORS: readonly Factor[] = [
     name: "eddy viscosity",
     range: "a third to three times, evenly in its logarithm",
     basis: CONVENTION,
-    applies: (_, { model, ekman }) => model === "coastal" || (model === "budget" && ekman === "finiteDepth"),
+    when: "in model coastal and in model budget with the Ekman balance of finite depth, where the method leaves it open",
+    applies: ({ method: choices }, { model, ekman }) =>
+      (model === "coastal" || (model === "budget" && ekman === "finiteDepth")) && choices?.eddyViscosity === undefined,
     vary: (scenario, u, { eddyViscosity }) =>
       withMethod(scenario, { eddyViscosity: Math.min(10, eddyViscosity * thirdToThree(u)) }),
     setting: (u) => `× ${Number(thirdToThree(u).toPrecision(2))}`,

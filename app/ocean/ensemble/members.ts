@@ -13,21 +13,23 @@ export interface MemberResult {
 
 /**
  * Runs one member. It may fall over an edge that the scenario itself does not, such as a thinner layer that evaporates away.
- * @returns null there
+ * @returns the refusal there
  */
-export function runMember(scenario: Scenario): MemberResult | null {
+export function runMember(scenario: Scenario): MemberResult | OceanError {
   try {
     const run = runModel(scenario);
     const series = responseSeries(scenario, run);
     return { headline: headlineOf(scenario, run, series), series };
   } catch (error) {
-    if (error instanceof OceanError) return null;
+    if (error instanceof OceanError) return error;
     throw error;
   }
 }
 
-/** Samples kept of every series at most: a figure shows no more, and a thousand members of a long storm fit into memory. */
+/** Samples kept of every series at most: a figure shows no more. */
 const MOST_SAMPLES = 500;
+/** Numbers kept of every series at most, so that the greatest ensemble of a long storm fits into memory. */
+const MOST_VALUES = 1e6;
 
 /** One sample of a series, or of the size of the vector that two of them make. */
 function sampleOf(series: Record<SeriesName, number[]>, name: BandName, k: number): number {
@@ -45,7 +47,7 @@ export class MemberSeries {
   private count = 0;
 
   constructor(members: number, length: number) {
-    const every = Math.ceil(length / MOST_SAMPLES);
+    const every = Math.ceil(length / Math.min(MOST_SAMPLES, Math.floor(MOST_VALUES / members)));
     this.members = members;
     this.samples = Array.from({ length }, (_, k) => k).filter((k) => k % every === 0 || k === length - 1);
     const room = () => new Float64Array(members * this.samples.length);

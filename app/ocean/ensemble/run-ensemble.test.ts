@@ -3,6 +3,7 @@ import { plainScenario } from "../../../tests/factories/scenario-arbitrary";
 import { estimate } from "../estimate";
 import { BAND_NAMES, EFFECT_FIGURES, HEADLINE_FIGURES, type Response, type Uncertainty } from "../response";
 import type { Scenario } from "../scenario";
+import { heated } from "./change-scenario";
 import { FEWEST_FOR_INDICES } from "./effects";
 
 const hours = Array.from({ length: 25 }, (_, k) => k);
@@ -68,6 +69,22 @@ describe("an ensemble", () => {
     expect(bands?.series.displacementEast.p90[0]).toBe(0);
   });
 
+  it("spreads stress as the square of an evenly drawn wind, all of it the wind's share (closed form)", () => {
+    const constant: Scenario = { ...whole, method: { model: "budget", dragLaw: "constant" } };
+    const { headline, uncertainty } = spreadOf(constant);
+    const { value, p10 = NaN, p50 = NaN, p90 = NaN } = headline.peakStress;
+    // Each percentile of the sample lies within one of the 200 strata of ±10 %: 0.1 % of the wind, 0.2 % of the stress.
+    [
+      [p10, 0.92],
+      [p50, 1],
+      [p90, 1.08],
+    ].forEach(([found, wind]) => expect(Math.abs(found / value / wind ** 2 - 1)).toBeLessThan(0.002));
+    const [first, ...others] = uncertainty.effects.find(({ figure }) => figure === "peakStress")?.firstOrder ?? [];
+    expect(first.factor).toBe("wind speed");
+    expect(first.index).toBeGreaterThan(0.95);
+    for (const { index } of others) expect(index).toBeLessThan(0.12);
+  });
+
   it("bands a change by itself: the start's uncertainty moves both its ends alike", () => {
     const { surfaceTemperature } = estimate(whole).headline;
     const width = ({ p10 = NaN, p90 = NaN }) => p90 - p10;
@@ -109,13 +126,29 @@ describe("an ensemble", () => {
       "start salinity",
     ]);
     const cyclone = { radiusOfMaximumWind: 40_000, translationSpeed: 5 };
-    expect(names({ ...whole, storm: { ...whole.storm, cyclone } })).toContain("averaging of the wind");
+    const under = (parametricWind: boolean) => ({
+      ...whole,
+      storm: { ...whole.storm, cyclone: { ...cyclone, parametricWind } },
+    });
+    expect(names(under(true))).toContain("averaging of the wind");
+    // Measured under a cyclone: its averaging period is known.
+    expect(names(under(false))).not.toContain("averaging of the wind");
     const coastal: Scenario = {
       ...whole,
       box: { ...whole.box, waterDepth: 30, shoreNormal: 90 },
       method: { model: "coastal" },
     };
     expect(names(coastal)).toContain("eddy viscosity");
+    expect(names({ ...coastal, method: { model: "coastal", eddyViscosity: 0.01 } })).not.toContain("eddy viscosity");
+  });
+
+  it("adds heat that neither evaporates water nor shines into it", () => {
+    const components = heated(whole, 50).storm.heat;
+    expect(components?.sensible).toEqual(hours.map(() => 50));
+    expect(components?.latent).toBe(whole.storm.heat?.latent);
+    expect(components?.shortwave).toBe(whole.storm.heat?.shortwave);
+    const net = { ...whole, storm: { ...whole.storm, heat: { net: hours.map(() => -200) } } };
+    expect(heated(net, 50).storm.heat).toEqual({ net: hours.map(() => -150) });
   });
 
   it("tells how far each factor alone moves a figure, the widest first, on both sides of the value where it is monotone", () => {
@@ -128,11 +161,17 @@ describe("an ensemble", () => {
         figure,
       ).toEqual(swings);
       expect(swings.every((swing) => swing >= 0)).toBe(true);
-      const depth = bars.find(({ factor }) => factor === "layer depth");
-      const rounding = 1e-12 * Math.abs(value);
-      expect(depth?.low.value).toBeLessThanOrEqual(value + rounding);
-      expect(depth?.high.value).toBeGreaterThanOrEqual(value - rounding);
+      expect(bars).toHaveLength(11);
+      for (const { low, high } of bars) {
+        expect(low.value).toBeLessThanOrEqual(value);
+        expect(high.value).toBeGreaterThanOrEqual(value);
+        // An end that is the estimate itself says so.
+        for (const end of [low, high]) if (end.setting === "as given") expect(end.value).toBe(value);
+      }
     }
+    const drift = effects.find(({ figure }) => figure === "peakDrift");
+    const depth = drift?.bars.find(({ factor }) => factor === "layer depth");
+    expect([depth?.low.setting, depth?.high.setting]).toEqual(["+20 %", "−20 %"]);
     const stress = effects.find(({ figure }) => figure === "peakStress");
     const wind = stress?.bars.find(({ factor }) => factor === "wind speed");
     expect([wind?.low.setting, wind?.high.setting]).toEqual(["−10 %", "+10 %"]);
@@ -164,9 +203,29 @@ describe("an ensemble", () => {
       storm: { ...plainScenario({ hours: 48 }).storm, evaporation: new Array<number>(49).fill(8) },
       ensemble: { members: 60, seed: 2 },
     };
-    const { computed, members } = spreadOf(thin).uncertainty;
+    const { computed, members, failures, factors } = spreadOf(thin).uncertainty;
     expect(members).toBe(60);
     expect(computed).toBeGreaterThan(0);
     expect(computed).toBeLessThan(60);
+    expect(failures?.reduce((sum, failure) => sum + failure.members, 0)).toBe(60 - computed);
+    expect(failures?.[0].message).toMatch(/layer/);
+    // By itself the thinner layer evaporates away as well; the thicker one does not.
+    expect(factors.find(({ name }) => name === "layer depth")?.failed).toEqual(["−20 %"]);
+    expect(factors.find(({ name }) => name === "wind speed")?.failed).toBeUndefined();
+  });
+
+  it("counts the members that meet a trigger level, and bands the hours beyond it", () => {
+    const { triggers } = spreadOf({
+      ...whole,
+      triggerLevels: [
+        { quantity: "stress", side: "above", value: 0, hours: 1 },
+        { quantity: "stress", side: "above", value: 100, hours: 1 },
+        { quantity: "temperature", side: "below", value: 18.1, hours: 12 },
+      ],
+    }).headline;
+    expect(triggers.map(({ metInMembers }) => metInMembers)).toEqual([200, 0, expect.any(Number)]);
+    expect(triggers[2].metInMembers).toBeGreaterThan(20);
+    expect(triggers[2].metInMembers).toBeLessThan(180);
+    expect(triggers[2].p10).toBeLessThan(triggers[2].p90 ?? 0);
   });
 });

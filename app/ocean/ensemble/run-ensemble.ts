@@ -1,12 +1,13 @@
 import { OceanError } from "../errors";
 import type { ModelRun } from "../models/run-model";
-import { HEADLINE_FIGURES, BAND_NAMES, type Band, type Headline, type SeriesBands, type Response } from "../response";
+import type { Headline, MemberFailure, Response, Uncertainty } from "../response";
 import type { Scenario } from "../scenario";
 import { latinHypercube } from "../statistics/latin-hypercube";
-import { quantile } from "../statistics/quantile";
+import { seriesBands, withBands } from "./bands";
 import { effectsOf, type Drawn } from "./effects";
 import { FACTORS } from "./factors";
 import { MemberSeries, runMember } from "./members";
+import { oneAtATime } from "./one-at-a-time";
 
 /**
  * Runs the members of a Latin hypercube over the uncertain inputs: the 10th, 50th and 90th percentile of every headline
@@ -26,9 +27,13 @@ export function runEnsemble(
   const factors = FACTORS.filter(({ applies }) => applies(scenario, method));
   const series = new MemberSeries(members, scenario.storm.time.length);
   const drawn: Drawn = { rows: [], headlines: [] };
+  const refusals: OceanError[] = [];
   for (const row of latinHypercube(members, factors.length, seed)) {
     const member = runMember(factors.reduce((varied, factor, k) => factor.vary(varied, row[k], method), scenario));
-    if (!member) continue;
+    if (member instanceof OceanError) {
+      refusals.push(member);
+      continue;
+    }
     series.add(member.series);
     drawn.rows.push(row);
     drawn.headlines.push(member.headline);
@@ -39,53 +44,31 @@ export function runEnsemble(
       "No member of the ensemble could be computed; the case lies at the edge of what the model can bear.",
     );
   }
+  const trials = factors.map((factor) => oneAtATime(factor, scenario, method));
   return {
     headline: withBands(headline, drawn.headlines),
-    bands: bandsOf(scenario, series),
+    bands: seriesBands(scenario.storm.time, series),
     uncertainty: {
       members,
       computed: drawn.rows.length,
+      ...(refusals.length > 0 && { failures: failuresOf(refusals) }),
       seed,
-      factors: factors.map(({ name, range, basis }) => ({ name, range, basis })),
-      effects: effectsOf(scenario, method, headline, factors, drawn),
+      factors: factors.map(({ name, range, basis }, k): Uncertainty["factors"][number] => {
+        const failed = trials[k].flatMap(({ setting, headline: figures }) => (figures ? [] : [setting]));
+        return { name, range, basis, ...(failed.length > 0 && { failed }) };
+      }),
+      effects: effectsOf(headline, factors, method, trials, drawn),
     },
   };
 }
 
-function withBands(headline: Headline, members: readonly Headline[]): Headline {
-  const banded = { ...headline };
-  for (const figure of HEADLINE_FIGURES) {
-    Object.assign(banded, {
-      [figure]: { ...headline[figure], ...bandOf(members.map((member) => member[figure].value)) },
-    });
+/** Refusals by their code. */
+function failuresOf(refusals: readonly OceanError[]): MemberFailure[] {
+  const failures = new Map<string, MemberFailure>();
+  for (const { code, message } of refusals) {
+    const known = failures.get(code);
+    if (known) known.members += 1;
+    else failures.set(code, { code, message, members: 1 });
   }
-  for (const figure of ["surfaceSalinity", "surfaceTemperature"] as const) {
-    banded[figure].changeBand = bandOf(members.map((member) => member[figure].change));
-  }
-  banded.triggers = headline.triggers.map((trigger, k) => ({
-    ...trigger,
-    ...bandOf(members.map((member) => member.triggers[k].hoursBeyond)),
-  }));
-  return banded;
-}
-
-function bandOf(values: readonly (number | null)[]): Band {
-  const known = values.filter((value) => value !== null);
-  return known.length === 0 ? {} : percentiles(Float64Array.from(known));
-}
-
-function percentiles(values: Float64Array): Required<Band> {
-  return { p10: quantile(values, 0.1), p50: quantile(values, 0.5), p90: quantile(values, 0.9) };
-}
-
-function bandsOf(scenario: Scenario, members: MemberSeries): SeriesBands {
-  const bands = BAND_NAMES.map((name) => {
-    const at = members.samples.map((_, sample) => percentiles(members.at(name, sample)));
-    const series = { p10: at.map(({ p10 }) => p10), p50: at.map(({ p50 }) => p50), p90: at.map(({ p90 }) => p90) };
-    return [name, series] as const;
-  });
-  return {
-    time: members.samples.map((k) => scenario.storm.time[k]),
-    series: Object.fromEntries(bands) as SeriesBands["series"],
-  };
+  return [...failures.values()];
 }

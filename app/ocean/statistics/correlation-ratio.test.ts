@@ -1,5 +1,5 @@
 import { describe, expect, it } from "vitest";
-import { correlationRatio } from "./correlation-ratio";
+import { chanceRatio, correlationRatio } from "./correlation-ratio";
 import { latinHypercube } from "./latin-hypercube";
 import { ishigami, sobolIndices } from "./sobol";
 
@@ -37,9 +37,18 @@ describe("correlation ratio", () => {
     );
   });
 
-  it("is near zero for what has no effect, even in few groups of few members", () => {
-    const rows = latinHypercube(100, 2, 3);
-    expect(correlationRatio(column(rows, 1), column(rows, 0), 4)).toBeLessThan(0.15);
+  it.each([
+    [64, 4],
+    [200, 8],
+    [1000, 25],
+  ])("of %d members in %d groups passes the ratio of chance once in 25 times where there is no effect", (n, groups) => {
+    const rows = latinHypercube(n, 401, 3);
+    const y = column(rows, 0);
+    const found = Array.from({ length: 400 }, (_, k) => correlationRatio(column(rows, k + 1), y, groups) ?? NaN);
+    const passed = found.filter((ratio) => ratio > chanceRatio(n, groups)).length;
+    // 16 expected; within three standard deviations of the count, rounded up.
+    expect(Math.abs(passed - 16)).toBeLessThanOrEqual(12);
+    expect(found.filter((ratio) => ratio === 0).length).toBeGreaterThan(100);
   });
 
   it("has no answer where nothing varies, and refuses what it cannot group", () => {

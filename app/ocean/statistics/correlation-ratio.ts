@@ -42,3 +42,12 @@ export function correlationRatio(x: ArrayLike<number>, y: ArrayLike<number>, gro
   const unexplained = ((n - 1) / (n - filled)) * (1 - between / total);
   return Math.min(1, Math.max(0, 1 - unexplained));
 }
+
+/**
+ * The ratio that chance alone exceeds about once in 25 times where x has no effect: two standard deviations of the
+ * corrected ratio of independent groups, from the variance 2(m - 1) of χ² with m - 1 degrees of freedom.
+ * @param n members @param groups as in `correlationRatio`
+ */
+export function chanceRatio(n: number, groups: number): number {
+  return (2 * Math.sqrt(2 * (groups - 1))) / (n - 1);
+}

@@ -3,7 +3,7 @@ import { describe, expect, it } from "vitest";
 import { latinHypercube } from "./latin-hypercube";
 import { morrisEffects } from "./morris";
 import { mulberry32 } from "./mulberry32";
-import { quantile } from "./quantile";
+import { quantile, quantiles } from "./quantile";
 import { sobolIndices } from "./sobol";
 
 describe("statistics", () => {
@@ -36,7 +36,10 @@ describe("statistics", () => {
         expect(quantile(list, 1)).toBe(Math.max(...list) + 0);
       }),
     );
-    expect(() => quantile([1, Number.NaN], 0.5)).toThrow();
+    for (const wrong of [Number.NaN, Infinity, -Infinity]) {
+      expect(() => quantile([1, wrong, 2, 3], 0.1)).toThrow(/finite/);
+    }
+    expect(quantiles([3, 1, 2], [0, 0.25, 1])).toEqual([1, 1.5, 3]);
     expect(() => quantile([1], 1.5)).toThrow();
   });
 

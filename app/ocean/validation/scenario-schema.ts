@@ -67,6 +67,7 @@ export const stormSchema = z.object({
     .strictObject({
       radiusOfMaximumWind: numberWithin(1000, 1_000_000, "m"),
       translationSpeed: numberWithin(0, 50, "m/s"),
+      parametricWind: yesOrNo().optional(),
     })
     .optional(),
 });
