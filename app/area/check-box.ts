@@ -144,7 +144,9 @@ function findCrossing(ring: Position[]): BoxProblem | null {
   for (let i = 0; i < count; i++) {
     for (let j = i + 1; j < count; j++) {
       const adjacent = j === i + 1 || (i === 0 && j === count - 1);
-      const meet = adjacent ? foldsBack(side(i), side(j), j === i + 1) : sidesMeet(side(i), side(j));
+      const meet = adjacent
+        ? foldsBack(side(i), side(j), j === i + 1)
+        : mayMeet(side(i), side(j)) && sidesMeet(side(i), side(j));
       if (meet) return crossingProblem(i, j, count);
     }
   }
@@ -163,6 +165,16 @@ function crossingProblem(i: number, j: number, count: number): BoxProblem {
 function onOneLine(corners: Position[]): boolean {
   const [[x, y], [nextX, nextY]] = corners;
   return corners.every((corner) => (nextX - x) * (corner[1] - y) === (nextY - y) * (corner[0] - x));
+}
+
+/** Whether the extents of two sides overlap or touch: nearly all pairs of a ring of many corners do not. */
+function mayMeet([[ax, ay], [bx, by]]: Side, [[cx, cy], [dx, dy]]: Side): boolean {
+  return (
+    Math.max(ax, bx) >= Math.min(cx, dx) &&
+    Math.max(cx, dx) >= Math.min(ax, bx) &&
+    Math.max(ay, by) >= Math.min(cy, dy) &&
+    Math.max(cy, dy) >= Math.min(ay, by)
+  );
 }
 
 function sidesMeet(one: Side, other: Side): boolean {

@@ -18,6 +18,17 @@ function formOf(fields: Record<string, string>): FormData {
 }
 
 describe("found shapes", () => {
+  it("with too many corners are thinned only where that is agreed to, and say how far they move", () => {
+    const many = Array.from({ length: 2000 }, (_, k): Position => {
+      const angle = (2 * Math.PI * k) / 2000;
+      return [-8 + 0.05 * Math.cos(angle), 51 + 0.03 * Math.sin(angle)];
+    });
+    const [shape] = foundShapes({ polygons: [polygon(many)] }, DEFAULT_UNITS);
+    expect(shape).toMatchObject({ problems: [], taken: false });
+    expect(shape.facts).toMatch(/^2000 corners/);
+    expect(shape.change).toMatch(/at most 500 corners.*keeps \d{2,3} of them.*moves by less than [\d.]+\sm\.$/);
+  });
+
   it("say what each is, and why one cannot be a study box", () => {
     const huge = square.map(([x, y]): Position => [x * 4, y]);
     const bow: Position[] = [square[0], square[2], square[1], square[3]];

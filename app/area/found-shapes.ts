@@ -1,7 +1,8 @@
 /** Polygons of an imported file on their way to becoming study boxes. */
 import { z } from "zod";
-import { checkBox } from "./check-box";
+import { BOX_LIMITS, checkBox } from "./check-box";
 import { measureBox } from "./measure-box";
+import { thinRing, type ThinnedRing } from "./thin-ring";
 import type { Position } from "~/ocean/scenario";
 import type { ShapeReading } from "~/readers/shapes/shape-reading";
 import { formatQuantity } from "~/units/format-quantity";
@@ -10,11 +11,16 @@ import type { UnitChoices } from "~/units/unit-choices";
 /** More shapes than this are no choice of study boxes. */
 export const MOST_SHAPES = 200;
 
+/** Shapes of too many corners that are thinned at once: each takes its time. */
+const MOST_THINNED = 20;
+
 export interface FoundShape {
   name: string;
   ring: Position[];
   /** What it is, as `4 corners, 1.2 km²`. */
   facts: string;
+  /** What is done to it where it is taken: to tick it is to agree. */
+  change: string | null;
   /** Why it cannot be a study box; empty where it can. */
   problems: string[];
   /** Whether it has been chosen. */
@@ -23,8 +29,10 @@ export interface FoundShape {
 
 /** The polygons of a reading, each checked as one that was drawn; holes are told of, since a box has none. */
 export function foundShapes({ polygons }: Pick<ShapeReading, "polygons">, units: UnitChoices): FoundShape[] {
+  let thinning = MOST_THINNED;
   return polygons.slice(0, MOST_SHAPES).map(({ name, outer, holes }) => {
-    const checked = checkBox(outer);
+    const thinned = outer.length > BOX_LIMITS.corners && thinning-- > 0 ? thinRing(outer) : null;
+    const checked = thinned ? { ok: true as const, ring: thinned.ring } : checkBox(outer);
     const area = checked.ok ? [formatQuantity(measureBox(checked.ring).areaKm2 * 1e6, "area", units).text] : [];
     const hole =
       holes.length === 0 ? [] : [`${holes.length} ${holes.length === 1 ? "hole" : "holes"}, which will be filled`];
@@ -32,11 +40,17 @@ export function foundShapes({ polygons }: Pick<ShapeReading, "polygons">, units:
       name: name.slice(0, 120),
       ring: checked.ok ? checked.ring : outer,
       facts: [`${outer.length} corners`, ...area, ...hole].join(", "),
+      change: thinned && changeOf(thinned, units),
       problems: checked.ok ? [] : checked.problems.slice(0, 2).map(({ message }) => message),
-      // A file of one shape was brought for that shape.
-      taken: checked.ok && polygons.length === 1,
+      // A file of one shape was brought for that shape; where corners go, the person says so.
+      taken: checked.ok && !thinned && polygons.length === 1,
     };
   });
+}
+
+function changeOf({ ring, deviation }: ThinnedRing, units: UnitChoices): string {
+  const moved = formatQuantity(deviation, "depth", units).text;
+  return `A study box has at most ${BOX_LIMITS.corners} corners. Taken, it keeps ${ring.length - 1} of them, and its outline moves by less than ${moved}.`;
 }
 
 const ringSchema = z.array(z.tuple([z.number(), z.number()])).min(3);

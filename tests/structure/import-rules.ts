@@ -3,7 +3,7 @@ import path from "node:path";
 import { importsOf, type Import } from "./imports";
 
 /** Rooms that run anywhere: in the server, in a worker, in the browser. */
-const PURE_ROOMS = ["units", "ocean", "figures", "readers", "memo"];
+const PURE_ROOMS = ["units", "ocean", "figures", "readers", "quality", "memo"];
 
 /** What the lowest rooms may import beside themselves. A room that is not named here may import any but the routes. */
 const ALLOWED_ROOMS: Record<string, string[]> = { units: [], ocean: ["units"], figures: ["units", "ocean"] };

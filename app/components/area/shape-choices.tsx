@@ -13,15 +13,17 @@ export function ShapeChoices({ shapes, units }: { shapes: FoundShape[]; units: U
       <SectionHeading>
         {shapes.length} {shapes.length === 1 ? "shape" : "shapes"} found
       </SectionHeading>
-      <div className="grid gap-6 lg:grid-cols-[3fr_2fr]">
-        <StudyAreaMap
-          boxes={sound.map(({ name, ring }) => ({ name, polygon: ring }))}
-          units={units}
-          label="Shapes of the file on the map"
-          className="h-96"
-        />
+      <div className={sound.length > 0 ? "grid gap-6 lg:grid-cols-[3fr_2fr]" : undefined}>
+        {sound.length > 0 && (
+          <StudyAreaMap
+            boxes={sound.map(({ name, ring }) => ({ name, polygon: ring }))}
+            units={units}
+            label="Shapes of the file on the map"
+            className="h-96"
+          />
+        )}
         <ul className="border-t border-hairline">
-          {shapes.map(({ name, ring, facts, problems, taken }, index) => (
+          {shapes.map(({ name, ring, facts, change, problems, taken }, index) => (
             <li key={index} className="grid gap-1 border-b border-hairline py-3">
               <label className="flex items-center gap-2.5">
                 <input
@@ -42,6 +44,7 @@ export function ShapeChoices({ shapes, units }: { shapes: FoundShape[]; units: U
                 />
               </label>
               <p className="text-small text-slate">{facts}</p>
+              {change && <p className="text-small font-bold">{change}</p>}
               {problems.map((problem) => (
                 <p key={problem} className="text-small font-bold text-error">
                   {problem}

@@ -7,6 +7,9 @@ interface OriginalFieldsProps {
   errors: FormErrorsByField;
   /** Begins the hint of the file: what may be brought. */
   accepts?: string;
+  /** Whether the original stays in the project. */
+  kept?: boolean;
+  pasteLabel?: string;
   pasteHint?: string;
   placeholder?: string;
 }
@@ -32,6 +35,8 @@ export function OriginalFields({
   uploadLimitBytes,
   errors,
   accepts = SERIES.accepts,
+  kept = true,
+  pasteLabel = "Or rows from a spreadsheet",
   pasteHint = SERIES.pasteHint,
   placeholder = SERIES.placeholder,
 }: OriginalFieldsProps) {
@@ -64,7 +69,7 @@ export function OriginalFields({
         id={`${id}-file`}
         label="File"
         errors={trouble ? [trouble] : errors.file}
-        hint={`${accepts}, up to ${uploadLimitBytes / MEGABYTE} MB. It is kept as it is, byte for byte.`}
+        hint={`${accepts}, up to ${uploadLimitBytes / MEGABYTE} MB.${kept ? " It is kept as it is, byte for byte." : ""}`}
       >
         {(described) => (
           <div
@@ -88,7 +93,7 @@ export function OriginalFields({
           </div>
         )}
       </Field>
-      <Field id={`${id}-pasted`} label="Or rows from a spreadsheet" errors={errors.pasted} hint={pasteHint}>
+      <Field id={`${id}-pasted`} label={pasteLabel} errors={errors.pasted} hint={pasteHint}>
         {(described) => (
           <textarea
             {...described}

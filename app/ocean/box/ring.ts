@@ -34,6 +34,15 @@ function shoelace(ring: readonly Position[]): { area2: number; x: number; y: num
   return { area2, x, y };
 }
 
+/**
+ * The sense of a ring seen with north up, also across the antimeridian.
+ * @param ring [longitude, latitude] in degrees, at least one corner
+ * @returns 1 anticlockwise, -1 clockwise, 0 where nothing is enclosed
+ */
+export function ringSense(ring: readonly Position[]): number {
+  return Math.sign(shoelace(ring).area2);
+}
+
 /** Area enclosed, m², in the equirectangular plane at the ring's mean latitude: good to 1 % for boxes up to some 100 km. */
 export function ringArea(ring: readonly Position[]): number {
   const squareDegrees = Math.abs(shoelace(ring).area2) / 2;

@@ -1,4 +1,5 @@
 import type { Geometry, Position as JsonPosition } from "geojson";
+import { ringSense } from "~/ocean/box/ring";
 import type { Position } from "~/ocean/scenario";
 import type { ProblemList } from "../problem-list";
 import type { RawShapes } from "./raw-shapes";
@@ -94,9 +95,5 @@ function openRing(ring: JsonPosition[]): Position[] {
 
 /** The ring with this sense: 1 anticlockwise, -1 clockwise. */
 function turned(ring: Position[], sense: 1 | -1): Position[] {
-  const area = ring.reduce((sum, [x, y], k) => {
-    const [nextX, nextY] = ring[(k + 1) % ring.length];
-    return sum + x * nextY - nextX * y;
-  }, 0);
-  return Math.sign(area) === -sense ? [...ring].reverse() : ring;
+  return ringSense(ring) === -sense ? [...ring].reverse() : ring;
 }

@@ -1,37 +1,21 @@
-import type { Feature, Geometry } from "geojson";
-import { z } from "zod";
+import type { Geometry, Position } from "geojson";
 import type { ProblemList } from "../problem-list";
-import { nameOf, type RawShapes } from "./raw-shapes";
+import { nameOf, type NamedShape, type RawShapes } from "./raw-shapes";
 
-const position = z.array(z.number()).min(2);
-const ring = z.array(position);
-const simple = z.discriminatedUnion("type", [
-  z.object({ type: z.literal("Point"), coordinates: position }),
-  z.object({ type: z.literal("MultiPoint"), coordinates: z.array(position) }),
-  z.object({ type: z.literal("LineString"), coordinates: z.array(position) }),
-  z.object({ type: z.literal("MultiLineString"), coordinates: z.array(ring) }),
-  z.object({ type: z.literal("Polygon"), coordinates: z.array(ring) }),
-  z.object({ type: z.literal("MultiPolygon"), coordinates: z.array(z.array(ring)) }),
-]);
-const geometry = z.union([simple, z.object({ type: z.literal("GeometryCollection"), geometries: z.array(simple) })]);
-const feature = z.object({
-  type: z.literal("Feature"),
-  properties: z.record(z.string(), z.unknown()).nullish(),
-  geometry: geometry.nullable(),
-});
-const document = z.union([
-  z.object({ type: z.literal("FeatureCollection"), features: z.array(feature), crs: z.unknown().optional() }),
-  feature.extend({ crs: z.unknown().optional() }),
-  geometry,
-]);
-
+/** Geometries inside geometries, as a file made by hand or by an enemy may have them. */
 const DEEPEST = 12;
 
 /** Whether a text looks like GeoJSON. */
 export function isGeoJson(text: string): boolean {
-  const types =
-    /"type"\s*:\s*"(?:FeatureCollection|Feature|GeometryCollection|(?:Multi)?(?:Polygon|LineString|Point))"/;
-  return /^\s*\{/.test(text) && types.test(text);
+  const named = /"(?:FeatureCollection|Feature|GeometryCollection|(?:Multi)?(?:Point|LineString|Polygon))"/;
+  return /^\s*\{/.test(text) && named.test(text);
+}
+
+/** What stands where RFC 7946 wants something else: the path to it. */
+class Misfit extends Error {
+  constructor(readonly path: string) {
+    super(`${path} does not fit RFC 7946`);
+  }
 }
 
 /**
@@ -51,41 +35,101 @@ export function geoJsonShapes(text: string, problems: ProblemList): RawShapes | 
     const reason = error instanceof SyntaxError ? error.message : "it cannot be parsed";
     return refuse(`the text is not JSON: ${reason}`, "Export the shapes anew as GeoJSON.");
   }
-  if (depthOf(value) > DEEPEST) return refuse("the JSON is nested too deeply for GeoJSON", "Export the shapes anew.");
-  const read = document.safeParse(value);
-  if (!read.success) {
-    const issue = read.error.issues[0];
-    return refuse(
-      `the JSON is no GeoJSON: ${issue.path.join(".") || "the document"} does not fit RFC 7946`,
-      "Export the shapes anew as GeoJSON.",
-    );
-  }
-  const crs = "crs" in read.data ? JSON.stringify(read.data.crs ?? null) : "null";
-  if (crs !== "null" && !/CRS84|EPSG:{1,2}4326/.test(crs)) {
+  const crs = isObject(value) ? crsOf(value.crs) : null;
+  if (crs !== null && !/CRS84|EPSG:{1,2}4326/.test(crs)) {
     return refuse(
       `its coordinates are in another system: ${crs.slice(0, 120)}`,
       "Export the shapes in longitude and latitude (WGS 84).",
     );
   }
-  const features: Feature[] =
-    read.data.type === "FeatureCollection"
-      ? (read.data.features as Feature[])
-      : read.data.type === "Feature"
-        ? [read.data as Feature]
-        : [{ type: "Feature", properties: {}, geometry: read.data as Geometry }];
+  try {
+    return {
+      features: featuresOf(value),
+      understood: [{ what: "Coordinates", taken: "longitude, latitude, WGS 84", confidence: "by the format" }],
+      questions: [],
+    };
+  } catch (error) {
+    if (!(error instanceof Misfit)) throw error;
+    return refuse(`the JSON is no GeoJSON: ${error.message}`, "Export the shapes anew as GeoJSON.");
+  }
+}
+
+/** The name of the system in a `crs` member of the older draft; null where there is none. */
+function crsOf(crs: unknown): string | null {
+  if (crs === null || crs === undefined) return null;
+  const properties = isObject(crs) && isObject(crs.properties) ? crs.properties : {};
+  return typeof properties.name === "string" ? properties.name : "one that is not named";
+}
+
+function featuresOf(value: unknown): NamedShape[] {
+  if (!isObject(value)) throw new Misfit("the document");
+  if (value.type === "FeatureCollection") {
+    return listOf(value.features, "features").map((one, index) => featureOf(one, `features.${index}`));
+  }
+  if (value.type === "Feature") return [featureOf(value, "the document")];
+  return [{ name: "", geometry: geometryOf(value, "the document", 0) }];
+}
+
+function featureOf(value: unknown, path: string): NamedShape {
+  if (!isObject(value) || value.type !== "Feature") throw new Misfit(path);
+  const { properties, geometry } = value;
   return {
-    features: features.map((one) => ({ name: nameOf(one.properties), geometry: one.geometry })),
-    understood: [{ what: "Coordinates", taken: "longitude, latitude, WGS 84", confidence: "by the format" }],
-    questions: [],
+    name: nameOf(isObject(properties) ? properties : null),
+    geometry: geometry === null || geometry === undefined ? null : geometryOf(geometry, `${path}.geometry`, 0),
   };
 }
 
-function depthOf(value: unknown): number {
-  let depth = 0;
-  let level: unknown[] = [value];
-  while (level.length > 0 && depth <= DEEPEST + 1) {
-    depth += 1;
-    level = level.flatMap((item) => (typeof item === "object" && item !== null ? Object.values(item) : []));
+function geometryOf(value: unknown, path: string, depth: number): Geometry {
+  if (!isObject(value) || depth > DEEPEST) throw new Misfit(path);
+  const at = `${path}.coordinates`;
+  const { type, coordinates } = value;
+  switch (type) {
+    case "Point":
+      return { type, coordinates: positionOf(coordinates) ?? misfit(at) };
+    case "MultiPoint":
+    case "LineString":
+      return { type, coordinates: positionsOf(coordinates, at) };
+    case "MultiLineString":
+    case "Polygon":
+      return { type, coordinates: ringsOf(coordinates, at) };
+    case "MultiPolygon":
+      return { type, coordinates: listOf(coordinates, at).map((rings, k) => ringsOf(rings, `${at}.${k}`)) };
+    case "GeometryCollection": {
+      const inner = listOf(value.geometries, `${path}.geometries`);
+      return { type, geometries: inner.map((one, k) => geometryOf(one, `${path}.geometries.${k}`, depth + 1)) };
+    }
+    default:
+      throw new Misfit(path);
   }
-  return depth;
+}
+
+function ringsOf(value: unknown, path: string): Position[][] {
+  return listOf(value, path).map((ring, k) => positionsOf(ring, `${path}.${k}`));
+}
+
+function positionsOf(value: unknown, path: string): Position[] {
+  return listOf(value, path).map((one, k) => positionOf(one) ?? misfit(`${path}.${k}`));
+}
+
+function positionOf(value: unknown): Position | null {
+  if (!Array.isArray(value) || value.length < 2) return null;
+  const position: Position = [];
+  for (const part of value) {
+    if (typeof part !== "number" || !Number.isFinite(part)) return null;
+    position.push(part);
+  }
+  return position;
+}
+
+function misfit(path: string): never {
+  throw new Misfit(path);
+}
+
+function listOf(value: unknown, path: string): unknown[] {
+  if (!Array.isArray(value)) throw new Misfit(path);
+  return value;
+}
+
+function isObject(value: unknown): value is Record<string, unknown> {
+  return typeof value === "object" && value !== null && !Array.isArray(value);
 }

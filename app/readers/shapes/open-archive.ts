@@ -2,7 +2,7 @@ import { unzipSync } from "fflate";
 import type { ProblemList } from "../problem-list";
 
 /** Largest size of an archive once unpacked, bytes. */
-export const MAX_UNPACKED_BYTES = 256 * 1024 * 1024;
+const MAX_UNPACKED_BYTES = 128 * 1024 * 1024;
 const MAX_FILES = 2000;
 
 /** Whether bytes are a zip archive. */

@@ -2,9 +2,14 @@ import type { Geometry } from "geojson";
 import type { Understood } from "../reading";
 import type { ShapeQuestion } from "./shape-reading";
 
+export interface NamedShape {
+  name: string;
+  geometry: Geometry | null;
+}
+
 /** What one of the forms yields: geometries in longitude and latitude, with their names. */
 export interface RawShapes {
-  features: { name: string; geometry: Geometry | null }[];
+  features: NamedShape[];
   understood: Understood[];
   questions: ShapeQuestion[];
 }

@@ -162,11 +162,59 @@ describe("shapes", () => {
   it("trap 40: a shapefile without its .prj is asked about, with candidates, and the answer is used", () => {
     const bare = shpOf(SQUARE);
     expect(read(bare).questions[0]).toMatchObject({ key: "projection", needed: true });
-    expect(read(bare).questions[0].options).toHaveLength(3);
+    expect(read(bare).questions[0].options.map(({ value }) => value)).toEqual(["EPSG:4326", "EPSG:4269"]);
+    expect(read(bare).questions[0].options[0].place).toEqual([10.5, 50.5]);
     const metres = shpOf(SQUARE.map(([x, y]) => [x * 111_319.49, y * 130_000]));
     const answered = read(metres, { projection: "EPSG:3857" });
     expect(answered.polygons[0].outer[0][0]).toBeCloseTo(11, 3);
     expect(answered.questions[0].needed).toBe(false);
+    const labels = answered.questions[0].options.map(({ label }) => label);
+    expect(labels.slice(0, 2)).toEqual(["metres, web Mercator", "metres, UTM zone 1 north, WGS 84"]);
+    expect(read(metres, { projection: "+proj=utm +zone=32" }).questions[0].needed).toBe(true);
+  });
+
+  it("a zone of metres is one of the candidates, and puts the shape where it belongs", () => {
+    // The central meridian of zone 32 is 9° E (500 km east); 5 540 km north is near 50° N.
+    const metres = shpOf(SQUARE.map(([x, y]) => [500_000 + 1000 * (x - 10), 5_540_000 + 1000 * (y - 50)]));
+    const { polygons, questions } = read(metres, { projection: "EPSG:32632" });
+    expect(questions[0].needed).toBe(false);
+    expect(polygons[0].outer[0][0]).toBeCloseTo(9, 1);
+    expect(polygons[0].outer[0][1]).toBeCloseTo(50, 1);
+  });
+
+  it("warns of a datum that is not that of the map", () => {
+    const old = WGS84.replaceAll("WGS_1984", "North_American_1927");
+    const zipped = (prj: string) => zipSync({ "a.shp": shpOf(SQUARE), "a.prj": strToU8(prj) });
+    expect(read(zipped(old)).problems[0]).toMatchObject({ code: "datumShift", severity: "warning" });
+    expect(read(zipped(old)).problems[0].message).toContain("North American 1927");
+    expect(read(zipped(WGS84)).problems).toEqual([]);
+  });
+
+  it("trap 39: a ring across the antimeridian keeps its sense, whichever turn its longitudes are in", () => {
+    const across = (east: number) => [
+      [179, -17],
+      [east, -17],
+      [east, -16],
+      [179, -16],
+      [179, -17],
+    ];
+    for (const east of [181, -179]) {
+      const { polygons } = read(collection(feature({ type: "Polygon", coordinates: [across(east)] })));
+      expect(polygons[0].outer).toEqual(across(east).slice(0, -1));
+      const clockwise = [...across(east)].reverse();
+      const turned = read(collection(feature({ type: "Polygon", coordinates: [clockwise] }))).polygons[0].outer;
+      expect(turned).toEqual([...clockwise.slice(0, -1)].reverse());
+    }
+  });
+
+  it("security: an archive that would swell is refused unread, and so is a text too long", () => {
+    const swelling = zipSync({ "a.kml": new Uint8Array(140 * 1024 * 1024) });
+    expect(swelling.length).toBeLessThan(1024 * 1024);
+    expect(() => read(swelling)).toThrow(/would unpack to 140 MB/);
+    expect(() => read(zipSync({ "a.kml": new Uint8Array(20 * 1024 * 1024) }))).toThrow(/20 MB of text/);
+    expect(() => read(new Uint8Array(17 * 1024 * 1024).fill(32))).toThrow(/17 MB of text/);
+    const deep = `{"type":"FeatureCollection","crs":${"[".repeat(200_000)}${"]".repeat(200_000)},"features":[]}`;
+    expect(() => read(deep)).toThrow(/another system|not JSON/);
   });
 
   it("says why what is none cannot be read", () => {

@@ -10,6 +10,9 @@ import type { RawShapes } from "./raw-shapes";
 import type { ShapeAnswers, ShapeReading } from "./shape-reading";
 import { shapefileShapes } from "./shapefile-shapes";
 
+/** Largest text of shapes that is read, bytes: a study area is small, and a text of millions of corners would keep others waiting. */
+const MOST_TEXT = 16 * 1024 * 1024;
+
 const WANTED = /\.(?:kml|shp|dbf|prj)$/i;
 
 /** Whether a text is unmistakably a file of shapes. */
@@ -65,13 +68,25 @@ interface Found {
   raw: RawShapes | null;
 }
 
+function isTextAllowed(bytes: Uint8Array, problems: ProblemList): boolean {
+  if (bytes.length <= MOST_TEXT) return true;
+  const [size, most] = [bytes.length, MOST_TEXT].map((length) => Math.ceil(length / (1024 * 1024)));
+  problems.add(
+    "error",
+    "tooLarge",
+    `the shapes have ${size} MB of text; the limit is ${most} MB`,
+    "Cut them to the study area.",
+  );
+  return false;
+}
+
 function shapesOf(bytes: Uint8Array, answers: ShapeAnswers, problems: ProblemList): Found | null {
   if (isShapefile(bytes)) {
     const raw = shapefileShapes({ shp: bytes, dbf: null, prj: null }, answers, problems);
     return { format: "shapefile", formatLabel: "shapefile, .shp alone", raw };
   }
   if (isArchive(bytes)) return shapesOfArchive(bytes, answers, problems);
-  const text = decodeText(bytes)?.text;
+  const text = isTextAllowed(bytes, problems) ? decodeText(bytes)?.text : undefined;
   if (text === undefined) return null;
   if (isKml(text)) return { format: "kml", formatLabel: "KML", raw: kmlShapes(text, problems) };
   if (isGeoJson(text)) return { format: "geoJson", formatLabel: "GeoJSON", raw: geoJsonShapes(text, problems) };
@@ -86,6 +101,7 @@ function shapesOfArchive(bytes: Uint8Array, answers: ShapeAnswers, problems: Pro
   const read = (name: string | undefined) => (name === undefined ? null : (files.get(name) ?? null));
   const kmlBytes = read(document);
   if (kmlBytes) {
+    if (!isTextAllowed(kmlBytes, problems)) return null;
     const text = decodeText(kmlBytes)?.text ?? "";
     return { format: "kmz", formatLabel: "KMZ", raw: kmlShapes(text, problems) };
   }

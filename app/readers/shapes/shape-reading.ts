@@ -12,8 +12,8 @@ export interface ShapeQuestion {
   key: "projection";
   needed: boolean;
   message: string;
-  options: { value: string; label: string }[];
-  suggestion: string;
+  /** With the place where each puts the middle of the file. */
+  options: { value: string; label: string; place: Position }[];
   answer?: string;
 }
 

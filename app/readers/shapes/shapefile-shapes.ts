@@ -1,14 +1,9 @@
 import { parseDbf, parseShp } from "shpjs";
 import type { ProblemList } from "../problem-list";
 import { nameOf, type RawShapes } from "./raw-shapes";
-import type { ShapeAnswers, ShapeQuestion } from "./shape-reading";
-
-/** Systems that a shapefile without its .prj is most often in, as the projection library knows them. */
-const CANDIDATES = [
-  { value: "EPSG:4326", label: "longitude and latitude, WGS 84" },
-  { value: "EPSG:4269", label: "longitude and latitude, NAD 83" },
-  { value: "EPSG:3857", label: "metres, web Mercator" },
-] as const;
+import type { Understood } from "../reading";
+import type { ShapeAnswers } from "./shape-reading";
+import { extentOf, statedSystem, systemQuestion } from "./shapefile-system";
 
 export interface ShapefileParts {
   shp: Uint8Array;
@@ -18,24 +13,20 @@ export interface ShapefileParts {
 }
 
 /**
- * Takes a shapefile apart and turns its coordinates to longitude and latitude by its .prj. Without one the person is asked.
+ * Takes a shapefile apart and turns its coordinates to longitude and latitude by its .prj. Without one the person is asked,
+ * and nothing is taken for a place before.
  * @returns null where it cannot be read; `problems` says why
  */
 export function shapefileShapes(parts: ShapefileParts, answers: ShapeAnswers, problems: ProblemList): RawShapes | null {
-  const projection = parts.prj ?? answers.projection ?? null;
   try {
-    const geometries = parseShp(parts.shp, projection ?? undefined);
+    const question = parts.prj === null ? systemQuestion(extentOf(parts.shp), answers) : null;
+    const answered = question?.needed === false ? answers.projection : undefined;
+    const geometries = parseShp(parts.shp, parts.prj ?? answered);
     const records = parts.dbf ? parseDbf(parts.dbf) : [];
     return {
       features: geometries.map((geometry, index) => ({ name: nameOf(records[index]), geometry: geometry ?? null })),
-      understood: [
-        {
-          what: "Projection",
-          taken: parts.prj ? systemName(parts.prj) : (answers.projection ?? "longitude and latitude, WGS 84"),
-          confidence: parts.prj ? "stated in the file" : answers.projection ? "answered" : "assumed",
-        },
-      ],
-      questions: parts.prj ? [] : [projectionQuestion(answers)],
+      understood: [parts.prj === null ? askedSystem(answered) : statedSystem(parts.prj, problems)],
+      questions: question ? [question] : [],
     };
   } catch (error) {
     const reason = error instanceof Error ? `: ${error.message.slice(0, 120)}` : "";
@@ -49,19 +40,8 @@ export function shapefileShapes(parts: ShapefileParts, answers: ShapeAnswers, pr
   }
 }
 
-/** The name in the .prj's text. */
-function systemName(prj: string): string {
-  return /^\s*[A-Z]+\["([^"]+)"/.exec(prj)?.[1]?.replaceAll("_", " ") ?? "as its .prj says";
-}
-
-function projectionQuestion({ projection }: ShapeAnswers): ShapeQuestion {
-  return {
-    key: "projection",
-    needed: projection === undefined,
-    message:
-      "The shapefile came without its .prj, so its coordinates may be in any system. Which one puts it where it belongs?",
-    options: [...CANDIDATES],
-    suggestion: CANDIDATES[0].value,
-    ...(projection !== undefined && { answer: projection }),
-  };
+function askedSystem(answered: string | undefined): Understood {
+  return answered === undefined
+    ? { what: "Projection", taken: "not known", confidence: "assumed" }
+    : { what: "Projection", taken: answered, confidence: "answered" };
 }
