@@ -3,6 +3,7 @@ import { describe, expect, it } from "vitest";
 import { readPastedGrid } from "./paste-grid";
 import { readSeries } from "./read-series";
 import { UnreadableFile, type SeriesReading } from "./reading";
+import { hours, makeNetcdf } from "../../tests/factories/make-netcdf";
 import { sampleStormFile } from "../../tests/factories/sample-storm";
 
 const read = (bytes: Uint8Array): SeriesReading | UnreadableFile => {
@@ -31,6 +32,22 @@ function expectSound(outcome: SeriesReading | UnreadableFile): void {
 }
 
 const SAMPLE = new TextEncoder().encode(sampleStormFile().text.split("\n").slice(0, 40).join("\n"));
+
+const WIND = { standard_name: "wind_speed", units: "m s-1", scale_factor: 0.1 };
+const NETCDF = makeNetcdf({
+  dimensions: { time: null },
+  records: 24,
+  variables: [
+    hours(24),
+    {
+      name: "w",
+      type: "short",
+      dimensions: ["time"],
+      values: Array.from({ length: 24 }, (_, hour) => 40 + hour),
+      attributes: WIND,
+    },
+  ],
+});
 
 describe("readSeries", () => {
   it("gives a sound reading or a refusal for any bytes", () => {
@@ -62,15 +79,18 @@ describe("readSeries", () => {
     );
   });
 
-  it("gives a sound reading or a refusal for a good file with bytes changed, lost or repeated", () => {
+  it.each([
+    ["a table of text", SAMPLE],
+    ["a NetCDF file", NETCDF],
+  ])("gives a sound reading or a refusal for %s with bytes changed, lost or repeated", (_, good) => {
     const change = fc.record({
-      at: fc.nat(SAMPLE.length - 1),
+      at: fc.nat(good.length - 1),
       byte: fc.nat(255),
       kind: fc.constantFrom("set", "cut", "repeat"),
     });
     fc.assert(
       fc.property(fc.array(change, { minLength: 1, maxLength: 12 }), (changes) => {
-        let bytes = SAMPLE;
+        let bytes = good;
         for (const { at, byte, kind } of changes) {
           if (kind === "set") {
             bytes = bytes.slice();

@@ -88,6 +88,26 @@ describe("answers from a reading sheet's form", () => {
     expect(readAnswers(form({ directionSense: "towards" }), asked).answers).toEqual({ directionSense: "towards" });
   });
 
+  it("reads a place however it is written, and what else a file of several places asks", () => {
+    const place: ReadingQuestion = { key: "place", needed: true, message: "" };
+    const axis: ReadingQuestion = {
+      key: "timeAxis",
+      needed: false,
+      message: "",
+      options: [{ value: "day", label: "" }],
+    };
+    const asked = { ...shown, questions: [place, axis] };
+    const fields = { gridMethod: "bilinear", accumulation: "day", flagged: "keep", timeAxis: "day" };
+    expect(readAnswers(form({ place: "44° 30′ N 63° 24′ W", ...fields }), asked).answers).toEqual({
+      place: "44.5,-63.4",
+      ...fields,
+    });
+    expect(readAnswers(form({ place: "somewhere" }), asked).errors.place).toContain("latitude");
+    expect(readAnswers(form({ place: "44.5,-63.4", timeAxis: "day" }), shown)).toEqual({ answers: {}, errors: {} });
+    const listed = { ...shown, questions: [{ ...place, options: [{ value: "Laval", label: "" }] }] };
+    expect(readAnswers(form({ place: "Laval" }), listed).answers).toEqual({ place: "Laval" });
+  });
+
   it("ignores columns that the file does not have", () => {
     expect(readAnswers(form({ "role-77": "rain" }), shown).answers).toEqual({});
   });

@@ -6,6 +6,7 @@ import {
   type ReadingQuestion,
   type SeriesReading,
 } from "~/readers/reading";
+import { parseCoordinates } from "~/area/parse-coordinates";
 import { zoneClock } from "~/units/format-time";
 import { CHANNELS } from "./channels";
 
@@ -54,8 +55,7 @@ export function readAnswers(form: FormData, shown: Pick<SeriesReading, "columns"
   const answers: ReadingAnswers = {};
 
   const sheet = text("sheet");
-  if (shown.questions.some(({ key, options }) => key === "sheet" && options?.some(({ value }) => value === sheet)))
-    answers.sheet = sheet;
+  if (isOffered("sheet", sheet, shown.questions)) answers.sheet = sheet;
   const zone = text("zone");
   if (zone !== "" && isZone(zone)) answers.zone = zone;
   else if (zone !== "")
@@ -75,6 +75,18 @@ export function readAnswers(form: FormData, shown: Pick<SeriesReading, "columns"
   const averaging = readNumber(text("averagingMinutes"), 0.01, 1440);
   if (averaging === "wrong") errors.averagingMinutes = "Write minutes from 0.01 to 1440.";
   else if (averaging !== null) answers.averagingMinutes = averaging;
+
+  const place = readPlace(text("place"), shown.questions);
+  if (place === "wrong") errors.place = "Write a latitude and a longitude, such as 44.5, -63.4.";
+  else if (place !== null) answers.place = place;
+  const gridMethod = text("gridMethod");
+  if (isOneOf(gridMethod, ["nearestSea", "bilinear"])) answers.gridMethod = gridMethod;
+  const accumulation = text("accumulation");
+  if (isOneOf(accumulation, ["step", "day", "start"])) answers.accumulation = accumulation;
+  const flagged = text("flagged");
+  if (isOneOf(flagged, ["leaveOut", "keep"])) answers.flagged = flagged;
+  const timeAxis = text("timeAxis");
+  if (isOffered("timeAxis", timeAxis, shown.questions)) answers.timeAxis = timeAxis;
 
   for (const column of shown.columns) {
     const role = ROLES.find(({ value }) => value === text(`role-${column.index}`))?.value;
@@ -102,6 +114,22 @@ export function readAnswers(form: FormData, shown: Pick<SeriesReading, "columns"
 function isAsRead(key: ReadingQuestion["key"], value: string, questions: readonly ReadingQuestion[]): boolean {
   const question = questions.find((candidate) => candidate.key === key);
   return question !== undefined && !question.needed && question.answer === undefined && question.suggestion === value;
+}
+
+function isOffered(key: ReadingQuestion["key"], value: string, questions: readonly ReadingQuestion[]): boolean {
+  return questions.some(
+    (question) => question.key === key && question.options?.some((option) => option.value === value),
+  );
+}
+
+/** A place of the list as it stands there, or a position however it is written, as `LAT,LON`. */
+function readPlace(text: string, questions: readonly ReadingQuestion[]): string | null | "wrong" {
+  if (text === "" || !questions.some(({ key }) => key === "place")) return null;
+  if (isOffered("place", text, questions)) return text;
+  const { corners, problems } = parseCoordinates(text);
+  const [corner] = corners;
+  if (corner === undefined || corners.length > 1 || problems.length > 0) return "wrong";
+  return `${corner[1]},${corner[0]}`;
 }
 
 function isOneOf<const T extends string>(value: string, options: readonly T[]): value is T {

@@ -10,10 +10,13 @@ export interface OpenMatters {
 }
 
 export function openMatters(reading: SeriesReading): OpenMatters {
+  const questions = reading.questions.filter((question) => question.needed);
+  // Nothing is read of a file of several places before one of them is chosen.
+  const waits = questions.some(({ key }) => key === "place");
   return {
-    questions: reading.questions.filter((question) => question.needed),
+    questions,
     errors: reading.problems.filter((problem) => problem.severity === "error"),
-    empty: !CHANNEL_NAMES.some((channel) => (reading.channels[channel]?.count ?? 0) > 0),
+    empty: !waits && !CHANNEL_NAMES.some((channel) => (reading.channels[channel]?.count ?? 0) > 0),
   };
 }
 

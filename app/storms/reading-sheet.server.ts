@@ -1,6 +1,8 @@
+import { measureBox } from "~/area/measure-box";
 import type { StormRecord } from "~/db/models/record.server";
 import type { Storm } from "~/db/models/storm.server";
 import type { Tenant } from "~/db/scoped.server";
+import type { Position } from "~/ocean/scenario";
 import { UnreadableFile, type ReadingAnswers, type SeriesReading } from "~/readers/reading";
 import type { ChannelSeries } from "./channel-series";
 import { groupLabel, groupOf, type ChannelGroup } from "./channels";
@@ -28,6 +30,8 @@ export interface ReadingSheet {
   conflicts: Conflict[];
   /** Other places of the project where the same bytes are in use. */
   alsoIn: string[];
+  /** Middle of the project's first study box, [longitude, latitude] in degrees; null where it has none. */
+  boxCentre: Position | null;
 }
 
 /** Everything a reading sheet shows; null for a constant, which has none. */
@@ -43,6 +47,7 @@ export async function readingSheet(tenant: Tenant, storm: Storm, record: StormRe
     proposed: own === null,
     conflicts: await conflictsOf(tenant, storm, record, series),
     alsoIn: await otherUses(tenant, record),
+    boxCentre: await centreOfFirstBox(tenant, storm.projectId),
   };
 }
 
@@ -62,6 +67,11 @@ async function conflictsOf(
     held.set(group, { group, label: groupLabel(group), heldBy });
   }
   return [...held.values()];
+}
+
+async function centreOfFirstBox(tenant: Tenant, projectId: string): Promise<Position | null> {
+  const [box] = await tenant.studyBoxes.list({ where: { projectId }, order: [["createdAt", "ASC"]], limit: 1 });
+  return box === undefined ? null : measureBox(box.polygon).centroid;
 }
 
 async function otherUses(tenant: Tenant, record: StormRecord): Promise<string[]> {

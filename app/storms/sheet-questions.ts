@@ -1,4 +1,29 @@
+import type { Position } from "~/ocean/scenario";
+import { distanceKm, positionFromText } from "~/readers/netcdf/position";
 import type { ReadingAnswers, ReadingQuestion, SeriesReading } from "~/readers/reading";
+
+/**
+ * Tells for the place of a file of several what a study box says of it: its middle for a grid, else which place is
+ * nearest and how far, which may be too far to take.
+ * @param centre [longitude, latitude] in degrees, or null where the project has no box yet
+ */
+export function suggestPlace(questions: readonly ReadingQuestion[], centre: Position | null): ReadingQuestion[] {
+  if (centre === null) return [...questions];
+  const [longitude, latitude] = centre;
+  return questions.map((question) => {
+    if (question.key !== "place") return question;
+    const away = ({ value }: { value: string }) => {
+      const position = positionFromText(value);
+      return position === null ? Infinity : distanceKm(position, { latitude, longitude });
+    };
+    const nearest = [...(question.options ?? [])].sort((a, b) => away(a) - away(b))[0];
+    if (nearest !== undefined) {
+      const near = `Nearest to the first study box: ${nearest.label}, ${Math.round(away(nearest))} km from its middle.`;
+      return away(nearest) === Infinity ? question : { ...question, message: `${question.message} ${near}` };
+    }
+    return { ...question, suggestion: `${latitude.toFixed(4)},${longitude.toFixed(4)}` };
+  });
+}
 
 /**
  * The questions that a sheet shows beside the open ones: those answered already, those the reader settled by itself, and

@@ -97,7 +97,9 @@ describe.skipIf(!present)(POINT, () => {
     expectAxis(reading, fact);
     expectWind(reading, fact);
     expect(reading.windHeight).toBe(10);
-    expect(reading.understood.find(({ what }) => what === "Place")?.taken).toBe(`${fact.lat}° N, ${fact.lon}° E`);
+    expect(reading.understood.find(({ what }) => what === "Place")?.taken).toBe(
+      `${fact.lat.toFixed(3)}° N ${fact.lon.toFixed(3)}° E`,
+    );
   });
 
   it("unpacks to the facts' means, and misses nothing", () => {

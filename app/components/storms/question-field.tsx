@@ -67,6 +67,20 @@ export function QuestionField({ question, sheet, errors }: QuestionFieldProps) {
       return <CodesField question={question} answers={sheet.record.answers} />;
     case "leaveOutBadRows":
       return <LeaveOutField question={question} />;
+    case "place":
+      return question.options === undefined ? (
+        <PositionField question={question} errors={errors} />
+      ) : (
+        <OptionField question={question} name="place" label="Place" errors={errors} />
+      );
+    case "gridMethod":
+      return <OptionField question={question} name="gridMethod" label="From the grid to the place" errors={errors} />;
+    case "timeAxis":
+      return <OptionField question={question} name="timeAxis" label="Axis of time" errors={errors} />;
+    case "accumulation":
+      return <OptionField question={question} name="accumulation" label="How amounts add up" errors={errors} />;
+    case "flagged":
+      return <OptionField question={question} name="flagged" label="Values flagged as bad" errors={errors} />;
   }
 }
 
@@ -120,6 +134,31 @@ function ZoneField({
               <option key={zone} value={zone} />
             ))}
           </datalist>
+        </>
+      )}
+    </Field>
+  );
+}
+
+function PositionField({ question, errors }: Pick<ControlProps, "question" | "errors">) {
+  const box = question.suggestion === undefined ? "" : ` The first study box’s middle is ${question.suggestion}.`;
+  return (
+    <Field id={idOf(question)} label="Place" hint={question.message + box} errors={errors.place}>
+      {(described) => (
+        <>
+          <input
+            {...described}
+            name="place"
+            list="study-box-middle"
+            defaultValue={question.answer ?? ""}
+            autoComplete="off"
+            className="input max-w-60"
+          />
+          {question.suggestion !== undefined && (
+            <datalist id="study-box-middle">
+              <option value={question.suggestion} />
+            </datalist>
+          )}
         </>
       )}
     </Field>

@@ -82,8 +82,8 @@ describe("stations", () => {
     expect(reading.questions.find(({ key }) => key === "place")).toMatchObject({
       needed: true,
       options: [
-        { value: "44.5,-63.4", label: "Halifax (44.5° N, 63.4° W)" },
-        { value: "45.5,-73.4", label: "Laval (45.5° N, 73.4° W)" },
+        { value: "44.5,-63.4", label: "Halifax (44.500° N 63.400° W)" },
+        { value: "45.5,-73.4", label: "Laval (45.500° N 73.400° W)" },
       ],
     });
   });

@@ -1,3 +1,5 @@
+import { formatPosition } from "~/area/format-coordinates";
+
 export interface LatLon {
   /** Degrees north. */
   latitude: number;
@@ -33,9 +35,7 @@ export function positionFromText(text: string): LatLon | null {
   return Math.abs(latitude) <= 90 && Math.abs(longitude) <= 360 ? { latitude, longitude } : null;
 }
 
-/** `44.5° N, 63.4° W`, to four decimals. */
+/** `44.500° N 63.400° W` */
 export function positionLabel({ latitude, longitude }: LatLon): string {
-  const turned = eastwardBy(0, longitude);
-  const degrees = (value: number) => `${Number(Math.abs(value).toFixed(4))}°`;
-  return `${degrees(latitude)} ${latitude < 0 ? "S" : "N"}, ${degrees(turned)} ${turned < 0 ? "W" : "E"}`;
+  return formatPosition([longitude, latitude]);
 }

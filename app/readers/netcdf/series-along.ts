@@ -10,7 +10,7 @@ import type { Bounds } from "./cf-amounts";
 import type { TimeAxis } from "./cf-axes";
 import { cellMethods, columnsOf } from "./cf-columns";
 import { atEachLevel, type LeveledColumn } from "./cf-levels";
-import { textOf, type NetcdfFile, type NetcdfVariable } from "./netcdf-file";
+import { DamagedNetcdf, textOf, type NetcdfFile, type NetcdfVariable } from "./netcdf-file";
 import { settlePlace, type SettledPlace } from "./settle-place";
 import { leaveFlaggedOut } from "./settle-flags";
 
@@ -91,6 +91,11 @@ export function seriesAlong(
 function orderedByUse(columns: readonly LeveledColumn[], records: number): LeveledColumn[] {
   const used = columns.filter(({ role }) => role !== "leftOut").sort((a, b) => a.rank - b.rank);
   const rest = columns.filter(({ role }) => role === "leftOut");
+  if (used.length * records > MOST_CELLS)
+    throw new DamagedNetcdf(
+      `holds more than ${MOST_CELLS} values that could be used`,
+      "Cut it to the days of the storm.",
+    );
   return columns.length * records > MOST_CELLS ? used : [...used, ...rest];
 }
 

@@ -32,7 +32,7 @@ import { receiveForm } from "~/storms/receive-original.server";
 import type { FormErrorsByField } from "~/storms/refusal";
 import { removeRecord } from "~/storms/remove-record.server";
 import { recordOf, stormOf } from "~/storms/stored-record.server";
-import { settledQuestions } from "~/storms/sheet-questions";
+import { settledQuestions, suggestPlace } from "~/storms/sheet-questions";
 import { stormFigure } from "~/storms/storm-figure";
 import { wallClock } from "~/storms/storm-window";
 
@@ -42,6 +42,7 @@ export async function loader({ context, params }: Route.LoaderArgs) {
   const record = await recordOf(tenant, storm.id, params.record);
   const sheet = (await readingSheet(tenant, storm, record)) ?? notFound();
   const { reading, window } = sheet;
+  const open = openMatters(reading);
   const draw = (width: number) =>
     stormFigure(
       sheet.series,
@@ -52,8 +53,8 @@ export async function loader({ context, params }: Route.LoaderArgs) {
     storm: { id: storm.id, name: storm.name },
     record: { name: record.name, origin: record.origin, state: record.state, answers: record.answers },
     reading: presentReading(reading),
-    open: openMatters(reading),
-    settled: settledQuestions(reading, record.answers),
+    open: { ...open, questions: suggestPlace(open.questions, sheet.boxCentre) },
+    settled: suggestPlace(settledQuestions(reading, record.answers), sheet.boxCentre),
     sampleDirection: sampleDirection(reading),
     window: window && {
       startsAt: wallClock(window.startsAt, project.timeZone),
@@ -214,7 +215,7 @@ export default function ReadingSheet({ loaderData, actionData }: Route.Component
             </div>
           </div>
         ) : (
-          <p>There are no values to take over yet: say above what each column is.</p>
+          <p>There are no values to take over yet: answer the open questions, or say above what each column is.</p>
         )}
       </Form>
     </>
