@@ -16,6 +16,7 @@ import { inWriteTransaction } from "./connection.server";
 import { newId } from "./id.server";
 import { Cast } from "./models/cast.server";
 import { Estimate } from "./models/estimate.server";
+import { FlagOverride } from "./models/flag-override.server";
 import { Membership } from "./models/membership.server";
 import { MemoEstimate } from "./models/memo-estimate.server";
 import { MemoRevision } from "./models/memo-revision.server";
@@ -31,6 +32,7 @@ import { ShareVisit } from "./models/share-visit.server";
 import { SourceFile } from "./models/source-file.server";
 import { Storm } from "./models/storm.server";
 import { StudyBox } from "./models/study-box.server";
+import { ThresholdSheet } from "./models/threshold-sheet.server";
 import { WaterColumn } from "./models/water-column.server";
 
 interface TenantRow {
@@ -131,6 +133,8 @@ export interface Tenant {
   readonly sourceFiles: TenantTable<SourceFile>;
   readonly records: TenantTable<StormRecord>;
   readonly series: TenantTable<Series>;
+  readonly thresholdSheets: TenantTable<ThresholdSheet>;
+  readonly flagOverrides: TenantTable<FlagOverride>;
   readonly waterColumns: TenantTable<WaterColumn>;
   readonly casts: TenantTable<Cast>;
   readonly methodSheets: TenantTable<MethodSheet>;
@@ -158,6 +162,8 @@ export function forOrganisation(organisationId: string, transaction?: Transactio
     sourceFiles: table(SourceFile),
     records: table(StormRecord),
     series: table(Series),
+    thresholdSheets: table(ThresholdSheet),
+    flagOverrides: table(FlagOverride),
     waterColumns: table(WaterColumn),
     casts: table(Cast),
     methodSheets: table(MethodSheet),

@@ -49,7 +49,7 @@ export function heatInterpolationOf(sheet: MethodSheet): "linear" | "hold" {
 
 /** Puts rows and a storm's reading together; asks the database nothing. */
 export function gatherFrom({ box, storm, water, sheet }: EstimateRows, reading: StormReading): GatheredScenario {
-  const { forcing, problems, assumptions, scenarioStorm, hash: stormHash, records } = reading;
+  const { forcing, problems, assumptions, scenarioStorm, hash: stormHash, records, quality } = reading;
   const { choices, ensemble } = sheet;
   const { scenarioWater, registered } = water;
   const scenario =
@@ -65,7 +65,7 @@ export function gatherFrom({ box, storm, water, sheet }: EstimateRows, reading: 
     assumptions,
     register: {
       box: { name: box.name, polygon, waterDepth, shoreNormal, distanceToShore, triggerLevels },
-      storm: { name: storm.name, startsAt: storm.startsAt, endsAt: storm.endsAt, records },
+      storm: { name: storm.name, startsAt: storm.startsAt, endsAt: storm.endsAt, records, quality },
       water: registered,
       method: { name: sheet.name, version: sheet.version, choices },
     },

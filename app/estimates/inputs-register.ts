@@ -1,6 +1,7 @@
 /** Every input of an estimate by name, file and hash: shown on its page, printed in the memo, kept with its last run. */
 import type { InputParts } from "./input-parts";
 import type { MethodChoices, Position, TriggerLevel } from "~/ocean/scenario";
+import type { RegisteredQuality } from "~/quality/register-quality";
 import type { RecordProvenance } from "~/storms/provenance";
 import type { CastProvenance } from "~/water/cast-provenance";
 
@@ -12,6 +13,8 @@ export interface RegisteredRecord {
   fileName: string | null;
   sha256: string | null;
   provenance: RecordProvenance | null;
+  /** Absent in runs of before series were tested. */
+  id?: string;
 }
 
 export interface RegisteredWater {
@@ -38,8 +41,15 @@ export interface InputsRegister {
     distanceToShore: number | null;
     triggerLevels: TriggerLevel[];
   };
-  /** Seconds since 1970-01-01T00:00:00Z. */
-  storm: { name: string; startsAt: number | null; endsAt: number | null; records: RegisteredRecord[] };
+  storm: {
+    name: string;
+    /** Seconds since 1970-01-01T00:00:00Z. */
+    startsAt: number | null;
+    endsAt: number | null;
+    records: RegisteredRecord[];
+    /** Absent in runs of before series were tested. */
+    quality?: RegisteredQuality;
+  };
   water: RegisteredWater;
   method: { name: string; version: number; choices: MethodChoices };
 }

@@ -3,11 +3,14 @@ import { partHash } from "./input-parts";
 import type { RegisteredRecord } from "./inputs-register";
 import { Recent } from "./recent";
 import { readForcing, type ReadForcing } from "./storm-forcing";
+import { usedForcing } from "./used-forcing";
 import type { Storm } from "~/db/models/storm.server";
 import type { Tenant } from "~/db/scoped.server";
-import { fromBlob } from "~/db/typed-array.server";
 import type { ScenarioStorm } from "~/ocean/scenario";
-import type { SampledChannels } from "~/quality/samples";
+import { judgeSeries, qualityInputs } from "~/quality/quality-inputs.server";
+import { registerQuality, type RegisteredQuality } from "~/quality/register-quality";
+import { loadSeries } from "~/storms/load-series.server";
+import { windowOf } from "~/storms/storm-window";
 
 /** A storm's series as the engine will take them. */
 export interface StormReading extends ReadForcing {
@@ -15,31 +18,24 @@ export interface StormReading extends ReadForcing {
   /** Hash of `scenarioStorm`, and of what stands in its way, which a longer window may bring without another sample. */
   hash: string | null;
   records: RegisteredRecord[];
+  quality: RegisteredQuality;
 }
 
 type Series = Omit<StormReading, "records">;
 
 const recent = new Recent<Series>(64);
 
-async function channelsOf(tenant: Tenant, stormId: string): Promise<SampledChannels> {
-  const rows = await tenant.series.list({ where: { stormId } });
-  return Object.fromEntries(
-    rows.map(({ channel, time, values, length }) => [
-      channel,
-      { time: fromBlob(time, length), values: fromBlob(values, length) },
-    ]),
-  );
-}
-
 /**
- * Reads a storm's series from the database, or from memory while no row of them changed.
+ * Reads a storm's series from the database, or from memory while nothing that it depends on changed.
  * @param zone names times in messages
+ * @param leaveOutSuspect as the storm says; the other way round to see what it makes
  */
 export async function readStorm(
   tenant: Tenant,
   storm: Storm,
   heatInterpolation: "linear" | "hold",
   zone: string,
+  leaveOutSuspect: boolean = storm.leaveOutSuspect,
 ): Promise<StormReading> {
   const [rows, recordRows] = await Promise.all([
     tenant.series.list({ where: { stormId: storm.id }, without: ["time", "values"], order: [["channel", "ASC"]] }),
@@ -49,26 +45,43 @@ export async function readStorm(
     where: { id: recordRows.flatMap(({ sourceFileId }) => sourceFileId ?? []) },
     without: ["bytes"],
   });
-  const records = recordRows.map(({ name, origin, sourceFileId, provenance }): RegisteredRecord => {
+  const records = recordRows.map(({ id: recordId, name, origin, sourceFileId, provenance }): RegisteredRecord => {
     const file = files.find(({ id }) => id === sourceFileId);
-    return { name, origin, sourceFileId, fileName: file?.name ?? null, sha256: file?.sha256 ?? null, provenance };
+    return {
+      id: recordId,
+      name,
+      origin,
+      sourceFileId,
+      fileName: file?.name ?? null,
+      sha256: file?.sha256 ?? null,
+      provenance,
+    };
   });
   const windRecord = rows.find(({ channel }) => channel === "windSpeed")?.recordId;
   const windHeight = recordRows.find(({ id }) => id === windRecord)?.provenance?.windHeight ?? null;
-  const { startsAt, endsAt } = storm;
+  const { startsAt, endsAt, missingAccepted } = storm;
+  const inputs = await qualityInputs(tenant, storm, recordRows);
   const key = JSON.stringify([
     [tenant.organisationId, storm.id, startsAt, endsAt, windHeight, heatInterpolation, zone],
+    [leaveOutSuspect, missingAccepted, storm.projectId, inputs.thresholdsVersion, inputs.place],
+    inputs.overrides.map(({ id }) => id),
     rows.map(({ id, updatedAt }) => [id, updatedAt]),
   ]);
   const known = recent.get(key);
   if (known) return { ...known, records };
-  const channels = await channelsOf(tenant, storm.id);
-  const read = readForcing({ channels, windHeight, startsAt, endsAt, heatInterpolation }, zone);
+  const judged = judgeSeries(await loadSeries(tenant, storm.id), inputs);
+  const window = windowOf(storm);
+  const used = usedForcing(judged, window, { leaveOutSuspect, missingAccepted: missingAccepted !== null });
+  const read = readForcing({ channels: used.channels, windHeight, startsAt, endsAt, heatInterpolation }, zone);
+  const problems = [...used.problems, ...read.problems];
   const asked = read.forcing && scenarioStorm(read.forcing);
   const series: Series = {
-    ...read,
+    forcing: read.forcing,
+    problems,
+    assumptions: [...read.assumptions, ...used.assumptions],
     scenarioStorm: asked,
-    hash: asked && partHash(read.problems.length > 0 ? [asked, read.problems] : asked),
+    hash: asked && partHash(problems.length > 0 ? [asked, problems] : asked),
+    quality: registerQuality(judged, window, { ...inputs, leaveOutSuspect, missingAccepted }),
   };
   recent.set(key, series);
   return { ...series, records };

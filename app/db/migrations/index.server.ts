@@ -3,6 +3,7 @@ import { firstTables } from "./2026-12-01-first-tables.server";
 import { estimateInputs } from "./2026-12-01-estimate-inputs.server";
 import { methodSheetEnsembles } from "./2026-12-01-method-sheet-ensembles.server";
 import { casts } from "./2026-12-01-casts.server";
+import { quality } from "./2026-12-01-quality.server";
 
 export interface MigrationContext {
   /** Runs one statement inside the migration's transaction. */
@@ -11,4 +12,4 @@ export interface MigrationContext {
 export type Migration = RunnableMigration<MigrationContext>;
 
 /** In order. A migration that has been released is never edited: add the next one. */
-export const migrations: Migration[] = [firstTables, estimateInputs, methodSheetEnsembles, casts];
+export const migrations: Migration[] = [firstTables, estimateInputs, methodSheetEnsembles, casts, quality];

@@ -1,5 +1,6 @@
 import { type CreationOptional, DataTypes, type InferAttributes, type InferCreationAttributes, Model } from "sequelize";
 import { sequelize } from "../connection.server";
+import type { MissingAccepted } from "~/quality/missing-rule";
 
 /** A named event: a time window with its forcing series. */
 export class Storm extends Model<InferAttributes<Storm>, InferCreationAttributes<Storm>> {
@@ -10,6 +11,10 @@ export class Storm extends Model<InferAttributes<Storm>, InferCreationAttributes
   /** Seconds since 1970 UTC; null until a record is confirmed. */
   declare startsAt: number | null;
   declare endsAt: number | null;
+  /** Whether estimates leave suspect values out; they keep them by default. */
+  declare leaveOutSuspect: CreationOptional<boolean>;
+  /** Who took it on to estimate with more missing than the rule allows, and why; null while nobody did. */
+  declare missingAccepted: CreationOptional<MissingAccepted | null>;
   declare createdAt: CreationOptional<Date>;
   declare updatedAt: CreationOptional<Date>;
 }
@@ -22,6 +27,8 @@ Storm.init(
     name: { type: DataTypes.TEXT, allowNull: false, validate: { len: [1, 120] } },
     startsAt: { type: DataTypes.DOUBLE, allowNull: true },
     endsAt: { type: DataTypes.DOUBLE, allowNull: true },
+    leaveOutSuspect: { type: DataTypes.BOOLEAN, allowNull: false, defaultValue: false },
+    missingAccepted: { type: DataTypes.JSON, allowNull: true },
     createdAt: DataTypes.DATE,
     updatedAt: DataTypes.DATE,
   },
