@@ -100,9 +100,9 @@ describe("validateScenario", () => {
     [
       "a misspelt cyclone",
       withStorm({ cyclone: { radiusOfMaximumWind: 40_000, translationSpeed: 5, speed: 5 } }),
-      "storm.cyclone INVALID_INPUT",
+      "storm.cyclone.speed INVALID_INPUT",
     ],
-    ["a misspelt heat", withStorm({ heat: { shortwav: [0] } }), "storm.heat INVALID_INPUT"],
+    ["a misspelt heat", withStorm({ heat: { shortwav: [0] } }), "storm.heat.shortwav INVALID_INPUT"],
     ["no layer depth", { ...plain, water: { temperature: 18, salinity: 35 } }, "water.layerDepth INVALID_INPUT"],
     [
       "a layer of no depth",
@@ -144,7 +144,9 @@ describe("validateScenario", () => {
       "water.cast INVALID_INPUT",
     ],
     ["an unknown law", { ...plain, method: { dragLaw: "mine" } }, "method.dragLaw INVALID_INPUT"],
-    ["a misspelt choice", { ...plain, method: { dragLow: "constant" } }, "method INVALID_INPUT"],
+    ["a misspelt choice", { ...plain, method: { dragLow: "constant" } }, "method.dragLow INVALID_INPUT"],
+    ["a misspelt key of the box", { ...plain, box: { ...plain.box, waterDept: 20 } }, "box.waterDept INVALID_INPUT"],
+    ["a misspelt part", { ...plain, triggers: [] }, "triggers INVALID_INPUT"],
     ["no place", { ...plain, box: { name: "nowhere" } }, "box.latitude INVALID_INPUT"],
     [
       "a line for a polygon",

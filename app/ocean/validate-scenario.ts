@@ -13,6 +13,8 @@ import {
 } from "./validation/scenario-schema";
 import { stormRules } from "./validation/storm-rules";
 
+const PARTS = ["box", "water", "storm", "method", "triggerLevels", "ensemble"];
+
 /** As many as a person can work through; the last one then says that there are more. */
 const MOST_PROBLEMS = 50;
 
@@ -29,6 +31,7 @@ export function validateScenario(scenario: unknown): ScenarioProblem[] {
   const parts = scenario as Record<string, unknown>;
   const hasCast = typeof parts.water === "object" && parts.water !== null && "cast" in parts.water;
   const shape = [
+    ...Object.keys(parts).flatMap((key) => (PARTS.includes(key) ? [] : [unknownKey("", key)])),
     ...shapeProblems(boxSchema, parts.box, "box"),
     ...shapeProblems(hasCast ? castSchema : twoLayerSchema, parts.water, "water"),
     ...shapeProblems(stormSchema, parts.storm, "storm"),
@@ -49,12 +52,18 @@ function shapeProblems(schema: z.ZodType, part: unknown, name: string): Scenario
   }
   const parsed = schema.safeParse(part, { error: plainMessage });
   if (parsed.success) return [];
-  return parsed.error.issues.map((issue) => ({
-    path: pathText(name, issue.path),
-    code: issue.code === "custom" && typeof issue.params?.code === "string" ? issue.params.code : "INVALID_INPUT",
-    message:
-      issue.code === "unrecognized_keys" ? `Unknown: ${issue.keys.join(", ")}. Check the spelling.` : issue.message,
-  }));
+  return parsed.error.issues.flatMap((issue) => {
+    const path = pathText(name, issue.path);
+    if (issue.code === "unrecognized_keys") return issue.keys.map((key) => unknownKey(path, key));
+    const code =
+      issue.code === "custom" && typeof issue.params?.code === "string" ? issue.params.code : "INVALID_INPUT";
+    return [{ path, code, message: issue.message }];
+  });
+}
+
+function unknownKey(parent: string, key: string): ScenarioProblem {
+  const path = parent === "" ? key : `${parent}.${key}`;
+  return { path, code: "INVALID_INPUT", message: "A scenario knows no such key; check its spelling." };
 }
 
 const KINDS: Record<string, string> = { object: "an object", array: "a list", string: "text" };

@@ -1,7 +1,7 @@
 import { copyCell, renewDensity, type ColumnState } from "./column-state";
 
-/** A step upwards in density smaller than this is rounding, kg/m³. */
-const TOLERANCE = 1e-10;
+/** A step in density smaller than this is rounding, kg/m³. */
+export const DENSITY_ROUNDING = 1e-10;
 
 /**
  * Mixes only what is statically unstable: each unstable pair becomes a block, which grows up and down while it is
@@ -11,7 +11,7 @@ const TOLERANCE = 1e-10;
 export function mixStatically(state: ColumnState): void {
   const { rho, cells } = state;
   for (let k = 0; k + 1 < cells; k++) {
-    if (rho[k + 1] < rho[k] - TOLERANCE) k = pool(state, k) - 1;
+    if (rho[k + 1] < rho[k] - DENSITY_ROUNDING) k = pool(state, k) - 1;
   }
 }
 
@@ -33,8 +33,8 @@ function pool(state: ColumnState, k: number): number {
     u[block] = sumU / count;
     v[block] = sumV / count;
     renewDensity(state, block, block + 1);
-    if (bottom + 1 < cells && rho[bottom + 1] < rho[block] - TOLERANCE) block = ++bottom;
-    else if (top > 0 && rho[block] < rho[top - 1] - TOLERANCE) block = --top;
+    if (bottom + 1 < cells && rho[bottom + 1] < rho[block] - DENSITY_ROUNDING) block = ++bottom;
+    else if (top > 0 && rho[block] < rho[top - 1] - DENSITY_ROUNDING) block = --top;
     else break;
     sumT += T[block];
     sumS += S[block];

@@ -41,7 +41,8 @@ export function runEnsemble(
   if (drawn.rows.length === 0) {
     throw new OceanError(
       "NOT_CONVERGED",
-      "No member of the ensemble could be computed; the case lies at the edge of what the model can bear.",
+      `None of the ${members} members could be computed, though the scenario itself can; the first ended with: ${refusals[0].message}`,
+      "ensemble",
     );
   }
   const trials = factors.map((factor) => oneAtATime(factor, scenario, method));

@@ -1,8 +1,8 @@
 import fc from "fast-check";
 import { describe, expect, it } from "vitest";
+import { uniform as number } from "../../../tests/factories/uniform";
 import { SALINITY_OFFSET, SALINITY_SCALE, specificVolumeAt, surfaceSpecificVolume } from "./specific-volume";
 
-const number = (min: number, max: number) => fc.double({ min, max, noNaN: true });
 const seawater: [fc.Arbitrary<number>, fc.Arbitrary<number>, fc.Arbitrary<number>] = [
   number(0.1, 42),
   number(-2, 40),

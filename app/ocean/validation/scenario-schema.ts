@@ -9,11 +9,13 @@ const DEEPEST = 12000;
 /** The Practical Salinity that is the greatest Absolute Salinity, rounded down. */
 const SALTIEST_PRACTICAL = Math.floor((10 * SALTIEST) / SALINITY_PER_PSS) / 10;
 
+// Strict throughout: a misspelt key would otherwise fall back on a default, or on nothing, without a word.
+
 const position = z.tuple([numberWithin(-360, 360, "degrees east"), numberWithin(-90, 90, "degrees north")], {
   error: "Must be a pair [longitude, latitude].",
 });
 
-export const boxSchema = z.object({
+export const boxSchema = z.strictObject({
   name: z.string().optional(),
   polygon: z.array(position, { error: "Must be a list of [longitude, latitude] pairs." }).optional(),
   latitude: numberWithin(-90, 90, "degrees").optional(),
@@ -29,16 +31,16 @@ const salinities = {
 };
 const temperature = numberWithin(-4, 45, "°C");
 
-export const twoLayerSchema = z.object({
+export const twoLayerSchema = z.strictObject({
   temperature,
   ...salinities,
   layerDepth: depthWithin(THINNEST_LAYER, DEEPEST),
-  below: z.object({ temperature, ...salinities }).optional(),
+  below: z.strictObject({ temperature, ...salinities }).optional(),
 });
 
-export const castSchema = z.object({
+export const castSchema = z.strictObject({
   cast: z
-    .array(z.object({ depth: numberWithin(0, DEEPEST, "m"), temperature, ...salinities }), {
+    .array(z.strictObject({ depth: numberWithin(0, DEEPEST, "m"), temperature, ...salinities }), {
       error: "Must be a list of levels.",
     })
     .min(2, { error: "A cast needs at least two levels." })
@@ -48,7 +50,7 @@ export const castSchema = z.object({
 
 const heatFlux = seriesOf(numberWithin(-5000, 5000, "W/m²")).optional();
 
-export const stormSchema = z.object({
+export const stormSchema = z.strictObject({
   time: z
     .array(z.union([z.string(), z.number()], { error: "Must be an ISO 8601 time or a number of seconds." }), {
       error: "Must be a list of times.",
@@ -72,7 +74,6 @@ export const stormSchema = z.object({
     .optional(),
 });
 
-/** Strict: a misspelt key would otherwise fall back on a default without a word. */
 export const methodSchema = z.strictObject({
   model: oneOf(["budget", "slab", "column", "coastal"]).optional(),
   dragLaw: oneOf(DRAG_LAWS).optional(),
@@ -101,7 +102,7 @@ export const methodSchema = z.strictObject({
 
 export const triggersSchema = z
   .array(
-    z.object({
+    z.strictObject({
       quantity: oneOf(TRIGGER_QUANTITIES),
       side: oneOf(["below", "above"]),
       value: numberWithin(-1e6, 1e6, ""),
@@ -111,7 +112,7 @@ export const triggersSchema = z
   )
   .max(100, { error: "At most 100 trigger levels." });
 
-export const ensembleSchema = z.object({
+export const ensembleSchema = z.strictObject({
   members: numberWithin(2, 5000, "").refine(Number.isInteger, { error: "Must be a whole number." }),
   seed: numberWithin(0, 4294967295, "").refine(Number.isInteger, { error: "Must be a whole number." }),
 });
