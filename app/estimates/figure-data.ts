@@ -6,7 +6,7 @@ import { measureBox } from "~/area/measure-box";
 import type { LocalPosition } from "~/figures/drift-track";
 import type { ForcingData } from "~/figures/forcing-stack";
 import type { SeriesBand } from "~/figures/response-panels";
-import type { BandName, MethodUsed, SeriesBands } from "~/ocean/response";
+import type { BandName, MethodUsed, Response } from "~/ocean/response";
 import type { Position } from "~/ocean/scenario";
 import { epochSeconds } from "~/units/format-time";
 
@@ -44,13 +44,21 @@ export function forcingData(forcing: StormForcing, method: MethodUsed): ForcingD
   };
 }
 
-/** A band at the times of the series: as it is, or on the line between its samples where a long storm has fewer of them. */
-export function bandAt({ time, series }: SeriesBands, name: BandName, at: readonly number[]): SeriesBand {
-  const knots = time.map(epochSeconds);
-  const { p10, p90 } = series[name];
-  if (knots.length === at.length) return { p10, p90 };
-  const between = (values: number[]) => at.map((moment) => linearAt({ time: knots, values }, moment));
-  return { p10: between(p10), p90: between(p90) };
+/**
+ * A response's bands at the times of its series: as they are, or on the line between their samples where a long storm has
+ * fewer of them; undefined where no ensemble ran.
+ */
+export function bandsOf({ series, bands, uncertainty }: Response): ((name: BandName) => SeriesBand) | undefined {
+  if (!bands || !uncertainty) return undefined;
+  const members = uncertainty.computed;
+  const at = series.time.map(epochSeconds);
+  const knots = bands.time.map(epochSeconds);
+  const between = (values: number[]) =>
+    knots.length === at.length ? values : at.map((moment) => linearAt({ time: knots, values }, moment));
+  return (name) => {
+    const { p10, p50, p90 } = bands.series[name];
+    return { p10: between(p10), p50: between(p50), p90: between(p90), members };
+  };
 }
 
 /** Depth that never changes says nothing through time. */

@@ -11,13 +11,13 @@ describe("headlineFigure", () => {
     expect(headlineFigure("surfaceSalinity", headline, context)).toMatchObject({
       label: "Lowest surface salinity",
       value: { text: "31.9\u00a0g/kg" },
-      bandText: "31.6 to 32.2\u00a0g/kg",
+      bandText: "31.6 to 32.2\u00a0g/kg, median\u00a031.9",
       levels: [32.5],
       remarks: ["below 32.5\u00a0g/kg for 19\u00a0h", "−1.70\u00a0g/kg from the start", "2026-11-05 04:00 UTC"],
     });
     expect(headlineFigure("netDisplacement", headline, context)).toMatchObject({
       value: { text: "84\u00a0km" },
-      bandText: "70 to 98\u00a0km",
+      bandText: "70 to 98\u00a0km, median\u00a083",
       remarks: ["towards 128°, south-east"],
     });
   });
@@ -25,7 +25,7 @@ describe("headlineFigure", () => {
   it("tells the band of the temperature's change, not of its end", () => {
     const { value, bandText } = headlineFigure("surfaceTemperature", headline, context);
     expect(value.text).toBe("−0.9\u00a0°C");
-    expect(bandText).toBe("−1.2 to −0.7\u00a0°C");
+    expect(bandText).toBe("−1.2 to −0.7\u00a0°C, median\u00a0−0.9");
   });
 
   it("names the side of the shore, or the compass where there is none", () => {

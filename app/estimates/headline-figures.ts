@@ -77,8 +77,8 @@ export interface HeadlineFigure {
   si: number | null;
   value: FormattedQuantity;
   /** SI; null where no ensemble ran. */
-  band: { p10: number; p90: number } | null;
-  /** `31.6 to 32.2 g/kg`; empty without a band. */
+  band: Required<Band> | null;
+  /** `31.6 to 32.2 g/kg, median 31.9`; empty without a band. */
   bandText: string;
   /** SI, trigger levels of this quantity. */
   levels: number[];
@@ -151,8 +151,8 @@ function remarksOf(id: FigureId, headline: Headline, { units, zone, shore }: Fig
   }
 }
 
-function bandOf({ p10, p90 }: Band): { p10: number; p90: number } | null {
-  return p10 === undefined || p90 === undefined ? null : { p10, p90 };
+function bandOf({ p10, p50, p90 }: Band): Required<Band> | null {
+  return p10 === undefined || p50 === undefined || p90 === undefined ? null : { p10, p50, p90 };
 }
 
 /** One figure of a headline, in the organisation's units. */
@@ -175,7 +175,9 @@ export function headlineFigure(id: FigureId, headline: Headline, context: Figure
     si,
     value: formatQuantity(si, quantityId, units, { decimals, sign: SIGNED.includes(id) }),
     band,
-    bandText: band ? formatRange(band.p10, band.p90, quantityId, units, { decimals }) : "",
+    bandText: band
+      ? `${formatRange(band.p10, band.p90, quantityId, units, { decimals })}, median${SPACE}${formatQuantity(band.p50, quantityId, units, { decimals }).number}`
+      : "",
     levels: triggers.map(({ value }) => value),
     remarks: [...triggers.map((trigger) => triggerText(trigger, units)), ...remarksOf(id, headline, context)],
   };

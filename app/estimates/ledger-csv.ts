@@ -34,6 +34,7 @@ export function ledgerCsv(ledger: Ledger, { jobNumber, units, zone }: LedgerCsvC
     return [
       { name, unit },
       { name: `${name}, p10`, unit },
+      { name: `${name}, p50`, unit },
       { name: `${name}, p90`, unit },
     ];
   });
@@ -52,11 +53,11 @@ export function ledgerCsv(ledger: Ledger, { jobNumber, units, zone }: LedgerCsvC
         water?.name ?? "",
         sheet ? sheetLabel(sheet) : "",
         ...FIGURE_IDS.flatMap((id) => {
-          if (!headline) return [null, null, null];
+          if (!headline) return [null, null, null, null];
           const figure = headlineFigure(id, headline, context);
           const shown = (value: number | null | undefined) =>
             value === null || value === undefined ? null : toDisplay(value, figure.quantity, units);
-          return [shown(figure.si), shown(figure.band?.p10), shown(figure.band?.p90)];
+          return [shown(figure.si), shown(figure.band?.p10), shown(figure.band?.p50), shown(figure.band?.p90)];
         }),
         headline?.netDisplacement.towards ?? null,
         headline?.peakDrift.towards ?? null,

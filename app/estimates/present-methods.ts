@@ -1,4 +1,5 @@
 /** The engine's methods as the public page shows them, in the order of the work. */
+import { FACTORS } from "~/ocean/ensemble/factors";
 import { SOURCES, type MethodSource, type Provenance } from "~/ocean/sources";
 
 export interface MethodView {
@@ -42,6 +43,9 @@ const NAMES: Record<MethodSource["group"], string> = {
   uncertainty: "Uncertainty",
   fit: "Where a method applies",
 };
+
+/** What an ensemble varies, how far, where that comes from, and in which scenarios. */
+export const UNCERTAIN_INPUTS = FACTORS.map(({ name, range, basis, when }) => ({ name, range, basis, when }));
 
 /** @param typeset TeX to MathML */
 export function presentMethods(typeset: (tex: string) => string): MethodGroup[] {

@@ -1,5 +1,5 @@
 /** A response in words and formatted numbers, as its page shows them. */
-import { headlineRows, triggerText, type FigureContext, type HeadlineFigure } from "./headline-figures";
+import { headlineRows, hoursText, triggerText, type FigureContext, type HeadlineFigure } from "./headline-figures";
 import {
   isInUse,
   METHOD_KEYS,
@@ -69,7 +69,20 @@ function markOf(figure: HeadlineFigure, units: UnitChoices): SmallMark | null {
   return bandMark({ value: si, p10: band?.p10, p90: band?.p90, trigger: levels[0], ...ends }, figure.quantity, units);
 }
 
-function presentTrigger(trigger: TriggerOutcome, { units, zone }: FigureContext): TriggerView {
+/** Where an ensemble ran: the range of hours, and in how many members the limit was met. */
+function spreadOf({ p10, p90, metInMembers }: TriggerOutcome, computed: number | undefined): string[] {
+  if (p10 === undefined || p90 === undefined || metInMembers === undefined || computed === undefined) return [];
+  return [
+    `beyond for ${hoursText(p10)} to ${hoursText(p90)} (10th to 90th percentile)`,
+    `met in ${metInMembers} of ${computed} members`,
+  ];
+}
+
+function presentTrigger(
+  trigger: TriggerOutcome,
+  computed: number | undefined,
+  { units, zone }: FigureContext,
+): TriggerView {
   const { met, hours, firstAt, longestSpell } = trigger;
   const first = firstAt === null ? [] : [`first ${formatTime(firstAt, zone)}`];
   const spell = trigger.hoursBeyond > 0 ? [`longest spell ${longestSpell.toFixed(1)}\u00a0h`] : [];
@@ -77,7 +90,7 @@ function presentTrigger(trigger: TriggerOutcome, { units, zone }: FigureContext)
     level: `${quantity(trigger.quantity).name} ${triggerText(trigger, units)}`,
     met,
     verdict: met ? "met" : "not met",
-    detail: [...first, ...spell, `counts as met from ${hours}\u00a0h`].join(" · "),
+    detail: [...first, ...spell, `counts as met from ${hours}\u00a0h`, ...spreadOf(trigger, computed)].join(" · "),
   };
 }
 
@@ -105,7 +118,7 @@ export function presentResponse(response: Response, context: FigureContext): Res
       mark: markOf(figure, context.units),
       remarks: figure.remarks,
     })),
-    triggers: headline.triggers.map((trigger) => presentTrigger(trigger, context)),
+    triggers: headline.triggers.map((trigger) => presentTrigger(trigger, response.uncertainty?.computed, context)),
     fitNotes: fitNotes.map(({ severity, message, source }) => ({
       severity,
       word: SEVERITY_WORDS[severity],

@@ -1,8 +1,8 @@
 import { figureCsv } from "~/figures/figure-csv";
-import { SERIES_NAMES, SERIES_UNITS, type Response, type SeriesName } from "~/ocean/response";
+import { BAND_NAMES, BAND_UNITS, SERIES_NAMES, SERIES_UNITS, type BandName, type Response } from "~/ocean/response";
 
 /** Names as a spreadsheet's reader wants them; the unit is added to each. */
-const HEADERS: Record<SeriesName, string> = {
+const HEADERS: Record<BandName, string> = {
   stressX: "wind stress towards east",
   stressY: "wind stress towards north",
   driftEast: "drift towards east",
@@ -15,6 +15,8 @@ const HEADERS: Record<SeriesName, string> = {
   salinity: "surface Absolute Salinity",
   density: "surface potential density",
   layerDepth: "layer depth",
+  stress: "wind stress",
+  driftSpeed: "drift speed",
 };
 
 const PERCENTILES = { p10: "10th percentile", p50: "median", p90: "90th percentile" } as const;
@@ -25,13 +27,13 @@ const PERCENTILE_KEYS = Object.keys(PERCENTILES) as (keyof typeof PERCENTILES)[]
  * percentiles follow; a long storm has them at some of its times, and blanks between.
  */
 export function responseCsv({ series, bands }: Pick<Response, "series" | "bands">): string {
-  const banded = bands ? SERIES_NAMES.flatMap((name) => PERCENTILE_KEYS.map((p) => ({ name, p }))) : [];
+  const banded = bands ? BAND_NAMES.flatMap((name) => PERCENTILE_KEYS.map((p) => ({ name, p }))) : [];
   const sampleAt = new Map(bands?.time.map((time, sample) => [time, sample]));
   return figureCsv({
     columns: [
       { name: "time (UTC)", unit: "" },
       ...SERIES_NAMES.map((name) => ({ name: HEADERS[name], unit: SERIES_UNITS[name] })),
-      ...banded.map(({ name, p }) => ({ name: `${HEADERS[name]}, ${PERCENTILES[p]}`, unit: SERIES_UNITS[name] })),
+      ...banded.map(({ name, p }) => ({ name: `${HEADERS[name]}, ${PERCENTILES[p]}`, unit: BAND_UNITS[name] })),
     ],
     rows: series.time.map((time, index) => {
       const sample = sampleAt.get(time);

@@ -1,5 +1,5 @@
 /** The figures of a response page, drawn once for each width and kept while they are asked for. */
-import { bandAt, changing, forcingData, localOutline } from "./figure-data";
+import { bandsOf, changing, forcingData, localOutline } from "./figure-data";
 import type { FigureId } from "./headline-figures";
 import type { InputsRegister } from "./inputs-register";
 import { presentUncertainty } from "./present-uncertainty";
@@ -60,8 +60,8 @@ function draw({ response, register, forcing, ...shared }: FigureRequest): Respon
     const narrow = at(FIGURE_WIDTHS.narrow);
     return { wide: at(width), narrow: { ...narrow, table: { columns: [], rows: [] } } };
   };
-  const { bands, uncertainty } = response;
-  const banded = bands && ((name: BandName) => bandAt(bands, name, time));
+  const { uncertainty } = response;
+  const banded = bandsOf(response);
   const effects = uncertainty ? presentUncertainty(uncertainty, register.box.shoreNormal !== null).effects : [];
   const drivenBy = forcing && forcingData(forcing, response.method);
   return {

@@ -4,7 +4,7 @@ import { beyondSentence, periodOf, rangeSentence } from "./describe";
 import { drawTimeFigure } from "./draw-time-figure";
 import type { Figure } from "./figure";
 import { caption, type FigureContext } from "./figure-context";
-import { seriesPanel, type SeriesBand } from "./response-panels";
+import { bandChannels, bandSentence, seriesPanel, type SeriesBand } from "./response-panels";
 import { timeTable } from "./time-table";
 
 const LAYER_QUANTITIES = ["salinity", "temperature", "density", "layerDepth"] as const satisfies QuantityId[];
@@ -44,7 +44,7 @@ export function layerStack(data: LayerStackData, context: FigureContext): Figure
     caption: caption(
       [
         `Surface layer: ${names.join(", ")}.`,
-        data.bands ? "Tinted: from the 10th to the 90th percentile." : null,
+        bandSentence(data.bands?.salinity),
         beyondSentence(drawn.levelsBeyond),
         `${periodOf(time, context)}.`,
       ],
@@ -63,7 +63,10 @@ export function layerStack(data: LayerStackData, context: FigureContext): Figure
     svg: drawn.svg,
     table: timeTable(
       time,
-      shown.map(({ id, values }) => ({ name: QUANTITIES[id].name, quantity: id, values })),
+      shown.flatMap(({ id, values }) => [
+        { name: QUANTITIES[id].name, quantity: id, values },
+        ...bandChannels(id, data.bands?.[id]),
+      ]),
       context,
     ),
   };

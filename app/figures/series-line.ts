@@ -4,7 +4,7 @@ import { beyondSentence, endsSentence, missingSentence, periodOf, rangeSentence 
 import { drawTimeFigure } from "./draw-time-figure";
 import type { Figure } from "./figure";
 import { caption, type FigureContext } from "./figure-context";
-import { seriesPanel, type SeriesBand, type SeriesQuantity } from "./response-panels";
+import { bandChannels, bandSentence, seriesPanel, type SeriesBand, type SeriesQuantity } from "./response-panels";
 import { timeTable } from "./time-table";
 
 export interface SeriesLineData {
@@ -38,7 +38,8 @@ export function seriesLine(id: SeriesQuantity, data: SeriesLineData, context: Fi
     title: name,
     caption: caption(
       [
-        `${name}${band ? ", with the band from the 10th to the 90th percentile" : ""}.`,
+        `${name}.`,
+        bandSentence(band),
         beyondSentence(drawn.levelsBeyond),
         missingSentence(values, name),
         `${periodOf(time, context)}.`,
@@ -56,19 +57,7 @@ export function seriesLine(id: SeriesQuantity, data: SeriesLineData, context: Fi
     width: drawn.width,
     height: drawn.height,
     svg: drawn.svg,
-    table: timeTable(
-      time,
-      [
-        { name: QUANTITIES[id].name, quantity: id, values },
-        ...(band
-          ? [
-              { name: `${QUANTITIES[id].name}, 10th percentile`, quantity: id, values: band.p10 },
-              { name: `${QUANTITIES[id].name}, 90th percentile`, quantity: id, values: band.p90 },
-            ]
-          : []),
-      ],
-      context,
-    ),
+    table: timeTable(time, [{ name: QUANTITIES[id].name, quantity: id, values }, ...bandChannels(id, band)], context),
   };
 }
 

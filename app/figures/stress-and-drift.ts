@@ -7,7 +7,7 @@ import { drawTimeFigure } from "./draw-time-figure";
 import { extremes } from "./extremes";
 import type { Figure } from "./figure";
 import { caption, type FigureContext } from "./figure-context";
-import { magnitude, seriesPanel, type SeriesBand } from "./response-panels";
+import { bandChannels, bandSentence, magnitude, seriesPanel, type SeriesBand } from "./response-panels";
 import { timeTable } from "./time-table";
 
 export interface StressAndDriftData {
@@ -59,7 +59,7 @@ export function stressAndDrift(data: StressAndDriftData, context: FigureContext)
     caption: caption(
       [
         "Wind stress; drift of the layer as speed and as its components towards east and north.",
-        bands ? "Tinted: from the 10th to the 90th percentile of stress and speed." : null,
+        bandSentence(bands?.stress, "of stress and speed"),
         beyondSentence(drawn.levelsBeyond),
         `${periodOf(time, context)}.`,
       ],
@@ -78,9 +78,11 @@ export function stressAndDrift(data: StressAndDriftData, context: FigureContext)
       time,
       [
         { name: QUANTITIES.stress.name, quantity: "stress", values: stress },
+        ...bandChannels("stress", bands?.stress),
         { name: "wind stress, east", quantity: "stress", values: stressX },
         { name: "wind stress, north", quantity: "stress", values: stressY },
         { name: QUANTITIES.driftSpeed.name, quantity: "driftSpeed", values: speed },
+        ...bandChannels("driftSpeed", bands?.driftSpeed),
         { name: "drift, east", quantity: "driftSpeed", values: driftEast },
         { name: "drift, north", quantity: "driftSpeed", values: driftNorth },
       ],

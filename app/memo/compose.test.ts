@@ -64,6 +64,7 @@ describe("composeMemo", () => {
       "Intended use",
       "Findings",
       "Results",
+      "How sure this is",
       "Where the method holds here",
       "Study boxes",
       "Inputs register",
@@ -74,6 +75,31 @@ describe("composeMemo", () => {
       "Revision history",
       "Attachments",
     ]);
+  });
+
+  it("tells members, seed, failures and what each figure depends on, and says so where no ensemble ran", () => {
+    const words = (blocks: readonly Block[]) =>
+      all(blocks, "paragraph").map(({ runs }) => textOf(runs).replaceAll("\u00a0", " "));
+    const told = words(memo.blocks).find((text) => text.startsWith("Estimate 2617-07. Range"));
+    expect(told).toContain("200 members, seed 7: 10th to 90th percentile.");
+    expect(told).toContain("3 of 203 members could not be computed and are left out");
+    const tables = all(memo.blocks, "table");
+    const depends = tables.find(({ caption }) => caption.startsWith("What the figures of estimate 2617-07"));
+    expect(depends?.rows.map((row) => textOf(row[1]))).toEqual(["rain", "wind speed"]);
+    expect(depends?.rows.map((row) => textOf(row[2]).replaceAll("\u00a0", " "))).toEqual([
+      "31.5 to 32.3 g/kg",
+      "70.0 to 99.0 km",
+    ]);
+    const varied = tables.find(({ caption }) => caption === "Inputs varied in estimate 2617-07.");
+    expect(varied?.rows.map((row) => row.map(textOf).join(" | "))).toEqual([
+      "rain | ±30 % | a convention of this engine",
+      "wind speed | ±10 %. By itself it could not be computed at × 1.1. | a convention of this engine",
+    ]);
+    const [estimate] = memoInput().estimates;
+    const plainMemo = composeMemo(
+      memoInput({ estimates: [{ ...estimate, response: sampleResponse({ uncertainty: undefined }) }] }),
+    );
+    expect(words(plainMemo.blocks).join(" ")).toContain("Estimate 2617-07 was run without an ensemble");
   });
 
   it("registers each series with file, hash, rows, period, steps and gaps", () => {

@@ -9,6 +9,7 @@ import { limitBlocks, methodBlocks, referencesOf } from "./sections/method";
 import { attachmentBlocks, revisionBlocks } from "./sections/record";
 import { budgetBlocks, resultBlocks } from "./sections/results";
 import { FigureNumbers } from "./sections/section";
+import { sensitivityBlocks } from "./sections/sensitivity";
 import { draftAnswer } from "./words";
 
 export function composeMemo(input: MemoInput): MemoDocument {
@@ -67,6 +68,7 @@ function blocksOf(input: MemoInput): Block[] {
     ...(figureFits ? [] : figure),
     ...input.facts.sections.flatMap(({ heading, text }) => titled(heading, authorBlocks(text))),
     ...titled("Results", resultBlocks(input, numbers)),
+    ...titled("How sure this is", sensitivityBlocks(input)),
     ...titled("Where the method holds here", fitBlocks(input)),
     ...titled("Study boxes", boxBlocks(input)),
     ...titled("Inputs register", inputBlocks(input)),

@@ -31,12 +31,20 @@ describe("draftAnswer", () => {
   });
 
   it("says that there is no range where no ensemble ran", () => {
-    const text = answer({
-      surfaceSalinity: { value: 31.9, change: -1.7, time: "2026-11-05T04:00:00Z" },
-      netDisplacement: { value: 84_200, towards: 128 },
-    });
+    const text = answer(
+      {
+        surfaceSalinity: { value: 31.9, change: -1.7, time: "2026-11-05T04:00:00Z" },
+        netDisplacement: { value: 84_200, towards: 128 },
+      },
+      { uncertainty: undefined },
+    );
     expect(text).toContain("No ensemble was run, so these values carry no range.");
     expect(text).not.toContain("percentile");
+  });
+
+  it("says of how many members its ranges are, and what the salinity depends on", () => {
+    const text = answer({}, { fitNotes: [] });
+    expect(text).toContain("Ranges are the 10th to 90th percentile of 200 members; the salinity depends most on rain.");
   });
 
   it("warns first of all where the method does not hold", () => {

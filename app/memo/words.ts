@@ -1,5 +1,5 @@
 /** The answer of a response in plain words, of at most 120: what happened, by how much, and what limits saying so. */
-import type { Band, Response, TriggerOutcome } from "~/ocean/response";
+import type { Band, Response, TriggerOutcome, Uncertainty } from "~/ocean/response";
 import { compassWord } from "~/units/compass";
 import { formatBearing, formatQuantity, formatRange, SPACE, toDisplay } from "~/units/format-quantity";
 import { formatTime } from "~/units/format-time";
@@ -205,10 +205,21 @@ function asClause(message: string): string {
   return lowered ? head.toLowerCase() + first.slice(1) : first;
 }
 
-function range({ headline }: Response): Sentence[] {
-  const banded = [headline.surfaceSalinity, headline.netDisplacement].some((figure) => figure.p10 !== undefined);
-  if (banded) return [{ rank: 9, runs: [plain("Ranges are the 10th to 90th percentile.")] }];
+function range({ uncertainty }: Response): Sentence[] {
+  if (uncertainty) {
+    const ranges = `Ranges are the 10th to 90th percentile of ${uncertainty.computed} members`;
+    const driver = leadingInput(uncertainty);
+    return [{ rank: 9, runs: [plain(driver === null ? `${ranges}.` : `${ranges}; ${driver}.`)] }];
+  }
   return [{ rank: 3.5, runs: [plain("No ensemble was run, so these values carry no range.")] }];
+}
+
+/** `the salinity depends most on rain`; null where nothing moves it. */
+function leadingInput({ effects }: Uncertainty): string | null {
+  const effect = effects.find(({ figure }) => figure === "surfaceSalinity");
+  const [widest] = effect?.bars ?? [];
+  if (!widest || widest.high.value === widest.low.value) return null;
+  return `the salinity depends most on ${widest.factor}`;
 }
 
 function band({ p10, p90 }: Band, id: QuantityId, units: UnitChoices, decimals?: number): string {

@@ -1,6 +1,47 @@
-import type { Response } from "~/ocean/response";
+import type { Response, Uncertainty } from "~/ocean/response";
 
 const START = Date.parse("2026-11-03T00:00:00Z");
+
+/** Two inputs varied: rain that makes the salinity, wind that makes the drift; three members failed. */
+export function sampleUncertainty(): Uncertainty {
+  const bars = (rain: [number, number], wind: [number, number]) =>
+    [
+      { factor: "rain", low: { setting: "× 0.7", value: rain[0] }, high: { setting: "× 1.3", value: rain[1] } },
+      { factor: "wind speed", low: { setting: "× 0.9", value: wind[0] }, high: { setting: "× 1.1", value: wind[1] } },
+    ].sort((a, b) => b.high.value - b.low.value - (a.high.value - a.low.value));
+  return {
+    members: 203,
+    computed: 200,
+    failures: [
+      { code: "NOT_CONVERGED", message: "Gradient mixing did not settle; use a shorter timeStep.", members: 3 },
+    ],
+    seed: 7,
+    factors: [
+      { name: "rain", range: "±30 %", basis: "a convention of this engine" },
+      { name: "wind speed", range: "±10 %", basis: "a convention of this engine", failed: ["× 1.1"] },
+    ],
+    effects: [
+      {
+        figure: "surfaceSalinity",
+        value: 31.9,
+        bars: bars([31.5, 32.3], [31.8, 32]),
+        firstOrder: [
+          { factor: "rain", index: 0.81, chance: 0.05 },
+          { factor: "wind speed", index: 0.03, chance: 0.05 },
+        ],
+      },
+      {
+        figure: "netDisplacement",
+        value: 84_200,
+        bars: bars([84_200, 84_200], [70_000, 99_000]),
+        firstOrder: [
+          { factor: "wind speed", index: 0.4, chance: 0.05 },
+          { factor: "rain", index: 0, chance: 0.05 },
+        ],
+      },
+    ],
+  };
+}
 
 /** A response as the engine gives one: a freshening storm of five days, with an ensemble. */
 export function sampleResponse(changes: Partial<Response> = {}): Response {
@@ -62,6 +103,7 @@ export function sampleResponse(changes: Partial<Response> = {}): Response {
       density: at((hour) => 1025 - (hour % 24) / 40),
       layerDepth: at(() => 12),
     },
+    uncertainty: sampleUncertainty(),
     fitNotes: [
       {
         code: "DURATION",

@@ -40,7 +40,9 @@ const CAST_LAYERS = [
 
 const bandAround = (values: number[]) => ({
   p10: values.map((value) => 0.8 * Math.abs(value)),
+  p50: values.map(Math.abs),
   p90: values.map((value) => 1.2 * Math.abs(value)),
+  members: 200,
 });
 
 /** Every figure there is, of one set of series. */
@@ -57,7 +59,12 @@ export function everyFigure(series: EverySeries, context: FigureContext): Figure
         time,
         values: series.salinity,
         triggers,
-        band: { p10: series.salinity.map((value) => value - 0.3), p90: series.salinity.map((value) => value + 0.2) },
+        band: {
+          p10: series.salinity.map((value) => value - 0.3),
+          p50: series.salinity,
+          p90: series.salinity.map((value) => value + 0.2),
+          members: 64,
+        },
       },
       context,
     ),

@@ -104,16 +104,18 @@ describe("series line", () => {
   it("puts the band into the table", () => {
     const figure = seriesLine(
       "density",
-      { time, values: [1, 2, 3, 4], band: { p10: [0, 1, 2, 3], p90: [2, 3, 4, 5] } },
+      { time, values: [1, 2, 3, 4], band: { p10: [0, 1, 2, 3], p50: [1, 2, 3, 3.5], p90: [2, 3, 4, 5], members: 64 } },
       context,
     );
     expect(figure.table.columns.map((column) => column.name)).toEqual([
       "time (UTC)",
       "surface density",
       "surface density, 10th percentile",
+      "surface density, median",
       "surface density, 90th percentile",
     ]);
-    expect(figure.table.rows[1]?.slice(1)).toEqual([2, 1, 3]);
+    expect(figure.table.rows[1]?.slice(1)).toEqual([2, 1, 2, 3]);
+    expect(plain(figure.caption)).toContain("Tinted: the 10th to the 90th percentile of 64 members.");
   });
 });
 

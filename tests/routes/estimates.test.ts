@@ -122,4 +122,15 @@ describe("method sheets", () => {
     }
     expect(await page(sheets())).toMatch(/Gentle<\/strong>, version (<!-- -->)?2/);
   });
+
+  it("carry the members and the seed of their ensemble", async () => {
+    const fields = { name: "Ranged", model: "slab", members: "64", seed: "5" };
+    const refused = await consultant.post(`${sheets()}/new`, { ...fields, members: "6.5" });
+    expect(refused.status).toBe(400);
+    expect(await refused.text()).toContain("Must be a whole number.");
+    expect((await consultant.post(`${sheets()}/new`, fields)).status).toBe(302);
+    expect(await page(sheets())).toContain("range from 64 members, seed 5");
+    expect((await consultant.post(`${sheets()}/new`, { ...fields, seed: "" })).status).toBe(302);
+    expect(await page(sheets())).toContain("range from 64 members, seed 1");
+  });
 });

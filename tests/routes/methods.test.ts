@@ -1,5 +1,6 @@
 import { afterAll, beforeAll, expect, test } from "vitest";
 import { CAUTION } from "~/ocean/caution";
+import { FACTORS } from "~/ocean/ensemble/factors";
 import { SOURCES } from "~/ocean/sources";
 import { HttpClient } from "../factories/http";
 import { startServer, type RunningServer } from "../setup/run-server";
@@ -25,6 +26,9 @@ test("every method stands on the public page, typeset, with its source and the c
     expect(text).toContain(title);
     expect(text).toContain(citation);
     expect(tex.length).toBeGreaterThan(0);
+  }
+  for (const { name, range, when } of FACTORS) {
+    for (const told of [name, range, when]) expect(text).toContain(`>${told}</td>`);
   }
   const equations = SOURCES.reduce((sum, { tex }) => sum + tex.length, 0);
   expect(page.match(/<math /g)?.length).toBeGreaterThanOrEqual(equations);

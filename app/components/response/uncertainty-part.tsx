@@ -13,7 +13,13 @@ export function UncertaintyPart({ view, tornadoes }: UncertaintyPartProps) {
   return (
     <>
       <p className="max-w-prose text-slate">{view.ensemble}</p>
-      {view.effects.map(({ id, label, sentence, shares }, index) => {
+      {view.failures.map((failure) => (
+        <p key={failure} className="max-w-prose border-l-4 border-ink pl-3">
+          {failure}
+        </p>
+      ))}
+      {view.tooFew !== null && <p className="max-w-prose text-small text-slate">{view.tooFew}</p>}
+      {view.effects.map(({ id, label, sentence, shares, others }, index) => {
         const figure = tornadoes[id];
         return (
           <details key={id} open={index === 0} className="border-b border-hairline">
@@ -39,10 +45,12 @@ export function UncertaintyPart({ view, tornadoes }: UncertaintyPartProps) {
                         <td className="number">{share}</td>
                       </tr>
                     ))}
-                    <tr>
-                      <td className="text-quiet">each of the others</td>
-                      <td className="number text-quiet">under 0.01</td>
-                    </tr>
+                    {others !== "" && (
+                      <tr>
+                        <td className="text-quiet">each of the others</td>
+                        <td className="number text-quiet">{others}</td>
+                      </tr>
+                    )}
                   </tbody>
                 </WideTable>
               )}
@@ -61,10 +69,13 @@ export function UncertaintyPart({ view, tornadoes }: UncertaintyPartProps) {
             </tr>
           </thead>
           <tbody>
-            {view.factors.map(({ name, range, basis }) => (
+            {view.factors.map(({ name, range, basis, failed }) => (
               <tr key={name}>
                 <td>{name}</td>
-                <td>{range}</td>
+                <td>
+                  {range}
+                  {failed !== "" && <span className="block text-small font-bold">{failed}</span>}
+                </td>
                 <td className="text-small text-slate">{basis}</td>
               </tr>
             ))}

@@ -24,7 +24,7 @@ export function resultBlocks(input: MemoInput, numbers: FigureNumbers): Block[] 
 type Told = (estimate: MemoEstimate) => string;
 
 function comparison({ estimates, units, project }: MemoInput): Block {
-  const banded = (value: number, id: QuantityId, p10?: number, p90?: number, decimals?: number) => {
+  const banded = (value: number | null, id: QuantityId, p10?: number, p90?: number, decimals?: number) => {
     const options = decimals === undefined ? {} : { decimals };
     const text = formatQuantity(value, id, units, options).text;
     return p10 === undefined || p90 === undefined ? text : `${text} (${formatRange(p10, p90, id, units, options)})`;
@@ -116,7 +116,11 @@ function comparison({ estimates, units, project }: MemoInput): Block {
     ],
     [
       "Density step below the layer",
-      ({ response }) => formatQuantity(response.headline.densityStep.value, "densityStep", units).text,
+      ({
+        response: {
+          headline: { densityStep: it },
+        },
+      }) => banded(it.value, "densityStep", it.p10, it.p90),
     ],
     ["Input hash", ({ response }) => response.inputs],
     ["Engine", ({ response }) => response.engine],

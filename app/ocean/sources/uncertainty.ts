@@ -7,14 +7,15 @@ export const UNCERTAINTY: readonly MethodSource[] = [
     group: "uncertainty",
     title: "Latin hypercube ensemble",
     citation: "McKay, Beckman & Conover (1979), Technometrics 21:239-245; quantiles of type 7, Hyndman & Fan (1996)",
-    equation: "p10, p50, p90 over members that vary law, wind, direction, layer depth, damping and heat",
+    equation: "p10, p50, p90 over members that vary every uncertain input that the scenario has",
     tex: [
       String.raw`x_{ij} = \frac{\pi_j(i) + u_{ij}}{n}, \qquad p_{10},\ p_{50},\ p_{90}\ \text{of}\ y(x_1), \ldots, y(x_n)`,
     ],
     symbols: [],
     validRange: "at least 200 members for layer models, 64 for the column",
     provenance: "published",
-    remark: "The ranges of the factors are a convention of this engine.",
+    remark:
+      "What is varied and how far stands in the table of uncertain inputs; where no source is named a range is a convention of this engine.",
   },
   {
     id: "quantile",
@@ -59,7 +60,8 @@ export const UNCERTAINTY: readonly MethodSource[] = [
     ),
     validRange: "64 members and more",
     provenance: "from memory",
-    remark: "Checked here against functions whose indices are known.",
+    remark:
+      "Checked here against functions whose indices are known. Chance alone passes 2√(2(m - 1))/(n - 1) about once in 25 times.",
   },
   {
     id: "variance-based",

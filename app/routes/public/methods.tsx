@@ -1,8 +1,10 @@
+import type { ReactNode } from "react";
 import { Link } from "react-router";
 import type { Route } from "./+types/methods";
 import { Equations, MethodFacts } from "~/components/method-entry";
 import { Mark } from "~/components/mark";
-import { PROVENANCES, presentMethods, type MethodView } from "~/estimates/present-methods";
+import { WideTable } from "~/components/wide-table";
+import { PROVENANCES, presentMethods, UNCERTAIN_INPUTS, type MethodView } from "~/estimates/present-methods";
 import { CAUTION } from "~/ocean/caution";
 import { ENGINE_VERSION } from "~/ocean/version";
 import { mathMarkup } from "~/services/typeset.server";
@@ -62,7 +64,9 @@ export default function Methods({ loaderData }: Route.ComponentProps) {
                 {name}
               </h2>
               {methods.map((method) => (
-                <Method key={method.id} method={method} />
+                <Method key={method.id} method={method}>
+                  {method.id === "ensemble" && <UncertainInputs />}
+                </Method>
               ))}
             </section>
           ))}
@@ -72,9 +76,12 @@ export default function Methods({ loaderData }: Route.ComponentProps) {
   );
 }
 
-function Method({ method }: { method: MethodView }) {
+function Method({ method, children }: { method: MethodView; children?: ReactNode }) {
   return (
-    <article id={method.id} className="-mx-3 scroll-mt-6 break-inside-avoid border-b border-hairline px-3 py-4 target:bg-mist">
+    <article
+      id={method.id}
+      className="-mx-3 scroll-mt-6 break-inside-avoid border-b border-hairline px-3 py-4 target:bg-mist"
+    >
       <h3 className="flex flex-wrap items-baseline justify-between gap-x-4 font-bold">
         <a href={`#${method.id}`} className="text-ink no-underline">
           {method.title}
@@ -83,6 +90,33 @@ function Method({ method }: { method: MethodView }) {
       </h3>
       <Equations equations={method.equations} label={method.title} />
       <MethodFacts method={method} />
+      {children}
     </article>
+  );
+}
+
+/** Each input that an ensemble varies, with its range. */
+function UncertainInputs() {
+  return (
+    <WideTable label="Uncertain inputs of an ensemble">
+      <thead>
+        <tr>
+          <th scope="col">Uncertain input</th>
+          <th scope="col">Range</th>
+          <th scope="col">Where the range comes from</th>
+          <th scope="col">Varied</th>
+        </tr>
+      </thead>
+      <tbody>
+        {UNCERTAIN_INPUTS.map(({ name, range, basis, when }) => (
+          <tr key={name}>
+            <td>{name}</td>
+            <td className="min-w-44">{range}</td>
+            <td className="text-small text-slate">{basis}</td>
+            <td className="text-small text-slate">{when}</td>
+          </tr>
+        ))}
+      </tbody>
+    </WideTable>
   );
 }
