@@ -1,11 +1,19 @@
 /** Responses are kept once for each organisation, input hash and engine version; their series as blobs beside them. */
-import { readBands, readColumn, readSeries, ROWS_WITHOUT_PROFILES, storedSeries } from "./stored-series";
+import {
+  readBands,
+  readColumn,
+  readMemberFigures,
+  readSeries,
+  ROWS_WITHOUT_PROFILES,
+  storedSeries,
+  type LongParts,
+} from "./stored-series";
 import type { Tenant } from "~/db/scoped.server";
 import { fromBlob, toBlob } from "~/db/typed-array.server";
 import type { Response } from "~/ocean/response";
 import { epochSeconds } from "~/units/format-time";
 
-export type ResponseWithoutSeries = Omit<Response, "series" | "bands" | "column">;
+export type ResponseWithoutSeries = Omit<Response, keyof LongParts>;
 
 export interface ResultKey {
   inputHash: string;
@@ -14,7 +22,7 @@ export interface ResultKey {
 
 /** Stores a response whose times are ISO 8601; one that is there already stays as it is. */
 export async function storeResult(tenant: Tenant, response: Response): Promise<void> {
-  const { series, bands, column, ...rest } = response;
+  const { series, bands, column, memberFigures, ...rest } = response;
   const { inputs: inputHash, engine: engineVersion } = response;
   await tenant.write(async (inner) => {
     if (await resultIsStored(inner, { inputHash, engineVersion })) return;
@@ -25,7 +33,7 @@ export async function storeResult(tenant: Tenant, response: Response): Promise<v
       length: series.time.length,
       time: toBlob(series.time.map(epochSeconds)),
     });
-    for (const { name, unit, values } of storedSeries({ series, bands, column })) {
+    for (const { name, unit, values } of storedSeries({ series, bands, column, memberFigures })) {
       await inner.resultSeries.create({ resultId, name, unit, length: values.length, values: toBlob(values) });
     }
   });
@@ -65,10 +73,12 @@ export async function readResponse(
   const values = new Map(rows.map((row) => [row.name, [...fromBlob(row.values, row.length)]]));
   const bands = readBands(values);
   const column = readColumn(values);
+  const memberFigures = readMemberFigures(values);
   return {
     ...result.response,
     series: readSeries([...fromBlob(result.time, result.length)], values),
     ...(bands && { bands }),
     ...(column && { column }),
+    ...(memberFigures && { memberFigures }),
   };
 }

@@ -3,9 +3,12 @@ import { isoTime } from "./build-scenario";
 import {
   BAND_NAMES,
   BAND_UNITS,
+  EFFECT_FIGURES,
   SERIES_NAMES,
   SERIES_UNITS,
   type BandName,
+  type EffectFigureName,
+  type MemberFigures,
   type Response,
   type ResponseColumn,
   type ResponseSeries,
@@ -29,7 +32,8 @@ type Percentile = (typeof PERCENTILES)[number];
 
 type ProfileRow = "column.depth" | "column.time" | `column.${ProfileName}`;
 type BandRow = "band.time" | `band.${Percentile}.${BandName}`;
-export type StoredSeriesName = SeriesName | BandRow | ProfileRow;
+type MemberRow = `member.${EffectFigureName}`;
+export type StoredSeriesName = SeriesName | BandRow | ProfileRow | MemberRow;
 
 export interface StoredSeries {
   name: StoredSeriesName;
@@ -44,14 +48,40 @@ export const ROWS_WITHOUT_PROFILES: readonly StoredSeriesName[] = [
   ...SERIES_NAMES,
   "band.time",
   ...BAND_NAMES.flatMap((name) => PERCENTILES.map((p): BandRow => `band.${p}.${name}`)),
+  ...EFFECT_FIGURES.map((figure): MemberRow => `member.${figure}`),
 ];
 
-export function storedSeries({ series, bands, column }: Pick<Response, "series" | "bands" | "column">): StoredSeries[] {
+/** The parts of a response that are kept as rows. */
+export type LongParts = Pick<Response, "series" | "bands" | "column" | "memberFigures">;
+
+export function storedSeries({ series, bands, column, memberFigures }: LongParts): StoredSeries[] {
   return [
     ...SERIES_NAMES.map((name) => ({ name, unit: SERIES_UNITS[name], values: series[name] })),
     ...(bands ? bandRows(bands) : []),
     ...(column ? profileRows(column) : []),
+    ...(memberFigures ? memberRows(memberFigures) : []),
   ];
+}
+
+const MEMBER_UNITS: Record<EffectFigureName, string> = {
+  peakStress: "N/m²",
+  peakDrift: "m/s",
+  netDisplacement: "m",
+  transportAlong: "m³/m",
+  transportAcross: "m³/m",
+  surfaceSalinity: "g/kg",
+  surfaceTemperature: "°C",
+  layerDepth: "m",
+  densityStep: "kg/m³",
+  salinityChange: "g/kg",
+  temperatureChange: "°C",
+};
+
+function memberRows(figures: MemberFigures): StoredSeries[] {
+  return EFFECT_FIGURES.flatMap((figure) => {
+    const values = figures[figure];
+    return values ? [{ name: `member.${figure}`, unit: MEMBER_UNITS[figure], values }] : [];
+  });
 }
 
 function bandRows({ time, series }: SeriesBands): StoredSeries[] {
@@ -102,6 +132,15 @@ export function readBands(stored: StoredValues): SeriesBands | null {
     return [name, Object.fromEntries(band) as Record<Percentile, number[]>] as const;
   });
   return { time: time.map(isoTime), series: Object.fromEntries(series) as SeriesBands["series"] };
+}
+
+/** Null where no ensemble ran. */
+export function readMemberFigures(stored: StoredValues): MemberFigures | null {
+  const figures = EFFECT_FIGURES.flatMap((figure) => {
+    const values = stored.get(`member.${figure}`);
+    return values ? [[figure, values] as const] : [];
+  });
+  return figures.length === 0 ? null : Object.fromEntries(figures);
 }
 
 export function readColumn(stored: StoredValues): ResponseColumn | null {

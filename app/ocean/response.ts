@@ -149,6 +149,9 @@ export interface Uncertainty {
   effects: FigureEffects[];
 }
 
+/** What the members of an ensemble came to, of each headline figure: sorted, not to be read across figures. */
+export type MemberFigures = Partial<Record<EffectFigureName, number[]>>;
+
 export type FitSeverity = "ok" | "caution" | "doNotUse";
 
 export interface FitNote {
@@ -198,9 +201,10 @@ export interface Response {
   series: ResponseSeries;
   /** Model `column` only. */
   column?: ResponseColumn;
-  /** Where an ensemble ran: percentiles of the series, and what the headline figures depend on. */
+  /** Where an ensemble ran: percentiles of the series, what the headline figures depend on, and how they are spread. */
   bands?: SeriesBands;
   uncertainty?: Uncertainty;
+  memberFigures?: MemberFigures;
   fitNotes: FitNote[];
   recommendedModel: ModelId;
   /** Why that model, in a sentence. */

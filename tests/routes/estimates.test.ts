@@ -79,6 +79,7 @@ describe("a response", () => {
         "method",
         "bands",
         "uncertainty",
+        "memberFigures",
         "budgets",
         "inputs",
         "engine",

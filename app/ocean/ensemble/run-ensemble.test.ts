@@ -3,6 +3,7 @@ import { plainScenario } from "../../../tests/factories/scenario-arbitrary";
 import { estimate } from "../estimate";
 import { BAND_NAMES, EFFECT_FIGURES, HEADLINE_FIGURES, type Response, type Uncertainty } from "../response";
 import type { Scenario } from "../scenario";
+import { quantiles } from "../statistics/quantile";
 import { heated } from "./change-scenario";
 import { FEWEST_FOR_INDICES } from "./effects";
 
@@ -50,6 +51,15 @@ describe("an ensemble", () => {
       expect(p50, figure).toBeLessThan(p90);
     }
     expect(spread.series).toEqual(single.series);
+  });
+
+  it("keeps the members' figures that its percentiles are of", () => {
+    const { headline, memberFigures } = spreadOf(whole);
+    for (const figure of HEADLINE_FIGURES) {
+      const { p10 = NaN, p50 = NaN, p90 = NaN } = headline[figure];
+      expect(quantiles(memberFigures?.[figure] ?? [], [0.1, 0.5, 0.9])).toEqual([p10, p50, p90]);
+    }
+    expect(estimate({ ...whole, ensemble: undefined }).memberFigures).toBeUndefined();
   });
 
   it("bands every series at its times, the value at the start by the start's own uncertainty", () => {

@@ -6,6 +6,7 @@ import { latinHypercube } from "../statistics/latin-hypercube";
 import { seriesBands, withBands } from "./bands";
 import { effectsOf, type Drawn } from "./effects";
 import { FACTORS } from "./factors";
+import { memberFigures } from "./member-figures";
 import { MemberSeries, runMember } from "./members";
 import { oneAtATime } from "./one-at-a-time";
 
@@ -21,7 +22,7 @@ export function runEnsemble(
   scenario: Scenario,
   { method }: Pick<ModelRun, "method">,
   headline: Headline,
-): Pick<Response, "headline" | "bands" | "uncertainty"> {
+): Pick<Response, "headline" | "bands" | "uncertainty" | "memberFigures"> {
   if (!scenario.ensemble) return { headline };
   const { members, seed } = scenario.ensemble;
   const factors = FACTORS.filter(({ applies }) => applies(scenario, method));
@@ -49,6 +50,7 @@ export function runEnsemble(
   return {
     headline: withBands(headline, drawn.headlines),
     bands: seriesBands(scenario.storm.time, series),
+    memberFigures: memberFigures(drawn.headlines),
     uncertainty: {
       members,
       computed: drawn.rows.length,
