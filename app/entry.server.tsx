@@ -6,6 +6,7 @@ import { renderToPipeableStream } from "react-dom/server";
 import { isRouteErrorResponse, ServerRouter, type EntryContext } from "react-router";
 import { closeDatabase } from "~/db/connection.server";
 import { resumeEstimates } from "~/estimates/run-queue.server";
+import { startSending } from "~/mail/outbox.server";
 import { config } from "~/services/config.server";
 import { log, requestLog } from "~/services/log.server";
 import { requestIdOf } from "~/services/request-facts.server";
@@ -13,6 +14,7 @@ import { onShutdown } from "~/services/shutdown.server";
 
 onShutdown("database", closeDatabase);
 void resumeEstimates().catch((error: unknown) => log().error({ err: error }, "could not resume estimates"));
+startSending();
 
 export const streamTimeout = 10_000;
 

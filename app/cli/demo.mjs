@@ -73,6 +73,23 @@ async function untilReady(port, server) {
   fail("starting the application", reason, "Mend what it names, then run npm run demo again.");
 }
 
+/** A mail server that keeps what comes and shows it on a page; the demonstration runs without it where it fails. */
+function startMailbox() {
+  return new Promise((resolve) => {
+    const child = start("npm", ["run", "--silent", "mailbox", "--", "--smtp-port", "0", "--port", "0"], {
+      stdio: ["ignore", "pipe", "ignore"],
+    });
+    let output = "";
+    child.stdout.setEncoding("utf8").on("data", (chunk) => {
+      output += chunk;
+      const [, page, smtp] = /shows what comes at (\S+)\n.*takes mail at (\S+)\n/.exec(output) ?? [];
+      if (smtp) resolve({ page, smtp });
+    });
+    child.once("close", () => resolve(undefined));
+    child.once("error", () => resolve(undefined));
+  });
+}
+
 if (Number(process.versions.node.split(".")[0]) < 20) {
   fail("checking Node", `This is Node ${process.versions.node}.`, "Install Node 20.19 or newer.");
 }
@@ -111,10 +128,17 @@ const people = await step(
   "Move the data folder away to start with an empty database.",
 );
 
+const mailbox = process.env.SMTP_URL ? undefined : await startMailbox();
 const port = await choosePort();
 say("Starting …");
 const server = start(process.execPath, ["--enable-source-maps", path.join(root, "build/start.mjs")], {
-  env: { ...process.env, NODE_ENV: "production", LOG_LEVEL: process.env.LOG_LEVEL || "warn", PORT: String(port) },
+  env: {
+    ...process.env,
+    NODE_ENV: "production",
+    LOG_LEVEL: process.env.LOG_LEVEL || "warn",
+    PORT: String(port),
+    ...(mailbox ? { SMTP_URL: mailbox.smtp } : {}),
+  },
   stdio: ["ignore", "ignore", "inherit"],
 });
 server.once("exit", (code) => {
@@ -122,6 +146,7 @@ server.once("exit", (code) => {
   process.exit(stopping ? 0 : (code ?? 1));
 });
 await untilReady(port, server);
+const mailPlace = mailbox ? `Mail that it sends is shown at ${mailbox.page}` : "Mail is not shown here; see SMTP_URL.";
 say(
-  `\nGaleprint runs at ${process.env.PUBLIC_URL || `http://localhost:${port}`}\n${people.trimEnd()}\n\nCtrl+C stops it.`,
+  `\nGaleprint runs at ${process.env.PUBLIC_URL || `http://localhost:${port}`}\n${people.trimEnd()}\n${mailPlace}\n\nCtrl+C stops it.`,
 );

@@ -34,6 +34,11 @@ const COMMANDS: Record<string, Command> = {
     does: "add the demonstration organisation, its people and its project",
     run: async (args) => (await import("./commands/seed")).seedCommand(args),
   },
+  mails: {
+    usage: "mails FOLDER",
+    does: "write every mail that the product sends, with sample facts, as text and HTML files",
+    run: async (args) => (await import("./commands/mails")).mailsCommand(args),
+  },
   backup: {
     usage: "backup FILE",
     does: "write a verified copy of the database, also while the server runs",

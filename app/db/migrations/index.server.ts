@@ -4,6 +4,7 @@ import { estimateInputs } from "./2026-12-01-estimate-inputs.server";
 import { methodSheetEnsembles } from "./2026-12-01-method-sheet-ensembles.server";
 import { casts } from "./2026-12-01-casts.server";
 import { quality } from "./2026-12-01-quality.server";
+import { mail } from "./2026-12-01-mail.server";
 
 export interface MigrationContext {
   /** Runs one statement inside the migration's transaction. */
@@ -12,4 +13,4 @@ export interface MigrationContext {
 export type Migration = RunnableMigration<MigrationContext>;
 
 /** In order. A migration that has been released is never edited: add the next one. */
-export const migrations: Migration[] = [firstTables, estimateInputs, methodSheetEnsembles, casts, quality];
+export const migrations: Migration[] = [firstTables, estimateInputs, methodSheetEnsembles, casts, quality, mail];
