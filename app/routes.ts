@@ -37,6 +37,8 @@ export default [
         route(":storm", "routes/org/storms/show.tsx"),
         route(":storm/records/:record", "routes/org/storms/reading-sheet.tsx"),
         route(":storm/series.csv", "routes/org/storms/series-csv.ts"),
+        route(":storm/quality", "routes/org/storms/quality.tsx"),
+        route(":storm/quality/flags.csv", "routes/org/storms/quality-csv.ts"),
       ]),
       route("files/:file", "routes/org/storms/source-file.ts"),
 

@@ -71,7 +71,7 @@ export async function readStorm(
   if (known) return { ...known, records };
   const judged = judgeSeries(await loadSeries(tenant, storm.id), inputs);
   const window = windowOf(storm);
-  const used = usedForcing(judged, window, { leaveOutSuspect, missingAccepted: missingAccepted !== null });
+  const used = usedForcing(judged, window, { leaveOutSuspect, missingAccepted });
   const read = readForcing({ channels: used.channels, windHeight, startsAt, endsAt, heatInterpolation }, zone);
   const problems = [...used.problems, ...read.problems];
   const asked = read.forcing && scenarioStorm(read.forcing);

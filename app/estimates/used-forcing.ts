@@ -3,7 +3,13 @@ import type { ScenarioProblem } from "~/ocean/scenario";
 import { FAIL, SUSPECT } from "~/quality/flags";
 import { forcingOf, longestBridged, type ForcingChannel } from "~/quality/gap-rule";
 import type { JudgedChannel } from "~/quality/judge-storm";
-import { MISSING_REFUSED, missingVerdict, shareMissing } from "~/quality/missing-rule";
+import {
+  bearableShare,
+  MISSING_REFUSED,
+  missingVerdict,
+  shareMissing,
+  type MissingAccepted,
+} from "~/quality/missing-rule";
 import type { SampledChannels } from "~/quality/samples";
 import { usedSamples } from "~/quality/used-values";
 import { medianStep } from "~/storms/channel-series";
@@ -12,8 +18,8 @@ import type { StormWindow } from "~/storms/storm-window";
 
 export interface UseOfSeries {
   leaveOutSuspect: boolean;
-  /** Whether a person took it on to estimate with more missing than the rule allows. */
-  missingAccepted: boolean;
+  /** Set where a person took it on to estimate with more missing than the rule allows. */
+  missingAccepted: MissingAccepted | null;
 }
 
 export interface UsedForcing {
@@ -56,7 +62,7 @@ export function usedForcing(
     if (!entry || !window) continue;
     const share = shareMissing(entry, from, window, use.leaveOutSuspect);
     const verdict = missingVerdict(share);
-    if (verdict === "refused" && !use.missingAccepted) problems.push(missingProblem(name, share));
+    if (share > bearableShare(use.missingAccepted)) problems.push(missingProblem(name, share));
     const left = leftOut(entry, window, use.leaveOutSuspect);
     if (left) assumptions.push(left);
     if (verdict !== "fits") {

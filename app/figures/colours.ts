@@ -16,6 +16,7 @@ export const PRINT_COLOURS = {
   drift: "#17212b",
   shore: "#5b6b3a",
   land: "#e5dec6",
+  error: "#a3271b",
 } as const;
 
 export type FigureToken = keyof typeof PRINT_COLOURS;
@@ -24,6 +25,9 @@ export const INK = "var(--ink)";
 export const PAPER = "var(--paper)";
 export const HAIRLINE = "var(--hairline)";
 export const MIST = "var(--mist)";
+export const QUIET = "var(--quiet)";
+/** What is wrong. */
+export const FAULT = "var(--error)";
 
 /** Colour of lines and marks: heat is lighter than its text, which needs the greater contrast. */
 export function markColour(token: ColourToken): string {

@@ -2,9 +2,10 @@ import * as Plot from "@observablehq/plot";
 import { formatNumber, toDisplay } from "~/units/format-quantity";
 import { arrowStrip } from "./arrow-strip";
 import { HAIRLINE, INK, markColour, MIST } from "./colours";
+import { flagMarks } from "./flag-marks";
 import { levelMarks, peakMarks, peakSide } from "./panel-labels";
 import { FONT_SIZE } from "./plain-markup";
-import { keepExtremes, openPauses } from "./thin-line";
+import { keepExtremes, openPauses, openTurns } from "./thin-line";
 import type { TimeFrame } from "./time-frame";
 import type { PanelLine, TimePanel } from "./time-panel";
 import { valueAxis, type ValueAxis } from "./value-axis";
@@ -56,6 +57,7 @@ export function drawTimePanel(panel: TimePanel, frame: TimeFrame): DrawnPanel {
       ...bandMarks(panel, frame),
       ...panel.lines.flatMap((line) => lineMarks(line, panel, frame)),
       ...levelMarks(panel, axis, frame),
+      ...flagMarks(panel, axis, frame),
       ...(side ? peakMarks(panel, frame, side) : []),
       ...(panel.arrows ? [arrowStrip(panel.arrows, frame, markColour(panel.colour))] : []),
     ],
@@ -98,7 +100,8 @@ function displayed(values: ArrayLike<number>, time: ArrayLike<number>, panel: Ti
 }
 
 function lineMarks(line: PanelLine, panel: TimePanel, frame: TimeFrame): Plot.Markish[] {
-  const opened = line.openPauses ? openPauses(frame.time, line.values) : { time: frame.time, values: line.values };
+  const paused = line.openPauses ? openPauses(frame.time, line.values) : { time: frame.time, values: line.values };
+  const opened = line.turns ? openTurns(paused.time, paused.values) : paused;
   const points = displayed(opened.values, opened.time, panel, frame);
   const colour = markColour(panel.colour);
   const hold = line.shape === "hold";

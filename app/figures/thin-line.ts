@@ -1,5 +1,7 @@
 /** No eye and no printer tells more points apart on one line. */
 export const MAX_POINTS = 1500;
+/** degrees */
+const HALF_CIRCLE = 180;
 
 /**
  * Which samples to draw: at most `limit`. Kept are the two ends and, of every stretch, the lowest and the highest value,
@@ -53,6 +55,25 @@ export function openPauses(time: ArrayLike<number>, values: ArrayLike<number>): 
       opened.time.push(moment + median);
       opened.values.push(Number.NaN);
     }
+  }
+  return opened;
+}
+
+/**
+ * Puts a missing sample wherever a bearing turns by more than half a circle from one sample to the next, so that no line is
+ * drawn across the axis where it passes north.
+ * @param time seconds, ascending
+ * @param values degrees
+ */
+export function openTurns(time: ArrayLike<number>, values: ArrayLike<number>): { time: number[]; values: number[] } {
+  const opened = { time: [] as number[], values: [] as number[] };
+  for (let index = 0; index < time.length; index += 1) {
+    if (index > 0 && Math.abs(values[index] - values[index - 1]) > HALF_CIRCLE) {
+      opened.time.push((time[index - 1] + time[index]) / 2);
+      opened.values.push(Number.NaN);
+    }
+    opened.time.push(time[index]);
+    opened.values.push(values[index]);
   }
   return opened;
 }

@@ -12,6 +12,19 @@ export interface PanelLine {
   shape?: "line" | "hold";
   /** Leave the line open across pauses in the record. */
   openPauses?: boolean;
+  /** A bearing: leave the line open where it passes north, rather than across the whole axis. */
+  turns?: boolean;
+}
+
+/** `set`: by a person, whatever the flag. */
+export type FlagMarkKind = "suspect" | "bad" | "missing" | "set";
+
+export interface FlagMark {
+  kind: FlagMarkKind;
+  /** Seconds since 1970-01-01T00:00:00Z. */
+  seconds: number;
+  /** SI; not looked at where missing. */
+  value: number;
 }
 
 export interface PanelLevel {
@@ -38,6 +51,8 @@ export interface TimePanel {
   marked?: number | null;
   /** One a time: degrees true that the arrows beneath point to, and the speed that weighs them. */
   arrows?: { towards: ArrayLike<number>; speed: ArrayLike<number> };
+  /** Flags of quality on samples, each kind in a shape of its own. */
+  flagMarks?: readonly FlagMark[];
   /** Interval of time, in seconds, on a tinted ground. */
   window?: { start: number; end: number };
   /** px of the plotting area. */

@@ -1,7 +1,7 @@
 /** Thresholds in words, for a memo: test by test, what is suspect and what is bad. */
 import { CHANNEL_UNITS, type ChannelName } from "~/readers/reading";
 import { formatSeasons } from "./season-text";
-import type { ChannelThresholds } from "./thresholds";
+import type { ChannelThresholds, RelationThresholds, TestName } from "./thresholds";
 
 function between(low: number | null, high: number | null): string {
   if (low !== null && high !== null) return `outside ${low} to ${high}`;
@@ -17,6 +17,18 @@ function degrees(suspect: string | null, bad: string | null, unit: string): stri
 const given = (value: number | null, words: (value: number) => string) => (value === null ? null : words(value));
 
 export function describeThresholds(channel: ChannelName, limits: ChannelThresholds): string {
+  return thresholdWords(channel, limits)
+    .map(({ test, words }) => `${test === "spike" ? `spike, ${limits.spikeMethod}` : test}: ${words}`)
+    .join("; ");
+}
+
+interface TestWords {
+  test: TestName;
+  words: string;
+}
+
+/** Test by test, those that have thresholds. */
+export function thresholdWords(channel: ChannelName, limits: ChannelThresholds): TestWords[] {
   const unit = CHANNEL_UNITS[channel];
   const range = (low: number | null, high: number | null) =>
     low === null && high === null ? null : between(low, high);
@@ -28,14 +40,14 @@ export function describeThresholds(channel: ChannelName, limits: ChannelThreshol
   );
   const lasting = limits.flatHours ? `, for at least ${limits.flatHours} h` : "";
   const fine = limits.flatFineTolerance === null ? "" : ` (${limits.flatFineTolerance} where reported to 0.1 or finer)`;
-  const parts: [string, string][] = [
+  const parts: [TestName, string][] = [
     [
       "gross range",
       degrees(range(limits.suspectLow, limits.suspectHigh), range(limits.failLow, limits.failHigh), unit),
     ],
     ["climatology", limits.seasons.length > 0 ? `suspect outside ${formatSeasons(limits.seasons, "; ")} ${unit}` : ""],
     [
-      `spike, ${limits.spikeMethod}`,
+      "spike",
       degrees(
         given(limits.spikeLow, (value) => `above ${value}`),
         given(limits.spikeHigh, (value) => `above ${value}`),
@@ -63,8 +75,28 @@ export function describeThresholds(channel: ChannelName, limits: ChannelThreshol
       ),
     ],
   ];
-  return parts
-    .filter(([, text]) => text !== "")
-    .map(([test, text]) => `${test}: ${text}`)
-    .join("; ");
+  return parts.flatMap(([test, words]) => (words === "" ? [] : [{ test, words }]));
+}
+
+/** Of the tests that set channels against each other; those that have thresholds. */
+export function relationWords(limits: RelationThresholds): TestWords[] {
+  const { gustRatio, gustAbove, directionAbove, nightLight, nightElevation, jumpDeviations, jumpHours } = limits;
+  const ratio = gustRatio === null ? "" : `, or above ${gustRatio} times a mean of more than ${gustAbove ?? 0} m/s`;
+  const words: [TestName, string | null][] = [
+    ["gust and mean", `suspect below the mean${ratio}`],
+    ["direction missing", given(directionAbove, (value) => `suspect where wind above ${value} m/s has no direction`)],
+    [
+      "light at night",
+      given(nightLight, (value) => `bad above ${value} W/m² with the sun below ${nightElevation ?? 0}°`),
+    ],
+    [
+      "wind and pressure",
+      given(
+        jumpDeviations,
+        (value) =>
+          `suspect where the wind jumps by more than ${value} standard deviations of ${jumpHours ?? 0} h and the pressure does not`,
+      ),
+    ],
+  ];
+  return words.flatMap(([test, text]) => (text === null ? [] : [{ test, words: text }]));
 }

@@ -20,6 +20,9 @@ export const FLAG_WORDS: Record<Flag, string> = {
   [MISSING]: "missing",
 };
 
+/** Where there is no room for the whole. */
+export const SHORT_FLAG_WORDS: Record<Flag, string> = { ...FLAG_WORDS, [SUSPECT]: "suspect" };
+
 /** One flag a sample; every element is a `Flag`. */
 export type Flags = Uint8Array;
 

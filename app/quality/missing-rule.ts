@@ -16,6 +16,8 @@ export interface MissingAccepted {
   /** ISO UTC */
   at: string;
   reason: string;
+  /** The greatest share of a channel that was missing then: where more is missing now, it has to be taken on anew. */
+  upTo: number;
 }
 
 /** A step whose end is a rounding away from a whole one is whole. */
@@ -59,6 +61,11 @@ export function shareMissing(
 function usedBearings(speed: JudgedChannel, from: JudgedChannel, leaveOutSuspect: boolean): Float64Array {
   const values = from.values.map((value, k) => (isUsed(from.inForce[k], leaveOutSuspect) ? value : Number.NaN));
   return valuesAt(speed.time, { ...from, values });
+}
+
+/** The share up to which an estimate is made. */
+export function bearableShare(accepted: MissingAccepted | null): number {
+  return Math.max(MISSING_REFUSED, accepted?.upTo ?? 0);
 }
 
 /** Which of the rule's steps a share reaches. */

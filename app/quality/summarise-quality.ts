@@ -2,6 +2,7 @@
 import type { ChannelName } from "~/readers/reading";
 import { withinWindow, type StormWindow } from "~/storms/storm-window";
 import { FAIL, FLAGS, SUSPECT, type Flag } from "./flags";
+import { forcingOf } from "./gap-rule";
 import type { JudgedChannel } from "./judge-storm";
 import { shareMissing } from "./missing-rule";
 import type { TestName } from "./thresholds";
@@ -29,6 +30,14 @@ interface SummaryOptions {
 export function summariseQuality(judged: readonly JudgedChannel[], options: SummaryOptions): QualitySummary[] {
   const from = judged.find(({ channel }) => channel === "windFrom");
   return judged.map((channel) => summariseChannel(channel, from, options));
+}
+
+/** The greatest share that is missing of a channel that an estimate takes. */
+export function greatestMissing(judged: readonly JudgedChannel[], options: SummaryOptions): number {
+  const asked: readonly ChannelName[] = forcingOf(Object.fromEntries(judged.map((entry) => [entry.channel, entry])));
+  return summariseQuality(judged, options)
+    .filter(({ channel }) => asked.includes(channel))
+    .reduce((most, { shareMissing: share }) => Math.max(most, share), 0);
 }
 
 function summariseChannel(

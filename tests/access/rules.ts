@@ -40,6 +40,8 @@ export const RULES: Record<string, Rule> = {
   "routes/org/storms/show.tsx": { get: "project.view", post: "project.edit" },
   "routes/org/storms/reading-sheet.tsx": { get: "project.edit", post: "project.edit" },
   "routes/org/storms/series-csv.ts": { get: "project.view", post: null, resource: true },
+  "routes/org/storms/quality.tsx": { get: "project.view", post: "project.edit" },
+  "routes/org/storms/quality-csv.ts": { get: "project.view", post: null, resource: true },
   "routes/org/storms/source-file.ts": { get: "project.view", post: null, resource: true },
   "routes/org/water/list.tsx": { get: "project.view", post: null },
   "routes/org/water/new.tsx": { get: "project.edit", post: "project.edit" },

@@ -11,7 +11,7 @@ describe("printColours", () => {
     );
   });
   it("refuses a token without a print colour", () => {
-    expect(() => printColours('<path fill="var(--error)"/>')).toThrow(/--error/);
+    expect(() => printColours('<path fill="var(--sheet)"/>')).toThrow(/--sheet/);
   });
 });
 
@@ -24,7 +24,7 @@ describe("print colours", () => {
     },
   );
 
-  it.each(["ink", "slate", "wind", "rain", "heat", "density", "drift", "shore"] as const)(
+  it.each(["ink", "slate", "wind", "rain", "heat", "density", "drift", "shore", "error"] as const)(
     "%s reads on white: contrast of 4.5 to 1 (WCAG 2.2, 1.4.3)",
     (token) => {
       expect(contrastOnWhite(PRINT_COLOURS[token])).toBeGreaterThanOrEqual(4.5);

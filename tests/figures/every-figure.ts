@@ -2,10 +2,12 @@ import type { Figure } from "~/figures/figure";
 import type { FigureContext } from "~/figures/figure-context";
 import { castProfile } from "~/figures/cast-profile";
 import { driftTrack } from "~/figures/drift-track";
+import { flaggedSeries } from "~/figures/flagged-series";
 import { forcingStack } from "~/figures/forcing-stack";
 import { hodograph } from "~/figures/hodograph";
 import { layerStack } from "~/figures/layer-stack";
 import { seriesLine } from "~/figures/series-line";
+import type { FlagMarkKind } from "~/figures/time-panel";
 import { stressAndDrift } from "~/figures/stress-and-drift";
 import type { TriggerLevel } from "~/ocean/scenario";
 import type { LocalPosition } from "~/figures/drift-track";
@@ -45,6 +47,16 @@ const bandAround = (values: number[]) => ({
   members: 200,
 });
 
+const MARK_KINDS: readonly FlagMarkKind[] = ["suspect", "bad", "missing", "set"];
+
+/** Every flag, one sample after another. */
+const marked = (time: number[], values: number[]) =>
+  time.map((seconds, k) => ({
+    kind: MARK_KINDS[k % MARK_KINDS.length],
+    seconds,
+    value: Number.isFinite(values[k]) ? values[k] : 0,
+  }));
+
 /** Every figure there is, of one set of series. */
 export function everyFigure(series: EverySeries, context: FigureContext): Figure[] {
   const { time, triggerLevels: triggers } = series;
@@ -77,6 +89,19 @@ export function everyFigure(series: EverySeries, context: FigureContext): Figure
     ),
     hodograph({ ...series, inertialAmplitude: 0.5 }, context),
     driftTrack({ ...series, box: series.boxOutline, land: series.coast }, context),
+    flaggedSeries(
+      {
+        id: "quality-windFrom",
+        label: "wind direction, from",
+        quantity: "direction",
+        between: "turn",
+        time,
+        values: series.windFrom,
+        marks: marked(time, series.windFrom),
+        mostTableRows: time.length,
+      },
+      context,
+    ),
     castProfile({ ...series, depth: time.map((_, level) => 0.75 * level), layers: CAST_LAYERS }, context),
   ];
 }

@@ -154,9 +154,14 @@ export default function ShowStorm({ loaderData, actionData }: Route.ComponentPro
       <PageTitle
         actions={
           window && (
-            <a href={csv} className="button" download>
-              Series as CSV
-            </a>
+            <>
+              <Link to="quality" className="button">
+                Quality
+              </Link>
+              <a href={csv} className="button" download>
+                Series as CSV
+              </a>
+            </>
           )
         }
       >
