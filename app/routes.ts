@@ -23,6 +23,7 @@ export default [
       index("routes/org/projects/ledger.tsx"),
       route("ledger.csv", "routes/org/projects/ledger-csv.ts"),
       route("facts", "routes/org/projects/edit.tsx"),
+      route("thresholds", "routes/org/projects/thresholds.tsx"),
 
       ...prefix("area", [
         index("routes/org/area/list.tsx"),

@@ -54,7 +54,7 @@ const TOGETHER: [given: ChannelField, needed: ChannelField, message: string][] =
 export const channelThresholdsSchema = z
   .object({
     ...fieldsOf(CHANNEL_FIELDS),
-    spikeMethod: z.enum(["differential", "average"]),
+    spikeMethod: z.enum(["differential", "average"], "Choose how a spike is found."),
     seasons: z.array(season).max(12),
   })
   .superRefine((values, context) => {

@@ -31,6 +31,7 @@ export const RULES: Record<string, Rule> = {
   "routes/org/projects/ledger.tsx": { get: "project.view", post: "estimate.run" },
   "routes/org/projects/ledger-csv.ts": { get: "project.view", post: null, resource: true },
   "routes/org/projects/edit.tsx": { get: "project.edit", post: "project.edit" },
+  "routes/org/projects/thresholds.tsx": { get: "project.view", post: "project.edit" },
   "routes/org/area/list.tsx": { get: "project.view", post: null },
   "routes/org/area/new.tsx": { get: "project.edit", post: "project.edit" },
   "routes/org/area/import.tsx": { get: "project.edit", post: "project.edit" },

@@ -125,6 +125,37 @@ describe("the quality of a storm", () => {
     expect(await page(estimate)).not.toContain("out of date");
   });
 
+  it("goes by thresholds that the project chose, of which each version is kept", async () => {
+    const form = `${project}/thresholds?of=rain`;
+    const fields = Object.fromEntries(
+      [...(await page(form)).matchAll(/<input[^>]* name="(\w+)"[^>]*value="([^"]*)"/g)].map(([, name, value]) => [
+        name,
+        value,
+      ]),
+    );
+    const save = (changes: Record<string, string>) =>
+      consultant.post(form, { ...fields, spikeMethod: "differential", intent: "save", ...changes });
+    const wrong = await save({ suspectHigh: "lots" });
+    expect(wrong.status).toBe(400);
+    expect(await wrong.text()).toContain('aria-invalid="true"');
+    expect((await save({})).status).toBe(400);
+
+    const saved = await save({ suspectHigh: "0.5" });
+    expect([saved.status, saved.headers.get("Location")]).toEqual([302, form]);
+    const flagged = await page(`${storm}?channel=rain&test=gross+range`);
+    expect(flagged).toContain("version 1 of this project");
+    expect(flagged).toContain("suspect above 0.5, bad outside 0 to 400 mm/h");
+    expect(flagged).toContain("gross range: suspect");
+    const stale = await save({ suspectHigh: "2" });
+    expect(stale.status).toBe(400);
+    expect(await stale.text()).toContain("Someone saved version 1");
+
+    expect(await page(form)).toContain("Version 1, saved by The consultant");
+    expect((await consultant.post(form, { intent: "reset", version: "1" })).status).toBe(302);
+    expect(await page(`${storm}?channel=rain&test=gross+range`)).toContain("No sample is found.");
+    expect(await page(form, viewer)).not.toContain("Save the thresholds");
+  });
+
   it("can be seen by a viewer, who is offered nothing to change", async () => {
     const html = await page(storm, viewer);
     expect(html).toContain("Flags by channel");

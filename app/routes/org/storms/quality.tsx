@@ -107,7 +107,10 @@ export default function StormQuality({ loaderData, actionData }: Route.Component
       <p className="max-w-prose text-slate">
         The open tests of QARTOD, on the storm’s window: {period}. A flag neither deletes nor changes a value: estimates
         leave out what is bad or missing and use the rest. Thresholds:{" "}
-        {rules.thresholdsVersion === 0 ? "the defaults" : `version ${rules.thresholdsVersion} of this project`}.
+        <Link to={`${home}/thresholds`} className="underline">
+          {rules.thresholdsVersion === 0 ? "the defaults" : `version ${rules.thresholdsVersion} of this project`}
+        </Link>
+        .
       </p>
       <FormErrors errors={errors[WHOLE_FORM]} />
       <div className="mt-5">
