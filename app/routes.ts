@@ -56,6 +56,7 @@ export default [
         route(":estimate", "routes/org/estimates/response.tsx"),
         route(":estimate/response.json", "routes/org/estimates/response-json.ts"),
         route(":estimate/series.csv", "routes/org/estimates/series-csv.ts"),
+        route(":estimate/without-suspect", "routes/org/estimates/without-suspect.tsx"),
       ]),
 
       ...prefix("memos", [

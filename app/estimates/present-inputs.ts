@@ -8,6 +8,8 @@ import { SALINITY_PER_PSS } from "~/ocean/constants";
 import { formatBearing, formatQuantity, formatRange } from "~/units/format-quantity";
 import { formatPeriod } from "~/units/format-time";
 import { quantity } from "~/units/quantities";
+import type { RegisteredQuality } from "~/quality/register-quality";
+import { decisionLines, overrideLines, qualityLines } from "~/quality/registered-words";
 import { CHANNELS } from "~/storms/channels";
 import type { UnitChoices } from "~/units/unit-choices";
 
@@ -38,7 +40,12 @@ function triggerRow({ quantity: id, side, value, hours }: TriggerLevel, units: U
   return `${quantity(id).name} ${side} ${formatQuantity(value, id, units).text} for ${hours}\u00a0h`;
 }
 
-function recordRows({ origin, provenance }: RegisteredRecord, zone: string, units: UnitChoices): Row[] {
+function recordRows(
+  { id, origin, provenance }: RegisteredRecord,
+  quality: RegisteredQuality | undefined,
+  zone: string,
+  units: UnitChoices,
+): Row[] {
   if (!provenance) return [{ label: "Origin", value: origin }];
   const { rows, first, last, windHeight, averagingMinutes, channels, steps, dropped } = provenance;
   const said = (label: string, values: (string | null)[]): Row[] => {
@@ -67,6 +74,8 @@ function recordRows({ origin, provenance }: RegisteredRecord, zone: string, unit
       "Left out",
       dropped.map(({ reason, count, firstRow }) => `${count} rows: ${reason} (first in row ${firstRow})`),
     ),
+    ...said("Quality", quality && id ? qualityLines(quality, id) : []),
+    ...said("Flags set by persons", quality && id ? overrideLines(quality, id, zone) : []),
   ];
 }
 
@@ -125,13 +134,14 @@ export function presentInputs(register: InputsRegister, zone: string, units: Uni
             ? "not set"
             : formatPeriod(storm.startsAt, storm.endsAt, zone),
       },
+      ...(storm.quality ? [{ label: "Quality", value: decisionLines(storm.quality).join(" ") }] : []),
     ],
     records: storm.records.map((record) => ({
       name: record.name,
       sourceFileId: record.sourceFileId,
       fileName: record.fileName,
       sha256: record.sha256,
-      rows: recordRows(record, zone, units),
+      rows: recordRows(record, storm.quality, zone, units),
     })),
     castFile: water.cast ?? null,
     water: [

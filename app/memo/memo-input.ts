@@ -104,6 +104,8 @@ export interface MemoSeries {
   missingShare: number | null;
   /** As `knots to m/s (× 0.514444)`. */
   steps: string[];
+  /** What the tests and persons made of it, a sentence each; empty where it was not tested. */
+  quality: string[];
   /** Gaps, dropped rows and repairs, one each. */
   gaps: string[];
 }

@@ -1,6 +1,7 @@
 /** The memo's register of what was put in: boxes, series, water and assumptions, each once. */
 import { measureBox } from "~/area/measure-box";
 import type { InputsRegister, RegisteredRecord } from "~/estimates/inputs-register";
+import { decisionLines, overrideLines, qualityLines } from "~/quality/registered-words";
 import { formatQuantity, formatRange } from "~/units/format-quantity";
 import type { UnitChoices } from "~/units/unit-choices";
 import type { MemoAssumption, MemoBox, MemoSeries, MemoWater } from "./memo-input";
@@ -36,7 +37,7 @@ const ORIGINS: Record<RegisteredRecord["origin"], string> = {
   constant: "a constant over the storm's window",
 };
 
-function memoSeries(stormName: string, record: RegisteredRecord): MemoSeries[] {
+function memoSeries({ name: stormName, quality }: InputsRegister["storm"], record: RegisteredRecord): MemoSeries[] {
   const { provenance } = record;
   if (!provenance) return [];
   return [
@@ -58,6 +59,14 @@ function memoSeries(stormName: string, record: RegisteredRecord): MemoSeries[] {
       averagingMinutes: provenance.averagingMinutes,
       missingShare: missingShare(provenance),
       steps: provenance.steps.map(({ label, count }) => `${label} (${count} values)`),
+      quality:
+        quality && record.id
+          ? [
+              ...qualityLines(quality, record.id),
+              ...overrideLines(quality, record.id, "UTC"),
+              ...decisionLines(quality),
+            ]
+          : [],
       gaps: provenance.dropped.map(({ reason, count, firstRow }) => `${reason}: ${count}, first in row ${firstRow}`),
     },
   ];
@@ -65,7 +74,7 @@ function memoSeries(stormName: string, record: RegisteredRecord): MemoSeries[] {
 
 export function registerSeries(registers: InputsRegister[]): MemoSeries[] {
   return unique(
-    registers.flatMap(({ storm }) => storm.records.flatMap((record) => memoSeries(storm.name, record))),
+    registers.flatMap(({ storm }) => storm.records.flatMap((record) => memoSeries(storm, record))),
     ({ name, sha256 }) => `${name} ${sha256}`,
   );
 }

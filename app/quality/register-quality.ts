@@ -1,8 +1,10 @@
 /** The quality of a storm's series as an estimate keeps it with its inputs and a memo prints it. */
 import type { ChannelName } from "~/readers/reading";
 import type { StormWindow } from "~/storms/storm-window";
-import type { JudgedChannel } from "./judge-storm";
+import type { JudgedChannel, RecordOverride } from "./judge-storm";
 import type { MissingAccepted } from "./missing-rule";
+import { overrideFinder } from "./override-finder";
+import type { SetFlag } from "./overrides";
 import { summariseQuality, type QualitySummary } from "./summarise-quality";
 import { describeThresholds } from "./describe-thresholds";
 import type { Thresholds } from "./thresholds";
@@ -13,6 +15,18 @@ export interface RegisteredChannel extends Omit<QualitySummary, "raised"> {
   thresholds: string;
 }
 
+/** What a person set in one act on a channel of a record, as far as it stands. */
+export interface RegisteredOverride {
+  recordId: string;
+  channel: ChannelName;
+  flag: SetFlag;
+  reason: string;
+  count: number;
+  /** ISO UTC of the first and the last. */
+  first: string;
+  last: string;
+}
+
 export interface RegisteredQuality {
   /** 0: the defaults. */
   thresholdsVersion: number;
@@ -20,6 +34,8 @@ export interface RegisteredQuality {
   missingAccepted: MissingAccepted | null;
   /** Inside the storm's window; none while it has no window. */
   channels: RegisteredChannel[];
+  /** Absent in runs of before flags could be set. */
+  overrides?: RegisteredOverride[];
 }
 
 interface RegisterOptions {
@@ -27,12 +43,16 @@ interface RegisterOptions {
   thresholdsVersion: number;
   leaveOutSuspect: boolean;
   missingAccepted: MissingAccepted | null;
+  /** Oldest first. */
+  overrides: readonly ReasonedOverride[];
 }
+
+type ReasonedOverride = RecordOverride & { reason: string };
 
 export function registerQuality(
   judged: readonly JudgedChannel[],
   window: StormWindow | null,
-  { thresholds, thresholdsVersion, leaveOutSuspect, missingAccepted }: RegisterOptions,
+  { thresholds, thresholdsVersion, leaveOutSuspect, missingAccepted, overrides }: RegisterOptions,
 ): RegisteredQuality {
   const recordOf = new Map<ChannelName, string>(judged.map(({ channel, recordId }) => [channel, recordId]));
   const summaries = window ? summariseQuality(judged, { window, leaveOutSuspect }) : [];
@@ -49,5 +69,30 @@ export function registerQuality(
       recordId: recordOf.get(channel) ?? "",
       thresholds: describeThresholds(channel, thresholds.channels[channel]),
     })),
+    overrides: window ? registerOverrides(judged, window, overrides) : [],
   };
+}
+
+/** Flags that persons set inside the window, those of one reason together. */
+function registerOverrides(
+  judged: readonly JudgedChannel[],
+  { startsAt, endsAt }: StormWindow,
+  overrides: readonly ReasonedOverride[],
+): RegisteredOverride[] {
+  const groups = new Map<string, RegisteredOverride>();
+  const setAt = overrideFinder(overrides);
+  for (const entry of judged) {
+    const { recordId, channel } = entry;
+    entry.time.forEach((seconds, k) => {
+      const set = seconds < startsAt || seconds > endsAt ? null : setAt({ judged: entry, k });
+      if (!set || set.flag === null) return;
+      const { flag, reason } = set;
+      const last = new Date(seconds * 1000).toISOString();
+      const key = JSON.stringify([recordId, channel, flag, reason]);
+      const known = groups.get(key);
+      if (known) Object.assign(known, { count: known.count + 1, last });
+      else groups.set(key, { recordId, channel, flag, reason, count: 1, first: last, last });
+    });
+  }
+  return [...groups.values()];
 }

@@ -1,5 +1,6 @@
 import type { Storm } from "~/db/models/storm.server";
 import type { Tenant } from "~/db/scoped.server";
+import { standing } from "~/quality/overrides";
 import { formatNumber } from "~/units/format-quantity";
 import { QUANTITIES } from "~/units/quantities";
 import type { ChannelSeries } from "./channel-series";
@@ -38,6 +39,8 @@ export async function copyAsScenario(tenant: Tenant, storm: Storm, request: Scen
       name: request.name || freeName(`${storm.name}, ${scenarioWords(changes)}`.slice(0, STORM_NAME_LENGTH), taken),
       startsAt: window.startsAt + shift,
       endsAt: window.endsAt + shift,
+      leaveOutSuspect: storm.leaveOutSuspect,
+      missingAccepted: storm.missingAccepted,
     });
     const records = await inner.records.list({ where: { stormId: storm.id }, order: [["createdAt", "ASC"]] });
     for (const record of records) {
@@ -57,9 +60,36 @@ export async function copyAsScenario(tenant: Tenant, storm: Storm, request: Scen
       for (const entry of inUse) {
         await storeSeries(inner, { stormId: copy.id, recordId: id }, changeSeries(entry, changes));
       }
+      await copyOverrides(inner, { from: record.id, to: id }, changes);
     }
     return copy;
   });
+}
+
+/** What persons set stands in the scenario too, on the changed values, with who set it and why. */
+async function copyOverrides(
+  tenant: Tenant,
+  { from, to }: { from: string; to: string },
+  changes: ScenarioChanges,
+): Promise<void> {
+  const overrides = await tenant.flagOverrides.list({
+    where: { recordId: from },
+    order: [
+      ["createdAt", "ASC"],
+      ["id", "ASC"],
+    ],
+  });
+  for (const { channel, at, value, flag, reason, createdBy } of standing(overrides).values()) {
+    await tenant.flagOverrides.create({
+      recordId: to,
+      channel,
+      at: at + changes.shiftHours * 3600,
+      value: value * factorOf(channel, changes),
+      flag,
+      reason,
+      createdBy,
+    });
+  }
 }
 
 const FACTORS = { windSpeed: "windFactor", windGust: "windFactor", rain: "rainFactor" } as const;

@@ -53,6 +53,7 @@ export const RULES: Record<string, Rule> = {
   "routes/org/estimates/response.tsx": { get: "project.view", post: "estimate.run" },
   "routes/org/estimates/response-json.ts": { get: "project.view", post: null, resource: true },
   "routes/org/estimates/series-csv.ts": { get: "project.view", post: null, resource: true },
+  "routes/org/estimates/without-suspect.tsx": { get: "project.view", post: null },
   "routes/org/memos/list.tsx": { get: "project.view", post: null },
   "routes/org/memos/new.tsx": { get: "memo.write", post: "memo.write" },
   "routes/org/memos/edit.tsx": { get: "project.view", post: "memo.write" },

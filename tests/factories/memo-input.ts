@@ -85,6 +85,7 @@ export function memoInput(changes: Partial<MemoInput> = {}): MemoInput {
         averagingMinutes: 10,
         missingShare: 0.012,
         steps: ["knots to m/s (× 0.514444)", "vector mean over the hour"],
+        quality: ["wind speed: 13 400 good, 40 suspect, 8 bad; 0.4 % missing or left out", "by the default thresholds"],
         gaps: ["2026-11-04 02:00 to 05:00 UTC, interpolated as a vector"],
       },
       {
@@ -101,6 +102,7 @@ export function memoInput(changes: Partial<MemoInput> = {}): MemoInput {
         averagingMinutes: null,
         missingShare: null,
         steps: [],
+        quality: [],
         gaps: [],
       },
     ],

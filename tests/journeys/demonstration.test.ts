@@ -41,12 +41,14 @@ async function open(page: Page, home: string, part: string, link?: RegExp): Prom
   if ((await map.count()) > 0) await page.locator('.maplibregl-map[aria-busy="false"]').first().waitFor();
 }
 
-const PLACES: { name: string; part: string; link?: RegExp }[] = [
+/** Opened by a part of the project, the first thing in it, and a link of that page. */
+const PLACES: { name: string; part: string; link?: RegExp; then?: RegExp }[] = [
   { name: "ledger", part: "" },
   { name: "area", part: "/area" },
   { name: "new box", part: "/area/new" },
   { name: "storms", part: "/storms" },
   { name: "storm", part: "/storms", link: /All Souls gale/ },
+  { name: "quality", part: "/storms", link: /All Souls gale/, then: /[Qq]uality/ },
   { name: "water", part: "/water" },
   { name: "new water column", part: "/water/new" },
   { name: "estimates", part: "/estimates" },
@@ -90,8 +92,14 @@ describe.each(["light", "dark"] as const)("the demonstration in %s colours", (co
       }
       await resize(page, WIDTHS[0]);
     };
-    for (const { name, part, link } of PLACES) {
+    for (const { name, part, link, then } of PLACES) {
       await open(page, home, part, link);
+      if (then) {
+        const before = page.url();
+        await page.locator("main").getByRole("link", { name: then }).first().click();
+        await page.waitForURL((url) => url.href !== before);
+        await page.locator('body > div[aria-busy="false"]').waitFor();
+      }
       await look(name);
     }
     for (const place of PUBLIC_PLACES) {

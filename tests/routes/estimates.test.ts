@@ -95,6 +95,14 @@ describe("a response", () => {
     expect(json.uncertainty?.computed).toBe(200);
   });
 
+  it("is set beside what it would be without suspect values", async () => {
+    expect(await page(response())).toContain("without-suspect");
+    const html = await page(`${response()}/without-suspect`);
+    expect(html).toContain("Headline figures with and without suspect values");
+    expect(html.match(/<td>Peak wind stress<\/td>/g)).toHaveLength(1);
+    expect(html).toContain("Not for navigation");
+  });
+
   it("tells its inputs by file and hash, its cautions and its sources", async () => {
     const html = await page(response());
     expect(html).toMatch(/SHA-256 (<!-- -->)?[0-9a-f]{64}/);
@@ -102,9 +110,12 @@ describe("a response", () => {
     expect(html).toContain("Equations and sources");
   });
 
-  it.each(["", "/response.json", "/series.csv"])("of another address is not found: %s", async (file) => {
-    expect((await consultant.get(`${home}/estimates/nothing${file}`)).status).toBe(404);
-  });
+  it.each(["", "/response.json", "/series.csv", "/without-suspect"])(
+    "of another address is not found: %s",
+    async (file) => {
+      expect((await consultant.get(`${home}/estimates/nothing${file}`)).status).toBe(404);
+    },
+  );
 });
 
 describe("method sheets", () => {

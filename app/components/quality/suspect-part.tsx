@@ -16,7 +16,8 @@ export function SuspectPart({ leaveOutSuspect, suspect, mayEdit }: SuspectPartPr
       <p className="max-w-prose text-slate">
         In a storm, suspect very often means of interest. {suspect === 1 ? "One sample" : `${suspect} samples`} in the
         window {suspect === 1 ? "is" : "are"} flagged so;{" "}
-        <strong>estimates {leaveOutSuspect ? "leave them out" : "keep them"}.</strong>
+        <strong>estimates {leaveOutSuspect ? "leave them out" : "keep them"}.</strong> What they change stands under the
+        inputs of each response.
       </p>
       {mayEdit && (
         <Form method="post" preventScrollReset className="mt-3">

@@ -78,6 +78,7 @@ function seriesFacts(series: MemoSeries, { project, units }: MemoInput): Block[]
     ["Averaging period", series.averagingMinutes === null ? "" : `${formatNumber(series.averagingMinutes, 0)} min`],
     ["Missing", missing === null ? NOT_KNOWN : `${formatNumber(missing * 100, 1)} %`],
     ["Steps applied", series.steps.length > 0 ? series.steps.join("\n") : "none"],
+    ["Quality", series.quality.join("\n")],
     ["Gaps and repairs", series.gaps.length > 0 ? series.gaps.join("\n") : "none"],
   ]);
 }

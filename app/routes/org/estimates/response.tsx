@@ -210,7 +210,13 @@ export default function ResponsePage({ loaderData, actionData }: Route.Component
         </section>
       )}
       <section aria-labelledby="inputs">
-        <PageTitle>
+        <PageTitle
+          actions={
+            <Link to="without-suspect" className="button">
+              With and without suspect values
+            </Link>
+          }
+        >
           <span id="inputs">Inputs</span>
         </PageTitle>
         <InputsPart inputs={loaderData.inputs} assumptions={loaderData.assumptions} home={home} />
