@@ -35,7 +35,9 @@ export default [
       ...prefix("storms", [
         index("routes/org/storms/list.tsx"),
         route("new", "routes/org/storms/new.tsx"),
+        route("tracks/new", "routes/org/storms/new-track.tsx"),
         route(":storm", "routes/org/storms/show.tsx"),
+        route(":storm/track", "routes/org/storms/track.tsx"),
         route(":storm/records/:record", "routes/org/storms/reading-sheet.tsx"),
         route(":storm/series.csv", "routes/org/storms/series-csv.ts"),
         route(":storm/quality", "routes/org/storms/quality.tsx"),

@@ -1,5 +1,6 @@
 /** What the figures of an estimate are drawn from, for its page and for a memo. */
 import type { StormForcing } from "./storm-forcing";
+import type { InputsRegister } from "./inputs-register";
 import { linearAt } from "./resample";
 import { windAtTenMetres } from "./wind-at-ten-metres";
 import { measureBox } from "~/area/measure-box";
@@ -8,6 +9,7 @@ import type { ForcingData } from "~/figures/forcing-stack";
 import type { SeriesBand } from "~/figures/response-panels";
 import type { BandName, MethodUsed, Response } from "~/ocean/response";
 import type { Position } from "~/ocean/scenario";
+import { trackSentence } from "~/storms/storm-track";
 import { epochSeconds } from "~/units/format-time";
 
 const EARTH_RADIUS = 6_371_008.8;
@@ -33,14 +35,21 @@ function netHeat({ heat, time }: StormForcing): number[] | undefined {
   return time.map((_, index) => series.reduce((sum, part) => sum + part[index], 0));
 }
 
+/** Said of a wind that a track gave; nothing of one that was recorded. */
+function windOrigin({ storm }: InputsRegister): string | undefined {
+  const recorded = storm.quality?.channels.some(({ channel }) => channel === "windSpeed");
+  return storm.track && !recorded ? trackSentence(storm.track) : undefined;
+}
+
 /** Wind as the engine took it, at 10 m; rain and heat where the storm has them. */
-export function forcingData(forcing: StormForcing, method: MethodUsed): ForcingData {
+export function forcingData(forcing: StormForcing, method: MethodUsed, register: InputsRegister): ForcingData {
   return {
     time: forcing.time,
     windSpeed10: windAtTenMetres(forcing, method),
     windFrom: forcing.windFrom,
     rainRate: forcing.rain,
     netHeat: netHeat(forcing),
+    windOrigin: windOrigin(register),
   };
 }
 

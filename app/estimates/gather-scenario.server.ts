@@ -6,12 +6,13 @@ import { readStorm, type StormReading } from "./read-storm.server";
 import { readWater, type WaterReading } from "./read-water.server";
 import { Recent } from "./recent";
 import type { StormForcing } from "./storm-forcing";
+import { measureBox } from "~/area/measure-box";
 import type { MethodSheet } from "~/db/models/method-sheet.server";
 import type { Storm } from "~/db/models/storm.server";
 import type { StudyBox } from "~/db/models/study-box.server";
 import type { Tenant } from "~/db/scoped.server";
 import { inputHash } from "~/ocean/input-hash";
-import type { Scenario, ScenarioProblem } from "~/ocean/scenario";
+import type { Position, Scenario, ScenarioProblem } from "~/ocean/scenario";
 
 export interface GatheredScenario {
   /** Null where the storm's series leave nothing to compute with: `problems` says why. */
@@ -43,6 +44,11 @@ function hashOf(scenario: Scenario, parts: InputParts): string {
   return hash;
 }
 
+/** Where a track's wind is computed for a box. */
+export function middleOf({ polygon }: Pick<StudyBox, "polygon">): Position {
+  return measureBox(polygon).centroid;
+}
+
 export function heatInterpolationOf(sheet: MethodSheet): "linear" | "hold" {
   return sheet.choices.heatInterpolation ?? "linear";
 }
@@ -65,7 +71,14 @@ export function gatherFrom({ box, storm, water, sheet }: EstimateRows, reading: 
     assumptions,
     register: {
       box: { name: box.name, polygon, waterDepth, shoreNormal, distanceToShore, triggerLevels },
-      storm: { name: storm.name, startsAt: storm.startsAt, endsAt: storm.endsAt, records, quality },
+      storm: {
+        name: storm.name,
+        startsAt: storm.startsAt,
+        endsAt: storm.endsAt,
+        records,
+        quality,
+        ...(storm.track && { track: storm.track }),
+      },
       water: registered,
       method: { name: sheet.name, version: sheet.version, choices },
     },
@@ -95,6 +108,6 @@ export async function gatherScenario(
     tenant.methodSheets.find(methodSheetId),
   ]);
   if (!box || !storm || !water || !sheet) return null;
-  const read = await readStorm(tenant, storm, heatInterpolationOf(sheet), zone);
+  const read = await readStorm(tenant, storm, heatInterpolationOf(sheet), zone, middleOf(box));
   return gatherFrom({ box, storm, water: await readWater(tenant, water), sheet }, read);
 }

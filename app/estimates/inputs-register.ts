@@ -3,6 +3,7 @@ import type { InputParts } from "./input-parts";
 import type { MethodChoices, Position, TriggerLevel } from "~/ocean/scenario";
 import type { RegisteredQuality } from "~/quality/register-quality";
 import type { RecordProvenance } from "~/storms/provenance";
+import type { StormTrack } from "~/storms/storm-track";
 import type { CastProvenance } from "~/water/cast-provenance";
 
 export interface RegisteredRecord {
@@ -47,6 +48,8 @@ export interface InputsRegister {
     startsAt: number | null;
     endsAt: number | null;
     records: RegisteredRecord[];
+    /** Only where the storm stands on a cyclone's track. */
+    track?: StormTrack;
     /** Absent in runs of before series were tested. */
     quality?: RegisteredQuality;
   };

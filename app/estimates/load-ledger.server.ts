@@ -1,6 +1,6 @@
 /** The boxes and storms of a project, and for every pair of them what is known. */
 import { estimateState, type EstimateState } from "./estimate-state";
-import { gatherFrom, heatInterpolationOf, type GatheredScenario } from "./gather-scenario.server";
+import { gatherFrom, heatInterpolationOf, middleOf, type GatheredScenario } from "./gather-scenario.server";
 import { readStorm, type StormReading } from "./read-storm.server";
 import { readWater } from "./read-water.server";
 import { readHeadlines, resultKey, type ResponseWithoutSeries } from "./result-store.server";
@@ -78,10 +78,10 @@ export async function loadLedger(tenant: Tenant, project: Pick<Project, "id" | "
     tenant.methodSheets.list({ order: BY_AGE }),
     tenant.estimates.list({ where, order: [["number", "ASC"]] }),
   ]);
-  const reading = (storm: Storm, interpolation: "linear" | "hold") =>
-    readStorm(tenant, storm, interpolation, project.timeZone);
+  const reading = (storm: Storm, interpolation: "linear" | "hold", box: StudyBox | undefined) =>
+    readStorm(tenant, storm, interpolation, project.timeZone, storm.track && box ? middleOf(box) : null);
   const storms = await Promise.all(
-    stormRows.map(async (storm) => ({ storm, reading: await reading(storm, "linear") })),
+    stormRows.map(async (storm) => ({ storm, reading: await reading(storm, "linear", boxes[0]) })),
   );
   const waters = await Promise.all(columns.map((column) => readWater(tenant, column)));
   const gathered = await Promise.all(
@@ -92,7 +92,8 @@ export async function loadLedger(tenant: Tenant, project: Pick<Project, "id" | "
       const sheet = sheets.find(({ id }) => id === estimate.methodSheetId);
       if (!box || !column || !water || !sheet) return [];
       const interpolation = heatInterpolationOf(sheet);
-      const read = interpolation === "linear" ? column.reading : await reading(column.storm, interpolation);
+      const shared = interpolation === "linear" && (!column.storm.track || box === boxes[0]);
+      const read = shared ? column.reading : await reading(column.storm, interpolation, box);
       return [{ estimate, now: gatherFrom({ box, storm: column.storm, water, sheet }, read) }];
     }),
   );

@@ -11,6 +11,7 @@ import { quantity } from "~/units/quantities";
 import type { RegisteredQuality } from "~/quality/register-quality";
 import { decisionLines, overrideLines, qualityLines } from "~/quality/registered-words";
 import { CHANNELS } from "~/storms/channels";
+import { trackRows } from "~/storms/track-rows";
 import type { UnitChoices } from "~/units/unit-choices";
 
 export interface Row {
@@ -135,6 +136,7 @@ export function presentInputs(register: InputsRegister, zone: string, units: Uni
             : formatPeriod(storm.startsAt, storm.endsAt, zone),
       },
       ...(storm.quality ? [{ label: "Quality", value: decisionLines(storm.quality).join(" ") }] : []),
+      ...(storm.track ? trackRows(storm.track) : []),
     ],
     records: storm.records.map((record) => ({
       name: record.name,

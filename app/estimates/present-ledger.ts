@@ -90,6 +90,7 @@ function stormFacts({ storm, reading }: Ledger["storms"][number], { units, zone 
   const peak = extremes(forcing.windSpeed)?.max;
   const said = [`peak ${formatQuantity(peak, "windSpeed", units).text}`];
   if (forcing.rain) said.push(`rain ${formatQuantity(heldTotal(forcing.time, forcing.rain), "rainTotal", units).text}`);
+  if (storm.track) facts.push("parametric wind from a track");
   return [...facts, said.join(" · ")];
 }
 

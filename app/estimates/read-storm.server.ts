@@ -3,13 +3,15 @@ import { partHash } from "./input-parts";
 import type { RegisteredRecord } from "./inputs-register";
 import { Recent } from "./recent";
 import { readForcing, type ReadForcing } from "./storm-forcing";
+import { throughTrack } from "./through-track";
 import { usedForcing } from "./used-forcing";
 import type { Storm } from "~/db/models/storm.server";
 import type { Tenant } from "~/db/scoped.server";
-import type { ScenarioStorm } from "~/ocean/scenario";
+import type { Position, ScenarioStorm } from "~/ocean/scenario";
 import { judgeSeries, qualityInputs } from "~/quality/quality-inputs.server";
 import { registerQuality, type RegisteredQuality } from "~/quality/register-quality";
 import { loadSeries } from "~/storms/load-series.server";
+import { TRACK_WIND_HEIGHT } from "~/storms/track-series";
 import { windowOf } from "~/storms/storm-window";
 
 /** A storm's series as the engine will take them. */
@@ -28,6 +30,7 @@ const recent = new Recent<Series>(64);
 /**
  * Reads a storm's series from the database, or from memory while nothing that it depends on changed.
  * @param zone names times in messages
+ * @param place where a track's wind is computed, [longitude, latitude]; nothing else depends on it
  * @param leaveOutSuspect as the storm says; the other way round to see what it makes
  */
 export async function readStorm(
@@ -35,6 +38,7 @@ export async function readStorm(
   storm: Storm,
   heatInterpolation: "linear" | "hold",
   zone: string,
+  place: Position | null,
   leaveOutSuspect: boolean = storm.leaveOutSuspect,
 ): Promise<StormReading> {
   const [rows, recordRows] = await Promise.all([
@@ -65,6 +69,7 @@ export async function readStorm(
     [tenant.organisationId, storm.id, startsAt, endsAt, windHeight, heatInterpolation, zone],
     [leaveOutSuspect, missingAccepted, storm.projectId, inputs.thresholdsVersion, inputs.place],
     inputs.overrides.map(({ id }) => id),
+    storm.track && [storm.updatedAt, place],
     rows.map(({ id, updatedAt }) => [id, updatedAt]),
   ]);
   const known = recent.get(key);
@@ -72,13 +77,19 @@ export async function readStorm(
   const judged = judgeSeries(await loadSeries(tenant, storm.id), inputs);
   const window = windowOf(storm);
   const used = usedForcing(judged, window, { leaveOutSuspect, missingAccepted });
-  const read = readForcing({ channels: used.channels, windHeight, startsAt, endsAt, heatInterpolation }, zone);
+  const tracked = throughTrack(used.channels, storm, place);
+  const { channels } = tracked;
+  const height = tracked.parametric ? TRACK_WIND_HEIGHT : windHeight;
+  const read = readForcing({ channels, windHeight: height, startsAt, endsAt, heatInterpolation }, zone);
   const problems = [...used.problems, ...read.problems];
-  const asked = read.forcing && scenarioStorm(read.forcing);
+  const asked = read.forcing && {
+    ...scenarioStorm(read.forcing),
+    ...(tracked.cyclone && { cyclone: tracked.cyclone }),
+  };
   const series: Series = {
     forcing: read.forcing,
     problems,
-    assumptions: [...read.assumptions, ...used.assumptions],
+    assumptions: [...tracked.assumptions, ...read.assumptions, ...used.assumptions],
     scenarioStorm: asked,
     hash: asked && partHash(problems.length > 0 ? [asked, problems] : asked),
     quality: registerQuality(judged, window, { ...inputs, leaveOutSuspect, missingAccepted }),

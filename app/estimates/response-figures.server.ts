@@ -63,7 +63,7 @@ function draw({ response, register, forcing, ...shared }: FigureRequest): Respon
   const { uncertainty } = response;
   const banded = bandsOf(response);
   const effects = uncertainty ? presentUncertainty(uncertainty, register.box.shoreNormal !== null).effects : [];
-  const drivenBy = forcing && forcingData(forcing, response.method);
+  const drivenBy = forcing && forcingData(forcing, response.method, register);
   return {
     forcing: drivenBy && pair((context) => forcingStack(drivenBy, context)),
     stressAndDrift: pair((context) =>

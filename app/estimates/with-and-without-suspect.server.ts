@@ -1,5 +1,5 @@
 import type { EstimateOutcome } from "./estimate-outcome";
-import { gatherFrom, heatInterpolationOf, type GatheredScenario } from "./gather-scenario.server";
+import { gatherFrom, heatInterpolationOf, middleOf, type GatheredScenario } from "./gather-scenario.server";
 import { runInPool } from "./pool.server";
 import { readStorm } from "./read-storm.server";
 import { readWater } from "./read-water.server";
@@ -41,7 +41,8 @@ export async function withAndWithoutSuspect(
   ]);
   if (!box || !storm || !column || !sheet) return null;
   const water = await readWater(tenant, column);
-  const reading = (leaveOut: boolean) => readStorm(tenant, storm, heatInterpolationOf(sheet), zone, leaveOut);
+  const reading = (leaveOut: boolean) =>
+    readStorm(tenant, storm, heatInterpolationOf(sheet), zone, middleOf(box), leaveOut);
   const [keeping, leaving] = [await reading(false), await reading(true)];
   const run = (read: typeof keeping) => headlineOf(gatherFrom({ box, storm, water, sheet }, read));
   return {

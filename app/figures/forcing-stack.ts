@@ -22,11 +22,13 @@ export interface ForcingData {
   rainRate?: ArrayLike<number>;
   /** W/m², positive into the sea */
   netHeat?: ArrayLike<number>;
+  /** A sentence, where the wind is not what was measured. */
+  windOrigin?: string;
 }
 
 /** What drove the water: wind with its direction, rain, net heat, above one time axis; panels without a series are left out. */
 export function forcingStack(data: ForcingData, context: FigureContext): Figure {
-  const { time, windSpeed10, windFrom, windGust, rainRate, netHeat } = data;
+  const { time, windSpeed10, windFrom, windGust, rainRate, netHeat, windOrigin } = data;
   const panels: TimePanel[] = [
     windPanel({ quantity: "windSpeed10", heading: "wind at 10 m", speed: windSpeed10, from: windFrom, gust: windGust }),
   ];
@@ -74,7 +76,7 @@ export function forcingStack(data: ForcingData, context: FigureContext): Figure 
     id: "forcing-stack",
     title: "What drove it",
     caption: caption(
-      [`${shown.join("; ")}.`, missingSentence(windSpeed10, "Wind"), `${periodOf(time, context)}.`],
+      [`${shown.join("; ")}.`, windOrigin, missingSentence(windSpeed10, "Wind"), `${periodOf(time, context)}.`],
       context,
     ),
     alt: alt.join(" "),

@@ -36,7 +36,7 @@ export function memoFigures(drawn: Drawn, options: Omit<FigureContext, "document
   const banded = bandsOf(response);
   return [
     seriesLine("salinity", { time, values: series.salinity, band: banded?.("salinity"), triggers }, context),
-    ...(forcing ? [forcingStack(forcingData(forcing, response.method), context)] : []),
+    ...(forcing ? [forcingStack(forcingData(forcing, response.method, register), context)] : []),
     seriesLine("temperature", { time, values: series.temperature, band: banded?.("temperature"), triggers }, context),
     seriesLine("density", { time, values: series.density, band: banded?.("density"), triggers }, context),
     ...(layerDepth

@@ -2,6 +2,9 @@
 import { measureBox } from "~/area/measure-box";
 import type { InputsRegister, RegisteredRecord } from "~/estimates/inputs-register";
 import { decisionLines, overrideLines, qualityLines } from "~/quality/registered-words";
+import type { StormTrack } from "~/storms/storm-track";
+import { trackRows } from "~/storms/track-rows";
+import { TRACK_WIND_HEIGHT } from "~/storms/track-series";
 import { formatQuantity, formatRange } from "~/units/format-quantity";
 import type { UnitChoices } from "~/units/unit-choices";
 import type { MemoAssumption, MemoBox, MemoSeries, MemoWater } from "./memo-input";
@@ -72,9 +75,35 @@ function memoSeries({ name: stormName, quality }: InputsRegister["storm"], recor
   ];
 }
 
+/** A track stands among the series, for it takes the place of one. */
+function memoTrack(stormName: string, track: StormTrack): MemoSeries {
+  const { fixes, source, averagingMinutes } = track;
+  const iso = (seconds: number) => new Date(seconds * 1000).toISOString();
+  return {
+    name: `Cyclone track, for ${stormName}`,
+    fileName: source?.fileName ?? "none",
+    sha256: source?.sha256 ?? "none",
+    rows: fixes.length,
+    first: iso(fixes[0].time),
+    last: iso(fixes[fixes.length - 1].time),
+    channels: "position, central pressure, maximum wind and its radius, where told",
+    source: source?.formatLabel ?? "typed",
+    zone: "UTC",
+    windHeight: TRACK_WIND_HEIGHT,
+    averagingMinutes,
+    missingShare: null,
+    steps: trackRows(track).flatMap(({ label, value }) => (label === "Track" ? [] : [`${label}: ${value}`])),
+    quality: [],
+    gaps: [],
+  };
+}
+
 export function registerSeries(registers: InputsRegister[]): MemoSeries[] {
   return unique(
-    registers.flatMap(({ storm }) => storm.records.flatMap((record) => memoSeries(storm, record))),
+    registers.flatMap(({ storm }) => [
+      ...(storm.track ? [memoTrack(storm.name, storm.track)] : []),
+      ...storm.records.flatMap((record) => memoSeries(storm, record)),
+    ]),
     ({ name, sha256 }) => `${name} ${sha256}`,
   );
 }

@@ -23,6 +23,9 @@ export interface ScenarioRequest {
  */
 export async function copyAsScenario(tenant: Tenant, storm: Storm, request: ScenarioRequest): Promise<Storm> {
   const { changes, requestedBy } = request;
+  if (storm.track) {
+    throw new StormRefusal("The wind of this storm comes from its track: change the track or its parameters instead.");
+  }
   const window = windowOf(storm);
   if (!window) throw new StormRefusal("The storm has no window yet: confirm a record with wind first.");
   return tenant.write(async (inner) => {

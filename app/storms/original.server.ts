@@ -33,11 +33,15 @@ export async function keepOriginal(
   });
 }
 
-/** Originals that no record and no cast uses any more go, so that nothing is kept that no page can reach. */
+/** Originals that no record, no cast and no track uses any more go, so that nothing is kept that no page can reach. */
 export async function dropIfUnused(tenant: Tenant, sourceFileIds: Iterable<string | null>): Promise<void> {
   for (const id of new Set(sourceFileIds)) {
     if (id === null) continue;
-    const users = [tenant.records.count({ sourceFileId: id }), tenant.casts.count({ sourceFileId: id })];
+    const users = [
+      tenant.records.count({ sourceFileId: id }),
+      tenant.casts.count({ sourceFileId: id }),
+      tenant.storms.count({ trackFileId: id }),
+    ];
     const used = (await Promise.all(users)).some((count) => count > 0);
     if (!used) await tenant.sourceFiles.remove({ id });
   }

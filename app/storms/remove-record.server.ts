@@ -32,10 +32,7 @@ export async function removeStorm(tenant: Tenant, storm: Storm): Promise<void> {
   await tenant.write(async (inner) => {
     const records = await inner.records.list({ where: { stormId: storm.id } });
     await inner.storms.remove({ id: storm.id });
-    await dropIfUnused(
-      inner,
-      records.map(({ sourceFileId }) => sourceFileId),
-    );
+    await dropIfUnused(inner, [storm.trackFileId, ...records.map(({ sourceFileId }) => sourceFileId)]);
   });
 }
 

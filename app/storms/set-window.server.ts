@@ -4,6 +4,7 @@ import type { ChannelSeries } from "./channel-series";
 import { fillConstants } from "./constant-record.server";
 import { loadSeries, type StormSeries } from "./load-series.server";
 import { StormRefusal } from "./refusal";
+import { trackReach } from "./track-series";
 import { fitWindow, proposeWindow, windowLimits, windowOf, windowProblems, type StormWindow } from "./storm-window";
 
 /**
@@ -12,12 +13,12 @@ import { fitWindow, proposeWindow, windowLimits, windowOf, windowProblems, type 
  */
 export async function setWindow(
   tenant: Tenant,
-  storm: Pick<Storm, "id">,
+  storm: Pick<Storm, "id" | "track">,
   series: readonly ChannelSeries[],
   window: StormWindow,
   zone: string,
 ): Promise<void> {
-  const limits = windowLimits(series);
+  const limits = windowLimits([...series, ...trackReach(storm.track)]);
   const [problem] = limits ? windowProblems(window, limits, zone) : [];
   if (problem) throw new StormRefusal(problem.message, problem.field);
   await tenant.storms.update(storm.id, window);
@@ -38,7 +39,7 @@ export async function loadMeasured(tenant: Tenant, stormId: string): Promise<Sto
 
 /** After series have gone: what is left of the window, or what the rest proposes, or none. Inside a writing transaction. */
 export async function refitWindow(tenant: Tenant, storm: Storm): Promise<void> {
-  const measured = await loadMeasured(tenant, storm.id);
+  const measured = [...(await loadMeasured(tenant, storm.id)), ...trackReach(storm.track)];
   const limits = windowLimits(measured);
   const known = windowOf(storm);
   const window = (known && limits && fitWindow(known, limits)) ?? proposeWindow(measured);

@@ -38,6 +38,8 @@ export const RULES: Record<string, Rule> = {
   "routes/org/area/edit.tsx": { get: "project.edit", post: "project.edit" },
   "routes/org/storms/list.tsx": { get: "project.view", post: null },
   "routes/org/storms/new.tsx": { get: "project.edit", post: "project.edit" },
+  "routes/org/storms/new-track.tsx": { get: "project.edit", post: "project.edit" },
+  "routes/org/storms/track.tsx": { get: "project.edit", post: "project.edit" },
   "routes/org/storms/show.tsx": { get: "project.view", post: "project.edit" },
   "routes/org/storms/reading-sheet.tsx": { get: "project.edit", post: "project.edit" },
   "routes/org/storms/series-csv.ts": { get: "project.view", post: null, resource: true },

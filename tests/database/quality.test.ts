@@ -87,7 +87,7 @@ const set = (storm: Storm, hours: number[], flag: SetFlag, channels: ChannelName
     by: organisation.userId,
   });
 
-const read = async (storm: Storm) => readStorm(organisation.tenant, await again(storm), "linear", "UTC");
+const read = async (storm: Storm) => readStorm(organisation.tenant, await again(storm), "linear", "UTC", null);
 
 beforeEach(async () => {
   organisation = await makeOrganisation();

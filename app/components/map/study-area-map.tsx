@@ -11,6 +11,8 @@ export interface StudyAreaMapProps {
   /** Water depths to write on the map, m. */
   depthLabels?: { position: Position; depth: number }[];
   tracks?: DriftTrack[];
+  /** Thin closed lines, as of wind radii. */
+  rings?: Position[][];
   /** Name of the map for screen readers. */
   label?: string;
   className?: string;

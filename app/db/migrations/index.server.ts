@@ -5,6 +5,7 @@ import { methodSheetEnsembles } from "./2026-12-01-method-sheet-ensembles.server
 import { casts } from "./2026-12-01-casts.server";
 import { quality } from "./2026-12-01-quality.server";
 import { mail } from "./2026-12-01-mail.server";
+import { stormTracks } from "./2026-12-01-storm-tracks.server";
 
 export interface MigrationContext {
   /** Runs one statement inside the migration's transaction. */
@@ -13,4 +14,12 @@ export interface MigrationContext {
 export type Migration = RunnableMigration<MigrationContext>;
 
 /** In order. A migration that has been released is never edited: add the next one. */
-export const migrations: Migration[] = [firstTables, estimateInputs, methodSheetEnsembles, casts, quality, mail];
+export const migrations: Migration[] = [
+  firstTables,
+  estimateInputs,
+  methodSheetEnsembles,
+  casts,
+  quality,
+  mail,
+  stormTracks,
+];

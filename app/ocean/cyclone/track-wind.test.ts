@@ -20,7 +20,10 @@ const fix = (hour: number, latitude: number, longitude: number, told: Partial<Cy
   ...told,
 });
 const still = (latitude: number) => [fix(0, latitude, 150), fix(24, latitude, 150)];
-const parameters = (given: Partial<TrackParameters> = {}): TrackParameters => ({ ...DEFAULT_TRACK_PARAMETERS, ...given });
+const parameters = (given: Partial<TrackParameters> = {}): TrackParameters => ({
+  ...DEFAULT_TRACK_PARAMETERS,
+  ...given,
+});
 const speedAt = (fixes: CycloneFix[], given: TrackParameters, latitude: number, longitude: number, hour = 6) => {
   const { u, v } = trackWind(fixes, given, { latitude, longitude }, [hour * HOUR]);
   return Math.hypot(u[0], v[0]);

@@ -118,13 +118,11 @@ function momentAt(state: CycloneState, parameters: TrackParameters, dx: number, 
   const ambient = state.ambientPressure ?? parameters.ambientPressure;
   const radius = state.radiusOfMaximumWind ?? parameters.radiusOfMaximumWind;
   const carriedAtRadius = (asymmetry * state.translationSpeed) / 2;
-  const surfaceMaximum =
-    state.maxWind === null ? null : Math.max(0, averagingFactor * state.maxWind - carriedAtRadius);
+  const surfaceMaximum = state.maxWind === null ? null : Math.max(0, averagingFactor * state.maxWind - carriedAtRadius);
   const deficit =
-    state.centralPressure === null
-      ? deficitByWind(surfaceMaximum ?? 0, parameters)
-      : ambient - state.centralPressure;
-  if (!(deficit > 0) || surfaceMaximum === 0) return { u: 0, v: 0, pressure: ambient - Math.max(0, deficit), maximum: 0 };
+    state.centralPressure === null ? deficitByWind(surfaceMaximum ?? 0, parameters) : ambient - state.centralPressure;
+  if (!(deficit > 0) || surfaceMaximum === 0)
+    return { u: 0, v: 0, pressure: ambient - Math.max(0, deficit), maximum: 0 };
   const vortex = VORTICES[parameters.profile]({ state, deficit, ambient, radius, surfaceMaximum }, parameters);
   const { u, v } = turnedAndCarried(
     vortex.around(r),

@@ -20,12 +20,13 @@ export async function loader({ context, params }: Route.LoaderArgs) {
 }
 
 function present(storm: StormLine, units: UnitChoices, zone: string) {
-  const { id, name, window, peakWind, rainTotal, scenarioOf, records, gaps } = storm;
+  const { id, name, window, peakWind, rainTotal, scenarioOf, trackAt, records, gaps } = storm;
   const waiting = records.filter(({ state }) => state === "reading");
   return {
     id,
     name,
     scenarioOf,
+    trackAt,
     window: window && formatPeriod(window.startsAt, window.endsAt, zone),
     peakWind: peakWind && {
       value: formatQuantity(peakWind.value, "windSpeed", units).text,
@@ -46,9 +47,14 @@ function present(storm: StormLine, units: UnitChoices, zone: string) {
 export default function StormList({ loaderData }: Route.ComponentProps) {
   const { storms, mayEdit } = loaderData;
   const bring = mayEdit && (
-    <Link to="new" className="button button-primary">
-      New storm
-    </Link>
+    <span className="flex flex-wrap gap-2">
+      <Link to="tracks/new" className="button">
+        From a track
+      </Link>
+      <Link to="new" className="button button-primary">
+        New storm
+      </Link>
+    </span>
   );
   return (
     <>
@@ -91,6 +97,7 @@ function StormRow({ storm }: { storm: Route.ComponentProps["loaderData"]["storms
         <Link to={storm.id} className="font-bold underline">
           {storm.name}
         </Link>
+        {storm.trackAt && <span className="block text-small text-quiet">{storm.trackAt}</span>}
         {storm.scenarioOf && <span className="block text-small text-quiet">scenario of {storm.scenarioOf}</span>}
       </td>
       <td className="min-w-44">{storm.window ?? "none yet"}</td>

@@ -5,11 +5,13 @@ import { FormErrors } from "~/components/field";
 import { EmptyState, PageTitle } from "~/components/page-title";
 import { SectionHeading } from "~/components/section-heading";
 import { AddRecord } from "~/components/storms/add-record";
+import { BoxChoice } from "~/components/storms/box-choice";
 import { RecordCard } from "~/components/storms/record-card";
 import { ScenarioForm } from "~/components/storms/scenario-form";
 import { SeriesFigure } from "~/components/storms/series-figure";
 import { StormFacts } from "~/components/storms/storm-facts";
 import { StormSettings } from "~/components/storms/storm-settings";
+import { TrackNote } from "~/components/storms/track-note";
 import { WindPart } from "~/components/storms/wind-part";
 import { FIGURE_WIDTHS } from "~/figures/figure-context";
 import { serverPlotDocument } from "~/figures/plot-document.server";
@@ -34,7 +36,10 @@ import { startRecord } from "~/storms/start-record.server";
 import { recordOf, stormOf } from "~/storms/stored-record.server";
 import { stormFigure } from "~/storms/storm-figure";
 import { postedName } from "~/storms/storm-name";
+import { parametricAt, trackSentence } from "~/storms/storm-track";
 import { summariseStorm } from "~/storms/storm-summary";
+import { trackPlace } from "~/storms/track-place.server";
+import { TRACK_WIND_HEIGHT, withTrack } from "~/storms/track-series";
 import { totalsFigure } from "~/storms/totals-figure";
 import { extentOf, wallClock, windowOf, withinWindow } from "~/storms/storm-window";
 
@@ -42,14 +47,17 @@ const MOST_TABLE_ROWS = 1000;
 /** px; a rose needs no more, and leaves room beside it. */
 const ROSE_WIDTH = 420;
 
-export async function loader({ context, params }: Route.LoaderArgs) {
+export async function loader({ request, context, params }: Route.LoaderArgs) {
   const { organisation, tenant, project } = await currentProject(context, params, "project.view");
   const storm = await stormOf(tenant, project.id, params.storm);
-  const { series, ...shown } = await showStorm(tenant, storm);
+  const { series: recorded, ...shown } = await showStorm(tenant, storm);
+  const { boxes, box, place } = await trackPlace(tenant, project.id, request);
+  const series = withTrack(recorded, storm.track, place);
+  const parametric = storm.track !== null && box !== null && !recorded.some(({ channel }) => channel === "windSpeed");
   const window = windowOf(storm);
   const inside = window ? series.map((entry) => withinWindow(entry, window)) : series;
   const summary = window && summariseStorm(series, window);
-  const { windHeight } = shown;
+  const windHeight = parametric ? TRACK_WIND_HEIGHT : shown.windHeight;
   const scenario = shown.records.find(({ provenance }) => provenance?.scenario)?.provenance?.scenario;
   const sized = (width: number) => ({
     document: serverPlotDocument(),
@@ -65,6 +73,7 @@ export async function loader({ context, params }: Route.LoaderArgs) {
         title: storm.name,
         windHeight,
         mostTableRows: MOST_TABLE_ROWS,
+        ...(parametric && { told: parametricAt(box.name) }),
         ...(scenario && { told: "as changed for the scenario" }),
       },
       sized(width),
@@ -81,6 +90,10 @@ export async function loader({ context, params }: Route.LoaderArgs) {
     // In full, since a file's link is not the router's: one that is relative would hang on a slash at the end.
     home: `/o/${organisation.slug}/projects/${project.id}`,
     ...shown,
+    track: storm.track || storm.trackFileId !== null ? { sentence: storm.track && trackSentence(storm.track) } : null,
+    ...(storm.track ? { boxes: boxes.map(({ id, name }) => ({ id, name })), box } : { boxes: [], box: null }),
+    windHeight,
+    ...(parametric && { averagingMinutes: 10 }),
     window,
     extent: extentOf(series),
     clock: window && {
@@ -146,8 +159,9 @@ export async function action({ request, context, params }: Route.ActionArgs) {
 
 export default function ShowStorm({ loaderData, actionData }: Route.ComponentProps) {
   const { storm, scenario, home, figure, narrowFigure, wind, totals, records, window, mayEdit, estimates } = loaderData;
+  const { track, boxes, box } = loaderData;
   const errors = actionData?.errors ?? {};
-  const csv = `${home}/storms/${storm.id}/series.csv`;
+  const csv = `${home}/storms/${storm.id}/series.csv${box ? `?box=${box.id}` : ""}`;
   return (
     <>
       <title>{`${storm.name} · Galeprint`}</title>
@@ -173,6 +187,8 @@ export default function ShowStorm({ loaderData, actionData }: Route.ComponentPro
           here; its window can.
         </p>
       )}
+      {track && <TrackNote track={track} mayEdit={mayEdit} />}
+      {track?.sentence && <BoxChoice boxes={boxes} box={box} />}
       {figure ? (
         <>
           <StormFacts {...loaderData} />
@@ -214,7 +230,7 @@ export default function ShowStorm({ loaderData, actionData }: Route.ComponentPro
             />
           )}
           <StormSettings name={storm.name} clock={loaderData.clock} zone={loaderData.zone} errors={errors} />
-          {window && <ScenarioForm key={storm.id} errors={errors} />}
+          {window && !track && <ScenarioForm key={storm.id} errors={errors} />}
           <div className="mt-10 border-t border-hairline pt-4">
             <ConfirmButton label="Remove the storm" title={`Remove ${storm.name}?`} fields={{ intent: "remove-storm" }}>
               Its records and series go with it, their original files where no other storm uses them, and{" "}
