@@ -46,7 +46,7 @@ export function FixTable({ rows, radii, units, errors }: FixTableProps) {
   };
   const withRadii = radii?.some((text) => text !== "");
   return (
-    <div>
+    <div className="min-w-0">
       <WideTable label="Fixes of the track">
         <thead>
           <tr>
