@@ -111,7 +111,7 @@ describe("checkBox", () => {
     expect(!checked.ok && checked.problems[0].message).toMatch(/corners 1–2 meets .* corners 3–4/);
   });
 
-  it("says which corner is wrong and guesses a swap of latitude and longitude", () => {
+  it("trap 36: says which corner is wrong and guesses a swap of latitude and longitude", () => {
     const checked = checkBox([good[0], [54.3, 108], good[2]]);
     expect(checked).toMatchObject({ ok: false, problems: [{ field: "polygon[1]", code: "latitudeRange" }] });
     expect(!checked.ok && checked.problems[0].message).toContain("swapped");
@@ -129,7 +129,7 @@ describe("checkBox", () => {
     expect(checkBox(positive)).toEqual(checkBox(signed));
   });
 
-  it("warns of the equator but accepts", () => {
+  it("trap 43: warns of the equator but accepts", () => {
     const astride: Position[] = [
       [0, -1],
       [1, -1],

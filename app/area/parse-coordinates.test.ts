@@ -47,11 +47,11 @@ describe("parseCoordinates", () => {
     expect(corners[0][1]).toBeCloseTo(WANTED[1], 9);
   });
 
-  it("lets one letter decide for both", () => {
+  it("trap 42: lets one letter decide for both", () => {
     expect(parseCoordinates("8.231 W, 54.412").corners).toEqual([WANTED]);
   });
 
-  it("reads south with its seconds", () => {
+  it("trap 42: reads south with its seconds", () => {
     expect(parseCoordinates("16° 54′ 36″ S 179° 48′ 0″ E").corners[0]).toEqual([179.8, -(16 + 54 / 60 + 36 / 3600)]);
     expect(parseCoordinates("16°54'36S 179°48'E").corners[0][1]).toBeCloseTo(-16.91, 9);
   });

@@ -30,6 +30,10 @@ describe("airport observations", () => {
     expect(reading.channels.airPressure?.values[0]).toBeCloseTo(29.92 * 33.86389, 3);
   });
 
+  it("trap 11: a station on land is not passed off as the sea", () => {
+    expect(read(STORM).problems.map(({ code }) => code)).toContain("landStation");
+  });
+
   it("trap: the hour's rain repeats in special reports and is not summed", () => {
     const reading = read(STORM);
     // 0.30 in, then 0.25 in, then a trace: 13.97 mm. The sum of the rows would be 17.78 mm.

@@ -154,6 +154,11 @@ export const NAME_RULES: readonly NameRule[] = [
   },
   { role: "evaporation", words: /(?:evapor|verdunst)/, whole: ["e", "evap", "et0"], not: /transpir/ },
   {
+    role: "leftOut",
+    words: /(?:\bsnow|\bschnee|\bneige|\bnieve|\bneve\b)/,
+    note: "snow is not rain: its water equivalent is another column",
+  },
+  {
     role: "rain",
     words: /(?:\brain|precip|prcp|\bpcp|lluvia|chuva|pluie|\bregen|niederschlag|pluvio|\bppt\b)/,
     whole: ["rr", "tp", "p01i", "p01m", "rain", "r", "precip", "prec", "rre24", "r1"],

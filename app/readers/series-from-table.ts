@@ -12,6 +12,7 @@ import { assembleSeries, type RowChannel } from "./assemble-series";
 import { scanColumn, type ColumnScan } from "./scan-column";
 import { answeredUnit, settleColumn, settleHeatSense, type SettledColumn, type Settling } from "./settle-columns";
 import { columnsOfPlan, findStampColumns } from "./stamp-columns";
+import { addCautions } from "./record-cautions";
 import { columnsSeen, type FormatKnowledge, type TextTable } from "./text-table";
 import { timeAxis } from "./time-axis";
 import { channelsFromColumns } from "./channels-from-columns";
@@ -82,6 +83,7 @@ export function seriesFromTable(
     }
     for (const row of result.bad) bad.set(row, `an error in “${column.column.name}”`);
   }
+  addCautions(settled, times, knowledge.id, problems);
   const wind = windQuestions(settled, knowledge, answers);
   understood.push(...wind.understood);
   questions.push(...wind.questions);

@@ -43,6 +43,15 @@ describe("wind", () => {
     expect(reading.windHeight).toBe(10);
   });
 
+  it("trap 2: directions from magnetic north are not passed off as true", () => {
+    const magnetic = read(hourly("time,wind speed (m/s),wind direction magnetic (deg)", ["10,90"]));
+    expect(codes(magnetic)).toContain("magneticDirection");
+    expect(values(magnetic, "windFrom")).toEqual([90]);
+    expect(codes(read(hourly("time,wind speed (m/s),wind direction true (deg)", ["10,90"])))).not.toContain(
+      "magneticDirection",
+    );
+  });
+
   it("trap 3: compass words, with O told from its column, and tens of degrees", () => {
     const spanish = read(hourly("time,velocidad viento (m/s),dirección viento", ["5,NO", "5,E", "5,SSO"]));
     expect(values(spanish, "windFrom")).toEqual([315, 90, 202.5]);
@@ -342,6 +351,38 @@ describe("rain and heat", () => {
     expect(codes(read(hourly("time,rain (mm)", drizzle)))).not.toContain("dailyTotalRepeated");
   });
 
+  it("trap 25: whole tips of a bucket at short intervals are told, sums to a tenth are not", () => {
+    const five = (amounts: number[]) =>
+      [
+        "time (UTC),rain (mm)",
+        ...amounts.map((amount, k) => `2024-03-01T${new Date(k * 300_000).toISOString().slice(11, 16)}Z,${amount}`),
+      ].join("\n");
+    const tips: number[] = Array.from({ length: 60 }, (_, k) => (k % 7 === 0 ? 0.4 : k % 3 === 0 ? 0.2 : 0));
+    const reading = read(five(tips));
+    const [note] = reading.problems.filter(({ code }) => code === "tipResolution");
+    expect(note.message).toContain("whole tips of 0.2 mm, so that one tip is a rate of 2.4 mm/h");
+    expect(reading.channels.rain?.total).toBeCloseTo(
+      tips.reduce((sum, amount) => sum + amount, 0),
+      9,
+    );
+    const weighed = Array.from({ length: 60 }, (_, k) => Number((0.1 + (k % 9) / 10).toFixed(1)));
+    expect(codes(read(five(weighed)))).not.toContain("tipResolution");
+  });
+
+  it("trap 27: one amount a day is told to end at its stamp, and the gauge's own day is asked to be checked", () => {
+    const daily = ["time (UTC),rain (mm)", "2024-03-01,4", "2024-03-02,0", "2024-03-03,7"].join("\n");
+    const reading = read(daily);
+    expect(codes(reading)).toContain("rainDay");
+    expect(reading.channels.rain?.total).toBe(11);
+  });
+
+  it("trap 28: snow is not rain, and rain in strong wind is a lower bound", () => {
+    const snow = read(hourly("time,wind speed (m/s),snowfall (mm),rain (mm)", ["12,5,1", "14,3,2"]));
+    expect(snow.columns[2]).toMatchObject({ role: "leftOut", note: expect.stringContaining("snow is not rain") });
+    expect(codes(snow)).toContain("undercatch");
+    expect(codes(read(hourly("time,wind speed (m/s),rain (mm)", ["4,1", "5,2"])))).not.toContain("undercatch");
+  });
+
   it("trap 26: T is a trace of rain: 0, counted", () => {
     const reading = read(hourly("time,rain (in)", ["T", "0.01", "T"]));
     expect(values(reading, "rain")[0]).toBe(0);
@@ -360,6 +401,20 @@ describe("rain and heat", () => {
     expect(unsaid.questions).toContainEqual(
       expect.objectContaining({ key: "columns", needed: true, suggestion: "W/m²" }),
     );
+  });
+
+  it("trap 31: radiation that comes in is not passed off as what the sea takes", () => {
+    expect(codes(read(hourly("time,global radiation (W/m2)", ["300"])))).toContain("incomingShortwave");
+    expect(codes(read(hourly("time,net shortwave (W/m2)", ["300"])))).not.toContain("incomingShortwave");
+  });
+
+  it("trap 33: langley, kWh/m² and MJ/m²/day", () => {
+    const flux = (unit: string, value: string) =>
+      values(read(hourly(`time,solar radiation (${unit})`, [value, value])), "shortwave")[0];
+    // NIST SP 811: 1 langley = 41 840 J/m²; the others by the SI.
+    expect(flux("Ly", "1")).toBeCloseTo(41_840 / 3600, 9);
+    expect(flux("kWh/m2", "1")).toBeCloseTo(1000, 9);
+    expect(flux("MJ/m2/day", "8.64")).toBeCloseTo(100, 9);
   });
 
   it("trap 32: °F and K by unit, and by their values where no unit is given", () => {

@@ -1,5 +1,6 @@
 import { describe, expect, it } from "vitest";
 import { fitWindow, proposeWindow, readWallClock, wallClock, windowProblems, withinWindow } from "./storm-window";
+import { windowCautions } from "./window-cautions";
 import type { ChannelSeries } from "./channel-series";
 
 const HOUR = 3600;
@@ -66,6 +67,13 @@ describe("a window against its data", () => {
       endsAt: START + HOUR,
     });
     expect(fitWindow({ startsAt: START + 3 * DAY, endsAt: START + 4 * DAY }, limits)).toBeNull();
+  });
+
+  it("trap 21: is told where it cuts off spin-up or what follows the strongest wind", () => {
+    const window = { startsAt: START, endsAt: START + 3 * DAY };
+    expect(windowCautions(window, START + DAY)).toEqual([]);
+    expect(windowCautions(window, START + 5 * HOUR)[0]).toContain("begins 5\u00a0h before its strongest wind");
+    expect(windowCautions(window, START + 3 * DAY - 2 * HOUR)[0]).toContain("ends 2\u00a0h after its strongest wind");
   });
 
   it("takes the samples at both of its ends", () => {

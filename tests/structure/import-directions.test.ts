@@ -1,15 +1,7 @@
-import { readdirSync, readFileSync } from "node:fs";
-import path from "node:path";
+import { readFileSync } from "node:fs";
 import { describe, expect, it } from "vitest";
 import { breachesOf } from "./import-rules";
-
-function sourceFiles(folder: string): string[] {
-  return readdirSync(folder, { withFileTypes: true }).flatMap((entry) => {
-    const place = path.posix.join(folder, entry.name);
-    if (entry.isDirectory()) return sourceFiles(place);
-    return /\.tsx?$/.test(entry.name) && !entry.name.endsWith(".d.ts") ? [place] : [];
-  });
-}
+import { sourceFiles } from "./source-files";
 
 /** Read from the text of the URL map, since running it needs the build tool. */
 function routeModules(): Set<string> {

@@ -1,5 +1,6 @@
 import type { StormSummary } from "~/storms/storm-summary";
 import type { StormWindow } from "~/storms/storm-window";
+import { windowCautions } from "~/storms/window-cautions";
 import { CHANNELS } from "~/storms/channels";
 import { compassLetters } from "~/units/compass";
 import { formatBearing, formatQuantity } from "~/units/format-quantity";
@@ -70,6 +71,13 @@ export function StormFacts({ window, extent, summary, windHeight, averagingMinut
           </div>
         ))}
       </dl>
+      {window &&
+        peakWind &&
+        windowCautions(window, peakWind.at).map((caution) => (
+          <p key={caution} className="mt-4 max-w-prose border-l-4 border-ink py-1 pl-3">
+            {caution}
+          </p>
+        ))}
       {gaps.length > 0 && (
         <div className="mt-4 border-l-4 border-error py-1 pl-3">
           <p className="font-bold text-error">

@@ -109,7 +109,7 @@ describe("shapes", () => {
     });
   });
 
-  it("KML: names, holes, heights, several geometries in one placemark", () => {
+  it("trap 37: KML is longitude, latitude; names, holes, heights, several geometries in one placemark", () => {
     const holes = `<innerBoundaryIs><LinearRing><coordinates>${ring(HOLE)}</coordinates></LinearRing></innerBoundaryIs>`;
     const { polygons, problems, format } = read(kmlOf(placemark(holes)));
     expect(format).toBe("kml");
