@@ -1,5 +1,5 @@
 import { createContext } from "react-router";
-import type { Role } from "~/organisations/permissions";
+import type { Standing } from "~/organisations/permissions";
 import type { UnitChoices } from "~/units/unit-choices";
 import type { PageSize } from "~/memo/document";
 
@@ -11,11 +11,10 @@ export interface Actor {
 }
 
 /** The organisation that the address names, and what the actor is in it. */
-export interface CurrentOrganisation {
+export interface CurrentOrganisation extends Standing {
   id: string;
   slug: string;
   name: string;
-  role: Role;
   units: UnitChoices;
   paperSize: PageSize;
 }

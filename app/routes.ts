@@ -10,6 +10,7 @@ export default [
   route("sign-in", "routes/account/sign-in.tsx"),
   route("sign-up", "routes/account/sign-up.tsx"),
   route("sign-out", "routes/account/sign-out.tsx"),
+  route("invitations/:token", "routes/account/invitation.tsx"),
 
   route("s/:token", "routes/share/open.tsx"),
   route("shared/:link", "routes/share/memo.tsx"),
@@ -71,6 +72,11 @@ export default [
       ]),
     ]),
     route("settings", "routes/org/settings.tsx"),
+    ...prefix("members", [
+      index("routes/org/members/list.tsx"),
+      route("roles", "routes/org/members/roles.tsx"),
+      route(":member", "routes/org/members/member.tsx"),
+    ]),
     route("method-sheets", "routes/org/method-sheets/list.tsx"),
     route("method-sheets/new", "routes/org/method-sheets/new.tsx"),
   ]),

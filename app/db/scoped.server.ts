@@ -17,6 +17,7 @@ import { newId } from "./id.server";
 import { Cast } from "./models/cast.server";
 import { Estimate } from "./models/estimate.server";
 import { FlagOverride } from "./models/flag-override.server";
+import { Invitation } from "./models/invitation.server";
 import { Membership } from "./models/membership.server";
 import { MemoEstimate } from "./models/memo-estimate.server";
 import { MemoRevision } from "./models/memo-revision.server";
@@ -134,7 +135,10 @@ export class TenantTable<M extends Model> {
 
 export interface Tenant {
   readonly organisationId: string;
+  /** The writing transaction under way, for what is written beside the tenant's own rows. */
+  readonly transaction: Transaction | undefined;
   readonly memberships: TenantTable<Membership>;
+  readonly invitations: TenantTable<Invitation>;
   readonly projects: TenantTable<Project>;
   readonly studyBoxes: TenantTable<StudyBox>;
   readonly storms: TenantTable<Storm>;
@@ -163,7 +167,9 @@ export function forOrganisation(organisationId: string, transaction?: Transactio
   const table = <M extends Model>(model: ModelStatic<M>) => new TenantTable(model, organisationId, transaction);
   return {
     organisationId,
+    transaction,
     memberships: table(Membership),
+    invitations: table(Invitation),
     projects: table(Project),
     studyBoxes: table(StudyBox),
     storms: table(Storm),

@@ -6,15 +6,17 @@
 import type { Transaction } from "sequelize";
 import { newId } from "./id.server";
 import { Estimate } from "./models/estimate.server";
+import { Invitation } from "./models/invitation.server";
 import { Membership } from "./models/membership.server";
 import { MemoRevision } from "./models/memo-revision.server";
 import { Organisation } from "./models/organisation.server";
+import { Session } from "./models/session.server";
 import { ShareLink } from "./models/share-link.server";
 import { User } from "./models/user.server";
-import type { Role } from "~/organisations/permissions";
+import type { Standing } from "~/organisations/permissions";
 
-export async function findUserByEmail(email: string): Promise<User | null> {
-  return User.findOne({ where: { email } });
+export async function findUserByEmail(email: string, transaction?: Transaction): Promise<User | null> {
+  return User.findOne({ where: { email }, transaction });
 }
 
 export async function findUser(id: string): Promise<User | null> {
@@ -22,7 +24,7 @@ export async function findUser(id: string): Promise<User | null> {
 }
 
 export async function createUser(
-  values: { email: string; name: string; passwordHash: string },
+  values: { email: string; name: string; passwordHash: string; emailConfirmedAt?: Date },
   transaction: Transaction,
 ): Promise<User> {
   return User.create({ id: newId(), ...values }, { transaction });
@@ -48,15 +50,19 @@ export async function slugIsTaken(slug: string, transaction?: Transaction): Prom
 
 export interface OrganisationOfUser {
   organisation: Organisation;
-  role: Role;
+  standing: Standing;
+}
+
+function standingOf({ role, mayCheck, mayIssue }: Membership): Standing {
+  return { role, mayCheck, mayIssue };
 }
 
 export async function organisationsOfUser(userId: string): Promise<OrganisationOfUser[]> {
-  const memberships = await Membership.findAll({ where: { userId } });
+  const memberships = await Membership.findAll({ where: { userId, suspendedAt: null } });
   const found = await Promise.all(
-    memberships.map(async ({ organisationId, role }) => ({
-      organisation: await Organisation.findByPk(organisationId),
-      role,
+    memberships.map(async (membership) => ({
+      organisation: await Organisation.findByPk(membership.organisationId),
+      standing: standingOf(membership),
     })),
   );
   return found
@@ -67,8 +73,30 @@ export async function organisationsOfUser(userId: string): Promise<OrganisationO
 export async function membershipBySlug(userId: string, slug: string): Promise<OrganisationOfUser | null> {
   const organisation = await Organisation.findOne({ where: { slug } });
   if (!organisation) return null;
-  const membership = await Membership.findOne({ where: { userId, organisationId: organisation.id } });
-  return membership && { organisation, role: membership.role };
+  const membership = await Membership.findOne({
+    where: { userId, organisationId: organisation.id, suspendedAt: null },
+  });
+  return membership && { organisation, standing: standingOf(membership) };
+}
+
+/** What an invitation's link stands for; the invitation leads to its organisation. */
+export async function findInvitation(id: string, transaction?: Transaction): Promise<Invitation | null> {
+  return Invitation.findByPk(id, { transaction });
+}
+
+export async function findOrganisation(id: string): Promise<Organisation | null> {
+  return Organisation.findByPk(id);
+}
+
+/** Signs a person out everywhere, at once. */
+export async function endSessionsOf(userId: string, transaction?: Transaction): Promise<void> {
+  await Session.destroy({ where: { userId }, transaction });
+}
+
+/** Names and addresses of people, by id. */
+export async function peopleById(ids: string[]): Promise<Map<string, Pick<User, "name" | "email">>> {
+  const users = await User.findAll({ where: { id: ids }, attributes: ["id", "name", "email"] });
+  return new Map(users.map((user) => [user.id, user]));
 }
 
 /** Names of people who wrote, checked or ran something. */

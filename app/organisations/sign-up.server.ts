@@ -4,6 +4,7 @@ import { createOrganisation, createUser, findUserByEmail, slugIsTaken } from "~/
 import { DEFAULT_METHOD_SHEET } from "~/estimates/default-method";
 import { hashPassword } from "~/services/password.server";
 import { DEFAULT_UNITS } from "~/units/unit-choices";
+import { usualStanding } from "./permissions";
 import type { Transaction } from "sequelize";
 
 export interface SignUp {
@@ -44,7 +45,7 @@ export async function signUp(values: SignUp): Promise<{ userId: string; slug: st
       transaction,
     );
     const tenant = forOrganisation(organisation.id, transaction);
-    await tenant.memberships.create({ userId: user.id, role: "owner" });
+    await tenant.memberships.create({ userId: user.id, ...usualStanding("owner") });
     await tenant.methodSheets.create({ ...DEFAULT_METHOD_SHEET, version: 1 });
     return { userId: user.id, slug };
   });

@@ -37,7 +37,7 @@ export const requireMembership: Middleware = async ({ params, context }) => {
   const found = actor && (await membershipBySlug(actor.id, params.organisation ?? ""));
   if (!found) notFound();
   const { id, slug, name, units, paperSize } = found.organisation;
-  context.set(organisationContext, { id, slug, name, units, paperSize, role: found.role });
+  context.set(organisationContext, { id, slug, name, units, paperSize, ...found.standing });
 };
 
 /**
@@ -59,7 +59,7 @@ export const refuseCrossSite: Middleware = ({ request }) => {
 export function allowed(context: Readonly<RouterContextProvider>, action: Action) {
   const organisation = context.get(organisationContext);
   const actor = context.get(actorContext);
-  if (!actor || !may(organisation.role, action)) {
+  if (!actor || !may(organisation, action)) {
     throw data("Your role in this organisation does not allow this.", { status: 403 });
   }
   return { actor, organisation, tenant: forOrganisation(organisation.id) };

@@ -1,5 +1,5 @@
 import { afterAll, beforeAll, describe, expect, inject, test } from "vitest";
-import { may, ROLES, type Role } from "../../app/organisations/permissions";
+import { may, ROLES, usualStanding, type Role } from "../../app/organisations/permissions";
 import { HttpClient } from "../factories/http";
 import { makeTenants, type Tenants } from "../factories/tenants";
 import { startServer, type RunningServer } from "../setup/run-server";
@@ -12,8 +12,8 @@ test("every route of routes.ts has a rule, and every rule a route", () => {
   expect(entries.map(({ file }) => file).sort()).toEqual(Object.keys(RULES).sort());
 });
 
-type Who = "anonymous" | "otherTenant" | Role;
-const EVERYONE: Who[] = ["anonymous", "otherTenant", ...ROLES];
+type Who = "anonymous" | "otherTenant" | "suspended" | Role;
+const EVERYONE: Who[] = ["anonymous", "otherTenant", "suspended", ...ROLES];
 
 let server: RunningServer;
 let tenants: Tenants;
@@ -58,8 +58,8 @@ function expected(rule: NonNullable<Rule["get"]>, who: Who): Outcome {
   if (rule === "public") return "allowed";
   if (who === "anonymous") return "signIn";
   if (rule === "signedIn") return "allowed";
-  if (who === "otherTenant") return "notFound";
-  return may(who, rule) ? "allowed" : "forbidden";
+  if (who === "otherTenant" || who === "suspended") return "notFound";
+  return may(usualStanding(who), rule) ? "allowed" : "forbidden";
 }
 
 /** What the server made of a request: a single-fetch answer carries redirects in its body. */
@@ -83,6 +83,7 @@ const ANSWERS_BY_ITSELF = new Set([
   "routes/account/sign-in.tsx",
   "routes/account/sign-up.tsx",
   "routes/account/sign-out.tsx",
+  "routes/account/invitation.tsx",
   "routes/public/landing.tsx",
   "routes/basemap-tile.ts",
 ]);

@@ -20,6 +20,7 @@ export const RULES: Record<string, Rule> = {
   "routes/account/sign-in.tsx": { get: "public", post: "public" },
   "routes/account/sign-up.tsx": { get: "public", post: "public" },
   "routes/account/sign-out.tsx": { get: "public", post: "public", resource: true },
+  "routes/account/invitation.tsx": { get: "public", post: "public" },
   "routes/share/open.tsx": { get: "public", post: null },
   "routes/share/memo.tsx": { get: "public", post: null },
   "routes/share/pdf.ts": { get: "public", post: null, resource: true },
@@ -63,6 +64,9 @@ export const RULES: Record<string, Rule> = {
   "routes/org/memos/revision.tsx": { get: "project.view", post: "memo.share" },
   "routes/org/memos/revision-pdf.ts": { get: "project.view", post: null, resource: true },
   "routes/org/settings.tsx": { get: "organisation.manage", post: "organisation.manage" },
+  "routes/org/members/list.tsx": { get: "project.view", post: "member.manage" },
+  "routes/org/members/roles.tsx": { get: "project.view", post: null },
+  "routes/org/members/member.tsx": { get: "member.manage", post: "member.manage" },
   "routes/org/method-sheets/list.tsx": { get: "project.view", post: null },
   "routes/org/method-sheets/new.tsx": { get: "project.edit", post: "project.edit" },
 };

@@ -33,7 +33,14 @@ afterEach(() => rmSync(folder, { recursive: true, force: true }));
 const NOW = "2026-12-01 00:00:00.000 +00:00";
 
 function addUser(file: SqliteFile, id: string): Promise<void> {
-  return file.run("INSERT INTO users VALUES (?, ?, ?, '-', ?, ?)", id, `${id}@example.com`, id, NOW, NOW);
+  return file.run(
+    "INSERT INTO users (id, email, name, passwordHash, createdAt, updatedAt) VALUES (?, ?, ?, '-', ?, ?)",
+    id,
+    `${id}@example.com`,
+    id,
+    NOW,
+    NOW,
+  );
 }
 
 async function usersIn(file: string): Promise<string[]> {

@@ -57,7 +57,9 @@ test("writers at the same time all get through, each seeing what the one before 
 test("a row of one organisation cannot hang under a row of another", async () => {
   const [a, b] = [newId(), newId()];
   const now = new Date().toISOString();
-  await sequelize.query(`INSERT INTO users VALUES ('u', 'u@u.example', 'U', 'x', '${now}', '${now}')`);
+  await sequelize.query(
+    `INSERT INTO users (id, email, name, passwordHash, createdAt, updatedAt) VALUES ('u', 'u@u.example', 'U', 'x', '${now}', '${now}')`,
+  );
   for (const id of [a, b]) {
     await sequelize.query(`INSERT INTO organisations VALUES ('${id}', '${id}', 'Org', '{}', 'A4', '${now}', '${now}')`);
   }

@@ -1,7 +1,7 @@
 import { copyFileSync, mkdtempSync, rmSync } from "node:fs";
 import { tmpdir } from "node:os";
 import path from "node:path";
-import type { Role } from "../../app/organisations/permissions";
+import { ROLES, usualStanding, type Role } from "../../app/organisations/permissions";
 
 interface Person {
   email: string;
@@ -12,7 +12,7 @@ export interface Tenants {
   databaseFile: string;
   /** A value for every parameter of the routes, all of the first organisation. */
   parameters: Record<string, string>;
-  people: Record<Role | "otherTenant", Person>;
+  people: Record<Role | "otherTenant" | "suspended", Person>;
   /** Slug of the second organisation, and a project of its own. */
   otherOrganisation: string;
   otherProject: string;
@@ -47,11 +47,13 @@ export async function makeTenants(seededDatabase: string): Promise<Tenants> {
   if (!demo) throw new Error("The database is not the demonstration's.");
   const tenant = forOrganisation(demo.organisation.id);
   const passwordHash = await hashPassword(PASSWORD);
-  const roles: Role[] = ["owner", "admin", "consultant", "viewer"];
-  for (const role of roles) {
-    const values = { email: `${role}@roles.example`, name: `The ${role}`, passwordHash };
+  for (const who of [...ROLES, "suspended"] as const) {
+    const values = { email: `${who}@roles.example`, name: `The ${who}`, passwordHash };
     const user = await inWriteTransaction((transaction) => createUser(values, transaction));
-    await tenant.memberships.create({ userId: user.id, role });
+    // A suspended owner may no more than anyone who is suspended.
+    const standing = usualStanding(who === "suspended" ? "owner" : who);
+    const suspendedAt = who === "suspended" ? new Date() : null;
+    await tenant.memberships.create({ userId: user.id, ...standing, suspendedAt });
   }
 
   const other = { email: "other@elsewhere.example", password: PASSWORD };
@@ -89,13 +91,14 @@ export async function makeTenants(seededDatabase: string): Promise<Tenants> {
     memo: revision.memoId,
     revision: revision.id,
     link: await one(tenant.shareLinks.first({})),
+    member: await one(tenant.memberships.first({ where: { role: "viewer" } })),
     token: "no-such-token",
     z: "3",
     x: "3",
     y: "2",
   };
   await closeDatabase();
-  const person = (role: Role) => ({ email: `${role}@roles.example`, password: PASSWORD });
+  const person = (who: Role | "suspended") => ({ email: `${who}@roles.example`, password: PASSWORD });
   return {
     databaseFile,
     parameters,
@@ -105,6 +108,7 @@ export async function makeTenants(seededDatabase: string): Promise<Tenants> {
       consultant: person("consultant"),
       viewer: person("viewer"),
       otherTenant: other,
+      suspended: person("suspended"),
     },
     otherOrganisation: signedUp.slug,
     otherProject: otherProject.id,

@@ -6,6 +6,7 @@ import { casts } from "./2026-12-01-casts.server";
 import { quality } from "./2026-12-01-quality.server";
 import { mail } from "./2026-12-01-mail.server";
 import { stormTracks } from "./2026-12-01-storm-tracks.server";
+import { members } from "./2026-12-01-members.server";
 
 export interface MigrationContext {
   /** Runs one statement inside the migration's transaction. */
@@ -22,4 +23,5 @@ export const migrations: Migration[] = [
   quality,
   mail,
   stormTracks,
+  members,
 ];

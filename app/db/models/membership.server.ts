@@ -8,6 +8,12 @@ export class Membership extends Model<InferAttributes<Membership>, InferCreation
   declare organisationId: string;
   declare userId: string;
   declare role: Role;
+  declare mayCheck: boolean;
+  declare mayIssue: boolean;
+  /** From then on the organisation does not exist for them. */
+  declare suspendedAt: CreationOptional<Date | null>;
+  /** Grows with each change, so that of two people who change it at once the second is told. */
+  declare version: CreationOptional<number>;
   declare createdAt: CreationOptional<Date>;
   declare updatedAt: CreationOptional<Date>;
 }
@@ -18,6 +24,10 @@ Membership.init(
     organisationId: { type: DataTypes.TEXT, allowNull: false },
     userId: { type: DataTypes.TEXT, allowNull: false },
     role: { type: DataTypes.TEXT, allowNull: false, validate: { isIn: [[...ROLES]] } },
+    mayCheck: { type: DataTypes.BOOLEAN, allowNull: false },
+    mayIssue: { type: DataTypes.BOOLEAN, allowNull: false },
+    suspendedAt: { type: DataTypes.DATE, allowNull: true },
+    version: { type: DataTypes.INTEGER, allowNull: false, defaultValue: 1 },
     createdAt: DataTypes.DATE,
     updatedAt: DataTypes.DATE,
   },

@@ -7,6 +7,8 @@ export class User extends Model<InferAttributes<User>, InferCreationAttributes<U
   declare email: string;
   declare name: string;
   declare passwordHash: string;
+  /** When mail to the address was shown to reach them. */
+  declare emailConfirmedAt: CreationOptional<Date | null>;
   declare createdAt: CreationOptional<Date>;
   declare updatedAt: CreationOptional<Date>;
 }
@@ -17,6 +19,7 @@ User.init(
     email: { type: DataTypes.TEXT, allowNull: false, validate: { isEmail: true, isLowercase: true } },
     name: { type: DataTypes.TEXT, allowNull: false, validate: { len: [1, 120] } },
     passwordHash: { type: DataTypes.TEXT, allowNull: false },
+    emailConfirmedAt: { type: DataTypes.DATE, allowNull: true },
     createdAt: DataTypes.DATE,
     updatedAt: DataTypes.DATE,
   },

@@ -14,6 +14,7 @@ import { composeDraft } from "~/memo/compose-draft.server";
 import { issueMemo, signMemo } from "~/memo/issue-memo.server";
 import { beginMemo } from "~/memo/save-memo.server";
 import { beginProject } from "~/projects/save-project.server";
+import { usualStanding } from "~/organisations/permissions";
 import type { ReadingAnswers } from "~/readers/reading";
 import { hashPassword } from "~/services/password.server";
 import { createShareLink } from "~/sharing/share-link.server";
@@ -44,7 +45,7 @@ async function makeOrganisation() {
     const people = [];
     for (const { email, name, role } of DEMO.people) {
       const user = await createUser({ email, name, passwordHash }, transaction);
-      await tenant.memberships.create({ userId: user.id, role });
+      await tenant.memberships.create({ userId: user.id, ...usualStanding(role) });
       people.push({ id: user.id, name, email });
     }
     return { organisation, people };

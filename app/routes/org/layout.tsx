@@ -3,20 +3,24 @@ import type { Route } from "./+types/layout";
 import { ErrorPage } from "~/components/error-page";
 import { Mark } from "~/components/mark";
 import { actorContext, organisationContext } from "~/context";
+import { myOrganisations } from "~/organisations/my-organisations.server";
 import { may } from "~/organisations/permissions";
 import { requireActor, requireMembership } from "~/services/guard.server";
 
 export const middleware: Route.MiddlewareFunction[] = [requireActor, requireMembership];
 
 /** Beside the middleware, so that moving between pages asks the server. */
-export function loader({ context }: Route.LoaderArgs) {
-  const { slug, name, role } = context.get(organisationContext);
-  const maySettle = may(role, "organisation.manage");
-  return { organisation: { slug, name, role }, maySettle, actorName: context.get(actorContext)?.name ?? "" };
+export async function loader({ context }: Route.LoaderArgs) {
+  const organisation = context.get(organisationContext);
+  const { slug, name, role } = organisation;
+  const maySettle = may(organisation, "organisation.manage");
+  const actor = context.get(actorContext);
+  const several = actor !== null && (await myOrganisations(actor.id)).length > 1;
+  return { organisation: { slug, name, role }, maySettle, several, actorName: actor?.name ?? "" };
 }
 
 export default function OrganisationLayout({ loaderData }: Route.ComponentProps) {
-  const { organisation, actorName, maySettle } = loaderData;
+  const { organisation, actorName, maySettle, several } = loaderData;
   return (
     <>
       <a href="#content" className="sr-only focus:not-sr-only focus:absolute focus:left-2 focus:top-2 focus:bg-paper">
@@ -36,6 +40,9 @@ export default function OrganisationLayout({ loaderData }: Route.ComponentProps)
           >
             Method sheets
           </Link>
+          <Link to={`/o/${organisation.slug}/members`} className="text-small text-slate no-underline hover:underline">
+            Members
+          </Link>
           {maySettle && (
             <Link
               to={`/o/${organisation.slug}/settings`}
@@ -47,6 +54,14 @@ export default function OrganisationLayout({ loaderData }: Route.ComponentProps)
           <span className="grow" />
           <span className="text-small text-slate">
             {actorName} · {organisation.role}
+            {several && (
+              <>
+                {" · "}
+                <Link to="/o" className="text-slate">
+                  switch organisation
+                </Link>
+              </>
+            )}
           </span>
           <Form method="post" action="/sign-out">
             <button type="submit" className="text-small text-slate underline">

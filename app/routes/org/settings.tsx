@@ -5,6 +5,7 @@ import type { z } from "zod";
 import type { Route } from "./+types/settings";
 import { FormErrors } from "~/components/field";
 import { SelectField, TextField } from "~/components/form-fields";
+import { Notice } from "~/components/notice";
 import { PageTitle } from "~/components/page-title";
 import { SubmitButton } from "~/components/submit-button";
 import { saveSettings } from "~/organisations/save-settings.server";
@@ -48,11 +49,7 @@ export default function Settings({ loaderData, actionData }: Route.ComponentProp
     <div className="max-w-2xl">
       <title>Settings · Galeprint</title>
       <PageTitle first>Settings of the organisation</PageTitle>
-      {actionData?.saved && (
-        <p role="status" className="mb-4 border-l-4 border-ink py-1 pl-3">
-          Saved. Screens follow from now on; issued memos stay as they are.
-        </p>
-      )}
+      {actionData?.saved && <Notice>Saved. Screens follow from now on; issued memos stay as they are.</Notice>}
       <Form method="post" {...getFormProps(form)} className="grid gap-4">
         <FormErrors errors={form.errors} id={form.errorId} />
         <TextField field={fields.name} label="Name" hint="It heads every memo." autoComplete="organization" />

@@ -12,7 +12,7 @@ export async function loader({ context, params }: Route.LoaderArgs) {
   return {
     boxes: boxes.map((box) => presentBox(box, organisation.units)),
     units: organisation.units,
-    mayEdit: may(organisation.role, "project.edit"),
+    mayEdit: may(organisation, "project.edit"),
   };
 }
 

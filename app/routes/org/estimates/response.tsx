@@ -77,7 +77,7 @@ export async function loader({ context, params }: Route.LoaderArgs) {
     columns: columns.map(({ id, name }) => ({ id, name })),
     sheets: sheets.map((sheet) => ({ id: sheet.id, label: sheetLabel(sheet) })),
     sheet: sheetLabel(register.method),
-    mayRun: may(organisation.role, "estimate.run"),
+    mayRun: may(organisation, "estimate.run"),
   };
 }
 

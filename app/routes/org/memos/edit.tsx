@@ -31,9 +31,9 @@ export async function loader({ context, params }: Route.LoaderArgs) {
     draftedFindings: draft.draftedFindings,
     hindrances: draft.hindrances,
     checker: draft.checkerName,
-    mayWrite: may(organisation.role, "memo.write"),
-    mayCheck: may(organisation.role, "memo.check") && actor.id !== memo.originatorId,
-    mayIssue: may(organisation.role, "memo.issue"),
+    mayWrite: may(organisation, "memo.write"),
+    mayCheck: may(organisation, "memo.check") && actor.id !== memo.originatorId,
+    mayIssue: may(organisation, "memo.issue"),
     isOriginator: actor.id === memo.originatorId,
   };
 }

@@ -11,7 +11,7 @@ export async function loader({ context, params }: Route.LoaderArgs) {
   return {
     memos: await listMemos(tenant, project),
     timeZone: project.timeZone,
-    mayWrite: may(organisation.role, "memo.write"),
+    mayWrite: may(organisation, "memo.write"),
     hasEstimates: (await tenant.estimates.count({ projectId: project.id })) > 0,
   };
 }

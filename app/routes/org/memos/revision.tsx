@@ -28,7 +28,7 @@ const shareSchema = z.object({
 export async function loader({ context, params }: Route.LoaderArgs) {
   const { tenant, organisation, project } = await currentProject(context, params, "project.view");
   const { revision } = await currentRevision(tenant, project, params);
-  const mayShare = may(organisation.role, "memo.share");
+  const mayShare = may(organisation, "memo.share");
   const links = mayShare ? await listShareLinks(tenant, revision.id) : [];
   const { label, document, stamp, pdfSha256, issuedAt, purpose } = revision;
   return {

@@ -37,7 +37,7 @@ export async function loader({ context }: Route.LoaderArgs) {
         ensemble ? `range from ${ensemble.members} members, seed ${ensemble.seed}` : "no range",
       ],
     })),
-    mayEdit: may(organisation.role, "project.edit"),
+    mayEdit: may(organisation, "project.edit"),
   };
 }
 

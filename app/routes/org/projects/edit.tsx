@@ -20,7 +20,7 @@ export async function loader({ context, params }: Route.LoaderArgs) {
   return {
     facts: { name, jobNumber, client, timeZone },
     timeZones: TIME_ZONES,
-    mayDelete: may(organisation.role, "project.delete"),
+    mayDelete: may(organisation, "project.delete"),
   };
 }
 

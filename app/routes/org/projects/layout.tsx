@@ -11,7 +11,7 @@ export async function loader({ context, params }: Route.LoaderArgs) {
     project: { id, name, jobNumber, client, timeZone },
     home: `/o/${organisation.slug}/projects/${id}`,
     parts: await projectParts(tenant, id),
-    mayEdit: may(organisation.role, "project.edit"),
+    mayEdit: may(organisation, "project.edit"),
   };
 }
 

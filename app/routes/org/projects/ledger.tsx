@@ -35,8 +35,8 @@ export async function loader({ request, context, params }: Route.LoaderArgs) {
     columns: ledger.columns.map(({ id, name }) => ({ id, name })),
     sheets: ledger.sheets.map((entry) => ({ id: entry.id, label: sheetLabel(entry) })),
     defaultSheet: sheet ? sheetLabel(sheet) : "",
-    mayRun: may(organisation.role, "estimate.run"),
-    mayEdit: may(organisation.role, "project.edit"),
+    mayRun: may(organisation, "estimate.run"),
+    mayEdit: may(organisation, "project.edit"),
     engine: ENGINE_VERSION,
   };
 }

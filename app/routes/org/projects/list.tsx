@@ -24,7 +24,7 @@ export async function loader({ context, request }: Route.LoaderArgs) {
     })),
     page,
     pages: Math.max(1, Math.ceil(total / PAGE_SIZE)),
-    mayEdit: may(organisation.role, "project.edit"),
+    mayEdit: may(organisation, "project.edit"),
   };
 }
 

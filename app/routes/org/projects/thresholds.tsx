@@ -24,7 +24,7 @@ export async function loader({ request, context, params }: Route.LoaderArgs) {
   const { organisation, tenant, project } = await currentProject(context, params, "project.view");
   return {
     ...(await presentThresholds(tenant, project, partOf(request.url))),
-    mayEdit: may(organisation.role, "project.edit"),
+    mayEdit: may(organisation, "project.edit"),
   };
 }
 

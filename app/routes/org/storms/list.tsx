@@ -15,7 +15,7 @@ export async function loader({ context, params }: Route.LoaderArgs) {
   const storms = await listStorms(tenant, project.id);
   return {
     storms: storms.map((storm) => present(storm, organisation.units, project.timeZone)),
-    mayEdit: may(organisation.role, "project.edit"),
+    mayEdit: may(organisation, "project.edit"),
   };
 }
 

@@ -43,7 +43,7 @@ export async function loader({ request, context, params }: Route.LoaderArgs) {
     home: `/o/${organisation.slug}/projects/${project.id}`,
     storm: { id: storm.id, name: storm.name, leaveOutSuspect: storm.leaveOutSuspect },
     zone,
-    mayEdit: may(organisation.role, "project.edit"),
+    mayEdit: may(organisation, "project.edit"),
     written: { from: search.get("from") ?? "", to: search.get("to") ?? "" },
     shown: window && {
       period: formatPeriod(window.startsAt, window.endsAt, zone),

@@ -110,7 +110,7 @@ export async function loader({ request, context, params }: Route.LoaderArgs) {
     zone: project.timeZone,
     units: organisation.units,
     uploadLimitBytes: config().uploadLimitBytes,
-    mayEdit: may(organisation.role, "project.edit"),
+    mayEdit: may(organisation, "project.edit"),
   };
 }
 

@@ -25,7 +25,7 @@ export async function loader({ context, params }: Route.LoaderArgs) {
       };
     }),
     waiting: casts.filter(({ waterColumnId }) => waterColumnId === null).map(({ id, name }) => ({ id, name })),
-    mayEdit: may(organisation.role, "project.edit"),
+    mayEdit: may(organisation, "project.edit"),
   };
 }
 
