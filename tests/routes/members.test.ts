@@ -216,7 +216,8 @@ describe("owners", () => {
     expect(done).toHaveLength(1);
     owner = both[0] === done[0] ? owner : second;
     const { version, path } = await pageOf(both[0] === done[0] ? tenants.people.owner.email : "second@quay.example");
-    for (const fields of [{ intent: "change", role: "admin" }, { intent: "remove" }]) {
+    const undoings: Record<string, string>[] = [{ intent: "change", role: "admin" }, { intent: "remove" }];
+    for (const fields of undoings) {
       const refused = await owner.post(path, { version, ...fields });
       expect(refused.status).toBe(409);
       expect(await textOf(refused)).toContain("last owner");
