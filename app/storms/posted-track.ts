@@ -142,19 +142,23 @@ function shownLimits(
   };
 }
 
+/** Apart from the columns of the fixes, one of which has the name of a parameter. */
+export const parameterField = (name: keyof TrackParameters) => `parameter-${name}`;
+
 /** A track's parameters from their fields; what is wrong is told beside its field. */
 export function postedParameters(form: FormData): { parameters: TrackParameters } | { errors: FormErrorsByField } {
   const errors: FormErrorsByField = {};
-  const profile = CYCLONE_PROFILES.find((id) => id === form.get("profile"));
-  if (!profile) errors.profile = ["Choose a profile."];
+  const profile = CYCLONE_PROFILES.find((id) => id === form.get(parameterField("profile")));
+  if (!profile) errors[parameterField("profile")] = ["Choose a profile."];
   const number = (name: TrackNumber): number => {
-    const field = form.get(name);
+    const field = form.get(parameterField(name));
     const { min, max, unit, toSi } = TRACK_NUMBERS[name];
     const value = numberOf(typeof field === "string" ? field : "");
-    if (!(value >= min && value <= max)) errors[name] = [`Write ${min} to ${max}${unit === "1" ? "" : ` ${unit}`}.`];
+    if (!(value >= min && value <= max))
+      errors[parameterField(name)] = [`Write ${min} to ${max}${unit === "1" ? "" : ` ${unit}`}.`];
     return value * toSi;
   };
-  const shape = form.get("B");
+  const shape = form.get(parameterField("B"));
   const parameters: TrackParameters = {
     profile: profile ?? CYCLONE_PROFILES[0],
     B: typeof shape === "string" && shape.trim() !== "" ? number("B") : null,
@@ -165,7 +169,7 @@ export function postedParameters(form: FormData): { parameters: TrackParameters 
     inflowAngle: number("inflowAngle"),
     asymmetry: number("asymmetry"),
     airDensity: number("airDensity"),
-    rain: form.get("rain") === "on",
+    rain: form.get(parameterField("rain")) === "on",
   };
   return Object.keys(errors).length > 0 ? { errors } : { parameters };
 }

@@ -93,7 +93,7 @@ describe("a storm from a track", () => {
     expect(sheet).toContain("The fixes were typed.");
   });
 
-  it("refuses parameters beyond their range beside the field, and what is no track", async () => {
+  it("keeps parameters, refuses those beyond their range beside the field, and what is no track", async () => {
     const begun = await consultant.post(
       `${storms}/tracks/new`,
       typed([
@@ -101,14 +101,28 @@ describe("a storm from a track", () => {
         ["2026-03-02 00:00", "-19", "149", "950", "48", "35"],
       ]),
     );
+    const parameters = {
+      B: "",
+      radiusOfMaximumWind: "60",
+      ambientPressure: "1010",
+      averagingFactor: "0.93",
+      reduction: "0.9",
+      inflowAngle: "15",
+      asymmetry: "1",
+      airDensity: "1.15",
+    };
     const form = typed([
       ["2026-03-01 00:00", "-18", "150", "955", "45", "40"],
       ["2026-03-02 00:00", "-19", "149", "950", "48", "35"],
     ]);
     form.set("intent", "save");
-    form.set("profile", "holland2010");
-    form.set("inflowAngle", "95");
-    const refused = await consultant.post(begun.headers.get("Location") ?? "", form);
+    form.set("parameter-profile", "holland2010");
+    for (const [name, value] of Object.entries(parameters)) form.set(`parameter-${name}`, value);
+    const track = begun.headers.get("Location") ?? "";
+    expect((await consultant.post(track, form)).status).toBe(302);
+    expect(await page(track)).toContain('name="parameter-inflowAngle" value="15"');
+    form.set("parameter-inflowAngle", "95");
+    const refused = await consultant.post(track, form);
     expect(refused.status).toBe(400);
     expect(await refused.text()).toContain("Write 0 to 45 °.");
     const file = new FormData();

@@ -9,6 +9,7 @@ import {
   type TrackNumber,
 } from "~/ocean/cyclone/track-parameters";
 import { parameterValues } from "~/storms/present-track";
+import { parameterField } from "~/storms/posted-track";
 import type { FormErrorsByField } from "~/storms/refusal";
 
 interface TrackParametersFieldsProps {
@@ -38,11 +39,11 @@ export function TrackParametersFields({ profile, values, rain, errors }: TrackPa
       <Field
         id={`${id}-profile`}
         label="Profile"
-        errors={errors.profile}
+        errors={errors[parameterField("profile")]}
         hint={`Default: ${PROFILE_NAMES[DEFAULT_TRACK_PARAMETERS.profile]}.`}
       >
         {(described) => (
-          <select {...described} name="profile" defaultValue={profile} className="input">
+          <select {...described} name={parameterField("profile")} defaultValue={profile} className="input">
             {CYCLONE_PROFILES.map((value) => (
               <option key={value} value={value}>
                 {PROFILE_NAMES[value]}
@@ -60,13 +61,13 @@ export function TrackParametersFields({ profile, values, rain, errors }: TrackPa
             label={label}
             unit={unit === "1" ? undefined : unit}
             optional={name === "B"}
-            errors={errors[name]}
+            errors={errors[parameterField(name)]}
             hint={`Default: ${defaults[name] === "" ? "none" : defaults[name]}. Source: ${source}.`}
           >
             {(described) => (
               <input
                 {...described}
-                name={name}
+                name={parameterField(name)}
                 defaultValue={values[name]}
                 inputMode="decimal"
                 autoComplete="off"
@@ -77,7 +78,12 @@ export function TrackParametersFields({ profile, values, rain, errors }: TrackPa
         );
       })}
       <label className="flex items-start gap-2.5">
-        <input type="checkbox" name="rain" defaultChecked={rain} className="mt-1 size-4 shrink-0 accent-ink" />
+        <input
+          type="checkbox"
+          name={parameterField("rain")}
+          defaultChecked={rain}
+          className="mt-1 size-4 shrink-0 accent-ink"
+        />
         <span>
           Climatological rain
           <span className="block text-small text-quiet">

@@ -65,7 +65,14 @@ export default function NewTrack({ loaderData, actionData }: Route.ComponentProp
           errors={errors.file}
           hint={`Deck text, the hurricane database's text, or the archive's CSV, up to ${loaderData.uploadLimitMb} MB. It is kept as it is, byte for byte.`}
         >
-          {(described) => <input {...described} type="file" name="file" className="block w-full min-w-0" />}
+          {(described) => (
+            <input
+              {...described}
+              type="file"
+              name="file"
+              className="block w-full min-w-0 file:mr-3 file:border file:border-ink file:bg-transparent file:px-3 file:py-1.5 file:text-ink"
+            />
+          )}
         </Field>
         <NameField id={`${id}-file-name`} errors={errors.name} />
         <div>
