@@ -10,6 +10,8 @@ export default [
   route("sign-in", "routes/account/sign-in.tsx"),
   route("sign-up", "routes/account/sign-up.tsx"),
   route("sign-out", "routes/account/sign-out.tsx"),
+  route("reset-password", "routes/account/forgot-password.tsx"),
+  route("reset-password/:token", "routes/account/reset-password.tsx"),
   route("invitations/:token", "routes/account/invitation.tsx"),
 
   route("s/:token", "routes/share/open.tsx"),

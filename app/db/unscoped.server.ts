@@ -88,6 +88,10 @@ export async function findOrganisation(id: string): Promise<Organisation | null>
   return Organisation.findByPk(id);
 }
 
+export async function setPassword(userId: string, passwordHash: string, transaction: Transaction): Promise<void> {
+  await User.update({ passwordHash }, { where: { id: userId }, transaction });
+}
+
 /** Signs a person out everywhere, at once. */
 export async function endSessionsOf(userId: string, transaction?: Transaction): Promise<void> {
   await Session.destroy({ where: { userId }, transaction });

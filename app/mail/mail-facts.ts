@@ -1,10 +1,8 @@
 /** What each mail tells. None carries a secret: the token of a link is made as the mail leaves. */
 export interface MailFacts {
   invitation: { organisation: string; invitedBy: string; role: string; hours: number };
-  "confirm-address": { name: string; hours: number };
   "reset-password": { name: string; minutes: number };
   "password-changed": { name: string; when: string; from: string };
-  "new-device": { name: string; device: string; when: string; from: string };
 }
 export type MailName = keyof MailFacts;
 

@@ -15,8 +15,6 @@ interface MailTemplate<Facts> {
   write(facts: Facts, link: string): MailContent;
 }
 
-const NOT_YOU = "If this was not you, reset your password at once and tell the owner of your organisation.";
-
 export const MAIL_TEMPLATES: { [Name in MailName]: MailTemplate<MailFacts[Name]> } = {
   invitation: {
     sample: { organisation: "Merrow & Quill", invitedBy: "Ida Renholt", role: "consultant", hours: 72 },
@@ -30,18 +28,6 @@ export const MAIL_TEMPLATES: { [Name in MailName]: MailTemplate<MailFacts[Name]>
       closing: [
         `The link works once and for ${hours} hours. A later mail replaces it.`,
         "If you did not expect this, leave it: nothing happens without you.",
-      ],
-    }),
-  },
-  "confirm-address": {
-    sample: { name: "Ida Renholt", hours: 24 },
-    write: ({ name, hours }, link) => ({
-      subject: "Confirm your e-mail address for Galeprint",
-      paragraphs: [`${name}, please confirm that this address is yours. Mail that you ask for will come here.`],
-      action: { label: "Confirm this address", address: link },
-      closing: [
-        `The link works once and for ${hours} hours.`,
-        "If you made no account, leave this mail: without it the address stays unconfirmed.",
       ],
     }),
   },
@@ -63,21 +49,7 @@ export const MAIL_TEMPLATES: { [Name in MailName]: MailTemplate<MailFacts[Name]>
       subject: "Your Galeprint password was changed",
       paragraphs: [`${name}, your password was changed on ${when}, from ${from}. All your other sign-ins have ended.`],
       action: { label: "Reset the password", address: link },
-      closing: [NOT_YOU],
-    }),
-  },
-  "new-device": {
-    sample: {
-      name: "Ida Renholt",
-      device: "Firefox on Linux",
-      when: "2026-03-04 09:30 UTC",
-      from: "192.0.2.14",
-    },
-    write: ({ name, device, when, from }, link) => ({
-      subject: "A new device signed in to Galeprint",
-      paragraphs: [`${name}, your account was signed in to on ${when} with ${device}, from ${from}.`],
-      action: { label: "See where you are signed in", address: link },
-      closing: [NOT_YOU],
+      closing: ["If this was not you, reset your password at once and tell the owner of your organisation."],
     }),
   },
 };

@@ -22,6 +22,10 @@ const password = z
   .min(12, "Use at least 12 characters; a few words in a row are easy to keep.")
   .max(256, "Use at most 256 characters.");
 
+export const forgotPasswordSchema = z.object({ email: z.preprocess((value) => value ?? "", email) });
+
+export const newPasswordSchema = z.object({ password });
+
 export const newcomerSchema = z.object({ name, password });
 
 export const signUpSchema = z.object({

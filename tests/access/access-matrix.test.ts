@@ -83,6 +83,7 @@ const ANSWERS_BY_ITSELF = new Set([
   "routes/account/sign-in.tsx",
   "routes/account/sign-up.tsx",
   "routes/account/sign-out.tsx",
+  "routes/account/reset-password.tsx",
   "routes/account/invitation.tsx",
   "routes/public/landing.tsx",
   "routes/basemap-tile.ts",

@@ -20,6 +20,8 @@ export const RULES: Record<string, Rule> = {
   "routes/account/sign-in.tsx": { get: "public", post: "public" },
   "routes/account/sign-up.tsx": { get: "public", post: "public" },
   "routes/account/sign-out.tsx": { get: "public", post: "public", resource: true },
+  "routes/account/forgot-password.tsx": { get: "public", post: "public" },
+  "routes/account/reset-password.tsx": { get: "public", post: "public" },
   "routes/account/invitation.tsx": { get: "public", post: "public" },
   "routes/share/open.tsx": { get: "public", post: null },
   "routes/share/memo.tsx": { get: "public", post: null },

@@ -196,6 +196,38 @@ describe("a member", () => {
   });
 });
 
+describe("a forgotten password", () => {
+  const email = "viewer@roles.example";
+
+  test("is answered alike for an address with an account and for one without", async () => {
+    const answers = await Promise.all(
+      [email, "nobody@quay.example"].map(async (address) => {
+        const response = await browser().post("/reset-password", { email: address });
+        const notice = /role="status"[^>]*>(.*?)<\/p>/s.exec((await textOf(response)) ?? "")?.[1];
+        return { status: response.status, notice };
+      }),
+    );
+    expect(answers[0].notice).toContain("If this address has an account");
+    expect(answers[1]).toEqual(answers[0]);
+  });
+
+  test("is replaced once by its link, which ends every sign-in and is told of by mail", async () => {
+    const { text } = await mailbox.next(email);
+    const link = new URL(/http\S+\/reset-password\/\S+/.exec(text)?.[0] ?? "").pathname;
+    const tab = await as("viewer");
+    const from = mailbox.mails.length;
+    const short = await browser().post(link, { password: "short" });
+    expect(short.status).toBe(400);
+    const both = await Promise.all([1, 2].map(() => browser().post(link, { password: NEWCOMER.password })));
+    expect(both.map((response) => response.headers.get("Location")).sort()).toEqual([link, "/sign-in?reset"].sort());
+    expect((await browser().get(link)).status).toBe(404);
+    expect((await tab.get(members)).status).toBe(302);
+    expect((await mailbox.next(email, from)).subject).toBe("Your Galeprint password was changed");
+    await expect(as("viewer")).rejects.toThrow("400");
+    expect((await (await browser().signIn(email, NEWCOMER.password)).get(members)).status).toBe(200);
+  });
+});
+
 describe("owners", () => {
   test("cannot be touched by an admin", async () => {
     const { email } = tenants.people.owner;

@@ -6,6 +6,7 @@ import type { Route } from "./+types/sign-in";
 import { AccountPage } from "~/components/account-page";
 import { FormErrors } from "~/components/field";
 import { TextField } from "~/components/form-fields";
+import { Notice } from "~/components/notice";
 import { SubmitButton } from "~/components/submit-button";
 import { actorContext } from "~/context";
 import { signInSchema } from "~/organisations/account-schema";
@@ -43,6 +44,7 @@ export default function SignIn({ actionData }: Route.ComponentProps) {
   const [search] = useSearchParams();
   return (
     <AccountPage title="Sign in">
+      {search.has("reset") && <Notice>Your password is changed. Sign in with it.</Notice>}
       <Form method="post" {...getFormProps(form)} className="grid gap-4">
         <FormErrors errors={form.errors} id={form.errorId} />
         <input type="hidden" name="to" value={search.get("to") ?? ""} />
@@ -51,6 +53,9 @@ export default function SignIn({ actionData }: Route.ComponentProps) {
         <SubmitButton busy="Signing in…">Sign in</SubmitButton>
       </Form>
       <p className="mt-6 text-slate">
+        <Link to="/reset-password">Forgot your password?</Link>
+      </p>
+      <p className="mt-2 text-slate">
         New here? <Link to="/sign-up">Make an account for your organisation</Link>
       </p>
     </AccountPage>
