@@ -25,7 +25,7 @@ export function InvitationTable({ invitations }: { invitations: PresentedInvitat
       <tbody>
         {invitations.map((invitation) => (
           <tr key={invitation.id}>
-            <td className="break-all">{invitation.email}</td>
+            <td className="min-w-44 wrap-anywhere">{invitation.email}</td>
             <td>{standingText(invitation)}</td>
             <td>
               {invitation.invited} UTC by {invitation.invitedBy}

@@ -95,13 +95,21 @@ export default function Members({ loaderData, actionData }: Route.ComponentProps
         <tbody>
           {members.map((member) => (
             <tr key={member.id}>
-              <td>{mayManage ? <Link to={member.id}>{member.name}</Link> : member.name}</td>
-              <td className="break-all">{member.email}</td>
+              <td>
+                {mayManage ? (
+                  <Link to={member.id} className="font-bold underline">
+                    {member.name}
+                  </Link>
+                ) : (
+                  member.name
+                )}
+              </td>
+              <td className="min-w-44 wrap-anywhere">{member.email}</td>
               <td>
                 {standingText(member)}
                 {member.suspended && <strong> · suspended</strong>}
               </td>
-              <td className="tabular-nums">{member.since}</td>
+              <td className="whitespace-nowrap tabular-nums">{member.since}</td>
             </tr>
           ))}
         </tbody>
