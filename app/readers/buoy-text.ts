@@ -1,5 +1,6 @@
 import type { ProblemList } from "./problem-list";
 import { UnreadableFile, type ReadingAnswers, type SeriesReading } from "./reading";
+import { rowsOf } from "./rows";
 import { seriesFromTable } from "./series-from-table";
 import type { SourceFile } from "./source-file";
 import type { FormatKnowledge, KnownColumn, TextTable } from "./text-table";
@@ -43,22 +44,17 @@ export function isBuoyText(source: SourceFile): boolean {
 export function readBuoyText(source: SourceFile, answers: ReadingAnswers, problems: ProblemList): SeriesReading {
   const headerIndex = source.lines.findIndex((line) => line.trim() !== "");
   const header = source.lines[headerIndex] ?? "";
-  const table: TextTable = {
-    names: split(header),
-    unitTexts: [],
-    rows: [],
-    lines: [],
-    decimal: ".",
-    preamble: [],
-    named: true,
-  };
+  const names = split(header);
+  const rows: string[][] = [];
+  const lines: number[] = [];
+  let units: string[] = [];
   let realtime = false;
   for (let index = headerIndex + 1; index < source.lines.length; index += 1) {
     const line = source.lines[index] ?? "";
     if (line.trim() === "") continue;
     const cells = split(line);
     if (line.trimStart().startsWith("#")) {
-      if (table.rows.length === 0 && cells.length === table.names.length) table.unitTexts = cells;
+      if (rows.length === 0 && cells.length === names.length) units = cells;
       continue;
     }
     if (HEADER.test(line)) {
@@ -68,16 +64,24 @@ export function readBuoyText(source: SourceFile, answers: ReadingAnswers, proble
       continue;
     }
     realtime ||= cells.includes("MM");
-    table.rows.push(cells);
-    table.lines.push(index + 1);
+    rows.push(cells);
+    lines.push(index + 1);
   }
-  if (table.rows.length === 0) {
+  if (rows.length === 0) {
     problems.add("error", "onlyHeader", "the file has a header but no records", "Give a file with records.", {
       row: headerIndex + 1,
     });
     throw new UnreadableFile(problems.toArray());
   }
-  table.unitTexts = table.names.map((_, index) => table.unitTexts[index] ?? null);
+  const table: TextTable = {
+    names,
+    unitTexts: names.map((_, index) => units[index] ?? null),
+    rows: rowsOf(rows),
+    lines,
+    decimal: ".",
+    preamble: [],
+    named: true,
+  };
   return seriesFromTable(table, knowledgeOf(realtime), source.fileName, answers, problems);
 }
 

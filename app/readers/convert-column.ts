@@ -29,10 +29,13 @@ export function convertColumn(
   const raw = perRow(settled, times, lines, problems);
   const converted = raw.map((value) => (value - unit.zero) * unit.factor);
   const amounts = isWaterAmount(unit) ? converted : null;
+  const divisor = divisorOf(unit, times.stepSeconds);
   const values =
     amounts !== null && isSpread(unit, times)
       ? ratesSinceRowBefore(amounts, times)
-      : converted.map((value) => value / divisorOf(unit, times.stepSeconds));
+      : divisor === 1
+        ? converted
+        : converted.map((value) => value / divisor);
   const bad = checkLimits(settled, values, lines, problems);
   for (const { row, text } of scan.unreadable) {
     problems.add(

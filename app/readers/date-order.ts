@@ -19,16 +19,22 @@ const LABELS: Record<DateOrder, string> = {
  * order under which the dates cover the shorter span is suggested and the person is asked.
  * @param cells date cells, all of them
  */
-export function chooseDateOrder(cells: readonly string[], answers: ReadingAnswers): DateOrderChoice {
+export function chooseDateOrder(cells: Iterable<string>, answers: ReadingAnswers): DateOrderChoice {
   let firstOver = 0;
   let secondOver = 0;
   let yearLast = 0;
   let sameNumbers = true;
+  let dotted = true;
+  let example = "";
   const distinct = new Set<string>();
   for (const cell of cells) {
-    const numbers = dayMonthNumbers(tidyCell(cell));
+    const text = tidyCell(cell);
+    const numbers = dayMonthNumbers(text);
     if (numbers === null) continue;
+    if (yearLast === 0) example = cell.trim();
     yearLast += 1;
+    // Dates with dots are written day first wherever they are written (common practice, no source).
+    if (!/^\d{1,2}\./.test(text)) dotted = false;
     if (numbers[0] > 12) firstOver += 1;
     if (numbers[1] > 12) secondOver += 1;
     if (numbers[0] !== numbers[1]) sameNumbers = false;
@@ -40,14 +46,12 @@ export function chooseDateOrder(cells: readonly string[], answers: ReadingAnswer
     taken: LABELS[order],
     confidence,
   });
-  // Dates with dots are written day first wherever they are written (common practice, no source).
-  const dotted = cells.every((cell) => dayMonthNumbers(tidyCell(cell)) === null || /^\d{1,2}\./.test(tidyCell(cell)));
   const ambiguous = firstOver === 0 && secondOver === 0 && !sameNumbers && !dotted;
   const suggestion = ambiguous ? shorterSpan([...distinct]) : firstOver >= secondOver ? "dmy" : "mdy";
   const question: ReadingQuestion = {
     key: "dateOrder",
     needed: ambiguous && answers.dateOrder === undefined,
-    message: `Dates such as ${cells.find((cell) => dayMonthNumbers(tidyCell(cell)) !== null)?.trim() ?? ""} could be day/month or month/day. Say which.`,
+    message: `Dates such as ${example} could be day/month or month/day. Say which.`,
     options: [
       { value: "dmy", label: LABELS.dmy },
       { value: "mdy", label: LABELS.mdy },

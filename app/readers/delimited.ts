@@ -2,6 +2,7 @@ import { findDelimiter, type Delimiter } from "./delimiter";
 import { decimalSignOf, tidyCell, type DecimalSign } from "./number-text";
 import type { ProblemList } from "./problem-list";
 import { UnreadableFile, type ReadingAnswers, type SeriesReading, type Understood } from "./reading";
+import { chosenRows, type Rows } from "./rows";
 import { seriesFromTable } from "./series-from-table";
 import type { SourceFile } from "./source-file";
 import { splitRows, type SplitRows } from "./split-table";
@@ -51,7 +52,8 @@ export function seriesFromRows(
   answers: ReadingAnswers,
   problems: ProblemList,
 ): SeriesReading {
-  const widest = split.rows.reduce((width, cells) => Math.max(width, cells.length), 0);
+  let widest = 0;
+  for (let row = 0; row < split.rows.length; row += 1) widest = Math.max(widest, split.rows.width(row));
   if (widest > MAX_COLUMNS) {
     problems.add(
       "error",
@@ -63,10 +65,7 @@ export function seriesFromRows(
   }
   const layout = findLayout(split);
   if (layout === null) {
-    refuse(
-      split.rows.map((cells) => cells.join(" ")),
-      problems,
-    );
+    refuse(textOfRows(split.rows, split.rows.length), problems);
     throw new UnreadableFile(problems.toArray());
   }
   const records = recordsOf(split, layout, problems);
@@ -85,7 +84,7 @@ export function seriesFromRows(
     rows: records.rows,
     lines: records.lines,
     decimal: decimal.sign,
-    preamble: split.rows.slice(0, layout.firstData).map((cells) => cells.join(" ")),
+    preamble: textOfRows(split.rows, layout.firstData),
     named: layout.named,
   };
   if (!layout.named) {
@@ -122,10 +121,10 @@ function refuse(textLines: readonly string[], problems: ProblemList): void {
 
 /** Rows of the table without blank lines, remarks and repeated headers, each passed over with a note. */
 function recordsOf(split: SplitRows, layout: TableLayout, problems: ProblemList): SplitRows {
-  const rows: string[][] = [];
+  const kept: number[] = [];
   const lines: number[] = [];
   for (let index = layout.firstData; index < split.rows.length; index += 1) {
-    const cells = split.rows[index] ?? [];
+    const cells = split.rows.row(index);
     const row = split.lines[index] ?? 0;
     if (cells.every((cell) => tidyCell(cell).trim() === "")) continue;
     if (index >= layout.endData) {
@@ -137,20 +136,24 @@ function recordsOf(split: SplitRows, layout: TableLayout, problems: ProblemList)
         row,
       });
     } else {
-      rows.push(cells);
+      kept.push(index);
       lines.push(row);
     }
   }
-  return { rows, lines };
+  return { rows: chosenRows(split.rows, kept), lines };
+}
+
+function textOfRows(rows: Rows, count: number): string[] {
+  return Array.from({ length: count }, (_, index) => rows.row(index).join(" "));
 }
 
 function isHeaderAgain(cells: readonly string[], names: readonly string[]): boolean {
   return cells.length >= names.length && names.every((name, index) => name === tidyCell(cells[index] ?? "").trim());
 }
 
-function* cellsOf(rows: readonly string[][]): Iterable<string> {
+function* cellsOf(rows: Rows): Iterable<string> {
   const stride = Math.max(1, Math.floor(rows.length / DECIMAL_ROWS));
-  for (let index = 0; index < rows.length; index += stride) yield* rows[index] ?? [];
+  for (let index = 0; index < rows.length; index += stride) yield* rows.row(index);
 }
 
 function knowledgeOf(source: SourceFile, delimiter: Delimiter, decimal: string): FormatKnowledge {

@@ -4,6 +4,7 @@ import { codeTest } from "./missing-codes";
 import { numberFromText } from "./number-text";
 import type { ColumnProposal } from "./propose-columns";
 import type { ColumnReading } from "./reading";
+import { columnOf } from "./rows";
 import type { SettledColumn } from "./settle-columns";
 import type { TextTable } from "./text-table";
 
@@ -35,8 +36,8 @@ export function describeColumns(
 function countMissing(table: TextTable, column: number, codes: readonly string[]): number {
   const isCode = codeTest(codes, table.decimal);
   let missing = 0;
-  for (const cells of table.rows) {
-    const text = tidyCell(cells[column] ?? "").trim();
+  for (const cell of columnOf(table.rows, column)) {
+    const text = tidyCell(cell).trim();
     const value = codes.length === 0 ? null : numberFromText(text, table.decimal);
     if (isMissingWord(text) || isCode(text, value)) missing += 1;
   }

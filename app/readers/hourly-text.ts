@@ -1,5 +1,6 @@
 import type { ProblemList } from "./problem-list";
 import type { ReadingAnswers, SeriesReading } from "./reading";
+import { rowsOf } from "./rows";
 import { seriesFromTable } from "./series-from-table";
 import type { SourceFile } from "./source-file";
 import type { FormatKnowledge, KnownColumn, TextTable } from "./text-table";
@@ -40,20 +41,22 @@ export function isHourlyText(source: SourceFile): boolean {
 
 /** Reads fixed-width hourly surface records: tenths, −9999 for missing, −1 for a trace of rain, direction 0 for a calm. */
 export function readHourlyText(source: SourceFile, answers: ReadingAnswers, problems: ProblemList): SeriesReading {
+  const rows: string[][] = [];
+  const lines: number[] = [];
+  for (const [index, line] of source.lines.entries()) {
+    if (line.trim() === "") continue;
+    rows.push(line.trim().split(/\s+/));
+    lines.push(index + 1);
+  }
   const table: TextTable = {
     names: FIELDS.map(({ name }) => name),
     unitTexts: FIELDS.map(() => null),
-    rows: [],
-    lines: [],
+    rows: rowsOf(rows),
+    lines,
     decimal: ".",
     preamble: [],
     named: true,
   };
-  for (const [index, line] of source.lines.entries()) {
-    if (line.trim() === "") continue;
-    table.rows.push(line.trim().split(/\s+/));
-    table.lines.push(index + 1);
-  }
   return seriesFromTable(table, KNOWLEDGE, source.fileName, answers, problems);
 }
 

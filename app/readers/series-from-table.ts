@@ -132,9 +132,9 @@ function noStamps(table: TextTable, problems: ProblemList): Stamps {
 function raggedRows(table: TextTable, problems: ProblemList): Map<number, string> {
   const bad = new Map<number, string>();
   const expected = table.names.length;
-  for (const [row, cells] of table.rows.entries()) {
-    let length = cells.length;
-    while (length > expected && (cells[length - 1] ?? "").trim() === "") length -= 1;
+  for (let row = 0; row < table.rows.length; row += 1) {
+    let length = table.rows.width(row);
+    while (length > expected && (table.rows.cell(row, length - 1) ?? "").trim() === "") length -= 1;
     if (length === expected) continue;
     bad.set(row, "the number of fields is wrong");
     problems.add(

@@ -35,12 +35,10 @@ export function statisticsOf(values: Float64Array, utc: Float64Array, rows: read
   let min = Infinity;
   let max = -Infinity;
   let maxAt = NaN;
-  const present: number[] = [];
   for (const row of rows) {
     const value = values[row] ?? NaN;
     if (Number.isNaN(value)) continue;
     count += 1;
-    present.push(value);
     min = Math.min(min, value);
     if (value > max) {
       max = value;
@@ -51,11 +49,18 @@ export function statisticsOf(values: Float64Array, utc: Float64Array, rows: read
   return {
     count,
     missing: rows.length - count,
-    mean: exactSum(present) / count,
+    mean: exactSum(valuesAt(values, rows)) / count,
     min,
     max,
     maxAt: isoFromSeconds(maxAt),
   };
+}
+
+/** Values at the given rows; a plain loop, since mapping through an iterator takes ten times as long. */
+export function valuesAt(values: Float64Array, rows: readonly number[]): Float64Array {
+  const picked = new Float64Array(rows.length);
+  for (let index = 0; index < rows.length; index += 1) picked[index] = values[rows[index] ?? 0] ?? NaN;
+  return picked;
 }
 
 /**
@@ -67,15 +72,17 @@ export function vectorMeanWind(
   from: Float64Array,
   rows: readonly number[],
 ): { speed: number; from: number | null } | null {
-  const u: number[] = [];
-  const v: number[] = [];
+  const u = new Float64Array(rows.length);
+  const v = new Float64Array(rows.length);
+  let count = 0;
   for (const row of rows) {
     const parts = componentsOfWind(speed[row] ?? NaN, from[row] ?? NaN);
     if (Number.isNaN(parts.u)) continue;
-    u.push(parts.u);
-    v.push(parts.v);
+    u[count] = parts.u;
+    v[count] = parts.v;
+    count += 1;
   }
-  if (u.length === 0) return null;
-  const mean = windFromComponents(exactSum(u) / u.length, exactSum(v) / v.length);
+  if (count === 0) return null;
+  const mean = windFromComponents(exactSum(u.subarray(0, count)) / count, exactSum(v.subarray(0, count)) / count);
   return { speed: mean.speed, from: Number.isNaN(mean.from) ? null : mean.from };
 }

@@ -1,10 +1,11 @@
 import Papa from "papaparse";
 import type { Delimiter } from "./delimiter";
 import type { ProblemList } from "./problem-list";
+import { packedRows, rowsOf, type Rows } from "./rows";
 import type { SourceFile } from "./source-file";
 
 export interface SplitRows {
-  rows: string[][];
+  rows: Rows;
   /** Line of the file on which each row starts, from 1. */
   lines: number[];
 }
@@ -16,10 +17,13 @@ export interface SplitRows {
 export function splitRows(source: SourceFile, delimiter: Delimiter, problems: ProblemList): SplitRows {
   const text = delimiter === " " ? source.lines.map(oneTab).join("\n") : source.decoded.text;
   const separator = delimiter === " " ? "\t" : delimiter;
-  const quoted = text.includes('"');
+  if (!text.includes('"')) {
+    const rows = packedRows(text, separator);
+    return { rows, lines: Array.from({ length: rows.length }, (_, index) => index + 1) };
+  }
   const parse = (fastMode: boolean): Papa.ParseResult<string[]> =>
     Papa.parse<string[]>(text, { delimiter: separator, newline: "\n", fastMode, skipEmptyLines: false });
-  let result = parse(!quoted);
+  let result = parse(false);
   const broken = result.errors.find((error) => error.type === "Quotes");
   if (broken !== undefined) {
     result = parse(true);
@@ -38,9 +42,9 @@ export function splitRows(source: SourceFile, delimiter: Delimiter, problems: Pr
   for (const cells of result.data) {
     lines.push(line);
     line += 1;
-    if (quoted) for (const cell of cells) line += newlinesIn(cell);
+    for (const cell of cells) line += newlinesIn(cell);
   }
-  return { rows: result.data, lines };
+  return { rows: rowsOf(result.data), lines };
 }
 
 function oneTab(line: string): string {

@@ -98,7 +98,7 @@ function sampleCells(table: TextTable, column: number): string[] {
   const cells: string[] = [];
   const stride = Math.max(1, Math.floor(table.rows.length / SAMPLE));
   for (let row = 0; row < table.rows.length && cells.length < SAMPLE; row += stride) {
-    const cell = tidyCell(table.rows[row]?.[column] ?? "");
+    const cell = tidyCell(table.rows.cell(row, column) ?? "");
     if (cell !== "") cells.push(cell);
   }
   return cells;

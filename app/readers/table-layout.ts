@@ -3,6 +3,7 @@ import { STAMP_NAMES } from "./column-vocabulary";
 import { unitFromText } from "./file-units";
 import { isMissingWord } from "./missing-codes";
 import { numberFromText, tidyCell } from "./number-text";
+import type { Rows } from "./rows";
 import type { SplitRows } from "./split-table";
 import { stampFromText, timeFromText } from "./stamp-text";
 
@@ -24,14 +25,14 @@ const LONGEST_NAME = 120;
 /** Finds names, units, records and notes at the foot; null where no row looks like a record. */
 export function findLayout(split: SplitRows): TableLayout | null {
   const { rows } = split;
-  const kinds = rows.slice(0, SEARCHED).map(kindOf);
+  const kinds = Array.from({ length: Math.min(SEARCHED, rows.length) }, (_, index) => kindOf(rows.row(index)));
   const width = commonWidth(rows);
   const digital = kinds.filter((kind) => kind.numbers + kind.stamps > 0);
   const stamped = digital.filter((kind) => kind.stamps > 0).length > 0.3 * digital.length;
   const isRecord = (index: number): boolean => {
-    const kind = index < kinds.length ? kinds[index] : kindOf(rows[index] ?? []);
+    const kind = index < kinds.length ? kinds[index] : kindOf(rows.row(index));
     if (kind === undefined || kind.filled === 0) return false;
-    const enough = Math.abs((rows[index]?.length ?? 0) - width) <= 1 || kind.filled >= 0.7 * width;
+    const enough = Math.abs(rows.width(index) - width) <= 1 || kind.filled >= 0.7 * width;
     return (
       enough &&
       kind.numbers + kind.stamps > 0 &&
@@ -42,7 +43,7 @@ export function findLayout(split: SplitRows): TableLayout | null {
   const firstData = kinds.findIndex((_, index) => isRecord(index));
   if (firstData < 0) return null;
   let endData = rows.length;
-  while (endData > firstData + 1 && !isRecord(endData - 1) && isNote(rows[endData - 1] ?? [], width)) endData -= 1;
+  while (endData > firstData + 1 && !isRecord(endData - 1) && isNote(rows.row(endData - 1), width)) endData -= 1;
   return { ...findHeader(rows, firstData, width), firstData, endData };
 }
 
@@ -69,9 +70,12 @@ function kindOf(cells: readonly string[]): RowKind {
   return kind;
 }
 
-function commonWidth(rows: readonly string[][]): number {
+function commonWidth(rows: Rows): number {
   const counts = new Map<number, number>();
-  for (const row of rows) if (row.length > 1) counts.set(row.length, (counts.get(row.length) ?? 0) + 1);
+  for (let row = 0; row < rows.length; row += 1) {
+    const length = rows.width(row);
+    if (length > 1) counts.set(length, (counts.get(length) ?? 0) + 1);
+  }
   let width = 1;
   let times = 0;
   for (const [length, count] of counts) if (count > times) [width, times] = [length, count];
@@ -92,14 +96,10 @@ function isNote(cells: readonly string[], width: number): boolean {
   return kind.stamps === 0 && kind.numbers < 0.5 * width;
 }
 
-function findHeader(
-  rows: readonly string[][],
-  firstData: number,
-  width: number,
-): Pick<TableLayout, "names" | "unitTexts" | "named"> {
+function findHeader(rows: Rows, firstData: number, width: number): Pick<TableLayout, "names" | "unitTexts" | "named"> {
   const block: string[][] = [];
   for (let index = firstData - 1; index >= 0 && block.length < HEADER_ROWS; index -= 1) {
-    const cells = rows[index] ?? [];
+    const cells = rows.row(index);
     const kind = kindOf(cells);
     if (kind.filled === 0 && block.length === 0) continue;
     if (kind.filled < Math.max(1, 0.4 * width) || kind.numbers > 0.5 * kind.filled) break;
@@ -140,8 +140,10 @@ function findHeader(
 }
 
 /** A trailing delimiter makes an empty last field in every row. */
-function widthWithoutTrailing(rows: readonly string[][], firstData: number, width: number): number {
-  const sample = rows.slice(firstData, firstData + 50).filter((row) => row.length === width);
+function widthWithoutTrailing(rows: Rows, firstData: number, width: number): number {
+  const count = Math.min(50, rows.length - firstData);
+  const first = Array.from({ length: count }, (_, index) => rows.row(firstData + index));
+  const sample = first.filter((row) => row.length === width);
   const trailing = sample.length > 0 && sample.every((row) => (row.at(-1) ?? "").trim() === "");
   return trailing ? width - 1 : width;
 }

@@ -1,4 +1,5 @@
 import type { DecimalSign } from "./number-text";
+import type { Rows } from "./rows";
 import type { ColumnReading, Understood } from "./reading";
 
 /** A table of text as a format reader hands it on: names, units as written, cells, and where each row stands. */
@@ -7,7 +8,7 @@ export interface TextTable {
   /** From a row of units, or null. */
   unitTexts: (string | null)[];
   /** Cells as written; a row may be shorter or longer than `names`. */
-  rows: string[][];
+  rows: Rows;
   /** Line of the file of each row, from 1. */
   lines: number[];
   decimal: DecimalSign;

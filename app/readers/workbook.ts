@@ -4,13 +4,19 @@ import { seriesFromRows } from "./delimited";
 import { isWorkbook } from "./magic-bytes";
 import type { ProblemList } from "./problem-list";
 import { UnreadableFile, type ReadingAnswers, type SeriesReading } from "./reading";
+import { rowsOf } from "./rows";
 import { isSizeAllowed } from "./source-file";
-import type { SplitRows } from "./split-table";
 import type { FormatKnowledge } from "./text-table";
 
 /** Largest size of a workbook's parts once unpacked, bytes: above, it is a bomb or no record of one storm. */
 const MAX_UNPACKED_BYTES = 512 * 1024 * 1024;
 const MAX_CELLS = 20_000_000;
+
+interface SheetRows {
+  rows: string[][];
+  /** Row of the sheet, from 1. */
+  lines: number[];
+}
 
 /**
  * Reads one sheet of an Excel workbook as a table: numbers in full, dates as their cells show them, formulas by the value
@@ -26,7 +32,7 @@ export function readWorkbook(
   if (!isSizeAllowed(bytes, fileName, problems)) throw new UnreadableFile(problems.toArray());
   const workbook = open(bytes, fileName, problems);
   const sheets = workbook.SheetNames.flatMap((name) => {
-    const rows = rowsOf(workbook.Sheets[name], problems);
+    const rows = cellsOf(workbook.Sheets[name], problems);
     return rows.rows.filter((cells) => cells.some((cell) => cell !== "")).length > 1 ? [{ name, rows }] : [];
   });
   const largest = [...sheets].sort((a, b) => b.rows.rows.length - a.rows.rows.length)[0];
@@ -35,7 +41,13 @@ export function readWorkbook(
     problems.add("error", "noTable", `no sheet of “${fileName}” has rows`, "Give a workbook with the table in it.");
     throw new UnreadableFile(problems.toArray());
   }
-  const reading = seriesFromRows(sheet.rows, () => knowledgeOf(sheet.name), fileName, answers, problems);
+  const reading = seriesFromRows(
+    { ...sheet.rows, rows: rowsOf(sheet.rows.rows) },
+    () => knowledgeOf(sheet.name),
+    fileName,
+    answers,
+    problems,
+  );
   if (sheets.length === 1) return reading;
   return {
     ...reading,
@@ -101,7 +113,7 @@ function unpackedSize(bytes: Uint8Array): number {
   return size;
 }
 
-function rowsOf(sheet: WorkSheet | undefined, problems: ProblemList): SplitRows {
+function cellsOf(sheet: WorkSheet | undefined, problems: ProblemList): SheetRows {
   const data: (CellObject[] | undefined)[] = sheet?.["!data"] ?? [];
   const rows: string[][] = [];
   const lines: number[] = [];

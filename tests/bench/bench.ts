@@ -5,6 +5,7 @@ import { mulberry32 } from "~/ocean/statistics/mulberry32";
 import { quantile } from "~/ocean/statistics/quantile";
 import { slabPath } from "~/ocean/slab/slab-integrator";
 import { benchmarkKnots, runBenchmarkColumn, runBenchmarkSlab } from "./benchmark-storm";
+import { benchReading } from "./bench-reading";
 import { fastest, report, sideBySide, timed } from "./measure";
 import { compilePlainC } from "./plain-c";
 
@@ -168,4 +169,5 @@ benchSlab();
 benchDensity();
 benchEnsemble();
 benchEstimates();
+benchReading();
 plainC?.remove();

@@ -40,15 +40,16 @@ export function plainTables(source: SourceFile, problems: ProblemList): CastTabl
     delimiter,
     problems,
   );
-  const header = headerOf(split.rows);
+  const all = Array.from({ length: split.rows.length }, (_, row) => split.rows.row(row));
+  const header = headerOf(all);
   if (!header) return [];
   const { written, first } = header;
-  const beneath = split.rows[first] ?? [];
+  const beneath = all[first] ?? [];
   const hasUnits = written.length > 0 && beneath.some((cell) => cell.trim() !== "") && !beneath.some(isNumber);
   const rows: string[][] = [];
   const lines: number[] = [];
-  for (let at = first + (hasUnits ? 1 : 0); at < split.rows.length; at += 1) {
-    const cells = split.rows[at] ?? [];
+  for (let at = first + (hasUnits ? 1 : 0); at < all.length; at += 1) {
+    const cells = all[at] ?? [];
     if (cells.every((cell) => cell.trim() === "")) continue;
     rows.push(cells);
     lines.push(split.lines[at] ?? 0);

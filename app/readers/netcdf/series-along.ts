@@ -1,6 +1,7 @@
 import type { ProblemList } from "../problem-list";
 import { isValueRole } from "../propose-columns";
 import type { ReadingAnswers, ReadingQuestion, ReadingStep, SeriesReading, Understood } from "../reading";
+import { rowsOf } from "../rows";
 import { seriesFromTable } from "../series-from-table";
 import { channelOfRole } from "../settle-columns";
 import { isoFromSeconds } from "../stamp-text";
@@ -171,7 +172,7 @@ function tableOf({ axis, utc }: Times, sampled: readonly SampledColumn[]): TextT
   return {
     names: [axis.variable.name, ...sampled.map(({ column }) => column.name)],
     unitTexts: [null, ...sampled.map(({ column }) => column.unitText)],
-    rows,
+    rows: rowsOf(rows),
     lines: rows.map((_, row) => row + 1),
     decimal: ".",
     preamble: [],
