@@ -7,6 +7,7 @@ import { throughTrack } from "./through-track";
 import { usedForcing } from "./used-forcing";
 import type { Storm } from "~/db/models/storm.server";
 import type { Tenant } from "~/db/scoped.server";
+import { namesOfUsers } from "~/db/unscoped.server";
 import type { Position, ScenarioStorm } from "~/ocean/scenario";
 import { judgeSeries, qualityInputs } from "~/quality/quality-inputs.server";
 import { registerQuality, type RegisteredQuality } from "~/quality/register-quality";
@@ -86,13 +87,14 @@ export async function readStorm(
     ...scenarioStorm(read.forcing),
     ...(tracked.cyclone && { cyclone: tracked.cyclone }),
   };
+  const names = await namesOfUsers(inputs.overrides.map(({ createdBy }) => createdBy));
   const series: Series = {
     forcing: read.forcing,
     problems,
     assumptions: [...tracked.assumptions, ...read.assumptions, ...used.assumptions],
     scenarioStorm: asked,
     hash: asked && partHash(problems.length > 0 ? [asked, problems] : asked),
-    quality: registerQuality(judged, window, { ...inputs, leaveOutSuspect, missingAccepted }),
+    quality: registerQuality(judged, window, { ...inputs, leaveOutSuspect, missingAccepted, names }),
   };
   recent.set(key, series);
   return { ...series, records };

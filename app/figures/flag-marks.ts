@@ -6,12 +6,23 @@ import type { FlagMark, FlagMarkKind, TimePanel } from "./time-panel";
 import type { ValueAxis } from "./value-axis";
 
 /** What each shape means, for captions. */
-export const FLAG_MARK_WORDS: Record<FlagMarkKind, string> = {
-  suspect: "Open triangles: suspect or of high interest",
+const FLAG_MARK_WORDS: Record<FlagMarkKind, string> = {
+  suspect: "open triangles: suspect or of high interest",
   bad: "crosses: bad",
   missing: "short strokes at the foot: missing",
   set: "rings: flag set by a person",
 };
+
+/** In the order that they are told in. */
+export const FLAG_MARK_KINDS: readonly FlagMarkKind[] = ["suspect", "bad", "missing", "set"];
+
+/** Says what the shapes mean that are met; null without any mark. */
+export function flagKey(marks: readonly FlagMark[]): string | null {
+  const key = FLAG_MARK_KINDS.filter((kind) => marks.some((mark) => mark.kind === kind))
+    .map((kind) => FLAG_MARK_WORDS[kind])
+    .join("; ");
+  return key === "" ? null : `${key[0].toUpperCase()}${key.slice(1)}.`;
+}
 
 /** px between two marks of one kind that are still told apart. */
 const APART = 3;

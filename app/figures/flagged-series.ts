@@ -4,7 +4,7 @@ import { periodOf, rangeSentence } from "./describe";
 import { drawTimeFigure } from "./draw-time-figure";
 import type { Figure } from "./figure";
 import { caption, type FigureContext } from "./figure-context";
-import { FLAG_MARK_WORDS } from "./flag-marks";
+import { FLAG_MARK_KINDS, flagKey } from "./flag-marks";
 import type { FlagMark, FlagMarkKind, PanelLine } from "./time-panel";
 import { timeTable } from "./time-table";
 
@@ -24,7 +24,6 @@ export interface FlaggedSeriesData {
   mostTableRows: number;
 }
 
-const KINDS: readonly FlagMarkKind[] = ["suspect", "bad", "missing", "set"];
 const HEIGHT = 120;
 
 /** One channel of a record with the flags of its quality; the same on the page and in print. */
@@ -48,16 +47,12 @@ export function flaggedSeries(data: FlaggedSeriesData, context: FigureContext): 
   };
   const { svg, width, height } = drawTimeFigure(id, [panel], time, context);
   const count = (kind: FlagMarkKind) => marks.filter((mark) => mark.kind === kind).length;
-  const met = KINDS.filter((kind) => count(kind) > 0);
-  const key = met.map((kind) => FLAG_MARK_WORDS[kind]).join("; ");
+  const met = FLAG_MARK_KINDS.filter((kind) => count(kind) > 0);
   return {
     id,
     title: name,
     caption: caption(
-      [
-        `${name} as recorded, ${periodOf(time, context)}.`,
-        key === "" ? "No sample is flagged." : `${key[0].toUpperCase()}${key.slice(1)}.`,
-      ],
+      [`${name} as recorded, ${periodOf(time, context)}.`, flagKey(marks) ?? "No sample is flagged."],
       context,
     ),
     alt: [

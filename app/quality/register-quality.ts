@@ -21,6 +21,10 @@ export interface RegisteredOverride {
   channel: ChannelName;
   flag: SetFlag;
   reason: string;
+  /** Name of the person; absent in runs of before names were registered. */
+  by?: string;
+  /** ISO UTC; absent as `by` is. */
+  setAt?: string;
   count: number;
   /** ISO UTC of the first and the last. */
   first: string;
@@ -45,14 +49,16 @@ interface RegisterOptions {
   missingAccepted: MissingAccepted | null;
   /** Oldest first. */
   overrides: readonly ReasonedOverride[];
+  /** Names of persons by their id. */
+  names: ReadonlyMap<string, string>;
 }
 
-type ReasonedOverride = RecordOverride & { reason: string };
+type ReasonedOverride = RecordOverride & { reason: string; createdBy: string; createdAt: Date };
 
 export function registerQuality(
   judged: readonly JudgedChannel[],
   window: StormWindow | null,
-  { thresholds, thresholdsVersion, leaveOutSuspect, missingAccepted, overrides }: RegisterOptions,
+  { thresholds, thresholdsVersion, leaveOutSuspect, missingAccepted, overrides, names }: RegisterOptions,
 ): RegisteredQuality {
   const recordOf = new Map<ChannelName, string>(judged.map(({ channel, recordId }) => [channel, recordId]));
   const summaries = window ? summariseQuality(judged, { window, leaveOutSuspect }) : [];
@@ -69,15 +75,16 @@ export function registerQuality(
       recordId: recordOf.get(channel) ?? "",
       thresholds: describeThresholds(channel, thresholds.channels[channel]),
     })),
-    overrides: window ? registerOverrides(judged, window, overrides) : [],
+    overrides: window ? registerOverrides(judged, window, overrides, names) : [],
   };
 }
 
-/** Flags that persons set inside the window, those of one reason together. */
+/** Flags that persons set inside the window, those of one act together. */
 function registerOverrides(
   judged: readonly JudgedChannel[],
   { startsAt, endsAt }: StormWindow,
   overrides: readonly ReasonedOverride[],
+  names: RegisterOptions["names"],
 ): RegisteredOverride[] {
   const groups = new Map<string, RegisteredOverride>();
   const setAt = overrideFinder(overrides);
@@ -86,12 +93,16 @@ function registerOverrides(
     entry.time.forEach((seconds, k) => {
       const set = seconds < startsAt || seconds > endsAt ? null : setAt({ judged: entry, k });
       if (!set || set.flag === null) return;
-      const { flag, reason } = set;
+      const { flag, reason, createdBy } = set;
+      const setAtTime = set.createdAt.toISOString();
       const last = new Date(seconds * 1000).toISOString();
-      const key = JSON.stringify([recordId, channel, flag, reason]);
+      const key = JSON.stringify([recordId, channel, flag, reason, createdBy, setAtTime]);
       const known = groups.get(key);
       if (known) Object.assign(known, { count: known.count + 1, last });
-      else groups.set(key, { recordId, channel, flag, reason, count: 1, first: last, last });
+      else {
+        const by = names.get(createdBy);
+        groups.set(key, { recordId, channel, flag, reason, by, setAt: setAtTime, count: 1, first: last, last });
+      }
     });
   }
   return [...groups.values()];

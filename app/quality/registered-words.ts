@@ -1,7 +1,7 @@
 /** The registered quality of a record's series in sentences, for a response's inputs and a memo's register. */
 import { CHANNELS } from "~/storms/channels";
 import { formatQuantity } from "~/units/format-quantity";
-import { formatPeriod } from "~/units/format-time";
+import { formatPeriod, formatTime } from "~/units/format-time";
 import { DEFAULT_UNITS } from "~/units/unit-choices";
 import { FAIL, FLAG_WORDS, PASS, SUSPECT } from "./flags";
 import type { RegisteredQuality } from "./register-quality";
@@ -27,8 +27,8 @@ export function overrideLines({ overrides = [] }: RegisteredQuality, recordId: s
   return overrides
     .filter((entry) => entry.recordId === recordId)
     .map(
-      ({ channel, flag, reason, count, first, last }) =>
-        `${count} ${count === 1 ? "value" : "values"} of the ${CHANNELS[channel].label}, ${formatPeriod(first, last, zone)}, set to ${FLAG_WORDS[flag]}: ${reason}`,
+      ({ channel, flag, reason, by, setAt, count, first, last }) =>
+        `${count} ${count === 1 ? "value" : "values"} of the ${CHANNELS[channel].label}, ${formatPeriod(first, last, zone)}, set to ${FLAG_WORDS[flag]}${by && setAt ? ` by ${by}, ${formatTime(setAt, zone)}` : ""}: ${reason}`,
     );
 }
 
@@ -37,7 +37,9 @@ export function decisionLines({ leaveOutSuspect, missingAccepted }: RegisteredQu
   return [
     leaveOutSuspect ? "Suspect values are left out." : "Suspect values are kept.",
     ...(missingAccepted
-      ? [`${missingAccepted.by} took it on to estimate with what is missing: ${missingAccepted.reason}`]
+      ? [
+          `${missingAccepted.by} took it on to estimate with up to ${percent(missingAccepted.upTo)} missing, ${formatTime(missingAccepted.at, "UTC")}: ${missingAccepted.reason}`,
+        ]
       : []),
   ];
 }

@@ -69,7 +69,7 @@ export async function copyAsScenario(tenant: Tenant, storm: Storm, request: Scen
   });
 }
 
-/** What persons set stands in the scenario too, on the changed values, with who set it and why. */
+/** What persons set stands in the scenario too, on the changed values, with who set it, when and why. */
 async function copyOverrides(
   tenant: Tenant,
   { from, to }: { from: string; to: string },
@@ -82,8 +82,9 @@ async function copyOverrides(
       ["id", "ASC"],
     ],
   });
-  for (const { channel, at, value, flag, reason, createdBy } of standing(overrides).values()) {
-    await tenant.flagOverrides.create({
+  const kept = [...standing(overrides).values()].filter(({ flag }) => flag !== null);
+  await tenant.flagOverrides.createAll(
+    kept.map(({ channel, at, value, flag, reason, createdBy, createdAt }) => ({
       recordId: to,
       channel,
       at: at + changes.shiftHours * 3600,
@@ -91,8 +92,9 @@ async function copyOverrides(
       flag,
       reason,
       createdBy,
-    });
-  }
+      createdAt,
+    })),
+  );
 }
 
 const FACTORS = { windSpeed: "windFactor", windGust: "windFactor", rain: "rainFactor" } as const;

@@ -1,9 +1,10 @@
 import { drawTimeFigure } from "~/figures/draw-time-figure";
 import { extremes } from "~/figures/extremes";
 import type { Figure } from "~/figures/figure";
+import { flagKey } from "~/figures/flag-marks";
 import { caption, type FigureContext } from "~/figures/figure-context";
 import { periodOf, rangeSentence } from "~/figures/describe";
-import type { TimePanel } from "~/figures/time-panel";
+import type { FlagMark, TimePanel } from "~/figures/time-panel";
 import { timeTable } from "~/figures/time-table";
 import { windPanel } from "~/figures/wind-panel";
 import type { ChannelName } from "~/readers/reading";
@@ -20,6 +21,8 @@ interface StormFigureOptions {
   windHeight: number | null;
   /** Where the series are not what was recorded: `as changed for the scenario`. */
   told?: string;
+  /** Flags of quality by channel; without them none is drawn. */
+  marks?: ReadonlyMap<ChannelName, readonly FlagMark[]>;
   /** Shown on a tinted ground. */
   window?: StormWindow | null;
   /** A longer table is left out: it would weigh more than the rest of the page. */
@@ -37,7 +40,7 @@ const DRAWN: readonly ChannelName[] = [
 /** Wind at its own height, rain and heat as recorded, above one time axis; null where there is none of the three. */
 export function stormFigure(
   series: readonly ChannelSeries[],
-  { id, title, windHeight, window, mostTableRows, told = "as recorded" }: StormFigureOptions,
+  { id, title, windHeight, window, mostTableRows, marks = new Map(), told = "as recorded" }: StormFigureOptions,
   context: FigureContext,
 ): Figure | null {
   const drawn = series.filter(({ channel }) => DRAWN.includes(channel));
@@ -46,7 +49,16 @@ export function stormFigure(
     const index = drawn.findIndex((entry) => entry.channel === channel);
     return index < 0 ? undefined : values[index];
   };
-  const panels = [windOf(of, windHeight), rainOf(of("rain")), heatOf(of)].filter((panel) => panel !== null);
+  // The arrows of the direction have no room for marks: those stand on the quality page.
+  const marksOf = (...channels: ChannelName[]) => channels.flatMap((channel) => marks.get(channel) ?? []);
+  const drawnMarks = [
+    marksOf("windSpeed", "windGust"),
+    marksOf("rain"),
+    marksOf(...HEAT_PARTS.map(({ channel }) => channel)),
+  ];
+  const panels = [windOf(of, windHeight), rainOf(of("rain")), heatOf(of)]
+    .map((panel, index) => panel && { ...panel, flagMarks: drawnMarks[index] })
+    .filter((panel) => panel !== null);
   if (panels.length === 0 || time.length === 0) return null;
   if (window) for (const panel of panels) panel.window = { start: window.startsAt, end: window.endsAt };
   const { svg, width, height } = drawTimeFigure(id, panels, time, context);
@@ -65,6 +77,7 @@ export function stormFigure(
         `${shown[0].toUpperCase()}${shown.slice(1)}, ${told}.`,
         of("windFrom") && "Arrows point where the wind blows to.",
         window && "The storm's window is tinted.",
+        flagKey(drawnMarks.flat()),
         `${periodOf(time, context)}.`,
       ],
       context,

@@ -15,6 +15,7 @@ const { copyAsScenario } = await import("~/storms/copy-as-scenario.server");
 const { setFlags, takeBackAct } = await import("~/quality/set-flags.server");
 const { loadQuality } = await import("~/quality/load-quality.server");
 const { chooseSuspect, takeOnMissing, withdrawMissing } = await import("~/quality/take-on-missing.server");
+const { saveThresholds } = await import("~/quality/save-thresholds.server");
 const { namedSamples } = await import("~/quality/find-samples");
 const { overrideActs, valueNowIn } = await import("~/quality/override-acts");
 const { readStorm } = await import("~/estimates/read-storm.server");
@@ -133,6 +134,14 @@ describe("flags set by a person", () => {
     });
     expect(await flagOf(copy, 15)).toBe(PASS);
     expect(copy.leaveOutSuspect).toBe(true);
+    const [first, second] = (await organisation.tenant.flagOverrides.list()).map(({ createdBy, createdAt }) => [
+      createdBy,
+      createdAt,
+    ]);
+    expect(second).toEqual(first);
+    const [registered] = (await read(copy)).quality.overrides ?? [];
+    expect(registered.by).toBeTruthy();
+    expect(registered.setAt).toMatch(/Z$/);
   });
 
   it("are never changed or removed by themselves", async () => {
@@ -157,6 +166,33 @@ describe("what is missing", () => {
     expect(taken.quality.missingAccepted?.reason).toBe("no other");
     await withdrawMissing(organisation.tenant, storm);
     expect((await read(storm)).problems.map(({ code }) => code)).toContain("MISSING");
+  });
+});
+
+describe("more missing than was taken on", () => {
+  it("has to be taken on anew", async () => {
+    const storm = await makeStorm((hour) => hour % 8 >= 4 && hour < 25);
+    await takeOnMissing(organisation.tenant, storm, {
+      by: "I. Renholt",
+      at: "2026-12-01T00:00:00Z",
+      reason: "no other",
+    });
+    await set(storm, [1, 2, 9, 10], FAIL);
+    const { problems, quality } = await read(storm);
+    expect(problems.map(({ code }) => code)).toContain("MISSING");
+    expect(quality.missingAccepted?.upTo).toBeLessThan(0.5);
+  });
+});
+
+describe("thresholds", () => {
+  it("are saved by one of two who write at the same time, and the other is told", async () => {
+    const form = new FormData();
+    form.set("gustRatio", "3");
+    const { tenant, userId } = organisation;
+    const save = () => saveThresholds(tenant, project.id, { part: "relations", form, seen: 0, by: userId });
+    const outcomes = await Promise.allSettled([save(), save()]);
+    expect(outcomes.map(({ status }) => status).sort()).toEqual(["fulfilled", "rejected"]);
+    expect(await tenant.thresholdSheets.count()).toBe(1);
   });
 });
 

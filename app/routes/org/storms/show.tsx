@@ -17,6 +17,8 @@ import { FIGURE_WIDTHS } from "~/figures/figure-context";
 import { serverPlotDocument } from "~/figures/plot-document.server";
 import { may } from "~/organisations/permissions";
 import { currentProject } from "~/projects/current-project.server";
+import { flagMarksOf, insideWindow } from "~/quality/flag-marks-of";
+import { judgeSeries, qualityInputs } from "~/quality/quality-inputs.server";
 import { config } from "~/services/config.server";
 import { answerRefusal } from "~/storms/answer-refusal.server";
 import { addConstant } from "~/storms/constant-record.server";
@@ -65,6 +67,12 @@ export async function loader({ request, context, params }: Route.LoaderArgs) {
     units: organisation.units,
     width,
   });
+  const confirmed = shown.records.filter(({ state }) => state === "confirmed");
+  // What is computed from a track is no record and has no flags.
+  const judged = judgeSeries(recorded, await qualityInputs(tenant, storm, confirmed));
+  const marks = new Map(
+    judged.map((entry) => [entry.channel, flagMarksOf(window ? insideWindow(entry, window) : entry)]),
+  );
   const draw = (width: number) =>
     stormFigure(
       inside,
@@ -74,6 +82,7 @@ export async function loader({ request, context, params }: Route.LoaderArgs) {
         windHeight,
         mostTableRows: MOST_TABLE_ROWS,
         ...(parametric && { told: parametricAt(box.name) }),
+        marks,
         ...(scenario && { told: "as changed for the scenario" }),
       },
       sized(width),
