@@ -34,7 +34,7 @@ describe("the command line", () => {
     expect(await galeprint(["restoer", "x"])).toEqual({
       code: 2,
       output:
-        'There is no command "restoer". Commands: checks, read, estimate, migrate, seed, backup, restore, verify-backup.\n',
+        'There is no command "restoer". Commands: checks, read, estimate, migrate, seed, mails, backup, restore, verify-backup.\n',
     });
     expect((await galeprint(["toString"])).code).toBe(2);
     expect((await galeprint([])).code).toBe(2);
