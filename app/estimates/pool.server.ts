@@ -1,10 +1,8 @@
 import { Piscina } from "piscina";
 import type { EstimateOutcome } from "./estimate-outcome";
+import { timeLimitSeconds } from "./time-limit";
 import type { Scenario } from "~/ocean/scenario";
 import { config } from "~/services/config.server";
-
-/** An estimate takes seconds; one that takes longer than this has gone astray. Common practice, no source. */
-export const TIME_LIMIT_MS = 5 * 60_000;
 
 let pool: Piscina<Scenario, EstimateOutcome> | undefined;
 
@@ -20,7 +18,7 @@ function workers(): Piscina<Scenario, EstimateOutcome> {
 
 /** @throws an AbortError at the time limit; whatever the worker threw and did not mean to */
 export function runInPool(scenario: Scenario): Promise<EstimateOutcome> {
-  return workers().run(scenario, { signal: AbortSignal.timeout(TIME_LIMIT_MS) });
+  return workers().run(scenario, { signal: AbortSignal.timeout(1000 * timeLimitSeconds(scenario)) });
 }
 
 /** Stops the workers; what they were at is rejected. */

@@ -4,12 +4,13 @@
  */
 import { gatherScenario } from "./gather-scenario.server";
 import type { RunInputs } from "./inputs-register";
-import { closePool, runInPool, TIME_LIMIT_MS } from "./pool.server";
+import { closePool, runInPool } from "./pool.server";
 import { resultIsStored, storeResult } from "./result-store.server";
+import { tooLong } from "./time-limit";
 import type { Estimate } from "~/db/models/estimate.server";
 import { forOrganisation, type Tenant } from "~/db/scoped.server";
 import { unfinishedEstimates } from "~/db/unscoped.server";
-import type { ScenarioProblem } from "~/ocean/scenario";
+import type { Scenario, ScenarioProblem } from "~/ocean/scenario";
 import { ENGINE_VERSION } from "~/ocean/version";
 import { config } from "~/services/config.server";
 import { log } from "~/services/log.server";
@@ -118,16 +119,13 @@ const FAULT: ScenarioProblem = {
   message:
     "The run broke off by a fault on our side, which has been recorded. Run it again; if it fails once more, tell us.",
 };
-const TOO_LONG: ScenarioProblem = {
+const GONE: ScenarioProblem = {
   path: "",
-  code: "TOO_LONG",
-  message: `The run took more than ${TIME_LIMIT_MS / 60_000} minutes and was stopped. Narrow the storm's window or take a longer time step.`,
+  code: "GONE",
+  message: "The study box, storm, water column or method sheet of this estimate is no longer there.",
 };
 
-async function problemsOfRun(
-  tenant: Tenant,
-  scenario: Parameters<typeof runInPool>[0],
-): Promise<ScenarioProblem[] | null> {
+async function problemsOfRun(tenant: Tenant, scenario: Scenario): Promise<ScenarioProblem[] | null> {
   const outcome = await runInPool(scenario);
   if ("problems" in outcome) return outcome.problems;
   await storeResult(tenant, outcome.response);
@@ -138,11 +136,15 @@ async function runOne(organisationId: string, id: string): Promise<void> {
   const tenant = forOrganisation(organisationId);
   const estimate = await claim(tenant, id);
   if (!estimate) return;
+  let running: Scenario | null = null;
   let ending: Ending = { problems: [FAULT], inputHash: null, inputs: null };
   try {
     const project = await tenant.projects.find(estimate.projectId);
     const gathered = project && (await gatherScenario(tenant, estimate, project.timeZone));
-    if (!gathered) return;
+    if (!gathered) {
+      await finish(tenant, id, { ...ending, problems: [GONE] });
+      return;
+    }
     const { scenario, hash: inputHash, parts, assumptions, register, problems } = gathered;
     ending = { problems: [FAULT], inputHash, inputs: { parts, assumptions, register } };
     if (!scenario || !inputHash || problems.length > 0) {
@@ -150,11 +152,12 @@ async function runOne(organisationId: string, id: string): Promise<void> {
     } else if (await resultIsStored(tenant, { inputHash, engineVersion: ENGINE_VERSION })) {
       ending.problems = null;
     } else {
+      running = scenario;
       ending.problems = await problemsOfRun(tenant, scenario);
     }
   } catch (error) {
     if (stopping) return;
-    if (error instanceof Error && error.name === "AbortError") ending.problems = [TOO_LONG];
+    if (running && error instanceof Error && error.name === "AbortError") ending.problems = [tooLong(running)];
     else log().error({ err: error, estimate: id, organisation: organisationId }, "an estimate broke off");
   }
   await finish(tenant, id, ending);
